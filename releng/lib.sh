@@ -1,0 +1,107 @@
+# Shared by run and test: finds a JDK and Maven, then builds. What is said here goes to standard error; standard output
+# belongs to the product and to the test's last line. Sourced with `top` set to the checkout.
+
+MAVEN_VERSION=3.9.16
+JAVA_NEEDED=21
+tools=$top/.tools
+product=$top/releng/product/target/products/stirwright.product/linux/gtk/x86_64
+
+say() { printf '%s\n' "$*" >&2; }
+
+die() {
+  say "stirwright: $*"
+  exit 3
+}
+
+# install PACKAGE...: the first that this Debian release has; fails when there is none or no right to install.
+install() {
+  local package
+  [ "$(id -u)" = 0 ] && command -v apt-get >/dev/null || return 1
+  apt-get update >&2 || return 1
+  for package; do
+    apt-cache show "$package" >/dev/null 2>&1 || continue
+    say "installing $package"
+    DEBIAN_FRONTEND=noninteractive apt-get install -y --no-install-recommends "$package" >&2 && return
+  done
+  return 1
+}
+
+# jdk HOME: takes HOME as JAVA_HOME when it holds a compiler that is new enough.
+jdk() {
+  local version
+  [ -x "$1/bin/javac" ] || return 1
+  version=$("$1/bin/javac" -version 2>&1 | sed -n 's/^javac \([0-9]*\).*/\1/p')
+  [ "${version:-0}" -ge "$JAVA_NEEDED" ] && export JAVA_HOME=$1
+}
+
+look_for_jdk() {
+  local home
+  [ -n "${JAVA_HOME:-}" ] && jdk "$JAVA_HOME" && return
+  command -v javac >/dev/null && home=$(readlink -f "$(command -v javac)") && jdk "${home%/bin/javac}" && return
+  for home in /usr/lib/jvm/* /Library/Java/JavaVirtualMachines/*/Contents/Home; do
+    jdk "$home" && return
+  done
+  return 1
+}
+
+find_jdk() {
+  look_for_jdk && return
+  install openjdk-25-jdk-headless openjdk-21-jdk-headless && look_for_jdk && return
+  die "needs a JDK $JAVA_NEEDED or later (on Debian openjdk-25-jdk-headless or openjdk-21-jdk-headless, where the" \
+    "release has one): install one or set JAVA_HOME."
+}
+
+# The machine's Maven may be too old for the build, so it only fetches the one that the build uses.
+find_maven() {
+  local fetched=$tools/fetched.$$
+  mvn=$tools/apache-maven-$MAVEN_VERSION/bin/mvn
+  [ -x "$mvn" ] && return
+  command -v mvn >/dev/null || install maven || die "needs Maven (on Debian the package maven) to fetch the Maven that it builds with."
+  say "fetching Maven $MAVEN_VERSION"
+  (cd "$tools" && mvn -B -q org.apache.maven.plugins:maven-dependency-plugin:3.7.1:unpack \
+    "-Dartifact=org.apache.maven:apache-maven:$MAVEN_VERSION:zip:bin" "-DoutputDirectory=$fetched") >&2 \
+    && mv "$fetched/apache-maven-$MAVEN_VERSION" "$tools/" || die "could not fetch Maven $MAVEN_VERSION; is there a network?"
+  rmdir "$fetched"
+}
+
+# One build at a time in a checkout. Ends by itself with the shell, or by `unlock`.
+lock() {
+  mkdir -p "$tools"
+  exec 9>"$tools/lock"
+  ! command -v flock >/dev/null || flock 9
+}
+
+unlock() { exec 9>&-; }
+
+# hash_sources FIND-EXPRESSION...: one hash over the names and contents of the source files that match.
+hash_sources() {
+  (cd "$top" && find pom.xml LICENSE .mvn bundles features releng \
+    \( -path 'bundles/*/target' -o -path 'features/*/target' -o -path 'releng/*/target' \) -prune -o -type f "$@" -print0 \
+    | LC_ALL=C sort -z | xargs -0 sha256sum | sha256sum | cut -d' ' -f1)
+}
+
+# What the product is made of: the same whichever script builds it.
+hash_product() { hash_sources -not -path 'bundles/*.tests/*'; }
+
+# built HASH: notes what the product was built from. The note is cleaned away with the product.
+built() { printf '%s\n' "$1" >"$top/releng/product/target/built-from"; }
+
+up_to_date() { [ -x "$product/stirwright" ] && [ "$(cat "$top/releng/product/target/built-from" 2>/dev/null)" = "$1" ]; }
+
+# maven PURPOSE ARGUMENT...: builds for PURPOSE (run or test); the log goes to .tools/PURPOSE.log and to descriptor 8.
+# Once this or a test has succeeded with the same poms and target, everything is there and the network is left alone;
+# should something be missing all the same, it is fetched.
+maven() {
+  local log=$tools/$1.log poms stamp
+  poms=$(hash_sources \( -name pom.xml -o -name '*.target' -o -path '.mvn/*' \))
+  stamp=$tools/fetched-$poms
+  if [ -e "$stamp-$1" ] || [ -e "$stamp-test" ]; then
+    call_maven "$log" -o "${@:2}" && return
+    grep -qE 'in offline mode|has not been downloaded' "$log" || return 1
+    say "something is missing: building again with the network"
+    rm -f "$stamp"-*
+  fi
+  call_maven "$log" "${@:2}" && touch "$stamp-$1"
+}
+
+call_maven() { (cd "$top" && "$mvn" "${@:2}") 2>&1 | tee "$1" >&8; }
