@@ -1,0 +1,2 @@
+/** Numerical work behind the fits. Not exported; it may change at any time. */
+package stirwright.rheology.internal;

@@ -1,0 +1,9 @@
+/**
+ * Fluids whose shear stress depends on the shear rate alone: models, measured flow curves, and least-squares fits of
+ * the first to the second.
+ *
+ * <p>SI throughout: shear rate in 1/s, stress in Pa, viscosity in Pa s, density in kg/m3. Everything here is immutable
+ * and free of shared state. Not for fluids that remember (thixotropic, viscoelastic): a steady flow curve does not
+ * describe them.
+ */
+package stirwright.rheology;
