@@ -1,0 +1,143 @@
+package stirwright.family.discturbine;
+
+import stirwright.correlation.Citation;
+import stirwright.correlation.Classifier;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Dimensions;
+import stirwright.correlation.Effect;
+import stirwright.correlation.Measure;
+import stirwright.correlation.Quantity;
+import stirwright.correlation.Transcription;
+
+/** Power numbers of the turbulent regime with baffles: independent of the Reynolds number. */
+final class TurbulentPower {
+
+    private TurbulentPower() {}
+
+    static Correlation mccabe() {
+        return Correlation.of("discturbine.np.mccabe-turbulent", Quantity.POWER_NUMBER,
+                        "McCabe, Smith and Harriott, turbulent")
+                .families(DiscTurbine.ID)
+                .cite(Sources.mccabe("Example 9.6"))
+                .transcription(Transcription.CHECKED_AGAINST_SOURCE)
+                .atLeast(Measure.REYNOLDS, 1e4)
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .oneOf(Measure.BAFFLE_COUNT, 4)
+                .nominal(Measure.B_OVER_T, 0.1)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .nominal(Measure.W_OVER_D, 0.2)
+                .nominal(Measure.L_OVER_D, 0.25)
+                .notStated(Measure.D_OVER_T, "no range; the worked example has 1/3")
+                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .value("KT", 5.75)
+                .remark("Conflict: charts have 5, Rushton et al. 6 to 6.3, Laity and Treybal (1957) 5.7; "
+                        + "blade and disc thickness account for part of it, see Bujalski et al.")
+                .remark(Sources.MCCABE_HEADING)
+                .build();
+    }
+
+    static Correlation rushton() {
+        return Correlation.of("discturbine.np.rushton-1950-turbulent", Quantity.POWER_NUMBER,
+                        "Rushton, Costich and Everett, turbulent, as in older tables")
+                .families(DiscTurbine.ID)
+                .cite(Sources.rushton(Citation.LOCATOR_NOT_AT_HAND))
+                .transcription(Transcription.FROM_MEMORY)
+                .atLeast(Measure.REYNOLDS, 1e4)
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .oneOf(Measure.BAFFLE_COUNT, 4)
+                .range(Measure.B_OVER_T, Sources.NARROW_BAFFLE, Sources.WIDE_BAFFLE)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .nominal(Measure.W_OVER_D, 0.2)
+                .nominal(Measure.L_OVER_D, 0.25)
+                .notStated(Measure.D_OVER_T, "recalled without a range")
+                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .value("KT", 6.3)
+                .remark("Conflict: a public transcription of the authors' table has 6.0, for baffles of T/12; "
+                        + "McCabe, Smith and Harriott have 5.75.")
+                .build();
+    }
+
+    static Correlation rushtonTable() {
+        return Correlation.of("discturbine.np.rushton-1950-table", Quantity.POWER_NUMBER,
+                        "Rushton, Costich and Everett, turbulent, table of 1950")
+                .families(DiscTurbine.ID)
+                .cite(Sources.rushton("p. 472 as printed in D. W. Hendricks, Fundamentals of Water "
+                        + "Treatment Unit Processes, CRC Press, Table 10.3, p. 258, column Re 1e5"))
+                .transcription(Transcription.CHECKED_AGAINST_SOURCE)
+                .atLeast(Measure.REYNOLDS, 1e5)
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .nominal(Measure.B_OVER_T, 1.0 / 12)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .notStated(Measure.W_OVER_D, "the table has no column for it; the figure beside it says 0.33, "
+                        + "other accounts of the same work 0.2")
+                .nominal(Measure.D_OVER_T, 1.0 / 3)
+                .nominal(Measure.H_OVER_T, 1)
+                .nominal(Measure.C_OVER_D, 1)
+                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .value("K", 6.0)
+                .remark("The column stands for the level part of the curve; for 4 and 12 blades it has 4.3 and 9.9.")
+                .remark("Conflict: older tables have 6.3 for the same work.")
+                .build();
+    }
+
+    static Correlation bujalski() {
+        return Correlation.of("discturbine.np.bujalski-1987", Quantity.POWER_NUMBER,
+                        "Bujalski et al., thickness and scale")
+                .families(DiscTurbine.ID)
+                .cite(Citation.withoutLocator("W. Bujalski, A. W. Nienow, S. Chatwin and M. Cooke, "
+                        + "Chem. Eng. Sci. 42 (1987) 317-326"))
+                .transcription(Transcription.CHECKED_NUMERICALLY)
+                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .nominal(Measure.W_OVER_D, 0.2)
+                .nominal(Measure.L_OVER_D, 0.25)
+                .notStated(Measure.D_OVER_T, "the paper's range is not at hand")
+                .notStated(Measure.THICKNESS_OVER_D, "the paper's range is not at hand; checked from 0.01 to 0.03")
+                .notStated(Measure.VESSEL_DIAMETER, "the paper's range is not at hand")
+                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .contains(Effect.THICKNESS)
+                .constant("a", 2.512)
+                .constant("b", 0.195)
+                .constant("c", 0.063)
+                .formula("Np = {a} (t/D)^-{b} (T/T0)^{c}, T0 = 1 m")
+                .relation((vessel, k) -> {
+                    double thickness = vessel.ratio(Dimensions.BLADE_THICKNESS, Dimensions.IMPELLER_DIAMETER);
+                    double metres = vessel.get(Dimensions.VESSEL_DIAMETER);
+                    double np = k.get("a") * Math.pow(thickness, -k.get("b")) * Math.pow(metres, k.get("c"));
+                    return point -> np;
+                })
+                .remark(Sources.TURBULENT_IN_WORDS)
+                .remark("Within 6 % of Rutherford et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m.")
+                .build();
+    }
+
+    static Correlation rutherford() {
+        return Correlation.of("discturbine.np.rutherford-1996", Quantity.POWER_NUMBER,
+                        "Rutherford et al., thickness")
+                .families(DiscTurbine.ID)
+                .cite(Citation.of("K. Rutherford, S. M. S. Mahmoudi, K. C. Lee and M. Yianneskis, "
+                        + "Chem. Eng. Res. Des. 74A (1996)", "p. 369"))
+                .transcription(Transcription.CHECKED_NUMERICALLY)
+                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .nominal(Measure.W_OVER_D, 0.2)
+                .nominal(Measure.L_OVER_D, 0.25)
+                .notStated(Measure.D_OVER_T, "the paper's range is not at hand")
+                .range(Measure.THICKNESS_OVER_D, 0.008, 0.034)
+                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .contains(Effect.THICKNESS)
+                .constant("a", 6.405)
+                .constant("b", 55.673)
+                .formula("Np = {a} - {b} t/D")
+                .relation((vessel, k) -> {
+                    double np = k.get("a")
+                            - k.get("b") * vessel.ratio(Dimensions.BLADE_THICKNESS, Dimensions.IMPELLER_DIAMETER);
+                    return point -> np;
+                })
+                .remark(Sources.TURBULENT_IN_WORDS)
+                .remark("Within 6 % of Bujalski et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m.")
+                .build();
+    }
+}

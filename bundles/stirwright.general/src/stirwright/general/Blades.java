@@ -1,0 +1,26 @@
+package stirwright.general;
+
+import stirwright.correlation.Dimensions;
+import stirwright.correlation.Geometry;
+
+/** How the blades stand; upright ones drop every term of the angle from the equations. */
+enum Blades {
+    UPRIGHT,
+    /** At the family's blade angle. */
+    PITCHED;
+
+    /** Of the angle to the horizontal. */
+    double sine(Geometry vessel) {
+        return this == PITCHED ? Math.sin(vessel.get(Dimensions.BLADE_ANGLE)) : 1;
+    }
+
+    /** The angle to the horizontal as a share of the right angle. */
+    double uprightness(Geometry vessel) {
+        return this == PITCHED ? vessel.get(Dimensions.BLADE_ANGLE) / (Math.PI / 2) : 1;
+    }
+
+    /** A part of a formula that upright blades do not have. */
+    String onlyPitched(String text) {
+        return this == PITCHED ? text : "";
+    }
+}

@@ -1,0 +1,27 @@
+package stirwright.general;
+
+import java.util.List;
+import org.osgi.service.component.annotations.Component;
+import stirwright.correlation.Contribution;
+import stirwright.correlation.Correlation;
+
+/** Correlations and modifiers that belong to no single family. It describes no family itself. */
+@Component
+public final class GeneralRelations implements Contribution {
+
+    @Override
+    public List<Correlation> correlations() {
+        return List.of(
+                PaddlePower.unbaffledPitchedBlade(),
+                PaddlePower.unbaffledDiscTurbine(),
+                PaddlePower.baffledPitchedBlade(),
+                PaddlePower.baffledDiscTurbine(),
+                FullyBaffled.hiraoka(),
+                CalderbankMooYoung.turbine(),
+                SeveralImpellers.power(),
+                SeveralImpellers.powerOfDiscTurbines(),
+                SeveralImpellers.flow(),
+                BlendTime.turbulent(),
+                BlendTime.transitional());
+    }
+}
