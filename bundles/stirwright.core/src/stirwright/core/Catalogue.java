@@ -1,0 +1,110 @@
+package stirwright.core;
+
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Predicate;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Family;
+import stirwright.correlation.Quantity;
+
+/** The families and correlations that were installed at one moment. Immutable. */
+public final class Catalogue {
+    private final Map<String, Family> families = new LinkedHashMap<>();
+    private final Map<String, Entry> entries = new LinkedHashMap<>();
+    private final Map<String, String> familyOrigins = new LinkedHashMap<>();
+    private final List<String> problems = new ArrayList<>();
+
+    private Catalogue() {}
+
+    /**
+     * Collects contributions in their order. Of two with one id the first is kept, and a problem
+     * names both bundles; a contribution that fails is left out, and a problem says why.
+     */
+    public static Catalogue of(List<Arrival> arrivals) {
+        Catalogue catalogue = new Catalogue();
+        arrivals.forEach(catalogue::take);
+        return catalogue;
+    }
+
+    private void take(Arrival arrival) {
+        List<Family> newFamilies;
+        List<Correlation> newCorrelations;
+        try {
+            newFamilies = List.copyOf(arrival.contribution().families());
+            newCorrelations = List.copyOf(arrival.contribution().correlations());
+        } catch (RuntimeException | LinkageError failure) {
+            // Code of another bundle: whatever it throws must not take the other families down.
+            problems.add(arrival.origin() + " was left out: " + failure);
+            return;
+        }
+        for (Family family : newFamilies) {
+            if (keepsFirst("family", family.id(), familyOrigins.get(family.id()), arrival.origin())) {
+                families.put(family.id(), family);
+                familyOrigins.put(family.id(), arrival.origin());
+            }
+        }
+        for (Correlation correlation : newCorrelations) {
+            Entry first = entries.get(correlation.id());
+            if (keepsFirst("correlation", correlation.id(), first == null ? null : first.origin(), arrival.origin())) {
+                entries.put(correlation.id(), new Entry(correlation, arrival.origin()));
+            }
+        }
+    }
+
+    private boolean keepsFirst(String what, String id, String firstOrigin, String origin) {
+        if (firstOrigin == null) {
+            return true;
+        }
+        problems.add(what + " '" + id + "' comes from " + firstOrigin + " and again from " + origin
+                + "; the first is used");
+        return false;
+    }
+
+    public Optional<Family> family(String id) {
+        return Optional.ofNullable(families.get(id));
+    }
+
+    public Collection<Family> families() {
+        return Collections.unmodifiableCollection(families.values());
+    }
+
+    /** The bundle that described a family. */
+    public String originOf(Family family) {
+        return familyOrigins.getOrDefault(family.id(), "");
+    }
+
+    public Collection<Entry> entries() {
+        return Collections.unmodifiableCollection(entries.values());
+    }
+
+    public Optional<Entry> entry(String correlationId) {
+        return Optional.ofNullable(entries.get(correlationId));
+    }
+
+    /** The correlations for a quantity of a family, modifiers aside. */
+    public List<Correlation> correlations(Quantity quantity, String familyId) {
+        return select(quantity, familyId, c -> c.modifierFor().isEmpty());
+    }
+
+    /** The modifiers of a quantity of a family. */
+    public List<Correlation> modifiers(Quantity quantity, String familyId) {
+        return select(quantity, familyId, c -> c.modifierFor().isPresent());
+    }
+
+    private List<Correlation> select(Quantity quantity, String familyId, Predicate<Correlation> which) {
+        return entries.values().stream()
+                .map(Entry::correlation)
+                .filter(c -> c.quantity().equals(quantity) && c.holdsFor(familyId) && which.test(c))
+                .toList();
+    }
+
+    /** What is wrong with the installed contributions, a sentence each. */
+    public List<String> problems() {
+        return Collections.unmodifiableList(problems);
+    }
+}

@@ -1,0 +1,48 @@
+package stirwright.core.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import stirwright.core.CaseRefusedException;
+import stirwright.core.CaseSpec;
+import stirwright.core.Catalogue;
+import stirwright.core.Choices;
+import stirwright.core.VesselGeometry;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Family;
+import stirwright.correlation.Quantity;
+
+/** Applies what the catalogue holds for a family to one vessel. */
+final class Candidates {
+    private final Catalogue catalogue;
+    private final Family family;
+    private final VesselGeometry vessel;
+    private final Choices choices;
+
+    Candidates(Catalogue catalogue, Family family, VesselGeometry vessel, CaseSpec spec) {
+        this.catalogue = catalogue;
+        this.family = family;
+        this.vessel = vessel;
+        this.choices = spec.choices();
+    }
+
+    /**
+     * Every candidate for a quantity, a given value first.
+     *
+     * @throws CaseRefusedException when the case asks for a correlation that is not there
+     */
+    List<Candidate> of(Quantity quantity) {
+        List<Correlation> correlations = catalogue.correlations(quantity, family.id());
+        choices.correlation(quantity).ifPresent(id -> {
+            if (correlations.stream().noneMatch(c -> c.id().equals(id))) {
+                throw new CaseRefusedException(Choices.field(quantity), id, "is not a correlation for the "
+                        + quantity.title() + " of family " + family.id() + "; installed: "
+                        + String.join(", ", correlations.stream().map(Correlation::id).toList()));
+            }
+        });
+        List<Correlation> modifiers = catalogue.modifiers(quantity, family.id());
+        List<Candidate> candidates = new ArrayList<>();
+        choices.given(quantity).ifPresent(value -> candidates.add(Candidate.given(quantity, value, vessel)));
+        correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, vessel)));
+        return candidates;
+    }
+}

@@ -1,0 +1,54 @@
+package stirwright.core.internal;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import org.osgi.framework.Bundle;
+import org.osgi.framework.ServiceReference;
+import org.osgi.service.component.annotations.Component;
+import org.osgi.service.component.annotations.Reference;
+import org.osgi.service.component.annotations.ReferenceCardinality;
+import org.osgi.service.component.annotations.ReferencePolicy;
+import stirwright.core.Arrival;
+import stirwright.core.Catalogue;
+import stirwright.core.Library;
+import stirwright.correlation.Contribution;
+
+/** Collects contributions as their bundles come and go; the bundle installed first comes first. */
+@Component
+public final class ContributionRegistry implements Library {
+
+    private static final Comparator<ServiceReference<Contribution>> INSTALLED_FIRST =
+            Comparator.<ServiceReference<Contribution>>comparingLong(r -> number(r, "service.bundleid"))
+                    .thenComparingLong(r -> number(r, "service.id"));
+
+    private final Map<ServiceReference<Contribution>, Arrival> arrivals =
+            new TreeMap<>(INSTALLED_FIRST);
+    private Catalogue current;
+
+    @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
+    synchronized void addContribution(Contribution contribution, ServiceReference<Contribution> reference) {
+        Bundle bundle = reference.getBundle();
+        String origin = bundle == null ? "a bundle that has left" : bundle.getSymbolicName() + " " + bundle.getVersion();
+        arrivals.put(reference, new Arrival(contribution, origin));
+        current = null;
+    }
+
+    synchronized void removeContribution(ServiceReference<Contribution> reference) {
+        arrivals.remove(reference);
+        current = null;
+    }
+
+    @Override
+    public synchronized Catalogue catalogue() {
+        if (current == null) {
+            current = Catalogue.of(List.copyOf(arrivals.values()));
+        }
+        return current;
+    }
+
+    private static long number(ServiceReference<?> reference, String property) {
+        return (Long) reference.getProperty(property);
+    }
+}

@@ -1,0 +1,113 @@
+package stirwright.core.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import stirwright.core.CaseSpec;
+import stirwright.core.FluidState;
+import stirwright.core.Point;
+import stirwright.core.Role;
+import stirwright.core.VesselGeometry;
+import stirwright.correlation.Dimensions;
+import stirwright.correlation.Figures;
+import stirwright.correlation.FluidClass;
+import stirwright.rheology.MeasuredWindow;
+
+/** What a reader must know before using the pick: what flags the case, and what is worth a note. */
+final class Doubts {
+    private final CaseSpec spec;
+    private final VesselGeometry vessel;
+    private final ResultAssembly.Row row;
+    private final FluidState state;
+    private final boolean anyRecommended;
+    private final DefaultsUsed defaults;
+
+    Doubts(CaseSpec spec, VesselGeometry vessel, ResultAssembly.Row pickRow, boolean anyRecommended) {
+        this.spec = spec;
+        this.vessel = vessel;
+        this.row = pickRow;
+        this.state = pickRow.power().trial().state().orElseThrow();
+        this.anyRecommended = anyRecommended;
+        this.defaults = new DefaultsUsed(spec, vessel, pickRow, viscosityVaries());
+    }
+
+    List<String> flags() {
+        List<String> flags = new ArrayList<>();
+        pickDoubts(flags);
+        if (viscosityVaries()) {
+            row.constants().pick().filter(c -> !c.sound()).ifPresent(c -> flags.add(constantInDoubt(c)));
+        }
+        defaults.assumedThatMatter().ifPresent(words -> flags.add("assumed: " + words));
+        outsideWindow(flags);
+        levelNearBlades(flags);
+        return List.copyOf(flags);
+    }
+
+    private void pickDoubts(List<String> flags) {
+        Selection.Ranked pick = row.power();
+        if (pick.role() == Role.EXCLUDED) {
+            flags.add("nothing is recommended: no candidate qualifies; the nearest is " + pick.id() + ", "
+                    + pick.why());
+        } else if (pick.trial().assessment().verdict().fails()) {
+            flags.add("the chosen " + pick.id() + " is not within its bounds: "
+                    + String.join("; ", pick.trial().assessment().failed()));
+        } else if (pick.role() == Role.CHOSEN && !pick.sound()) {
+            flags.add("the chosen " + pick.id() + " does not qualify: " + pick.trial().assessment().obstacle());
+        }
+        if (!anyRecommended && pick.role() == Role.CHOSEN) {
+            flags.add("nothing is recommended: no candidate qualifies");
+        }
+    }
+
+    /** Below a fluid of constant viscosity the shear-rate constant changes nothing but its own column. */
+    private boolean viscosityVaries() {
+        return state.fluid() != FluidClass.NEWTONIAN;
+    }
+
+    private static String constantInDoubt(Selection.Ranked constant) {
+        return "shear-rate constant " + constant.id() + " does not qualify: " + constant.trial().assessment().obstacle();
+    }
+
+    private void outsideWindow(List<String> flags) {
+        MeasuredWindow window = spec.fluid().window();
+        double decades = window.decadesOutside(state.shearRate());
+        if (window.known() && decades > 0) {
+            flags.add(String.format(Locale.ROOT,
+                    "shear rate %s 1/s is %.1f decades outside the measured window %s to %s 1/s",
+                    Figures.show(state.shearRate()), decades, Figures.show(window.min()), Figures.show(window.max())));
+        }
+    }
+
+    /** Common practice, no source: side loads grow once less than half a diameter of liquid covers a blade. */
+    private void levelNearBlades(List<String> flags) {
+        double top = vessel.get(Dimensions.CLEARANCE)
+                + (vessel.get(Dimensions.IMPELLER_COUNT) - 1) * vessel.get(Dimensions.IMPELLER_SPACING);
+        double cover = vessel.get(Dimensions.LIQUID_HEIGHT) - top;
+        if (cover < vessel.get(Dimensions.IMPELLER_DIAMETER) / 2) {
+            flags.add("caution: liquid level " + Figures.show(cover) + " m above the uppermost impeller's centre, less"
+                    + " than D/2: side loads, vibration and air entrainment are not estimated; keep to the equipment"
+                    + " maker's minimum submergence");
+        }
+    }
+
+    List<String> notes() {
+        List<String> notes = new ArrayList<>(spec.remarks());
+        defaults.others().ifPresent(words -> notes.add("default: " + words));
+        row.constants().pick().ifPresent(c -> {
+            if (c.role() == Role.CHOSEN) {
+                notes.add("shear-rate constant " + (c.id().equals(Candidate.GIVEN) ? "given in the case" : "chosen in the case"));
+            } else if (!c.sound() && !viscosityVaries()) {
+                notes.add(constantInDoubt(c) + "; the power does not rest on it");
+            }
+        });
+        row.flows().pick().filter(f -> !f.sound()).ifPresent(f -> notes.add(
+                "flow number " + f.id() + " does not qualify: " + f.trial().assessment().obstacle()));
+        row.flows().pick().ifPresent(f -> notes.addAll(f.trial().candidate().modifiersInWords(
+                new Point().at(state), state)));
+        if (state.fluid() == FluidClass.YIELD_STRESS) {
+            notes.add("yield stress: torque to start a product at rest can exceed the running torque and is not"
+                    + " estimated; whether the product moves at the wall is not checked here");
+        }
+        return List.copyOf(notes);
+    }
+}

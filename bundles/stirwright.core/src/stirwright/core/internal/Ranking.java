@@ -1,0 +1,76 @@
+package stirwright.core.internal;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.function.Function;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.FlowKind;
+import stirwright.correlation.Standing;
+import stirwright.correlation.Verdict;
+
+/**
+ * The order of candidates as the contract page fixes it: approved in-house first, then fewer bounds
+ * that are not stated, better transcription, a stated scatter before none and smaller before
+ * larger, then id. Flow numbers that count discharge go before those that count circulation, since
+ * the two are different quantities.
+ */
+final class Ranking {
+
+    /**
+     * One criterion.
+     *
+     * @param label what is compared
+     * @param words what a candidate has of it
+     */
+    private record Criterion(String label, Comparator<Correlation> order, Function<Correlation, String> words) {}
+
+    private static final List<Criterion> CRITERIA = List.of(
+            new Criterion("counts", Comparator.comparing(Ranking::countsCirculation),
+                    c -> c.flowKind().map(FlowKind::id).orElse("")),
+            new Criterion("standing", Comparator.comparing(c -> c.standing() != Standing.APPROVED), c -> c.standing().words()),
+            new Criterion("bounds not stated", Comparator.comparingLong(Ranking::notStated), c -> String.valueOf(notStated(c))),
+            new Criterion("digits", Comparator.comparing(Correlation::transcription), c -> c.transcription().words()),
+            new Criterion("scatter", Comparator.comparingDouble(c -> c.scatter().orElse(Double.MAX_VALUE)), Ranking::scatterInWords),
+            new Criterion("else equal, by id", Comparator.comparing(Correlation::id), Correlation::id));
+
+    /** From the most to the least recommendable; says nothing of whether a candidate qualifies. */
+    static final Comparator<Correlation> BY_TRUST =
+            CRITERIA.stream().map(Criterion::order).reduce(Comparator::thenComparing).orElseThrow();
+
+    private Ranking() {}
+
+    /** What decided between two, the one ahead first: "bounds not stated 2 before 3". */
+    static String difference(Correlation ahead, Correlation behind) {
+        return CRITERIA.stream()
+                .filter(c -> c.order().compare(ahead, behind) != 0)
+                .findFirst()
+                .map(c -> c.label() + " " + c.words().apply(ahead) + " before " + c.words().apply(behind))
+                .orElse("equal");
+    }
+
+    /** Among those that do not qualify, the one that comes nearest: it could be named, flagged. */
+    static Comparator<Trial> nearestFirst() {
+        return Comparator.<Trial, Boolean>comparing(t -> !t.usable())
+                .thenComparing(t -> !t.trustworthy())
+                .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
+                .thenComparing(t -> t.assessment().verdict().fails() ? t.assessment().verdict() : Verdict.INSIDE)
+                .thenComparing(t -> t.assessment().failed().size())
+                .thenComparing(t -> t.candidate().correlation().orElseThrow(), BY_TRUST);
+    }
+
+    /** A pumping rate means discharge unless nothing else is there. */
+    private static boolean countsCirculation(Correlation correlation) {
+        return correlation.flowKind().filter(FlowKind.CIRCULATION::equals).isPresent();
+    }
+
+    private static long notStated(Correlation correlation) {
+        return correlation.validity().stream().filter(b -> !b.stated()).count();
+    }
+
+    private static String scatterInWords(Correlation correlation) {
+        return correlation.scatter().isPresent()
+                ? String.format(Locale.ROOT, "%.0f %%", 100 * correlation.scatter().getAsDouble())
+                : "none stated";
+    }
+}

@@ -1,0 +1,87 @@
+package stirwright.core.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import stirwright.core.CandidateResult;
+import stirwright.core.CaseResult;
+import stirwright.core.CaseSpec;
+import stirwright.core.FluidState;
+import stirwright.core.Point;
+import stirwright.core.QuantityResult;
+import stirwright.core.Role;
+import stirwright.core.Status;
+import stirwright.core.VesselGeometry;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Dimensions;
+import stirwright.correlation.Family;
+
+/** Turns ranked trials into the result of a case. */
+final class ResultAssembly {
+    private final CaseSpec spec;
+    private final Family family;
+    private final VesselGeometry vessel;
+    private final Selection.Ranked pick;
+    private final double volume;
+
+    /** A power candidate with the shear-rate constants and flow numbers at its own state. */
+    record Row(Selection.Ranked power, Selection constants, Selection flows) {}
+
+    ResultAssembly(CaseSpec spec, Family family, VesselGeometry vessel, Selection.Ranked pick) {
+        this.spec = spec;
+        this.family = family;
+        this.vessel = vessel;
+        this.pick = pick;
+        this.volume = vessel.get(Dimensions.LIQUID_VOLUME);
+    }
+
+    /** @param rows the pick first */
+    CaseResult assemble(List<Row> rows) {
+        Row first = rows.get(0);
+        double pickPower = pick.trial().state().orElseThrow().power(pick.trial().value());
+        List<CandidateResult> results = rows.stream().map(r -> result(r, pickPower)).toList();
+        boolean anyRecommended = rows.stream().anyMatch(r -> r.power().role() == Role.RECOMMENDED);
+        Doubts doubts = new Doubts(spec, vessel, first, anyRecommended);
+        List<QuantityResult> quantities = new ArrayList<>();
+        rows.forEach(r -> quantities.add(quantity(r.power())));
+        first.constants().ranked().forEach(r -> quantities.add(quantity(r)));
+        first.flows().ranked().forEach(r -> quantities.add(quantity(r)));
+        List<String> flags = doubts.flags();
+        return new CaseResult(spec.name(), spec.familyId(), flags.isEmpty() ? Status.OK : Status.FLAGGED,
+                spread(rows), results, List.copyOf(quantities), flags, doubts.notes(), Optional.empty());
+    }
+
+    private CandidateResult result(Row row, double pickPower) {
+        Trial trial = row.power().trial();
+        Assessment assessment = trial.assessment();
+        Optional<FluidState> state = trial.state();
+        double power = state.map(s -> s.power(trial.value())).orElse(Double.NaN);
+        double speed = state.map(FluidState::speed).orElse(Double.NaN);
+        Optional<Selection.Ranked> flow = row.flows().pick();
+        double flowNumber = flow.map(f -> f.trial().value()).orElse(Double.NaN);
+        return new CandidateResult(row.power().id(), row.power().role(), assessment.verdict(), assessment.failed(),
+                row.power().why(), state.map(s -> family.regimes().at(s.reynolds())), state,
+                row.constants().pick().map(Selection.Ranked::id).orElse(""),
+                trial.value(), power, power / (2 * Math.PI * speed), power / volume,
+                flow.map(Selection.Ranked::id).orElse(""),
+                flow.flatMap(f -> f.trial().candidate().correlation()).flatMap(Correlation::flowKind),
+                flowNumber, state.map(s -> s.pumping(flowNumber)).orElse(Double.NaN), power / pickPower - 1,
+                state.map(s -> trial.candidate().modifiersInWords(new Point().at(s), s)).orElse(List.of()));
+    }
+
+    private static QuantityResult quantity(Selection.Ranked ranked) {
+        Trial trial = ranked.trial();
+        return new QuantityResult(trial.candidate().quantity(), ranked.id(), trial.candidate().correlation(),
+                trial.value(), ranked.role(), trial.assessment().verdict(), trial.assessment().failed(), ranked.why());
+    }
+
+    private static double spread(List<Row> rows) {
+        double[] powers = rows.stream()
+                .map(r -> r.power().trial())
+                .filter(t -> t.candidate().correlation().isPresent() && t.usable() && t.assessment().qualifies())
+                .mapToDouble(t -> t.state().orElseThrow().power(t.value()))
+                .sorted()
+                .toArray();
+        return powers.length == 0 ? Double.NaN : powers[powers.length - 1] / powers[0];
+    }
+}

@@ -1,0 +1,26 @@
+package stirwright.core.internal;
+
+import java.util.Optional;
+import stirwright.core.FluidState;
+import stirwright.correlation.Transcription;
+
+/**
+ * A candidate evaluated at a state.
+ *
+ * @param state empty when no state could be found; then the obstacle of the assessment says why
+ */
+record Trial(Candidate candidate, Optional<FluidState> state, double value, Assessment assessment) {
+
+    /** Whether its number means anything, qualified or not. */
+    boolean usable() {
+        return state.isPresent() && value > 0 && value < Double.POSITIVE_INFINITY;
+    }
+
+    /** Whether its digits, its source and its standing would allow to recommend it elsewhere. */
+    boolean trustworthy() {
+        return candidate.correlation()
+                .map(c -> c.transcription() != Transcription.UNSURE && c.citation().hasSource()
+                        && c.standing().recommendable())
+                .orElse(true);
+    }
+}
