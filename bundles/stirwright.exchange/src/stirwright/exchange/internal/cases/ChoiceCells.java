@@ -1,0 +1,40 @@
+package stirwright.exchange.internal.cases;
+
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import stirwright.core.CaseRefusedException;
+import stirwright.core.Choices;
+import stirwright.correlation.Quantity;
+
+/** What a row settles by hand: a correlation or a value for a quantity. */
+final class ChoiceCells {
+
+    private record Choice(Quantity quantity, String correlation, String value) {}
+
+    private static final List<Choice> ALL = List.of(
+            new Choice(Quantity.POWER_NUMBER, CaseColumns.CORRELATION, CaseColumns.POWER_NUMBER),
+            new Choice(Quantity.SHEAR_RATE_CONSTANT, CaseColumns.SHEAR_RATE_CORRELATION, CaseColumns.SHEAR_RATE_CONSTANT),
+            new Choice(Quantity.FLOW_NUMBER, CaseColumns.FLOW_NUMBER_CORRELATION, CaseColumns.FLOW_NUMBER));
+
+    private ChoiceCells() {}
+
+    /** @throws CaseRefusedException when a value is not above 0, or stands beside a correlation */
+    static Choices read(Cells cells) {
+        Map<Quantity, String> correlations = new HashMap<>();
+        Map<Quantity, Double> givens = new HashMap<>();
+        for (Choice choice : ALL) {
+            boolean byValue = cells.given(choice.value());
+            if (byValue && cells.given(choice.correlation())) {
+                throw cells.refusal(choice.value(), "stands beside " + cells.inWords(List.of(choice.correlation()))
+                        + "; give one of them");
+            }
+            if (byValue) {
+                givens.put(choice.quantity(), cells.positive(choice.value()));
+            } else if (cells.given(choice.correlation())) {
+                correlations.put(choice.quantity(), cells.text(choice.correlation()));
+            }
+        }
+        return correlations.isEmpty() && givens.isEmpty() ? Choices.NONE : new Choices(correlations, givens);
+    }
+}

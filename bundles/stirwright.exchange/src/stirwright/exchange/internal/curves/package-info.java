@@ -1,0 +1,2 @@
+/** How a text table becomes a flow curve. */
+package stirwright.exchange.internal.curves;

@@ -1,0 +1,27 @@
+package stirwright.exchange.internal.table;
+
+/** The sign between the whole and the fractional digits of a number. */
+public enum DecimalSign {
+    POINT('.', "decimal point"),
+    COMMA(',', "decimal comma");
+
+    private final char sign;
+    private final String words;
+
+    DecimalSign(char sign, String words) {
+        this.sign = sign;
+        this.words = words;
+    }
+
+    public char sign() {
+        return sign;
+    }
+
+    public String words() {
+        return words;
+    }
+
+    DecimalSign other() {
+        return this == POINT ? COMMA : POINT;
+    }
+}

@@ -1,0 +1,2 @@
+/** Text tables as people and spreadsheets write them: encoding, separator, decimal sign, rows. */
+package stirwright.exchange.internal.table;
