@@ -1,0 +1,19 @@
+package stirwright.conformance.internal;
+
+import java.util.List;
+import stirwright.correlation.Correlation;
+
+/**
+ * The reference rows of a subject.
+ *
+ * @param problems what could not be read
+ */
+public record ReferenceRows(List<ReferenceRow> rows, List<Problem> problems) {
+
+    /** @param place file, or file and line */
+    record Problem(String place, String message) {}
+
+    List<ReferenceRow> of(Correlation correlation) {
+        return rows.stream().filter(row -> row.correlation().id().equals(correlation.id())).toList();
+    }
+}

@@ -1,0 +1,45 @@
+package stirwright.conformance.internal;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+import stirwright.correlation.FluidClass;
+import stirwright.correlation.Geometry;
+import stirwright.correlation.GeometryParameter;
+import stirwright.correlation.OperatingPoint;
+import stirwright.correlation.Variable;
+
+/**
+ * A vessel and a state of its product, both free of hard limits, so that a check can go where no
+ * real case may.
+ */
+record Situation(Map<GeometryParameter, Double> dimensions, Map<Variable, Double> variables, FluidClass fluid)
+        implements Geometry, OperatingPoint {
+
+    @Override
+    public double get(GeometryParameter parameter) {
+        return dimensions.getOrDefault(parameter, Double.NaN);
+    }
+
+    @Override
+    public double get(Variable variable) {
+        return variables.getOrDefault(variable, Double.NaN);
+    }
+
+    Situation with(GeometryParameter parameter, double value) {
+        return new Situation(changed(dimensions, parameter, value), variables, fluid);
+    }
+
+    Situation with(Variable variable, double value) {
+        return new Situation(dimensions, changed(variables, variable, value), fluid);
+    }
+
+    Situation with(FluidClass other) {
+        return new Situation(dimensions, variables, other);
+    }
+
+    private static <K> Map<K, Double> changed(Map<K, Double> values, K key, double value) {
+        Map<K, Double> copy = new LinkedHashMap<>(values);
+        copy.put(key, value);
+        return copy;
+    }
+}

@@ -1,0 +1,35 @@
+package stirwright.equinox.tests;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.DynamicContainer;
+import org.junit.jupiter.api.DynamicTest;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestFactory;
+import stirwright.conformance.ConformanceSuite;
+import stirwright.conformance.InstalledBundles;
+import stirwright.conformance.Subject;
+
+/** Every installed bundle that contributes passes every check. */
+class ConformanceTest {
+
+    /** Two families and the general relations. */
+    private static final int LEAST_BUNDLES = 3;
+
+    @Test
+    void theBundlesAreThere() {
+        List<Subject> subjects = InstalledBundles.subjects(Framework.context());
+        assertTrue(subjects.size() >= LEAST_BUNDLES, () -> "only these contribute: " + subjects);
+    }
+
+    @TestFactory
+    Stream<DynamicContainer> conforms() {
+        return InstalledBundles.subjects(Framework.context()).stream().map(subject -> DynamicContainer.dynamicContainer(
+                subject.origin(), ConformanceSuite.checks().stream().map(check -> DynamicTest.dynamicTest(
+                        check.name() + ": " + check.proves(),
+                        () -> assertEquals(List.of(), check.examine(subject), subject + ": " + check.proves())))));
+    }
+}

@@ -1,0 +1,2 @@
+/** Tests that need a running framework: bundles resolved, Declarative Services live. */
+package stirwright.equinox.tests;
