@@ -1,0 +1,182 @@
+package stirwright.console.internal;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import stirwright.conformance.JarRefusedException;
+import stirwright.core.Arrival;
+import stirwright.core.Catalogue;
+import stirwright.correlation.Quantity;
+import stirwright.family.discturbine.DiscTurbine;
+import stirwright.family.pitchedblade.PitchedBlade;
+import stirwright.general.GeneralRelations;
+
+/** The command line as a script sees it: what goes to which stream, and the exit code. */
+class CommandLineTest {
+    private static final Catalogue CATALOGUE = Catalogue.of(List.of(
+            new Arrival(new DiscTurbine(), "stirwright.family.discturbine 1"),
+            new Arrival(new PitchedBlade(), "stirwright.family.pitchedblade 1"),
+            new Arrival(new GeneralRelations(), "stirwright.general 1")));
+
+    private static final String HEAD = "case,family,impeller_diameter_m,vessel_diameter_m,liquid_height_m,clearance_m,"
+            + "blade_count,blade_width_m,blade_length_m,blade_thickness_m,baffle_count,baffle_width_m,speed_rev_s,"
+            + "density_kg_m3,model,viscosity_Pa_s\n";
+    private static final String GOOD = "good,discturbine,0.2,0.6,0.6,0.2,6,0.04,0.05,0.004,4,0.06,2,1000,newtonian,0.001\n";
+    private static final String ASSUMING = "assuming,discturbine,0.2,,,,,,,,4,,2,1000,newtonian,0.001\n";
+    private static final String WRONG = "wrong,discturbine,0.7,0.6,0.6,0.2,6,0.04,0.05,0.004,4,0.06,2,1000,newtonian,0.001\n";
+
+    @TempDir
+    private Path folder;
+
+    private final StringWriter out = new StringWriter();
+    private final StringWriter err = new StringWriter();
+
+    private int run(String... arguments) {
+        Desk desk = new Desk(() -> CATALOGUE, jar -> {
+            throw new JarRefusedException(jar + " is refused by the test");
+        }, new PrintWriter(out), new PrintWriter(err), "9.9.9");
+        return Commands.run(desk, arguments);
+    }
+
+    private String table(String... rows) throws IOException {
+        Path file = folder.resolve("cases.csv");
+        Files.writeString(file, HEAD + String.join("", rows));
+        return file.toString();
+    }
+
+    @BeforeEach
+    @AfterEach
+    void noStackTraceReachesTheUser() {
+        assertFalse((out.toString() + err).contains("\tat "), () -> out.toString() + err);
+    }
+
+    @Test
+    void exitCodeTellsTheWorstOutcome() throws IOException {
+        assertEquals(0, run("crosscheck", table(GOOD)), err::toString);
+        assertEquals(1, run("crosscheck", table(GOOD, ASSUMING)));
+        assertEquals(2, run("crosscheck", table(ASSUMING, WRONG, GOOD)));
+        assertEquals(3, run("crosscheck", folder.resolve("missing.csv").toString()));
+    }
+
+    @Test
+    void refusedRowIsNamedOnStandardErrorAndTheOthersAreComputed() throws IOException {
+        run("crosscheck", table(WRONG, GOOD));
+        String line = err.toString().lines().filter(l -> l.contains("wrong")).findFirst().orElseThrow();
+        for (String part : List.of("cases.csv", "2", "impeller_diameter_m", "0.7", "vessel_diameter_m 0.6")) {
+            assertTrue(line.contains(part), line);
+        }
+        assertTrue(out.toString().contains("good, family discturbine: ok"), out.toString());
+    }
+
+    @Test
+    void resultsAloneGoToStandardOutput() throws IOException {
+        run("crosscheck", table(GOOD, WRONG));
+        assertFalse(out.toString().contains("separator"), "file remarks are messages");
+        assertTrue(err.toString().lines().allMatch(l -> l.contains("cases.csv")), err.toString());
+    }
+
+    @Test
+    void tablesFitTheirWidthAndCarryTheCaution() throws IOException {
+        run("crosscheck", table(GOOD, ASSUMING, WRONG));
+        assertTrue(out.toString().contains("torque"));
+        int powers = out.toString().split("power number by", -1).length - 1;
+        int cautions = out.toString().split("Power and torque are estimates", -1).length - 1;
+        assertEquals(powers, cautions, "the caution stands with every table of power and torque");
+        assertEquals(2, powers);
+        run("candidates");
+        run("help");
+        assertEquals(List.of(), out.toString().lines().filter(l -> l.length() > 120).toList());
+    }
+
+    @Test
+    void neverSaysSafe() throws IOException {
+        run("crosscheck", table(GOOD, ASSUMING, WRONG));
+        run("candidates");
+        run("demo");
+        run("help");
+        assertFalse(out.toString().matches("(?is).*\\bsafe\\b.*"));
+    }
+
+    @Test
+    void everyCandidateSaysWhyOrWhyNot() throws IOException {
+        run("crosscheck", table(GOOD));
+        for (String id : CATALOGUE.correlations(Quantity.POWER_NUMBER, "discturbine").stream()
+                .map(Object::toString).toList()) {
+            assertTrue(out.toString().matches("(?s).*" + id.replace(".", "\\.") + ": (recommended|qualifies|excluded|chosen).*"), id);
+        }
+    }
+
+    @Test
+    void demoWritesWhatItSaysAndExitsWithZero() throws IOException {
+        assertEquals(0, run("demo"));
+        assertTrue(out.toString().contains("invented"));
+        assertTrue(out.toString().contains("Cases: 4 ok, 1 flagged, 0 refused."), out.toString());
+        String kept = out.toString().lines().filter(l -> l.startsWith("Everything in this demo")).findFirst().orElseThrow();
+        Path files = Path.of(kept.substring(kept.lastIndexOf(": ") + 2));
+        for (String name : List.of("glaze-slip.csv", "results.csv", "results.json", "candidates.csv")) {
+            assertTrue(Files.size(files.resolve(name)) > 0, name);
+        }
+    }
+
+    @Test
+    void outWritesEveryRequestedFile() throws IOException {
+        Path csv = folder.resolve("r.csv");
+        Path json = folder.resolve("r.json");
+        Path candidates = folder.resolve("c.csv");
+        assertEquals(0, run("crosscheck", table(GOOD), "--out", csv.toString(), "--out", json.toString(),
+                "--candidates", candidates.toString()), err::toString);
+        assertTrue(Files.readString(csv).startsWith("case,family,correlation,role,verdict,failed_bounds,regime,speed_rev_s,"));
+        assertTrue(Files.readString(json).contains("\"9.9.9\""));
+        assertTrue(Files.readString(candidates).startsWith("case,quantity,correlation,value,role,verdict,"));
+        assertEquals(3, run("crosscheck", table(GOOD), "--out", folder.resolve("r.ods").toString()));
+        assertTrue(err.toString().contains(".csv"), err.toString());
+    }
+
+    @Test
+    void candidatesListsEveryCardWithItsSource() {
+        assertEquals(0, run("candidates"));
+        CATALOGUE.entries().forEach(e -> assertTrue(out.toString().contains(e.correlation().id()), e.correlation().id()));
+        assertTrue(out.toString().contains("Np = 2.512 (t/D)^-0.195 (T/T0)^0.063"));
+        assertTrue(out.toString().contains("Chem. Eng. Sci. 42 (1987) 317-326"));
+    }
+
+    @Test
+    void fitPrintsBothModels() throws IOException {
+        Path curve = folder.resolve("slip.csv");
+        Files.writeString(curve, "shear_rate_1_s,shear_stress_Pa\n1,5\n3,6.2\n10,8.7\n30,13\n100,22\n300,39\n");
+        assertEquals(0, run("fit", curve.toString()), err::toString);
+        assertTrue(out.toString().contains("herschel-bulkley: "), out.toString());
+        assertTrue(out.toString().contains("power-law: "), out.toString());
+    }
+
+    @Test
+    void versionAndHelpWork() {
+        assertEquals(0, run("--version"));
+        assertEquals("Stirwright 9.9.9", out.toString().strip());
+        assertEquals(0, run());
+        assertEquals(0, run("help", "crosscheck"));
+        assertTrue(out.toString().contains("--candidates"), out.toString());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"crosschek", "crosscheck", "crosscheck a b", "crosscheck a --nonsense", "help nonsense",
+            "candidates --out", "fit", "check", "check some.jar", "--nonsense"})
+    void wrongUseIsOneLineOnStandardErrorAndExitsWithThree(String line) {
+        assertEquals(3, run(line.split(" ")));
+        assertEquals("", out.toString());
+        assertEquals(1, err.toString().lines().count(), err.toString());
+    }
+}

@@ -1,0 +1,91 @@
+package stirwright.console.internal;
+
+import java.io.PrintWriter;
+import java.util.Locale;
+import stirwright.core.CandidateResult;
+import stirwright.core.CaseResult;
+import stirwright.core.FluidState;
+import stirwright.correlation.Figures;
+import stirwright.correlation.FlowKind;
+import stirwright.correlation.Regime;
+import stirwright.exchange.CaseEntry;
+
+/** One case laid out for reading, at most 120 columns wide. */
+final class CaseView {
+    static final int WIDTH = 120;
+
+    /** Stands wherever power or torque is printed. */
+    static final String CAUTION = "Power and torque are estimates. Drive, mechanical and safety design is for the"
+            + " responsible engineer, by the codes that apply and with the equipment maker.";
+
+    private final PrintWriter out;
+
+    CaseView(PrintWriter out) {
+        this.out = out;
+    }
+
+    void print(CaseEntry entry, CaseResult result) {
+        StringBuilder text = new StringBuilder();
+        Columns.appendWrapped(text, "", entry.name() + ", family " + (result.family().isBlank() ? "not given" : result.family())
+                + ": " + result.status().id(), WIDTH);
+        result.refusal().ifPresent(r -> Columns.appendWrapped(text, "  ", r.words(), WIDTH));
+        result.pick().ifPresent(pick -> {
+            pick.state().ifPresent(state -> productAndFlow(text, pick, state));
+            candidates(text, result);
+            result.flags().forEach(f -> Columns.appendWrapped(text, "  ", "flag: " + f, WIDTH));
+            result.notes().forEach(n -> Columns.appendWrapped(text, "  ", "note: " + n, WIDTH));
+            Columns.appendWrapped(text, "  ", CAUTION, WIDTH);
+        });
+        out.println(text);
+    }
+
+    private static void productAndFlow(StringBuilder text, CandidateResult pick, FluidState state) {
+        Columns.appendWrapped(text, "  ", Figures.show(state.speed()) + " rev/s (" + Figures.show(60 * state.speed())
+                + " rev/min), tip speed " + Figures.show(state.tipSpeed()) + " m/s, Reynolds number "
+                + Figures.show(state.reynolds()) + " (" + pick.regime().map(Regime::id).orElse("") + ")", WIDTH);
+        Columns.appendWrapped(text, "  ", "average shear rate " + Figures.show(state.shearRate()) + " 1/s ("
+                + Figures.show(state.shearRateConstant()) + " per revolution, " + pick.shearRateCorrelation()
+                + "), apparent viscosity " + Figures.show(state.viscosity()) + " Pa s", WIDTH);
+        Columns.appendWrapped(text, "  ", "power " + Figures.show(pick.power()) + " W, torque " + Figures.show(pick.torque())
+                + " N m, " + Figures.show(pick.powerPerVolume()) + " W/m3, power number " + Figures.show(pick.powerNumber())
+                + " by " + pick.correlation(), WIDTH);
+        if (!pick.flowCorrelation().isEmpty()) {
+            Columns.appendWrapped(text, "  ", "pumping " + Figures.show(pick.pumping()) + " m3/s (flow number "
+                    + Figures.show(pick.flowNumber()) + pick.flowKind().map(FlowKind::id).map(k -> ", " + k).orElse("")
+                    + ", " + pick.flowCorrelation() + ")", WIDTH);
+        }
+    }
+
+    private static void candidates(StringBuilder text, CaseResult result) {
+        Columns table = new Columns("llrrrrr")
+                .add("power number by", "verdict", "Np", "speed", "power", "torque", "from pick")
+                .add("", "", "-", "rev/s", "W", "N m", "%");
+        for (CandidateResult row : result.candidates()) {
+            table.add(mark(row) + row.correlation(), row.verdict().id(), shown(row.powerNumber()),
+                    row.state().map(s -> shown(s.speed())).orElse(""), shown(row.power()), shown(row.torque()),
+                    Double.isNaN(row.deviation()) ? "" : String.format(Locale.ROOT, "%+.1f", 100 * row.deviation()));
+        }
+        table.appendTo(text, "  ");
+        for (CandidateResult row : result.candidates()) {
+            Columns.appendWrapped(text, "  ", mark(row) + row.correlation() + ": " + row.why(), WIDTH);
+            row.notes().forEach(n -> Columns.appendWrapped(text, "      ", n, WIDTH));
+        }
+        Columns.appendWrapped(text, "  ", Double.isNaN(result.spread())
+                ? "no candidate qualifies, so there is no spread"
+                : "largest over smallest power of those that qualify: " + Figures.show(result.spread()), WIDTH);
+    }
+
+    /** What a row is to its case, readable without colour: the pick first, what is excluded in brackets. */
+    private static String mark(CandidateResult row) {
+        return switch (row.role()) {
+            case RECOMMENDED -> "> ";
+            case CHOSEN -> "* ";
+            case CANDIDATE -> "  ";
+            case EXCLUDED -> "x ";
+        };
+    }
+
+    private static String shown(double value) {
+        return Double.isNaN(value) ? "" : Figures.show(value);
+    }
+}

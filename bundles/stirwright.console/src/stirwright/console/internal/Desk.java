@@ -1,0 +1,32 @@
+package stirwright.console.internal;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.util.function.Supplier;
+import stirwright.conformance.JarRefusedException;
+import stirwright.conformance.JarReport;
+import stirwright.core.Catalogue;
+
+/**
+ * What every command works with.
+ *
+ * @param catalogue what is installed at this moment
+ * @param jarCheck the conformance suite over a jar
+ * @param out results alone
+ * @param err every message
+ * @param version of the product
+ */
+record Desk(Supplier<Catalogue> catalogue, JarChecker jarCheck, PrintWriter out, PrintWriter err, String version) {
+
+    /** Runs the conformance suite over a jar. */
+    @FunctionalInterface
+    interface JarChecker {
+        JarReport check(Path jar) throws JarRefusedException, IOException;
+    }
+
+    /** Says what is wrong with installed contributions; silent when nothing is. */
+    void reportProblems(Catalogue installed) {
+        installed.problems().forEach(p -> err.println("installed families: " + p));
+    }
+}

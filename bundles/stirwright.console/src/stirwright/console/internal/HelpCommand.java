@@ -1,0 +1,54 @@
+package stirwright.console.internal;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.concurrent.Callable;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
+
+@Command(name = "help", description = "Says what the commands do; 'help tables' describes the tables and their columns.")
+final class HelpCommand implements Callable<Integer> {
+    private static final String TABLES = "tables";
+
+    private final Desk desk;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Parameters(paramLabel = "TOPIC", arity = "0..1", description = "a command, or 'tables'")
+    private String topic;
+
+    HelpCommand(Desk desk) {
+        this.desk = desk;
+    }
+
+    @Override
+    public Integer call() {
+        CommandLine root = spec.parent().commandLine();
+        if (topic == null) {
+            root.usage(desk.out());
+        } else if (topic.equals(TABLES)) {
+            desk.out().print(page("/help/tables.md"));
+        } else if (root.getSubcommands().containsKey(topic)) {
+            root.getSubcommands().get(topic).usage(desk.out());
+        } else {
+            throw new CommandLine.ParameterException(spec.commandLine(), "there is no help on '" + topic
+                    + "', only on " + String.join(", ", root.getSubcommands().keySet()) + " and " + TABLES);
+        }
+        desk.out().flush();
+        return ExitCode.OK;
+    }
+
+    private static String page(String name) {
+        try (InputStream in = HelpCommand.class.getResourceAsStream(name)) {
+            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+        } catch (IOException unreadable) {
+            throw new UncheckedIOException(unreadable);
+        }
+    }
+}

@@ -1,0 +1,39 @@
+package stirwright.console.internal;
+
+import java.io.PrintWriter;
+
+/**
+ * A line that counts up on standard error once the work takes longer than half a second. Shown only
+ * when a person watches, which the start script knows and says by a system property.
+ */
+final class Progress {
+    private static final long AFTER_NANOS = 500_000_000L;
+
+    private final PrintWriter err;
+    private final String things;
+    private final int total;
+    private final boolean watched = Boolean.getBoolean("stirwright.watched");
+    private final long start = System.nanoTime();
+    private boolean shown;
+
+    Progress(PrintWriter err, String things, int total) {
+        this.err = err;
+        this.things = things;
+        this.total = total;
+    }
+
+    void reached(int count) {
+        if (watched && count < total && System.nanoTime() - start > AFTER_NANOS) {
+            err.print("\r" + count + " of " + total + " " + things + " (Ctrl-C stops) ");
+            err.flush();
+            shown = true;
+        }
+    }
+
+    void done() {
+        if (shown) {
+            err.print("\r" + " ".repeat(60) + "\r");
+            err.flush();
+        }
+    }
+}
