@@ -89,19 +89,26 @@ built() { printf '%s\n' "$1" >"$top/releng/product/target/built-from"; }
 up_to_date() { [ -x "$product/stirwright" ] && [ "$(cat "$top/releng/product/target/built-from" 2>/dev/null)" = "$1" ]; }
 
 # maven PURPOSE ARGUMENT...: builds for PURPOSE (run or test); the log goes to .tools/PURPOSE.log and to descriptor 8.
-# Once this or a test has succeeded with the same poms and target, everything is there and the network is left alone;
+# Once this or a test got through with the same poms and target, everything is there and the network is left alone;
 # should something be missing all the same, it is fetched.
 maven() {
-  local log=$tools/$1.log poms stamp
-  poms=$(hash_sources \( -name pom.xml -o -name '*.target' -o -path '.mvn/*' \))
-  stamp=$tools/fetched-$poms
+  local log=$tools/$1.log stamp result
+  stamp=$tools/fetched-$(hash_sources \( -name pom.xml -o -name '*.target' -o -path '.mvn/*' \))
   if [ -e "$stamp-$1" ] || [ -e "$stamp-test" ]; then
     call_maven "$log" -o "${@:2}" && return
     grep -qE 'in offline mode|has not been downloaded' "$log" || return 1
     say "something is missing: building again with the network"
     rm -f "$stamp"-*
   fi
-  call_maven "$log" "${@:2}" && touch "$stamp-$1"
+  call_maven "$log" "${@:2}" && result=0 || result=1
+  if [ $result = 0 ] || only_tests_failed "$log"; then
+    touch "$stamp-$1"
+  fi
+  return $result
 }
 
 call_maven() { (cd "$top" && "$mvn" "${@:2}") 2>&1 | tee "$1" >&8; }
+
+only_tests_failed() {
+  grep -q 'There are test failures' "$1" && ! grep 'Failed to execute goal' "$1" | grep -qv 'There are test failures'
+}

@@ -38,7 +38,7 @@ class DoubtsTest {
         assertEquals(List.of(), result.flags());
         assertEquals(Status.OK, result.status());
         assertTrue(result.notes().contains("from the reader"));
-        assertTrue(result.notes().stream().anyMatch(n -> n.startsWith("default: liquid_volume_m3 = 2.651")), result.notes().toString());
+        assertTrue(result.notes().stream().anyMatch(n -> n.startsWith("defaults: liquid_volume_m3 = 2.651")), result.notes().toString());
     }
 
     @Test

@@ -66,7 +66,7 @@ class ModifierTest {
     void boundOfAModifierCountsForTheCandidate() {
         CandidateResult row = Invented.row(check(3, 0.2), "np.single");
         assertEquals(Role.EXCLUDED, row.role());
-        assertTrue(row.failedBounds().get(0).contains("invented.np.factor states S/D 1 to 3"), row.failedBounds().toString());
+        assertTrue(row.failedBounds().get(0).contains("S/D 0.4 is outside (invented.np.factor: 1 to 3)"), row.failedBounds().toString());
         assertEquals(Role.RECOMMENDED, Invented.row(check(3, 0.2), "np.total").role());
     }
 }

@@ -17,6 +17,7 @@ import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Standing;
 import stirwright.correlation.Transcription;
+import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 
 /** Qualification and recommendation as the contract page fixes them. Re is 5e5 in these cases. */
@@ -170,5 +171,20 @@ class SelectionTest {
         assertEquals("invented.ks.ten", Invented.row(result, "np.a").shearRateCorrelation());
         assertEquals("invented.ks.other", Invented.row(result, "np.b").shearRateCorrelation(), "it states a scatter");
         assertFalse(result.candidates().isEmpty());
+    }
+
+    @Test
+    void furtherQuantitiesRestOnThePowerAndFlowNumberOfThePick() {
+        Quantity own = Quantity.of("invented-time", "invented time", "ti", "s");
+        Correlation flow = Invented.constant(Quantity.FLOW_NUMBER, "nq.half", 0.5);
+        Correlation time = Invented.formula(
+                Invented.anywhere(own, "time.own", Variable.POWER_NUMBER, Variable.FLOW_NUMBER, Variable.SPEED).constant("a", 3),
+                "{a} Np Nq/N", (g, k) -> p -> k.get("a") * p.get(Variable.POWER_NUMBER) * p.get(Variable.FLOW_NUMBER)
+                        / p.get(Variable.SPEED));
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, np("np.five", 5, b -> b), flow, time))
+                .check(Invented.water(Choices.NONE));
+        QuantityResult row = result.quantities().stream().filter(q -> q.quantity().equals(own)).findFirst().orElseThrow();
+        assertEquals(3 * 5 * 0.5 / 2, row.value(), 1e-15);
+        assertEquals(Role.RECOMMENDED, row.role());
     }
 }

@@ -3,6 +3,7 @@ package stirwright.core;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Collections;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -84,6 +85,17 @@ public final class Catalogue {
 
     public Optional<Entry> entry(String correlationId) {
         return Optional.ofNullable(entries.get(correlationId));
+    }
+
+    /** The quantities for which a family has correlations, by id. */
+    public List<Quantity> quantities(String familyId) {
+        return entries.values().stream()
+                .map(Entry::correlation)
+                .filter(c -> c.holdsFor(familyId) && c.modifierFor().isEmpty())
+                .map(Correlation::quantity)
+                .distinct()
+                .sorted(Comparator.comparing(Quantity::id))
+                .toList();
     }
 
     /** The correlations for a quantity of a family, modifiers aside. */

@@ -66,6 +66,14 @@ class BoundTest {
     }
 
     @Test
+    void roundingOfRatiosAndAnglesDoesNotFailABound() {
+        Geometry sixtyDegrees = p -> Dimensions.BLADE_ANGLE.fromColumn(60);
+        assertEquals(Verdict.INSIDE, new Bound.OneOf(Measure.BLADE_ANGLE, List.of(60.0)).verdict(sixtyDegrees, reynolds(1)));
+        assertEquals(Verdict.INSIDE, Measure.D_OVER_T.verdict(0.6096 / 1.8288, 0.2, 1.0 / 3));
+        assertEquals(Verdict.NEAR, Measure.D_OVER_T.verdict(1.000001 / 3, 0.2, 1.0 / 3));
+    }
+
+    @Test
     void notStatedNeedsAReason() {
         assertEquals(Verdict.NOT_STATED, new Bound.NotStated(Measure.D_OVER_T, "not in the table").verdict(SIX_BLADES, reynolds(1)));
         assertThrows(ContractException.class, () -> new Bound.NotStated(Measure.D_OVER_T, " "));

@@ -77,7 +77,7 @@ class CorrelationBuilderTest {
     @Test
     void nominalValuesAllowForRoundedDrawings() {
         Bound bound = complete().nominal(Measure.W_OVER_D, 0.2).build().bound(Measure.W_OVER_D).orElseThrow();
-        assertEquals("W/D 0.195 to 0.205 (nominal 0.2)", bound.words());
+        assertEquals("W/D 0.195 to 0.205, nominal 0.2", bound.words());
     }
 
     @ParameterizedTest

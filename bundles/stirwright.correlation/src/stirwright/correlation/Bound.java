@@ -13,8 +13,13 @@ public sealed interface Bound {
 
     Verdict verdict(Geometry geometry, OperatingPoint point);
 
+    /** What is allowed, for instance "0.2 to 0.5". */
+    String allowance();
+
     /** The bound in words, for instance "D/T 0.2 to 0.5". */
-    String words();
+    default String words() {
+        return subject().title() + " " + allowance();
+    }
 
     /** What the case has, in words, for instance "D/T 0.62". */
     String found(Geometry geometry, OperatingPoint point);
@@ -33,12 +38,12 @@ public sealed interface Bound {
         }
 
         @Override
-        public String words() {
+        public String allowance() {
             String range = least == Double.NEGATIVE_INFINITY ? "at most " + Figures.show(most)
                     : most == Double.POSITIVE_INFINITY ? "at least " + Figures.show(least)
                     : least == most ? Figures.show(least)
                     : Figures.show(least) + " to " + Figures.show(most);
-            return subject.title() + " " + range + (remark.isEmpty() ? "" : " (" + remark + ")");
+            return range + (remark.isEmpty() ? "" : ", " + remark);
         }
 
         @Override
@@ -55,12 +60,14 @@ public sealed interface Bound {
 
         @Override
         public Verdict verdict(Geometry geometry, OperatingPoint point) {
-            return allowed.contains(subject.value(geometry, point)) ? Verdict.INSIDE : Verdict.OUTSIDE;
+            double found = subject.value(geometry, point);
+            boolean inside = allowed.stream().anyMatch(a -> subject.verdict(found, a, a) == Verdict.INSIDE);
+            return inside ? Verdict.INSIDE : Verdict.OUTSIDE;
         }
 
         @Override
-        public String words() {
-            return subject.title() + " " + String.join(" or ", allowed.stream().map(Figures::show).toList());
+        public String allowance() {
+            return String.join(" or ", allowed.stream().map(Figures::show).toList());
         }
 
         @Override
@@ -81,8 +88,8 @@ public sealed interface Bound {
         }
 
         @Override
-        public String words() {
-            return subject.title() + " " + String.join(" or ", allowed);
+        public String allowance() {
+            return String.join(" or ", allowed);
         }
 
         @Override
@@ -105,8 +112,8 @@ public sealed interface Bound {
         }
 
         @Override
-        public String words() {
-            return subject.title() + " not stated (" + reason + ")";
+        public String allowance() {
+            return "not stated (" + reason + ")";
         }
 
         @Override

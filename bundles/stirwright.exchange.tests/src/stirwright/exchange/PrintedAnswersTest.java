@@ -77,7 +77,7 @@ class PrintedAnswersTest {
     /** What the case leaves open is assumed, and is said to be. */
     private static void assertAssumed(CaseResult result, String column) {
         assertTrue(Stream.concat(result.flags().stream(), result.notes().stream())
-                        .filter(w -> w.startsWith("assumed: ") || w.startsWith("default: "))
+                        .filter(w -> w.startsWith("assumed: ") || w.startsWith("defaults: "))
                         .anyMatch(w -> w.contains(column + " = ")),
                 column + " is not marked in " + result.flags() + result.notes());
     }

@@ -143,6 +143,9 @@ class RowShapeTest {
     void tenMegabytesInAComment() {
         assertEquals(List.of("A", "B"), accepted(read(row("A"), "#" + LONG + "\n", row("B"), "#" + LONG)));
         assertEquals(List.of("A"), accepted(Sheet.read(folder, "#" + LONG + "\n" + Sheet.good().text())));
+        CaseTable beyondEveryBuffer = read(row("A"), "#" + LONG + LONG + "\n", row("B"));
+        assertEquals(List.of("A", "B"), accepted(beyondEveryBuffer));
+        assertEquals(2, beyondEveryBuffer.entries().size());
     }
 
     @Test

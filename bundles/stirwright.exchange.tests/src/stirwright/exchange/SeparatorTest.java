@@ -41,6 +41,13 @@ class SeparatorTest {
     }
 
     @Test
+    void theSeparatorIsTheOneThatShowsKnownNames() {
+        String text = Sheet.good().with("remark; free\t", "").text();
+        assertAccepted(Sheet.read(folder, text).entries().get(0));
+        assertTrue(message(text).contains("comma as separator"));
+    }
+
+    @Test
     void decimalSignsAreReported() {
         assertTrue(message(HEADER + "A;blades;0.5;1.5;4;2;1000;newtonian;0.1\n").contains("decimal point"));
         assertTrue(message(HEADER + "A;blades;0,5;1,5;4;2;1000;newtonian;0,1\n").contains("decimal comma"));

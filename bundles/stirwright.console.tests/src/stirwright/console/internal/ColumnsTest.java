@@ -10,8 +10,8 @@ class ColumnsTest {
     @Test
     void textGoesLeftNumbersRightAndNothingTrails() {
         StringBuilder text = new StringBuilder();
-        new Columns("lrl").add("name", "W", "note").add("a", "12.5", "").appendTo(text, "  ");
-        assertEquals("  name     W  note\n  a     12.5\n", text.toString());
+        new Columns("lrl").add("name", "W", "note").add("a", "12.5", "").under("why").appendTo(text, "  ", 80);
+        assertEquals("  name     W  note\n  a     12.5\n        why\n", text.toString());
         assertThrows(IllegalArgumentException.class, () -> new Columns("l").add("one", "two"));
     }
 

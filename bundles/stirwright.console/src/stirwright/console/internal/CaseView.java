@@ -28,11 +28,11 @@ final class CaseView {
         StringBuilder text = new StringBuilder();
         Columns.appendWrapped(text, "", entry.name() + ", family " + (result.family().isBlank() ? "not given" : result.family())
                 + ": " + result.status().id(), WIDTH);
+        result.flags().forEach(f -> Columns.appendWrapped(text, "  ", "flag: " + f, WIDTH));
         result.refusal().ifPresent(r -> Columns.appendWrapped(text, "  ", r.words(), WIDTH));
         result.pick().ifPresent(pick -> {
             pick.state().ifPresent(state -> productAndFlow(text, pick, state));
             candidates(text, result);
-            result.flags().forEach(f -> Columns.appendWrapped(text, "  ", "flag: " + f, WIDTH));
             result.notes().forEach(n -> Columns.appendWrapped(text, "  ", "note: " + n, WIDTH));
             Columns.appendWrapped(text, "  ", CAUTION, WIDTH);
         });
@@ -64,12 +64,10 @@ final class CaseView {
             table.add(mark(row) + row.correlation(), row.verdict().id(), shown(row.powerNumber()),
                     row.state().map(s -> shown(s.speed())).orElse(""), shown(row.power()), shown(row.torque()),
                     Double.isNaN(row.deviation()) ? "" : String.format(Locale.ROOT, "%+.1f", 100 * row.deviation()));
+            table.under(row.why());
+            row.notes().forEach(table::under);
         }
-        table.appendTo(text, "  ");
-        for (CandidateResult row : result.candidates()) {
-            Columns.appendWrapped(text, "  ", mark(row) + row.correlation() + ": " + row.why(), WIDTH);
-            row.notes().forEach(n -> Columns.appendWrapped(text, "      ", n, WIDTH));
-        }
+        table.appendTo(text, "  ", WIDTH);
         Columns.appendWrapped(text, "  ", Double.isNaN(result.spread())
                 ? "no candidate qualifies, so there is no spread"
                 : "largest over smallest power of those that qualify: " + Figures.show(result.spread()), WIDTH);

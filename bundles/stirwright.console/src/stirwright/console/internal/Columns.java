@@ -4,10 +4,17 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
-/** Lines of cells set under each other: text to the left, numbers to the right. */
+/**
+ * Lines of cells set under each other, text to the left and numbers to the right; sentences may
+ * stand under a line.
+ */
 final class Columns {
+    private static final String UNDER = "      ";
+
     private final boolean[] right;
-    private final List<String[]> lines = new ArrayList<>();
+    private final List<Line> lines = new ArrayList<>();
+
+    private record Line(String[] cells, List<String> under) {}
 
     /** @param alignment one character a column, {@code l} or {@code r} */
     Columns(String alignment) {
@@ -21,33 +28,37 @@ final class Columns {
         if (cells.length != right.length) {
             throw new IllegalArgumentException(cells.length + " cells for " + right.length + " columns");
         }
-        lines.add(cells);
+        lines.add(new Line(cells, new ArrayList<>()));
+        return this;
+    }
+
+    /** A sentence under the line that was added last. */
+    Columns under(String sentence) {
+        lines.getLast().under().add(sentence);
         return this;
     }
 
     /** Appends the lines with an indent and two spaces between columns; no trailing spaces. */
-    void appendTo(StringBuilder text, String indent) {
+    void appendTo(StringBuilder text, String indent, int width) {
         int[] widths = new int[right.length];
-        for (String[] line : lines) {
+        for (Line line : lines) {
             for (int i = 0; i < widths.length; i++) {
-                widths[i] = Math.max(widths[i], line[i].length());
+                widths[i] = Math.max(widths[i], line.cells()[i].length());
             }
         }
-        for (String[] line : lines) {
-            int start = text.length();
-            text.append(indent);
-            for (int i = 0; i < widths.length; i++) {
-                int gap = widths[i] - line[i].length();
-                text.append(right[i] ? " ".repeat(gap) + line[i] : line[i] + " ".repeat(gap));
-                text.append(i < widths.length - 1 ? "  " : "");
-            }
-            int end = text.length();
-            while (end > start && text.charAt(end - 1) == ' ') {
-                end--;
-            }
-            text.setLength(end);
-            text.append('\n');
+        for (Line line : lines) {
+            text.append(indent).append(set(line.cells(), widths).stripTrailing()).append('\n');
+            line.under().forEach(sentence -> appendWrapped(text, indent + UNDER, sentence, width));
         }
+    }
+
+    private String set(String[] cells, int[] widths) {
+        StringBuilder line = new StringBuilder();
+        for (int i = 0; i < widths.length; i++) {
+            String gap = " ".repeat(widths[i] - cells[i].length());
+            line.append(right[i] ? gap + cells[i] : cells[i] + gap).append("  ");
+        }
+        return line.toString();
     }
 
     /** Appends a paragraph broken at spaces to fit a width, later lines indented further. */

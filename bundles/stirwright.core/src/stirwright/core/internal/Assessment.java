@@ -47,8 +47,8 @@ record Assessment(Verdict verdict, List<String> failed, int notStated, String ob
                 Verdict found = bound.verdict(candidate.geometry(), point);
                 verdict = verdict.worseOf(found);
                 if (found.fails()) {
-                    failed.add(bound.found(candidate.geometry(), point) + " is " + found.id() + ": "
-                            + (part == correlation ? "" : part.id() + " states ") + bound.words());
+                    failed.add(bound.found(candidate.geometry(), point) + " is " + found.id() + " ("
+                            + (part == correlation ? "" : part.id() + ": ") + bound.allowance() + ")");
                 } else if (found == Verdict.NOT_STATED && part == correlation) {
                     notStated++;
                 }

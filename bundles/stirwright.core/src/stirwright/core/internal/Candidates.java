@@ -2,6 +2,7 @@ package stirwright.core.internal;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseSpec;
 import stirwright.core.Catalogue;
@@ -13,6 +14,9 @@ import stirwright.correlation.Quantity;
 
 /** Applies what the catalogue holds for a family to one vessel. */
 final class Candidates {
+    private static final Set<Quantity> COUPLED =
+            Set.of(Quantity.POWER_NUMBER, Quantity.SHEAR_RATE_CONSTANT, Quantity.FLOW_NUMBER);
+
     private final Catalogue catalogue;
     private final Family family;
     private final VesselGeometry vessel;
@@ -23,6 +27,11 @@ final class Candidates {
         this.family = family;
         this.vessel = vessel;
         this.choices = spec.choices();
+    }
+
+    /** The quantities that rest on power, shear rate and flow, for instance the blend time. */
+    List<Quantity> furtherQuantities() {
+        return catalogue.quantities(family.id()).stream().filter(q -> !COUPLED.contains(q)).toList();
     }
 
     /**

@@ -1,5 +1,6 @@
 package stirwright.core.internal;
 
+import java.util.ArrayList;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
@@ -28,6 +29,7 @@ public final class CaseSolver {
     private final CaseSpec spec;
     private final Family family;
     private final VesselGeometry vessel;
+    private final Candidates candidates;
     private final List<Candidate> powers;
     private final List<Candidate> constants;
     private final List<Candidate> flows;
@@ -44,7 +46,7 @@ public final class CaseSolver {
                 "family", spec.familyId(), "is not installed; there are "
                         + String.join(", ", catalogue.families().stream().map(Family::id).sorted().toList())));
         this.vessel = VesselGeometry.resolve(family, spec.geometry());
-        Candidates candidates = new Candidates(catalogue, family, vessel, spec);
+        this.candidates = new Candidates(catalogue, family, vessel, spec);
         this.powers = candidates.of(Quantity.POWER_NUMBER);
         this.constants = candidates.of(Quantity.SHEAR_RATE_CONSTANT);
         this.flows = candidates.of(Quantity.FLOW_NUMBER);
@@ -66,7 +68,23 @@ public final class CaseSolver {
         Selection.Ranked pick = selection.pick().filter(p -> p.trial().usable())
                 .orElseThrow(() -> nothingComputed(selection));
         return new ResultAssembly(spec, family, vessel, pick).assemble(
-                selection.ranked().stream().map(r -> row(trials, r)).toList());
+                selection.ranked().stream().map(r -> row(trials, r)).toList(), further(pick));
+    }
+
+    /** Every other quantity, each correlation at the pick's state with the pick's power and flow number. */
+    private List<Selection> further(Selection.Ranked pick) {
+        FluidState state = pick.trial().state().orElseThrow();
+        List<Selection> selections = new ArrayList<>();
+        for (Quantity quantity : candidates.furtherQuantities()) {
+            List<Trial> trials = new ArrayList<>();
+            for (Candidate candidate : candidates.of(quantity)) {
+                Point point = new Point().at(state).set(Variable.POWER_NUMBER, pick.trial().value());
+                flowAt(state).pick().ifPresent(flow -> point.set(Variable.FLOW_NUMBER, flow.trial().value()));
+                trials.add(trial(candidate, state, point, OptionalDouble.empty()));
+            }
+            selections.add(Selection.of(trials, spec.choices().correlation(quantity), Optional.empty()));
+        }
+        return selections;
     }
 
     /** A power candidate and the shear-rate constants that were tried for it. */
@@ -132,6 +150,10 @@ public final class CaseSolver {
         if (candidate.reads(Variable.FLOW_NUMBER)) {
             flowAt(state).pick().ifPresent(flow -> point.set(Variable.FLOW_NUMBER, flow.trial().value()));
         }
+        return trial(candidate, state, point, known);
+    }
+
+    private static Trial trial(Candidate candidate, FluidState state, Point point, OptionalDouble known) {
         double value = known.orElseGet(() -> candidate.value(point, state));
         return new Trial(candidate, Optional.of(state), value, Assessment.of(candidate, point, state, value));
     }

@@ -92,7 +92,7 @@ final class Doubts {
 
     List<String> notes() {
         List<String> notes = new ArrayList<>(spec.remarks());
-        defaults.others().ifPresent(words -> notes.add("default: " + words));
+        defaults.others().ifPresent(words -> notes.add("defaults: " + words));
         row.constants().pick().ifPresent(c -> {
             if (c.role() == Role.CHOSEN) {
                 notes.add("shear-rate constant " + (c.id().equals(Candidate.GIVEN) ? "given in the case" : "chosen in the case"));

@@ -35,8 +35,11 @@ final class ResultAssembly {
         this.volume = vessel.get(Dimensions.LIQUID_VOLUME);
     }
 
-    /** @param rows the pick first */
-    CaseResult assemble(List<Row> rows) {
+    /**
+     * @param rows the pick first
+     * @param further the other quantities at the pick
+     */
+    CaseResult assemble(List<Row> rows, List<Selection> further) {
         Row first = rows.get(0);
         double pickPower = pick.trial().state().orElseThrow().power(pick.trial().value());
         List<CandidateResult> results = rows.stream().map(r -> result(r, pickPower)).toList();
@@ -46,6 +49,7 @@ final class ResultAssembly {
         rows.forEach(r -> quantities.add(quantity(r.power())));
         first.constants().ranked().forEach(r -> quantities.add(quantity(r)));
         first.flows().ranked().forEach(r -> quantities.add(quantity(r)));
+        further.forEach(s -> s.ranked().forEach(r -> quantities.add(quantity(r))));
         List<String> flags = doubts.flags();
         return new CaseResult(spec.name(), spec.familyId(), flags.isEmpty() ? Status.OK : Status.FLAGGED,
                 spread(rows), results, List.copyOf(quantities), flags, doubts.notes(), Optional.empty());
