@@ -59,9 +59,10 @@ find_maven() {
   command -v mvn >/dev/null || install maven || die "needs Maven (on Debian the package maven) to fetch the Maven that it builds with."
   say "fetching Maven $MAVEN_VERSION"
   (cd "$tools" && mvn -B -q org.apache.maven.plugins:maven-dependency-plugin:3.7.1:unpack \
-    "-Dartifact=org.apache.maven:apache-maven:$MAVEN_VERSION:zip:bin" "-DoutputDirectory=$fetched") >&2 \
+    "-Dartifact=org.apache.maven:apache-maven:$MAVEN_VERSION:zip:bin" "-DoutputDirectory=$fetched" \
+    "-Dproject.basedir=$fetched") >&2 \
     && mv "$fetched/apache-maven-$MAVEN_VERSION" "$tools/" || die "could not fetch Maven $MAVEN_VERSION; is there a network?"
-  rmdir "$fetched"
+  rm -rf "$fetched"
 }
 
 # One build at a time in a checkout. Ends by itself with the shell, or by `unlock`.

@@ -8,7 +8,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.Predicate;
+import java.util.concurrent.ConcurrentHashMap;
+import stirwright.core.internal.Ranking;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 import stirwright.correlation.Quantity;
@@ -19,6 +20,12 @@ public final class Catalogue {
     private final Map<String, Entry> entries = new LinkedHashMap<>();
     private final Map<String, String> familyOrigins = new LinkedHashMap<>();
     private final List<String> problems = new ArrayList<>();
+
+    /** What is asked for in every case, found once. */
+    private final Map<Wanted, List<Correlation>> chosen = new ConcurrentHashMap<>();
+    private final Map<String, List<Quantity>> quantities = new ConcurrentHashMap<>();
+
+    private record Wanted(Quantity quantity, String familyId, boolean modifiers) {}
 
     private Catalogue() {}
 
@@ -89,30 +96,32 @@ public final class Catalogue {
 
     /** The quantities for which a family has correlations, by id. */
     public List<Quantity> quantities(String familyId) {
-        return entries.values().stream()
+        return quantities.computeIfAbsent(familyId, id -> entries.values().stream()
                 .map(Entry::correlation)
-                .filter(c -> c.holdsFor(familyId) && c.modifierFor().isEmpty())
+                .filter(c -> c.holdsFor(id) && c.modifierFor().isEmpty())
                 .map(Correlation::quantity)
                 .distinct()
                 .sorted(Comparator.comparing(Quantity::id))
-                .toList();
+                .toList());
     }
 
-    /** The correlations for a quantity of a family, modifiers aside. */
+    /** The correlations for a quantity of a family, modifiers aside, the most recommendable first. */
     public List<Correlation> correlations(Quantity quantity, String familyId) {
-        return select(quantity, familyId, c -> c.modifierFor().isEmpty());
+        return choose(new Wanted(quantity, familyId, false));
     }
 
-    /** The modifiers of a quantity of a family. */
+    /** The modifiers of a quantity of a family, the most recommendable first. */
     public List<Correlation> modifiers(Quantity quantity, String familyId) {
-        return select(quantity, familyId, c -> c.modifierFor().isPresent());
+        return choose(new Wanted(quantity, familyId, true));
     }
 
-    private List<Correlation> select(Quantity quantity, String familyId, Predicate<Correlation> which) {
-        return entries.values().stream()
+    private List<Correlation> choose(Wanted wanted) {
+        return chosen.computeIfAbsent(wanted, w -> entries.values().stream()
                 .map(Entry::correlation)
-                .filter(c -> c.quantity().equals(quantity) && c.holdsFor(familyId) && which.test(c))
-                .toList();
+                .filter(c -> c.quantity().equals(w.quantity()) && c.holdsFor(w.familyId())
+                        && c.modifierFor().isPresent() == w.modifiers())
+                .sorted(Ranking.BY_TRUST)
+                .toList());
     }
 
     /** What is wrong with the installed contributions, a sentence each. */

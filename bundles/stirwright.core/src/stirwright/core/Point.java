@@ -59,11 +59,6 @@ public final class Point implements OperatingPoint {
 
     private int indexOf(Variable variable) {
         for (int i = 0; i < size; i++) {
-            if (variables[i] == variable) {
-                return i;
-            }
-        }
-        for (int i = 0; i < size; i++) {
             if (variables[i].equals(variable)) {
                 return i;
             }

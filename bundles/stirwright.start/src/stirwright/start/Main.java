@@ -1,5 +1,9 @@
 package stirwright.start;
 
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import org.eclipse.core.runtime.adaptor.EclipseStarter;
 
 /**
@@ -8,8 +12,8 @@ import org.eclipse.core.runtime.adaptor.EclipseStarter;
  * errors on standard output, where only results may stand.
  */
 public final class Main {
-    /** The exit code of a run that broke: above those that tell about the user's input. */
-    private static final int BROKEN = 70;
+    /** What the command line says when it or a file could not be used; see the product's help. */
+    private static final int UNUSABLE = 3;
 
     private Main() {
     }
@@ -32,9 +36,21 @@ public final class Main {
                 EclipseStarter.shutdown();
             }
         } catch (Throwable failure) {
-            System.err.println("stirwright: stopped by an internal error:");
-            failure.printStackTrace();
-            return BROKEN;
+            System.err.println("stirwright: could not be started: " + failure + kept(failure));
+            return UNUSABLE;
+        }
+    }
+
+    /** Keeps the details in a file, since they mean nothing to the user. */
+    private static String kept(Throwable failure) {
+        try {
+            Path file = Files.createTempFile("stirwright-start-", ".txt");
+            try (PrintWriter details = new PrintWriter(Files.newBufferedWriter(file))) {
+                failure.printStackTrace(details);
+            }
+            return "; details are in " + file;
+        } catch (IOException unwritable) {
+            return "; details could not be kept: " + unwritable.getMessage();
         }
     }
 }

@@ -32,6 +32,7 @@ public final class Application implements IApplication {
                 return ExitCode.UNUSABLE;
             }
             Library library = bundles.getService(reference);
+            DroppedJars.unusable(bundles.getBundles(), System.getProperty("felix.fileinstall.dir")).forEach(err::println);
             Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), out, err,
                     release(bundles.getBundle().getVersion()));
             return Commands.run(desk, arguments);

@@ -1,6 +1,5 @@
 package stirwright.console.internal;
 
-import java.io.PrintWriter;
 import java.util.Locale;
 import stirwright.core.CandidateResult;
 import stirwright.core.CaseResult;
@@ -18,13 +17,9 @@ final class CaseView {
     static final String CAUTION = "Power and torque are estimates. Drive, mechanical and safety design is for the"
             + " responsible engineer, by the codes that apply and with the equipment maker.";
 
-    private final PrintWriter out;
+    private CaseView() {}
 
-    CaseView(PrintWriter out) {
-        this.out = out;
-    }
-
-    void print(CaseEntry entry, CaseResult result) {
+    static String text(CaseEntry entry, CaseResult result) {
         StringBuilder text = new StringBuilder();
         Columns.appendWrapped(text, "", entry.name() + ", family " + (result.family().isBlank() ? "not given" : result.family())
                 + ": " + result.status().id(), WIDTH);
@@ -36,7 +31,7 @@ final class CaseView {
             result.notes().forEach(n -> Columns.appendWrapped(text, "  ", "note: " + n, WIDTH));
             Columns.appendWrapped(text, "  ", CAUTION, WIDTH);
         });
-        out.println(text);
+        return text.toString();
     }
 
     private static void productAndFlow(StringBuilder text, CandidateResult pick, FluidState state) {

@@ -3,6 +3,12 @@ package stirwright.console.internal;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CancellationException;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import stirwright.core.CaseResult;
 import stirwright.core.Catalogue;
 import stirwright.core.CrossCheck;
@@ -44,35 +50,56 @@ final class CrosscheckRun {
         }
     }
 
+    /** A case, what came out, and how it is laid out for reading. */
+    private record Done(CaseEntry entry, CaseResult result, String text) {}
+
+    /** Computes block after block while a thread of its own writes the block before. */
     private Status check(CaseTable table, CrossCheck crossCheck, List<Output<CaseResult>> outputs) {
-        CaseView view = new CaseView(desk.out());
         Summary summary = new Summary();
         Progress progress = new Progress(desk.err(), "cases", table.entries().size());
-        Status worst = Status.OK;
         List<CaseEntry> entries = table.entries();
-        for (int from = 0; from < entries.size(); from += BLOCK) {
-            List<CaseEntry> block = entries.subList(from, Math.min(from + BLOCK, entries.size()));
-            List<CaseResult> results = block.parallelStream().map(e -> e.check(crossCheck)).toList();
-            for (int i = 0; i < block.size(); i++) {
-                CaseResult result = results.get(i);
-                view.print(block.get(i), result);
-                outputs.forEach(o -> o.add(result));
-                summary.add(block.get(i), result);
-                worst = worst.worseOf(result.status());
+        try (ExecutorService writer = Executors.newSingleThreadExecutor()) {
+            Future<?> writing = CompletableFuture.completedFuture(null);
+            for (int from = 0; from < entries.size(); from += BLOCK) {
+                List<Done> block = entries.subList(from, Math.min(from + BLOCK, entries.size())).parallelStream()
+                        .map(entry -> done(entry, crossCheck)).toList();
+                await(writing);
+                writing = writer.submit(() -> write(table.fileName(), block, outputs, summary));
+                progress.reached(from + block.size());
             }
-            reportRefusals(table.fileName(), block, results);
-            progress.reached(from + block.size());
+            await(writing);
         }
         progress.done();
         summary.print(desk.out());
-        return worst;
+        return summary.worst();
     }
 
-    private void reportRefusals(String fileName, List<CaseEntry> block, List<CaseResult> results) {
-        for (int i = 0; i < block.size(); i++) {
-            CaseEntry entry = block.get(i);
-            results.get(i).refusal().ifPresent(r ->
-                    desk.err().println(fileName + " line " + entry.line() + " (case '" + entry.name() + "'): " + r.words()));
+    private static Done done(CaseEntry entry, CrossCheck crossCheck) {
+        CaseResult result = entry.check(crossCheck);
+        return new Done(entry, result, CaseView.text(entry, result));
+    }
+
+    private void write(String fileName, List<Done> block, List<Output<CaseResult>> outputs, Summary summary) {
+        for (Done done : block) {
+            desk.out().println(done.text());
+            outputs.forEach(o -> o.add(done.result()));
+            summary.add(done.entry(), done.result());
+            done.result().refusal().ifPresent(r -> desk.err().println(fileName + " line " + done.entry().line()
+                    + " (case '" + done.entry().name() + "'): " + r.words()));
+        }
+    }
+
+    private static void await(Future<?> writing) {
+        try {
+            writing.get();
+        } catch (ExecutionException failure) {
+            if (failure.getCause() instanceof RuntimeException cause) {
+                throw cause;
+            }
+            throw new IllegalStateException(failure.getCause());
+        } catch (InterruptedException stopped) {
+            Thread.currentThread().interrupt();
+            throw new CancellationException("stopped while results were written");
         }
     }
 }

@@ -33,7 +33,7 @@ final class HelpCommand implements Callable<Integer> {
         if (topic == null) {
             root.usage(desk.out());
         } else if (topic.equals(TABLES)) {
-            desk.out().print(page("/help/tables.md"));
+            desk.out().print(forTerminal(page("/help/tables.md")));
         } else if (root.getSubcommands().containsKey(topic)) {
             root.getSubcommands().get(topic).usage(desk.out());
         } else {
@@ -42,6 +42,19 @@ final class HelpCommand implements Callable<Integer> {
         }
         desk.out().flush();
         return ExitCode.OK;
+    }
+
+    /** Paragraphs broken to the width of a terminal; rows of tables stay whole. */
+    private static String forTerminal(String page) {
+        StringBuilder text = new StringBuilder();
+        page.lines().forEach(line -> {
+            if (line.startsWith("|")) {
+                text.append(line).append('\n');
+            } else {
+                Columns.appendWrapped(text, "", line, CaseView.WIDTH);
+            }
+        });
+        return text.toString();
     }
 
     private static String page(String name) {

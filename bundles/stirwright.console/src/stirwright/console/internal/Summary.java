@@ -36,6 +36,11 @@ final class Summary {
         });
     }
 
+    /** The worst status of any case; ok when there is none. */
+    Status worst() {
+        return counts.keySet().stream().reduce(Status.OK, Status::worseOf);
+    }
+
     void print(PrintWriter out) {
         StringBuilder text = new StringBuilder();
         least.forEach((contest, best) -> {

@@ -56,7 +56,7 @@ final class Candidate {
         this.defaultsRead = defaultsRead;
     }
 
-    /** Applies a correlation with, for each effect that it lacks, the best of the modifiers. */
+    /** Applies a correlation with, for each effect that it lacks, the first of the modifiers. */
     static Candidate of(Correlation correlation, List<Correlation> modifiers, VesselGeometry vessel) {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
@@ -64,7 +64,6 @@ final class Candidate {
         Set<Effect> done = new LinkedHashSet<>(correlation.contains());
         modifiers.stream()
                 .filter(m -> m.appliesTo(geometry))
-                .sorted(Ranking.BY_TRUST)
                 .filter(m -> done.add(m.modifierFor().orElseThrow()))
                 .forEach(m -> parts.add(Part.of(m, geometry)));
         return new Candidate(correlation.quantity(), Optional.of(correlation),

@@ -15,7 +15,7 @@ import stirwright.correlation.Verdict;
  * larger, then id. Flow numbers that count discharge go before those that count circulation, since
  * the two are different quantities.
  */
-final class Ranking {
+public final class Ranking {
 
     /**
      * One criterion.
@@ -35,7 +35,7 @@ final class Ranking {
             new Criterion("else equal, by id", Comparator.comparing(Correlation::id), Correlation::id));
 
     /** From the most to the least recommendable; says nothing of whether a candidate qualifies. */
-    static final Comparator<Correlation> BY_TRUST =
+    public static final Comparator<Correlation> BY_TRUST =
             CRITERIA.stream().map(Criterion::order).reduce(Comparator::thenComparing).orElseThrow();
 
     private Ranking() {}
@@ -49,14 +49,13 @@ final class Ranking {
                 .orElse("equal");
     }
 
-    /** Among those that do not qualify, the one that comes nearest: it could be named, flagged. */
+    /** Among those that do not qualify, the one that comes nearest first; else they keep their order. */
     static Comparator<Trial> nearestFirst() {
         return Comparator.<Trial, Boolean>comparing(t -> !t.usable())
                 .thenComparing(t -> !t.trustworthy())
                 .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
                 .thenComparing(t -> t.assessment().verdict().fails() ? t.assessment().verdict() : Verdict.INSIDE)
-                .thenComparing(t -> t.assessment().failed().size())
-                .thenComparing(t -> t.candidate().correlation().orElseThrow(), BY_TRUST);
+                .thenComparing(t -> t.assessment().failed().size());
     }
 
     /** A pumping rate means discharge unless nothing else is there. */

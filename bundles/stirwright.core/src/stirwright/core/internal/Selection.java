@@ -1,7 +1,6 @@
 package stirwright.core.internal;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import stirwright.core.Role;
@@ -31,6 +30,7 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
     }
 
     /**
+     * @param trials the most recommendable first
      * @param chosen id that the user asked for
      * @param belonging id that the source of another correlation used with it; used before the
      *     recommended one
@@ -38,7 +38,6 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
     static Selection of(List<Trial> trials, Optional<String> chosen, Optional<String> belonging) {
         List<Trial> qualified = trials.stream()
                 .filter(t -> t.candidate().correlation().isPresent() && t.usable() && t.assessment().qualifies())
-                .sorted(Comparator.comparing(Selection::correlation, Ranking.BY_TRUST))
                 .toList();
         List<Trial> rest = trials.stream()
                 .filter(t -> t.candidate().correlation().isPresent() && !qualified.contains(t))
