@@ -22,20 +22,22 @@ public final class ConformanceSuite {
     private static final List<Check> CHECKS = List.of(
             new Check("answers", "Every contribution hands over its families and correlations without an error.",
                     Answers::examine),
-            new Check("ids", "Every id is unique among all that is installed and tells family or bundle, quantity and source.",
-                    Ids::examine),
+            new Check("ids", "Every id is unique among all that is installed and tells family or bundle, quantity and"
+                    + " source.", Ids::examine),
             new Check("citation", "Every correlation and regime limit says where it comes from, with a locator or the words"
                     + " \"locator not at hand\".", Citations::examine),
             new Check("bounds", "Reynolds number, baffling, D/T and fluid are each stated, or not stated with a reason.",
                     Bounds::examine),
             new Check("names", "The families and the shear-rate constant that a correlation names exist.", Names::examine),
-            new Check("family geometry", "Every dimension of a family follows from what has no default.",
+            new Check("family geometry", "Every default of a family follows from what the family lists before it.",
                     FamilyGeometry::examine),
             new Check("formula", "The formula prints with nothing left to fill in.", PrintedForm::formula),
             new Check("applicability", "Every modifier says when it applies.", PrintedForm::applicability),
             new Check("rows read", "Every reference file has its provenance on top and is read completely.",
                     References::read),
-            new Check("rows cover", "Every correlation has at least one reference row.", References::cover),
+            new Check("rows cover", "Every correlation has a reference row within its stated bounds, for each installed"
+                    + " family that it names.", References::cover),
+            new Check("rows inside", "Every reference row is within the stated bounds or marked outside.", References::mark),
             new Check("rows met", "Every reference row is met within the tolerance of its kind.", References::met),
             new Check("finite", "Within its stated range every correlation gives a finite number above zero.",
                     StatedRange::examine),
@@ -46,7 +48,7 @@ public final class ConformanceSuite {
                     LaminarLimits::examine),
             new Check("reads", "A correlation reads the variables that it declares, all of them and no other.",
                     DeclaredReads::examine),
-            new Check("constants", "Every constant and curve that the formula prints changes the number.",
+            new Check("constants", "Every constant and curve that the formula prints is held by a reference row.",
                     ConstantsUsed::examine));
 
     private ConformanceSuite() {}

@@ -10,6 +10,7 @@ import java.util.Collection;
 import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
 import org.osgi.framework.InvalidSyntaxException;
@@ -17,12 +18,15 @@ import org.osgi.framework.ServiceReference;
 import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
 import stirwright.correlation.Contribution;
-import stirwright.correlation.Correlation;
 
 /** Makes subjects of the bundles that publish contributions in a running framework. */
 public final class InstalledBundles {
     private static final String FOLDER = "reference";
     private static final String FILES = "*.csv";
+
+    /** Declarative Services logs the cause and tells nobody else. */
+    private static final String NOT_CREATED = "an error when its component is created, so it needs a public constructor"
+            + " without parameters that does not fail";
 
     private InstalledBundles() {}
 
@@ -34,27 +38,25 @@ public final class InstalledBundles {
 
     /** What one bundle publishes, amid what the others publish. */
     public static Subject subject(BundleContext context, Bundle bundle) {
-        List<Contribution> own = new ArrayList<>();
+        List<Arrival> own = new ArrayList<>();
         List<Arrival> others = new ArrayList<>();
-        List<ServiceReference<Contribution>> references = references(context);
-        try {
-            for (ServiceReference<Contribution> reference : references) {
-                Contribution contribution = context.getService(reference);
-                if (reference.getBundle() == bundle) {
-                    own.add(contribution == null ? new Unavailable() : contribution);
-                } else if (contribution != null) {
-                    others.add(new Arrival(contribution, origin(reference.getBundle())));
-                }
-            }
-            return Subject.of(origin(bundle), own, referenceFiles(bundle), Catalogue.of(others));
-        } finally {
-            references.forEach(context::ungetService);
+        for (ServiceReference<Contribution> reference : references(context)) {
+            (bundle.equals(reference.getBundle()) ? own : others).add(ask(context, reference));
         }
+        return Subject.of(Arrival.origin(bundle), own, referenceFiles(bundle), Catalogue.of(others));
     }
 
-    /** Symbolic name and version, as the catalogue's messages name a bundle. */
-    static String origin(Bundle bundle) {
-        return bundle == null ? "a bundle that has left" : bundle.getSymbolicName() + " " + bundle.getVersion();
+    private static Arrival ask(BundleContext context, ServiceReference<Contribution> reference) {
+        String origin = Arrival.origin(reference.getBundle());
+        Contribution contribution = context.getService(reference);
+        if (contribution == null) {
+            return new Arrival(origin, List.of(), List.of(), Optional.of(NOT_CREATED));
+        }
+        try {
+            return Arrival.of(contribution, origin);
+        } finally {
+            context.ungetService(reference);
+        }
     }
 
     private static List<ServiceReference<Contribution>> references(BundleContext context) {
@@ -79,15 +81,6 @@ public final class InstalledBundles {
                     new String(in.readAllBytes(), StandardCharsets.UTF_8));
         } catch (IOException failure) {
             throw new UncheckedIOException("cannot read " + entry, failure);
-        }
-    }
-
-    /** Stands in for a service that its component could not create; Declarative Services logs the cause. */
-    private static final class Unavailable implements Contribution {
-        @Override
-        public List<Correlation> correlations() {
-            throw new IllegalStateException("the component that publishes the contribution could not be created; it needs"
-                    + " a public constructor without parameters that does not fail");
         }
     }
 }

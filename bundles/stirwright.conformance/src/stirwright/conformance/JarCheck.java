@@ -11,7 +11,7 @@ import org.osgi.framework.BundleException;
 import stirwright.conformance.internal.Arrivals;
 import stirwright.conformance.internal.BundleErrors;
 import stirwright.conformance.internal.BundleFile;
-import stirwright.conformance.internal.NotABundleException;
+import stirwright.core.Arrival;
 
 /**
  * Runs the suite over a jar: installs it into the running framework, as the drop-in folder would,
@@ -56,13 +56,11 @@ public final class JarCheck {
             for (Bundle installed : context.getBundles()) {
                 if (file.symbolicName().equals(installed.getSymbolicName())) {
                     throw new JarRefusedException(jar + ": a bundle of the same name is installed already, "
-                            + InstalledBundles.origin(installed) + " from " + installed.getLocation()
+                            + Arrival.origin(installed) + " from " + installed.getLocation()
                             + "; take it out of the drop-in folder, or check the jar under another name");
                 }
             }
             return context.installBundle(location, new ByteArrayInputStream(content));
-        } catch (NotABundleException refused) {
-            throw new JarRefusedException(refused.getMessage());
         } catch (BundleException refused) {
             throw new JarRefusedException(jar + " cannot be installed: " + refused.getMessage());
         }
@@ -80,7 +78,7 @@ public final class JarCheck {
         try {
             bundle.uninstall();
         } catch (BundleException failure) {
-            throw new JarRefusedException(InstalledBundles.origin(bundle) + " cannot be removed again: "
+            throw new JarRefusedException(Arrival.origin(bundle) + " cannot be removed again: "
                     + failure.getMessage());
         }
     }

@@ -1,10 +1,9 @@
 package stirwright.conformance;
 
 import java.util.List;
-import stirwright.conformance.internal.Offer;
 import stirwright.conformance.internal.Workpiece;
+import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
-import stirwright.correlation.Contribution;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 
@@ -17,31 +16,35 @@ public final class Subject {
     }
 
     /**
-     * Asks the contributions once, as the workbench does.
+     * Takes what a bundle answered when it was asked once, as the workbench asks.
      *
      * @param origin the bundle's symbolic name and version
      * @param others what the other bundles contribute
      */
-    public static Subject of(
-            String origin, List<Contribution> contributions, List<ReferenceFile> references, Catalogue others) {
-        return new Subject(new Workpiece(Offer.ask(origin, contributions), references, others));
+    public static Subject of(String origin, List<Arrival> arrivals, List<ReferenceFile> references, Catalogue others) {
+        return new Subject(new Workpiece(origin, arrivals, references, others));
     }
 
     public String origin() {
-        return workpiece.offer().origin();
+        return workpiece.origin();
     }
 
     public List<Family> families() {
-        return workpiece.offer().families();
+        return workpiece.ownFamilies();
     }
 
     public List<Correlation> correlations() {
-        return workpiece.offer().correlations();
+        return workpiece.correlations();
     }
 
     /** How many reference rows could be read. */
     public int rows() {
         return workpiece.references().rows().size();
+    }
+
+    /** How many of them are numbers from memory, which prove nothing. */
+    public int recalledRows() {
+        return workpiece.references().recalled();
     }
 
     Workpiece workpiece() {

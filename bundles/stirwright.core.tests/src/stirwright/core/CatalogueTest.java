@@ -17,8 +17,8 @@ class CatalogueTest {
         Correlation first = Invented.constant(Quantity.POWER_NUMBER, "np.same", 1);
         Correlation second = Invented.constant(Quantity.POWER_NUMBER, "np.same", 2);
         Catalogue catalogue = Catalogue.of(List.of(
-                new Arrival(Invented.contribution(first), "bundle.one 1.0.0"),
-                new Arrival(Invented.contribution(second), "bundle.two 2.0.0")));
+                Arrival.of(Invented.contribution(first), "bundle.one 1.0.0"),
+                Arrival.of(Invented.contribution(second), "bundle.two 2.0.0")));
         assertSame(first, catalogue.entry("invented.np.same").orElseThrow().correlation());
         assertEquals(2, catalogue.problems().size(), "the family and the correlation stand twice");
         for (String problem : catalogue.problems()) {
@@ -32,8 +32,8 @@ class CatalogueTest {
             throw new IllegalStateException("broken on purpose");
         };
         Catalogue catalogue = Catalogue.of(List.of(
-                new Arrival(failing, "bundle.broken 1.0.0"),
-                new Arrival(Invented.contribution(Invented.constant(Quantity.POWER_NUMBER, "np.good", 1)), "bundle.good 1.0.0")));
+                Arrival.of(failing, "bundle.broken 1.0.0"),
+                Arrival.of(Invented.contribution(Invented.constant(Quantity.POWER_NUMBER, "np.good", 1)), "bundle.good 1.0.0")));
         assertTrue(catalogue.family(Invented.FAMILY).isPresent());
         assertEquals(1, catalogue.problems().size());
         assertTrue(catalogue.problems().get(0).contains("bundle.broken 1.0.0"));
@@ -45,6 +45,6 @@ class CatalogueTest {
         Contribution stale = () -> {
             throw new NoSuchMethodError("removed");
         };
-        assertEquals(1, Catalogue.of(List.of(new Arrival(stale, "stale 1.0.0"))).problems().size());
+        assertEquals(1, Catalogue.of(List.of(Arrival.of(stale, "stale 1.0.0"))).problems().size());
     }
 }

@@ -11,8 +11,8 @@ final class Installed {
 
     static Catalogue catalogue() {
         return Catalogue.of(List.of(
-                new Arrival(new DiscTurbine(), "stirwright.family.discturbine"),
-                new Arrival(new PitchedBlade(), "stirwright.family.pitchedblade"),
-                new Arrival(new GeneralRelations(), "stirwright.general")));
+                Arrival.of(new DiscTurbine(), "stirwright.family.discturbine"),
+                Arrival.of(new PitchedBlade(), "stirwright.family.pitchedblade"),
+                Arrival.of(new GeneralRelations(), "stirwright.general")));
     }
 }

@@ -125,7 +125,7 @@ class InvariantsTest {
         Map<String, Double> geometry = new HashMap<>();
         geometry.put("vessel_diameter", t);
         geometry.put("impeller_diameter", t * (0.2 + 0.5 * random.nextDouble()));
-        geometry.put("liquid_height", t * (0.9 + 0.5 * random.nextDouble()));
+        geometry.put("liquid_height", t * (1.2 + 0.5 * random.nextDouble()));
         geometry.put("blade_count", (double) (3 + random.nextInt(4)));
         geometry.put("baffle_count", random.nextInt(3) == 0 ? 0.0 : 4.0);
         geometry.put("impeller_count", 1.0 + random.nextInt(2));

@@ -70,7 +70,7 @@ final class Invented {
     }
 
     static Catalogue catalogue(Correlation... correlations) {
-        return Catalogue.of(List.of(new Arrival(contribution(correlations), "invented.bundle 1.0.0")));
+        return Catalogue.of(List.of(Arrival.of(contribution(correlations), "invented.bundle 1.0.0")));
     }
 
     static Contribution contribution(Correlation... correlations) {

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Measure;
@@ -68,5 +69,47 @@ class ModifierTest {
         assertEquals(Role.EXCLUDED, row.role());
         assertTrue(row.failedBounds().get(0).contains("S/D 0.4 is outside (invented.np.factor: 1 to 3)"), row.failedBounds().toString());
         assertEquals(Role.RECOMMENDED, Invented.row(check(3, 0.2), "np.total").role());
+    }
+
+    @Test
+    void whatRestsOnADoubtfulFactorIsNotRecommended() {
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, SINGLE, TOTAL, several("np.worse", 7, Transcription.UNSURE)))
+                .check(threeImpellers());
+        CandidateResult row = Invented.row(result, "np.single");
+        assertEquals(5 * (1 + 7 * 2), row.powerNumber(), 1e-12, "it is shown");
+        assertEquals(Role.EXCLUDED, row.role());
+        assertTrue(row.why().contains("invented.np.worse") && row.why().contains("unsure"), row.why());
+        assertEquals("invented.np.total", result.pick().orElseThrow().correlation());
+    }
+
+    @Test
+    void aFactorThatContainsAnotherEffectReplacesItsFactor() {
+        Correlation both = factor("np.both", Effect.SEVERAL_IMPELLERS, 3).contains(Effect.CLEARANCE).build();
+        Correlation clearance = factor("np.clearance", Effect.CLEARANCE, 10).build();
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, SINGLE, both, clearance)).check(threeImpellers());
+        assertEquals(15, Invented.row(result, "np.single").powerNumber(), 1e-12);
+    }
+
+    @Test
+    void aFactorMadeForTheFamilyGoesBeforeOneForAny() {
+        Correlation any = factor("np.any", Effect.CLEARANCE, 10).scatter(0.01).build();
+        Correlation own = factor("np.own", Effect.CLEARANCE, 2).notStated(Measure.D_OVER_T, "unknown").build();
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, SINGLE, any, own)).check(threeImpellers());
+        assertEquals(5 * 2, Invented.row(result, "np.single").powerNumber(), 1e-12);
+    }
+
+    private static CorrelationBuilder factor(String id, Effect effect, double value) {
+        CorrelationBuilder builder = Correlation.modifier("invented." + id, Quantity.POWER_NUMBER, effect, id)
+                .cite(Invented.SOURCE).transcription(Transcription.FROM_MEMORY).value("a", value);
+        return id.equals("np.any") ? builder.anyFamily() : builder.families(Invented.FAMILY);
+    }
+
+    private static CaseSpec threeImpellers() {
+        Map<String, Double> vessel = Invented.vessel();
+        vessel.put("impeller_count", 3.0);
+        vessel.put("impeller_spacing", 0.6);
+        vessel.put("liquid_height", 3.0);
+        return new CaseSpec("case", Invented.FAMILY, vessel, new SpeedDemand.At(2),
+                Invented.fluid(new Newtonian(0.001)), Choices.NONE, List.of());
     }
 }

@@ -13,6 +13,7 @@ import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.CorrelationBuilder;
+import stirwright.correlation.FlowKind;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Standing;
@@ -186,5 +187,17 @@ class SelectionTest {
         QuantityResult row = result.quantities().stream().filter(q -> q.quantity().equals(own)).findFirst().orElseThrow();
         assertEquals(3 * 5 * 0.5 / 2, row.value(), 1e-15);
         assertEquals(Role.RECOMMENDED, row.role());
+    }
+
+    @Test
+    void dischargeIsTakenBeforeCirculationWhateverElseSpeaksForIt() {
+        Correlation discharge = Invented.constant(Quantity.FLOW_NUMBER, "nq.discharge", 0.7,
+                b -> b.transcription(Transcription.FROM_MEMORY));
+        Correlation circulation = Invented.constant(Quantity.FLOW_NUMBER, "nq.circulation", 1.3,
+                b -> b.flow(FlowKind.CIRCULATION).scatter(0.01));
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, np("np.five", 5, b -> b), circulation, discharge))
+                .check(Invented.water(Choices.NONE));
+        assertEquals("invented.nq.discharge", result.pick().orElseThrow().flowCorrelation());
+        assertEquals(0.7 * 2 * 0.125, result.pick().orElseThrow().pumping(), 1e-15);
     }
 }

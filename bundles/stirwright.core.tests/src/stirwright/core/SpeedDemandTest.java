@@ -3,7 +3,10 @@ package stirwright.core;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Variable;
@@ -63,5 +66,45 @@ class SpeedDemandTest {
         assertEquals(Status.REFUSED, outOfReach.status(), "the greatest is 5 at N = 1");
         assertEquals("target_shear_rate_1_s", outOfReach.refusal().orElseThrow().field());
         assertTrue(outOfReach.refusal().orElseThrow().words().contains("no speed"));
+    }
+
+    /** At the speed that meets the target this constant allows three shear rates; only the demanded one counts. */
+    @ParameterizedTest
+    @ValueSource(doubles = {5, 20, 50, 400})
+    void aTargetIsMetWhereTheSpeedAloneWouldAllowOtherShearRates(double target) {
+        Correlation steep = Invented.formula(
+                Invented.anywhere(Quantity.SHEAR_RATE_CONSTANT, "ks.steep", Variable.REYNOLDS)
+                        .constant("a", 2).constant("b", 48).constant("c", 300),
+                "{a} + {b}/(1 + ({c}/Re)^6)",
+                (g, k) -> p -> k.get("a") + k.get("b") / (1 + Math.pow(k.get("c") / p.reynolds(), 6)));
+        CaseResult result = new CrossCheck(Invented.catalogue(steep, FIVE))
+                .check(Invented.demand(new SpeedDemand.ForShearRate(target), new PowerLaw(8, 0.3)));
+        FluidState s = result.pick().orElseThrow().state().orElseThrow();
+        assertEquals(target, s.shearRate(), 1e-9 * target);
+        assertEquals(2 + 48 / (1 + Math.pow(300 / s.reynolds(), 6)), s.shearRateConstant(), 1e-6 * s.shearRateConstant());
+    }
+
+    /** 60 m/s at D = 0.5 m is 38.2 rev/s, so with ks = 10 nothing above 382 1/s can be met. */
+    @Test
+    void speedsBeyondTheTipSpeedLimitAreNoSolution() {
+        for (SpeedDemand demand : List.of(new SpeedDemand.ForShearRate(400), new SpeedDemand.ForPowerPerVolume(1e9),
+                new SpeedDemand.At(90), new SpeedDemand.ForTipSpeed(61))) {
+            CaseResult result = new CrossCheck(Invented.catalogue(KS, FIVE)).check(Invented.demand(demand, new Newtonian(1)));
+            assertEquals(Status.REFUSED, result.status(), demand.toString());
+            assertEquals(demand.field(), result.refusal().orElseThrow().field());
+            assertTrue(result.refusal().orElseThrow().words().contains("60 m/s"), result.refusal().orElseThrow().words());
+        }
+    }
+
+    @Test
+    void aPowerNumberThatReadsTheFlowNumberMeetsATargetToo() {
+        Correlation flow = Invented.constant(Quantity.FLOW_NUMBER, "nq.half", 0.5);
+        Correlation power = Invented.formula(
+                Invented.anywhere(Quantity.POWER_NUMBER, "np.flow", Variable.FLOW_NUMBER).constant("a", 10),
+                "{a} Nq", (g, k) -> p -> k.get("a") * p.get(Variable.FLOW_NUMBER));
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, flow, power))
+                .check(Invented.demand(new SpeedDemand.ForPowerPerVolume(250), new Newtonian(1)));
+        assertEquals(5, result.pick().orElseThrow().powerNumber(), 1e-12);
+        assertEquals(250, result.pick().orElseThrow().powerPerVolume(), 1e-7);
     }
 }

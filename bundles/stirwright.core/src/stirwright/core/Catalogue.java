@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Collections;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -19,6 +20,7 @@ public final class Catalogue {
     private final Map<String, Family> families = new LinkedHashMap<>();
     private final Map<String, Entry> entries = new LinkedHashMap<>();
     private final Map<String, String> familyOrigins = new LinkedHashMap<>();
+    private final Map<String, String> units = new HashMap<>();
     private final List<String> problems = new ArrayList<>();
 
     /** What is asked for in every case, found once. */
@@ -40,27 +42,28 @@ public final class Catalogue {
     }
 
     private void take(Arrival arrival) {
-        List<Family> newFamilies;
-        List<Correlation> newCorrelations;
-        try {
-            newFamilies = List.copyOf(arrival.contribution().families());
-            newCorrelations = List.copyOf(arrival.contribution().correlations());
-        } catch (RuntimeException | LinkageError failure) {
-            // Code of another bundle: whatever it throws must not take the other families down.
-            problems.add(arrival.origin() + " was left out: " + failure);
-            return;
-        }
-        for (Family family : newFamilies) {
+        arrival.failure().ifPresent(failure -> problems.add(arrival.origin() + " was left out: " + failure));
+        for (Family family : arrival.families()) {
             if (keepsFirst("family", family.id(), familyOrigins.get(family.id()), arrival.origin())) {
                 families.put(family.id(), family);
                 familyOrigins.put(family.id(), arrival.origin());
             }
         }
-        for (Correlation correlation : newCorrelations) {
+        for (Correlation correlation : arrival.correlations()) {
             Entry first = entries.get(correlation.id());
             if (keepsFirst("correlation", correlation.id(), first == null ? null : first.origin(), arrival.origin())) {
                 entries.put(correlation.id(), new Entry(correlation, arrival.origin()));
+                compareUnit(correlation.quantity(), arrival.origin());
             }
+        }
+    }
+
+    /** Equal ids are the same quantity, so they must have the same unit. */
+    private void compareUnit(Quantity quantity, String origin) {
+        String first = units.putIfAbsent(quantity.id(), quantity.unit());
+        if (first != null && !first.equals(quantity.unit())) {
+            problems.add("quantity '" + quantity.id() + "' is in '" + first + "', but " + origin + " gives it in '"
+                    + quantity.unit() + "'");
         }
     }
 
@@ -120,7 +123,7 @@ public final class Catalogue {
                 .map(Entry::correlation)
                 .filter(c -> c.quantity().equals(w.quantity()) && c.holdsFor(w.familyId())
                         && c.modifierFor().isPresent() == w.modifiers())
-                .sorted(Ranking.BY_TRUST)
+                .sorted(w.modifiers() ? Ranking.MODIFIERS : Ranking.BY_TRUST)
                 .toList());
     }
 

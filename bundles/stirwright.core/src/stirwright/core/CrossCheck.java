@@ -1,6 +1,8 @@
 package stirwright.core;
 
 import stirwright.core.internal.CaseSolver;
+import stirwright.correlation.Quantity;
+import stirwright.correlation.Variable;
 
 /**
  * Applies every installed correlation of a family to a case and compares them. The window, the
@@ -19,6 +21,20 @@ public final class CrossCheck {
             return new CaseSolver(catalogue, spec).solve();
         } catch (CaseRefusedException refused) {
             return CaseResult.refused(spec.name(), spec.familyId(), refused.refusal());
+        } catch (RuntimeException | LinkageError broken) {
+            // A family's defaults and rules are code of another bundle; it must not cost the other cases.
+            return CaseResult.refused(spec.name(), spec.familyId(),
+                    new Refusal("family", spec.familyId(), "cannot be used, its code fails: " + broken));
         }
+    }
+
+    /**
+     * A candidate of a case over one variable.
+     *
+     * @param correlationId of a correlation for the quantity, or "given"
+     * @throws CaseRefusedException when the case cannot be computed or has no such candidate
+     */
+    public Slice slice(CaseSpec spec, Quantity quantity, String correlationId, Variable over) {
+        return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
     }
 }

@@ -43,6 +43,7 @@ public final class Point implements OperatingPoint {
                 .set(Variable.SPEED, state.speed())
                 .set(Variable.DENSITY, state.density())
                 .set(Variable.VISCOSITY, state.viscosity())
+                .set(Variable.SHEAR_RATE_CONSTANT, state.shearRateConstant())
                 .fluid(state.fluid());
     }
 
@@ -57,7 +58,13 @@ public final class Point implements OperatingPoint {
         return fluid;
     }
 
+    /** In loops it is nearly always the very object, so that is looked for first. */
     private int indexOf(Variable variable) {
+        for (int i = 0; i < size; i++) {
+            if (variables[i] == variable) {
+                return i;
+            }
+        }
         for (int i = 0; i < size; i++) {
             if (variables[i].equals(variable)) {
                 return i;

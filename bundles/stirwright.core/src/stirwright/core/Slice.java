@@ -1,39 +1,20 @@
 package stirwright.core;
 
-import stirwright.correlation.BoundCorrelation;
-import stirwright.correlation.Variable;
+import stirwright.correlation.Verdict;
 
 /**
- * A bound correlation over one variable, everything else held: what a chart draws. Not thread-safe.
+ * One candidate of a case over one variable, everything else as at the pick: what a chart draws. All
+ * modifiers and verdicts are those of the table, so chart and table agree. Not thread-safe.
  */
-public final class Slice {
-    private final BoundCorrelation correlation;
-    private final Point point;
-    private final Variable over;
-
-    /**
-     * @param point the held variables; this slice owns it from now on
-     * @param over the variable that is swept
-     */
-    public Slice(BoundCorrelation correlation, Point point, Variable over) {
-        this.correlation = correlation;
-        this.point = point;
-        this.over = over;
-    }
+public interface Slice {
 
     /**
      * Evaluates a block without allocating.
      *
-     * @param values of the swept variable, in its SI unit
-     * @param into receives a value each, in the unit of the correlation's quantity
+     * @param values of the swept variable, in its SI unit; a Reynolds number is that of Metzner and Otto
+     * @param into receives a value each, in the unit of the quantity; NaN where there is none
+     * @param verdicts receives the worst verdict over all bounds at each value
      * @throws IllegalArgumentException when the lengths differ
      */
-    public void evaluate(double[] values, double[] into) {
-        if (values.length != into.length) {
-            throw new IllegalArgumentException(values.length + " values into room for " + into.length);
-        }
-        for (int i = 0; i < values.length; i++) {
-            into[i] = correlation.at(point.set(over, values[i]));
-        }
-    }
+    void evaluate(double[] values, double[] into, Verdict[] verdicts);
 }

@@ -3,6 +3,12 @@ package stirwright.core;
 /** What settles the impeller's speed: a speed, or a target that every candidate solves for. */
 public sealed interface SpeedDemand {
 
+    /** In m/s. Common practice, no source: toothed discs stay below half of it; above, a unit was mistaken. */
+    double MOST_TIP_SPEED = 60;
+
+    /** In rev/s: one turn in three hours. Common practice, no source: no agitator runs slower. */
+    double LEAST_SPEED = 1e-4;
+
     /** The target or the speed, in the unit that its kind says. */
     double value();
 
@@ -25,7 +31,7 @@ public sealed interface SpeedDemand {
         }
     }
 
-    /** The least speed that gives this power per volume in W/m3. */
+    /** The speed that gives this power per volume in W/m3. */
     record ForPowerPerVolume(double value) implements SpeedDemand {
         @Override
         public String field() {

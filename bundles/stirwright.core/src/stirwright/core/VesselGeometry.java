@@ -2,10 +2,12 @@ package stirwright.core;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import stirwright.core.internal.GeometryRules;
+import stirwright.correlation.Fallback;
 import stirwright.correlation.Family;
 import stirwright.correlation.Figures;
 import stirwright.correlation.Geometry;
@@ -13,42 +15,70 @@ import stirwright.correlation.GeometryParameter;
 
 /** A vessel and impeller in which every parameter of the family has a value. Immutable. */
 public final class VesselGeometry implements Geometry {
+
+    /**
+     * How a blank was filled.
+     *
+     * @param restsOn the parameters, blank as well, whose values went into it
+     */
+    private record Filled(Fallback by, Set<GeometryParameter> restsOn) {}
+
     private final GeometryParameter[] parameters;
     private final double[] values;
-    private final boolean[] defaulted;
+    /** Null where the value was given. */
+    private final Filled[] filled;
 
     private VesselGeometry(Family family) {
         parameters = family.parameters().toArray(GeometryParameter[]::new);
         values = new double[parameters.length];
         Arrays.fill(values, Double.NaN);
-        defaulted = new boolean[parameters.length];
+        filled = new Filled[parameters.length];
     }
 
     /**
-     * Fills what was not given with the family's defaults and checks hard limits.
+     * Takes all that was given, fills each blank in the family's order with the first of its
+     * fallbacks that gives a finite number, and checks hard limits.
      *
      * @param given by parameter id, in SI units; ids that the family does not have are passed over
      * @throws CaseRefusedException naming the column and the value
      */
     public static VesselGeometry resolve(Family family, Map<String, Double> given) {
         VesselGeometry geometry = new VesselGeometry(family);
+        geometry.take(given);
         for (int i = 0; i < geometry.parameters.length; i++) {
             GeometryParameter parameter = geometry.parameters[i];
-            Double value = given.get(parameter.id());
-            if (value != null) {
-                geometry.values[i] = value;
-                GeometryRules.checkLimits(parameter, value);
-            } else if (parameter.defaultKind() == GeometryParameter.Default.NONE) {
+            if (!given.containsKey(parameter.id()) && !geometry.fill(i)) {
                 throw new CaseRefusedException(parameter.column(), "",
-                        "is blank; family " + family.id() + " has no default for the " + parameter.title());
-            } else {
-                geometry.values[i] = parameter.defaultValue(geometry);
-                geometry.defaulted[i] = true;
+                        "is blank; family " + family.id() + " has no default for the " + parameter.title()
+                        + (parameter.fallbacks().isEmpty() ? "" : " that follows from what was given"));
             }
         }
-        GeometryRules.checkTogether(geometry, given.keySet());
+        GeometryRules.checkTogether(family, geometry, given.keySet());
         geometry.defaulted().forEach(p -> GeometryRules.checkLimits(p, geometry.get(p)));
         return geometry;
+    }
+
+    private void take(Map<String, Double> given) {
+        for (int i = 0; i < parameters.length; i++) {
+            Double value = given.get(parameters[i].id());
+            if (value != null) {
+                GeometryRules.checkLimits(parameters[i], value);
+                values[i] = value;
+            }
+        }
+    }
+
+    private boolean fill(int at) {
+        for (Fallback fallback : parameters[at].fallbacks()) {
+            Set<GeometryParameter> restsOn = new LinkedHashSet<>();
+            double value = fallback.value(recordingDefaults(restsOn));
+            if (Double.isFinite(value)) {
+                values[at] = value;
+                filled[at] = new Filled(fallback, restsOn);
+                return true;
+            }
+        }
+        return false;
     }
 
     @Override
@@ -61,36 +91,52 @@ public final class VesselGeometry implements Geometry {
     public List<GeometryParameter> defaulted() {
         List<GeometryParameter> list = new ArrayList<>();
         for (int i = 0; i < parameters.length; i++) {
-            if (defaulted[i]) {
+            if (filled[i] != null) {
                 list.add(parameters[i]);
             }
         }
         return list;
     }
 
-    /** The default that stands in for a parameter of this family, in words, for instance "blade_width_m = 0.122 (D/5)". */
+    /** The kind of the fallback that stands in for a parameter; none when it was given or is not of this family. */
+    public GeometryParameter.Default defaultKind(GeometryParameter parameter) {
+        int at = indexOf(parameter);
+        return at < 0 || filled[at] == null ? GeometryParameter.Default.NONE : filled[at].by().kind();
+    }
+
+    /** What stands in for a parameter that nobody gave, in words, for instance "blade_width_m = 0.122 (D/5)". */
     public String defaultInWords(GeometryParameter parameter) {
         int at = indexOf(parameter);
         String value = Figures.show(parameter.toColumn(values[at]));
-        String words = parameters[at].defaultWords();
+        String words = filled[at].by().words();
         return parameter.column() + " = " + value + (words.startsWith(value) ? "" : " (" + words + ")");
     }
 
-    /** A view that records in a set which parameters that nobody gave were read through it. */
+    /**
+     * A view that records in a set which parameters that nobody gave were read through it, and on
+     * which others their values rest.
+     */
     public Geometry recordingDefaults(Set<GeometryParameter> read) {
         return parameter -> {
             int at = indexOf(parameter);
             if (at < 0) {
                 return Double.NaN;
             }
-            if (defaulted[at]) {
+            if (filled[at] != null) {
                 read.add(parameters[at]);
+                read.addAll(filled[at].restsOn());
             }
             return values[at];
         };
     }
 
+    /** In loops it is nearly always the very object, so that is looked for first. */
     private int indexOf(GeometryParameter parameter) {
+        for (int i = 0; i < parameters.length; i++) {
+            if (parameters[i] == parameter) {
+                return i;
+            }
+        }
         for (int i = 0; i < parameters.length; i++) {
             if (parameters[i].equals(parameter)) {
                 return i;

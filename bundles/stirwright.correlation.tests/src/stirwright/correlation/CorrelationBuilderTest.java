@@ -32,10 +32,6 @@ class CorrelationBuilderTest {
         assertEquals("Np = 2.512 (t/D)^-0.195", correlation.formula());
         // 0.01^-0.195 = exp(0.195 * 4.60517) = 2.454709; times 2.512 = 6.166229
         assertEquals(6.166229, correlation.bind(ANY).at(null), 1e-5);
-        Correlation other = correlation.withConstants(correlation.constants().with("a", 5));
-        assertEquals("Np = 5 (t/D)^-0.195", other.formula());
-        assertEquals(correlation.bind(ANY).at(null) * 5 / 2.512, other.bind(ANY).at(null), 1e-12);
-        assertEquals("Np = 2.512 (t/D)^-0.195", correlation.formula(), "the first is unchanged");
     }
 
     @Test
@@ -56,7 +52,31 @@ class CorrelationBuilderTest {
     void formulaAndConstantsMustNameTheSame() {
         assertTrue(message(b -> b.constant("c", 3), complete()).contains("[a, b, c]"));
         assertTrue(message(b -> b.formula("Np = {a} {b} {d}"), complete()).contains("[a, b, d]"));
-        assertTrue(message(b -> b.curve("a", 1, 1, 2, 2), complete()).contains("share a name"));
+    }
+
+    @Test
+    void aNameIsGivenOnce() {
+        assertTrue(message(b -> b.constant("a", 3), complete()).contains("second constant or curve 'a'"));
+        assertTrue(message(b -> b.curve("a", 1, 1, 2, 2), complete()).contains("second constant or curve 'a'"));
+        assertTrue(message(b -> b.curve("phi", 1, 1, 2, 2).curve("phi", 1, 1, 2, 2), complete()).contains("'phi'"));
+    }
+
+    @Test
+    void whatIsNoNumberIsRefusedAtOnce() {
+        assertTrue(message(b -> b.constant("c", Double.NaN), complete()).contains("constant 'c'"));
+        assertTrue(message(b -> b.scatter(-0.1), complete()).contains("scatter -0.1"));
+    }
+
+    @Test
+    void onlyAModifierAppliesNowAndThen() {
+        assertTrue(message(b -> b.appliesWhen("two blades", g -> true), complete()).contains("appliesWhen"));
+    }
+
+    @Test
+    void turbulentInWordsTakesTheGeneralLimitAndSaysSo() {
+        Correlation words = complete().turbulent().build();
+        assertEquals("Reynolds number at least 10000", words.bound(Measure.REYNOLDS).orElseThrow().words());
+        assertTrue(words.remarks().get(0).contains("10000 is from J. F. Steffe"), words.remarks().toString());
     }
 
     @Test

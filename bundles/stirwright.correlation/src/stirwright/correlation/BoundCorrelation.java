@@ -2,7 +2,7 @@ package stirwright.correlation;
 
 import org.osgi.annotation.versioning.ConsumerType;
 
-/** A correlation bound to one geometry. */
+/** A correlation bound to one geometry. Used by one thread at a time. */
 @FunctionalInterface
 @ConsumerType
 public interface BoundCorrelation {

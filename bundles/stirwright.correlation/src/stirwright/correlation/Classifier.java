@@ -2,7 +2,10 @@ package stirwright.correlation;
 
 import java.util.function.BiFunction;
 
-/** A class of a case that a validity bound can speak of, for instance baffled or not. An open set. */
+/**
+ * A class of a case that a validity bound can speak of, for instance baffled or not. An open set. The
+ * functions are stateless and may be called from several threads at once.
+ */
 public final class Classifier extends Term {
 
     public static final String BAFFLED = "baffled";

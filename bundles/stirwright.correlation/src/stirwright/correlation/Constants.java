@@ -1,21 +1,22 @@
 package stirwright.correlation;
 
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Set;
 import java.util.function.UnaryOperator;
 
 /**
- * The named coefficients of a correlation, in the order of its formula, and the curves that were
- * read off a chart. The printed formula and the code take them from here.
+ * The named coefficients of a correlation, in the order in which it declares them, and the curves
+ * that were read off a chart. The printed formula and the code take them from here. Immutable.
  */
 public final class Constants {
     private final Map<String, Double> values;
     private final Map<String, ChartCurve> curves;
 
     Constants(Map<String, Double> values, Map<String, ChartCurve> curves) {
-        this.values = new LinkedHashMap<>(values);
-        this.curves = new LinkedHashMap<>(curves);
+        this.values = Collections.unmodifiableMap(new LinkedHashMap<>(values));
+        this.curves = Collections.unmodifiableMap(new LinkedHashMap<>(curves));
     }
 
     /**
@@ -31,7 +32,11 @@ public final class Constants {
         return value;
     }
 
-    /** A curve through points that were read off a chart or printed as a table. */
+    /**
+     * A curve through points that were read off a chart or printed as a table.
+     *
+     * @throws ContractException when the correlation declares no curve of that name
+     */
     public ChartCurve curve(String name) {
         ChartCurve curve = curves.get(name);
         if (curve == null) {
@@ -48,7 +53,11 @@ public final class Constants {
         return curves.keySet();
     }
 
-    /** A copy in which one constant has another value: for an editor and for sensitivity. */
+    /**
+     * A copy in which one constant has another value, for {@link Correlation#variant}.
+     *
+     * @throws ContractException when there is no constant of that name
+     */
     public Constants with(String name, double value) {
         get(name);
         Map<String, Double> changed = new LinkedHashMap<>(values);
@@ -56,7 +65,11 @@ public final class Constants {
         return new Constants(changed, curves);
     }
 
-    /** A copy in which one curve is another. */
+    /**
+     * A copy in which one curve is another, for {@link Correlation#variant}.
+     *
+     * @throws ContractException when there is no curve of that name
+     */
     public Constants withCurve(String name, UnaryOperator<ChartCurve> change) {
         Map<String, ChartCurve> changed = new LinkedHashMap<>(curves);
         changed.put(name, change.apply(curve(name)));

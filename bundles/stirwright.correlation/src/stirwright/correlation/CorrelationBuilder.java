@@ -12,49 +12,30 @@ import java.util.Set;
 import java.util.function.Predicate;
 
 /**
- * Collects a {@link Correlation}; {@link #build} checks that nothing is missing. Every bound that a
- * reader would ask for is either stated or {@link #notStated} with the reason.
+ * Collects a {@link Correlation}; {@link #build} checks that it is complete in itself. State every
+ * bound that a reader would ask for or say {@link #notStated} with the reason: the conformance suite
+ * asks for them.
  */
 public final class CorrelationBuilder {
 
-    /** A single value that a source states is met within this fraction: drawings are rounded. */
+    /**
+     * A single value that a source states is met within this fraction, since drawings are rounded:
+     * common practice, no source.
+     */
     private static final double NOMINAL = 0.025;
 
-    final String id;
-    final Quantity quantity;
-    final Optional<Effect> modifierFor;
-    final String title;
-    final List<Bound> validity = new ArrayList<>();
-    final Set<Effect> contains = new LinkedHashSet<>();
-    final Set<Variable> reads = new LinkedHashSet<>();
-    final List<String> remarks = new ArrayList<>();
-    final Set<String> families = new LinkedHashSet<>();
-    Applicability applicability = Applicability.ALWAYS;
-    ReynoldsDefinition reynolds = ReynoldsDefinition.METZNER_OTTO;
-    Optional<String> belongsWith = Optional.empty();
-    OptionalDouble scatter = OptionalDouble.empty();
-    Standing standing = Standing.PUBLISHED;
-    Optional<FlowKind> flowKind = Optional.empty();
-    boolean laminarLimit;
-    Citation citation;
-    Transcription transcription;
-    String formula;
-    Relation relation;
+    private final Card card;
     private final Map<String, Double> constants = new LinkedHashMap<>();
     private final Map<String, ChartCurve> curves = new LinkedHashMap<>();
     private boolean anyFamily;
-    private boolean built;
 
-    CorrelationBuilder(String id, Quantity quantity, Optional<Effect> modifierFor, String title) {
-        this.id = id;
-        this.quantity = quantity;
-        this.modifierFor = modifierFor;
-        this.title = title;
+    CorrelationBuilder(Card card) {
+        this.card = card;
     }
 
     /** The families it was made for, by id. */
     public CorrelationBuilder families(String... ids) {
-        families.addAll(List.of(ids));
+        card.families.addAll(List.of(ids));
         return this;
     }
 
@@ -64,53 +45,57 @@ public final class CorrelationBuilder {
         return this;
     }
 
-    /** For a modifier: when it has anything to say. Where it does not apply it is not used. */
+    /**
+     * For a modifier: when it has anything to say. Where it does not apply it is not used.
+     *
+     * @param test stateless; may be called from several threads at once
+     */
     public CorrelationBuilder appliesWhen(String words, Predicate<Geometry> test) {
-        applicability = new Applicability(words, test);
+        card.applicability = new Applicability(words, test);
         return this;
     }
 
     public CorrelationBuilder cite(Citation source) {
-        citation = source;
+        card.citation = source;
         return this;
     }
 
     /** How the coefficients were checked. */
     public CorrelationBuilder transcription(Transcription grade) {
-        transcription = grade;
+        card.transcription = grade;
         return this;
     }
 
     public CorrelationBuilder standing(Standing value) {
-        standing = value;
+        card.standing = value;
         return this;
     }
 
     /** What was checked against what, or a conflict with another source, in one sentence. */
     public CorrelationBuilder remark(String sentence) {
-        remarks.add(sentence);
+        card.remarks.add(sentence);
         return this;
     }
 
     public CorrelationBuilder reynolds(ReynoldsDefinition definition) {
-        reynolds = definition;
+        card.reynolds = definition;
         return this;
     }
 
     /** The id of the shear-rate constant that the source used with it. */
     public CorrelationBuilder belongsWith(String shearRateConstantId) {
-        belongsWith = Optional.of(shearRateConstantId);
+        card.belongsWith = Optional.of(shearRateConstantId);
         return this;
     }
 
     public CorrelationBuilder contains(Effect... effects) {
-        contains.addAll(List.of(effects));
+        card.contains.addAll(List.of(effects));
         return this;
     }
 
     /** The variables of the operating point that the formula reads. */
     public CorrelationBuilder reads(Variable... variables) {
-        reads.addAll(List.of(variables));
+        card.reads.addAll(List.of(variables));
         return this;
     }
 
@@ -132,7 +117,7 @@ public final class CorrelationBuilder {
         return range(measure, Double.NEGATIVE_INFINITY, most);
     }
 
-    /** A single value that the source states; rounding of 2.5 % counts as equal. */
+    /** A single value that the source states; rounding of 2.5 % counts as equal (common practice, no source). */
     public CorrelationBuilder nominal(Measure measure, double value) {
         double margin = NOMINAL * Math.abs(value);
         return bound(new Bound.Range(
@@ -158,58 +143,97 @@ public final class CorrelationBuilder {
         return bound(new Bound.NotStated(subject, reason));
     }
 
+    /** For a source with data of Newtonian fluids that is used for others too: no bound on the fluid, and why. */
+    public CorrelationBuilder newtonianData() {
+        return notStated(Classifier.FLUID,
+                "Newtonian data; other fluids enter through Metzner and Otto's apparent viscosity");
+    }
+
+    /**
+     * For a source that says "turbulent" and no number: the Reynolds number from which flow is
+     * turbulent by {@link RegimeLimits#IN_GENERAL}, and a remark that says so.
+     */
+    public CorrelationBuilder turbulent() {
+        RegimeLimits limits = RegimeLimits.IN_GENERAL;
+        return atLeast(Measure.REYNOLDS, limits.turbulentFrom())
+                .remark("The source says turbulent; the number " + Figures.show(limits.turbulentFrom()) + " is from "
+                        + limits.citation() + ".");
+    }
+
     private CorrelationBuilder bound(Bound bound) {
-        if (validity.stream().anyMatch(b -> b.subject().equals(bound.subject()))) {
-            throw new ContractException(id + ": a second bound on " + bound.subject().title());
-        }
-        validity.add(bound);
+        card.demand(card.validity.stream().noneMatch(b -> b.subject().equals(bound.subject())),
+                "a second bound on " + bound.subject().title());
+        card.validity.add(bound);
         return this;
     }
 
-    /** Relative scatter that the source gives, for instance 0.1. */
+    /** Relative scatter that the source gives, for instance 0.1 for plus or minus 10 %. */
     public CorrelationBuilder scatter(double relative) {
-        scatter = OptionalDouble.of(relative);
+        card.demand(relative > 0 && relative < Double.POSITIVE_INFINITY, "scatter " + relative);
+        card.scatter = OptionalDouble.of(relative);
         return this;
     }
 
     /** Mandatory for a flow number. */
     public CorrelationBuilder flow(FlowKind kind) {
-        flowKind = Optional.of(kind);
+        card.flowKind = Optional.of(kind);
         return this;
     }
 
-    /** Claims that value times Reynolds number tends to a constant; the conformance suite checks it. */
+    /**
+     * Claims that value times Reynolds number tends to a constant at low Reynolds numbers; the
+     * conformance suite checks it.
+     */
     public CorrelationBuilder laminarLimit() {
-        laminarLimit = true;
+        card.laminarLimit = true;
         return this;
     }
 
+    /**
+     * A coefficient of the formula.
+     *
+     * @param name letters and digits, a letter first
+     */
     public CorrelationBuilder constant(String name, double value) {
+        demandNewName(name);
+        card.demand(Double.isFinite(value), "constant '" + name + "' is " + value);
         constants.put(name, value);
         return this;
     }
 
-    /** Points in x, y pairs, read off a chart or printed as a table. */
+    /**
+     * A curve of the formula.
+     *
+     * @param name letters and digits, a letter first
+     * @param xy points in x, y pairs, read off a chart or printed as a table
+     */
     public CorrelationBuilder curve(String name, double... xy) {
+        demandNewName(name);
         curves.put(name, ChartCurve.through(xy));
         return this;
     }
 
+    private void demandNewName(String name) {
+        card.demand(!constants.containsKey(name) && !curves.containsKey(name),
+                "a second constant or curve '" + name + "'");
+    }
+
     /** The formula as people write it, with {@code {name}} for each constant and curve. */
     public CorrelationBuilder formula(String template) {
-        formula = template;
+        card.formula = template;
         return this;
     }
 
+    /** The formula as code. */
     public CorrelationBuilder relation(Relation code) {
-        relation = code;
+        card.relation = code;
         return this;
     }
 
     /** For a correlation that is one number: constant, formula and relation at once. */
     public CorrelationBuilder value(String name, double number) {
         return constant(name, number)
-                .formula(quantity.symbol() + " = {" + name + "}")
+                .formula(card.quantity.symbol() + " = {" + name + "}")
                 .relation((geometry, k) -> {
                     double value = k.get(name);
                     return point -> value;
@@ -221,36 +245,35 @@ public final class CorrelationBuilder {
         return constant(name, number)
                 .reads(Variable.REYNOLDS)
                 .laminarLimit()
-                .formula(quantity.symbol() + " = {" + name + "}/Re")
+                .formula(card.quantity.symbol() + " = {" + name + "}/Re")
                 .relation((geometry, k) -> {
                     double value = k.get(name);
                     return point -> value / point.reynolds();
                 });
     }
 
-    /** @throws ContractException naming the correlation and what is missing or contradictory */
+    /**
+     * The correlation as told so far; it does not change when the builder is used further. What is
+     * demanded here never grows stricter in a minor version of the contract; the conformance suite
+     * asks for more.
+     *
+     * @throws ContractException naming the correlation and what is missing or contradictory
+     */
     public Correlation build() {
-        demand(!built, "is built already");
-        demand(id.matches("[a-z][a-z0-9]*(\\.[a-z0-9]+(-[a-z0-9]+)*)+"),
-                "the id must be lower-case words joined by '.' and '-'");
-        demand(anyFamily != !families.isEmpty(), "say either families(...) or anyFamily()");
-        demand(citation != null, "has no citation");
-        demand(transcription != null, "has no transcription");
-        demand(formula != null && relation != null, "has no formula or no relation");
-        demand(quantity.equals(Quantity.FLOW_NUMBER) == flowKind.isPresent() || modifierFor.isPresent(),
+        card.demandId();
+        card.demand(anyFamily != !card.families.isEmpty(), "say either families(...) or anyFamily()");
+        card.demand(card.citation != null, "has no citation");
+        card.demand(card.transcription != null, "has no transcription");
+        card.demand(card.formula != null && card.relation != null, "has no formula or no relation");
+        boolean modifier = card.modifierFor.isPresent();
+        card.demand(card.quantity.equals(Quantity.FLOW_NUMBER) == card.flowKind.isPresent() || modifier,
                 "a flow number, and nothing else, says discharge or circulation");
+        card.demand(modifier || card.applicability == Applicability.ALWAYS, "appliesWhen(...) is for a modifier");
         Set<String> names = new LinkedHashSet<>(constants.keySet());
         names.addAll(curves.keySet());
-        demand(names.size() == constants.size() + curves.size(), "a constant and a curve share a name");
-        demand(FormulaText.slots(formula).equals(names),
-                "the formula names " + FormulaText.slots(formula) + ", the constants are " + names);
-        built = true;
-        return new Correlation(this, new Constants(constants, curves));
-    }
-
-    private void demand(boolean met, String otherwise) {
-        if (!met) {
-            throw new ContractException("correlation '" + id + "': " + otherwise);
-        }
+        card.demand(FormulaText.slots(card.formula).equals(names),
+                "the formula names " + FormulaText.slots(card.formula) + ", the constants are " + names);
+        card.constants = new Constants(constants, curves);
+        return new Correlation(card);
     }
 }

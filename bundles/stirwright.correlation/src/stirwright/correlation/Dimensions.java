@@ -5,16 +5,17 @@ import stirwright.correlation.GeometryParameter.Kind;
 
 /**
  * The dimensions that many families share, so that one name means one thing everywhere. A family
- * takes those it needs and gives them its own defaults.
+ * has those of {@link #VESSEL}, takes of the others what it needs, and may give each its own default.
  */
 public final class Dimensions {
 
     public static final GeometryParameter IMPELLER_DIAMETER = GeometryParameter.of(
             "impeller_diameter", "impeller diameter", Kind.LENGTH, "D", "diameter swept by the blade tips");
 
-    /** Three impeller diameters when nobody gave it; families with a wall gap say otherwise. */
+    /** Follows from the wall gap where that was given; else three impeller diameters are assumed. */
     public static final GeometryParameter VESSEL_DIAMETER = GeometryParameter.of(
                     "vessel_diameter", "vessel diameter", Kind.LENGTH, "T", "inner diameter of the vessel")
+            .derivedAs("D + 2 c", g -> g.get(IMPELLER_DIAMETER) + 2 * g.get(Dimensions.WALL_GAP))
             .assumedAs("3 D", g -> 3 * g.get(IMPELLER_DIAMETER));
 
     public static final GeometryParameter LIQUID_HEIGHT = GeometryParameter.of(
@@ -32,7 +33,7 @@ public final class Dimensions {
 
     public static final GeometryParameter WALL_GAP = GeometryParameter.of(
                     "wall_gap", "wall gap", Kind.LENGTH, "c", "blade tip to vessel wall, on one side")
-            .usually("(T - D)/2", g -> (g.get(VESSEL_DIAMETER) - g.get(IMPELLER_DIAMETER)) / 2);
+            .derivedAs("(T - D)/2", g -> (g.get(VESSEL_DIAMETER) - g.get(IMPELLER_DIAMETER)) / 2);
 
     /** No default: a blank is refused, since baffles change the power of most families. */
     public static final GeometryParameter BAFFLE_COUNT = GeometryParameter.of(
@@ -43,7 +44,8 @@ public final class Dimensions {
     public static final GeometryParameter BAFFLE_WIDTH = GeometryParameter.of(
                     "baffle_width", "baffle width", Kind.LENGTH, "B", "radial width of one baffle")
             .withLimits(0, Double.MAX_VALUE)
-            .assumedAs("T/10", g -> g.get(BAFFLE_COUNT) == 0 ? 0 : g.get(VESSEL_DIAMETER) / 10);
+            .derivedAs("0", g -> g.get(BAFFLE_COUNT) == 0 ? 0 : Double.NaN)
+            .assumedAs("T/10", g -> g.get(VESSEL_DIAMETER) / 10);
 
     public static final GeometryParameter IMPELLER_COUNT = GeometryParameter.of(
                     "impeller_count", "impeller count", Kind.COUNT, "ni", "equal impellers on one shaft")
@@ -71,7 +73,7 @@ public final class Dimensions {
     public static final GeometryParameter BLADE_LENGTH = GeometryParameter.of(
             "blade_length", "blade length", Kind.LENGTH, "L", "radial length of one blade");
 
-    /** What every vessel has, in the order in which defaults build on each other. */
+    /** What every vessel has, in the order in which blanks are filled. */
     public static final List<GeometryParameter> VESSEL = List.of(
             IMPELLER_DIAMETER, VESSEL_DIAMETER, LIQUID_HEIGHT, LIQUID_VOLUME, CLEARANCE, WALL_GAP,
             BAFFLE_COUNT, BAFFLE_WIDTH, IMPELLER_COUNT, IMPELLER_SPACING);

@@ -9,7 +9,8 @@ public interface Geometry {
     /**
      * The value of a parameter in its SI unit (angles in rad).
      *
-     * @return NaN when the family does not have this parameter
+     * @return NaN when the family does not have this parameter, or while a {@link Fallback} is
+     *     computed from what is known so far
      */
     double get(GeometryParameter parameter);
 

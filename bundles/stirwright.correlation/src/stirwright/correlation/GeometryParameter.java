@@ -1,46 +1,65 @@
 package stirwright.correlation;
 
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
 import java.util.function.ToDoubleFunction;
 
 /**
  * One dimension or count of a vessel or impeller: name, symbol, unit, meaning, hard limits, and
- * what stands in when nobody gave it. Immutable; the {@code with...} methods return a copy, so
- * that a family takes a parameter from {@link Dimensions} and gives it its own meaning and default.
+ * what stands in when nobody gave it. Immutable; {@code with...}, {@link #derivedAs}, {@link
+ * #usually} and {@link #assumedAs} return a copy, so that a family takes a parameter from {@link
+ * Dimensions} and gives it its own meaning and default.
+ *
+ * <p>A blank takes the first fallback that gives a finite number: what is derived, in the order in
+ * which it was told; then what is usual or assumed. The functions are stateless and may be called
+ * from several threads at once. They may read every parameter that was given, whatever its place,
+ * and those that the family lists before this one; the rest is NaN.
  */
 public final class GeometryParameter extends Term {
 
     /** What a parameter measures, which settles its unit. */
     public enum Kind {
         /** In m. */
-        LENGTH("m", "_m", 1),
+        LENGTH("m", "_m", "m", 1),
         /** In rad; people and tables write degrees. */
-        ANGLE("rad", "_deg", Math.PI / 180),
+        ANGLE("rad", "_deg", "degrees", Math.PI / 180),
         /** In m3. */
-        VOLUME("m3", "_m3", 1),
+        VOLUME("m3", "_m3", "m3", 1),
         /** A whole number. */
-        COUNT("-", "", 1),
+        COUNT("-", "", "-", 1),
         /** A pure number. */
-        RATIO("-", "", 1);
+        RATIO("-", "", "-", 1);
 
         private final String unit;
         private final String columnSuffix;
+        private final String columnUnit;
         private final double siPerColumnUnit;
 
-        Kind(String unit, String columnSuffix, double siPerColumnUnit) {
+        Kind(String unit, String columnSuffix, String columnUnit, double siPerColumnUnit) {
             this.unit = unit;
             this.columnSuffix = columnSuffix;
+            this.columnUnit = columnUnit;
             this.siPerColumnUnit = siPerColumnUnit;
         }
 
+        /** The SI unit; {@code "-"} for a pure number. */
         public String unit() {
             return unit;
+        }
+
+        /** The unit in which people and tables write it; {@code "-"} for a pure number. */
+        public String columnUnit() {
+            return columnUnit;
         }
     }
 
     /** How much a value that nobody gave deserves to be shown. */
     public enum Default {
-        /** There is none: the value must be given. */
+        /** Nothing stands in: the value was given, or must be. */
         NONE,
+        /** Follows from what was given, for instance T = D + 2 c; neither flagged nor doubtful in itself. */
+        DERIVED,
         /** What everybody means by a blank, for instance one impeller. */
         USUAL,
         /** The standard geometry, assumed; results that rest on it are flagged. */
@@ -52,22 +71,18 @@ public final class GeometryParameter extends Term {
     private final String meaning;
     private final double min;
     private final double max;
-    private final Default defaultKind;
-    private final String defaultWords;
-    private final ToDoubleFunction<Geometry> defaultValue;
+    private final List<Fallback> fallbacks;
 
     private GeometryParameter(
             String id, String title, Kind kind, String symbol, String meaning, double min, double max,
-            Default defaultKind, String defaultWords, ToDoubleFunction<Geometry> defaultValue) {
+            List<Fallback> fallbacks) {
         super(id, title);
         this.kind = kind;
         this.symbol = symbol;
         this.meaning = meaning;
         this.min = min;
         this.max = max;
-        this.defaultKind = defaultKind;
-        this.defaultWords = defaultWords;
-        this.defaultValue = defaultValue;
+        this.fallbacks = fallbacks;
     }
 
     /**
@@ -78,31 +93,44 @@ public final class GeometryParameter extends Term {
      */
     public static GeometryParameter of(String id, String title, Kind kind, String symbol, String meaning) {
         double min = kind == Kind.COUNT ? 1 : Double.MIN_VALUE;
-        return new GeometryParameter(
-                id, title, kind, symbol, meaning, min, Double.MAX_VALUE, Default.NONE, "", g -> Double.NaN);
+        return new GeometryParameter(id, title, kind, symbol, meaning, min, Double.MAX_VALUE, List.of());
     }
 
     public GeometryParameter withMeaning(String meaningHere) {
-        return new GeometryParameter(
-                id(), title(), kind, symbol, meaningHere, min, max, defaultKind, defaultWords, defaultValue);
+        return new GeometryParameter(id(), title(), kind, symbol, meaningHere, min, max, fallbacks);
     }
 
     /** Hard limits in the SI unit, both included; beyond them a case is refused. */
     public GeometryParameter withLimits(double least, double most) {
-        return new GeometryParameter(
-                id(), title(), kind, symbol, meaning, least, most, defaultKind, defaultWords, defaultValue);
+        return new GeometryParameter(id(), title(), kind, symbol, meaning, least, most, fallbacks);
     }
 
-    /** Standard geometry that stands in for a blank and is marked as assumed. */
-    public GeometryParameter assumedAs(String words, ToDoubleFunction<Geometry> value) {
-        return new GeometryParameter(
-                id(), title(), kind, symbol, meaning, min, max, Default.ASSUMED, words, value);
+    /**
+     * Follows from other dimensions where those were given: give NaN where not. Several are tried in
+     * the order in which they were told, before what is usual or assumed.
+     */
+    public GeometryParameter derivedAs(String words, ToDoubleFunction<Geometry> value) {
+        return with(new Fallback(Default.DERIVED, words, value));
     }
 
-    /** What everybody means by a blank. */
+    /** What everybody means by a blank, in place of what was usual or assumed so far. */
     public GeometryParameter usually(String words, ToDoubleFunction<Geometry> value) {
-        return new GeometryParameter(
-                id(), title(), kind, symbol, meaning, min, max, Default.USUAL, words, value);
+        return with(new Fallback(Default.USUAL, words, value));
+    }
+
+    /** Standard geometry, marked as assumed, in place of what was usual or assumed so far. */
+    public GeometryParameter assumedAs(String words, ToDoubleFunction<Geometry> value) {
+        return with(new Fallback(Default.ASSUMED, words, value));
+    }
+
+    private GeometryParameter with(Fallback added) {
+        List<Fallback> all = new ArrayList<>(fallbacks);
+        if (added.kind() != Default.DERIVED) {
+            all.removeIf(f -> f.kind() != Default.DERIVED);
+        }
+        all.add(added);
+        all.sort(Comparator.comparing(Fallback::kind));
+        return new GeometryParameter(id(), title(), kind, symbol, meaning, min, max, List.copyOf(all));
     }
 
     public Kind kind() {
@@ -125,18 +153,9 @@ public final class GeometryParameter extends Term {
         return max;
     }
 
-    public Default defaultKind() {
-        return defaultKind;
-    }
-
-    /** The default in words, for instance "D/5". */
-    public String defaultWords() {
-        return defaultWords;
-    }
-
-    /** The default in the SI unit; it may read parameters that the family lists before this one. */
-    public double defaultValue(Geometry geometry) {
-        return defaultValue.applyAsDouble(geometry);
+    /** What stands in for a blank, in the order in which it is tried; empty when the value must be given. */
+    public List<Fallback> fallbacks() {
+        return fallbacks;
     }
 
     /** The name of the column that holds this parameter in a table. */

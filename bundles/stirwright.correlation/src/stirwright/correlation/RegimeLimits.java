@@ -2,6 +2,11 @@ package stirwright.correlation;
 
 /** Reynolds numbers at which a family's laminar regime ends and its turbulent regime begins. */
 public final class RegimeLimits {
+
+    /** Of impellers in general, for families whose sources give no limits of their own. */
+    public static final RegimeLimits IN_GENERAL = of(10, 1e4, Citation.of(
+            "J. F. Steffe, Rheological Methods in Food Process Engineering, 2nd ed., Freeman Press (1996)", "p. 188"));
+
     private final double laminarUpTo;
     private final double turbulentFrom;
     private final Citation citation;
@@ -15,6 +20,10 @@ public final class RegimeLimits {
         this.citation = citation;
     }
 
+    /**
+     * @param laminarUpTo the last Reynolds number of the laminar regime, above zero
+     * @param turbulentFrom the first Reynolds number of the turbulent regime
+     */
     public static RegimeLimits of(double laminarUpTo, double turbulentFrom, Citation citation) {
         return new RegimeLimits(laminarUpTo, turbulentFrom, citation);
     }

@@ -2,13 +2,13 @@ package stirwright.correlation;
 
 import org.osgi.annotation.versioning.ConsumerType;
 
-/** The formula of a correlation, as code. */
+/** The formula of a correlation, as code. Stateless: it may be called from several threads at once. */
 @FunctionalInterface
 @ConsumerType
 public interface Relation {
 
     /**
-     * Binds the formula to a geometry; what depends on the geometry alone is computed here, once.
+     * Binds the formula to a geometry; what depends on the geometry alone is best computed here, once.
      *
      * @param constants the correlation's named constants; take every coefficient from here, so that
      *     the printed formula and the computed number cannot differ

@@ -25,10 +25,13 @@ public final class Variable extends Term {
     public static final Variable VISCOSITY = of("viscosity", "apparent viscosity", "mu", "Pa s");
 
     /** Power number of the pick, all impellers and vessel effects included. */
-    public static final Variable POWER_NUMBER = of("power_number", "power number", "Np", "-");
+    public static final Variable POWER_NUMBER = of(Quantity.POWER_NUMBER);
 
     /** Flow number of the pick, all impellers and vessel effects included. */
-    public static final Variable FLOW_NUMBER = of("flow_number", "flow number", "Nq", "-");
+    public static final Variable FLOW_NUMBER = of(Quantity.FLOW_NUMBER);
+
+    /** Shear-rate constant of the pick, per revolution. */
+    public static final Variable SHEAR_RATE_CONSTANT = of(Quantity.SHEAR_RATE_CONSTANT);
 
     private final String symbol;
     private final String unit;
@@ -39,6 +42,19 @@ public final class Variable extends Term {
         this.unit = unit;
     }
 
+    /**
+     * The value of the pick for a quantity. It is unknown where nothing is picked for that quantity,
+     * or not yet.
+     */
+    public static Variable of(Quantity quantity) {
+        return of(quantity.id().replace('-', '_'), quantity.title(), quantity.symbol(), quantity.unit());
+    }
+
+    /**
+     * A variable of a contributor's own or one listed here.
+     *
+     * @param unit the SI unit; {@code "-"} for a pure number
+     */
     public static Variable of(String id, String title, String symbol, String unit) {
         return new Variable(id, title, symbol, unit);
     }

@@ -3,7 +3,8 @@
  *
  * <p>Start at {@link stirwright.correlation.Contribution}: publish one as an OSGi service and the
  * workbench finds it. All values are in SI units, speeds in revolutions per second, shear-rate
- * constants per revolution, angles in radians.
+ * constants per revolution, angles in radians; only a {@link stirwright.correlation.Measure} of a
+ * dimension, and so a bound on it, is in the unit of the table's column (angles in degrees).
  *
  * <p>What is named by an id ({@link stirwright.correlation.Quantity}, {@link
  * stirwright.correlation.Variable}, {@link stirwright.correlation.Effect}, ...) is an open set: a

@@ -56,12 +56,13 @@ class CaseRowTest {
     @Test
     void familyIsNeededAndLeftToTheCoreOtherwise() {
         assertRefused(Sheet.good().with("family", "").entry(folder), "family", "", "blank");
-        CaseEntry unknown = Sheet.good().with("family", "Blades").entry(folder);
+        CaseEntry unknown = Sheet.good().with("family", "Nosuch").entry(folder);
         assertAccepted(unknown);
         CaseResult result = unknown.check(Invented.CROSS_CHECK);
         assertEquals(Status.REFUSED, result.status());
         assertEquals("family", result.refusal().orElseThrow().field());
-        assertEquals("Blades", result.refusal().orElseThrow().value());
+        assertEquals("Nosuch", result.refusal().orElseThrow().value());
+        assertEquals("blades", spec(Sheet.good().with("family", "Blades")).familyId());
     }
 
     @Test

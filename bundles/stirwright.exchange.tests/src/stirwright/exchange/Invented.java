@@ -31,7 +31,7 @@ final class Invented {
             GeometryParameter.of("twist", "twist", Kind.ANGLE, "w", "twist of a blade from hub to tip")
                     .usually("0", g -> 0).withLimits(0, Math.PI);
 
-    static final Catalogue CATALOGUE = Catalogue.of(List.of(new Arrival(new Blades(), "invented.blades 1.0.0")));
+    static final Catalogue CATALOGUE = Catalogue.of(List.of(Arrival.of(new Blades(), "invented.blades 1.0.0")));
     static final CrossCheck CROSS_CHECK = new CrossCheck(CATALOGUE);
 
     private Invented() {}

@@ -37,9 +37,9 @@ import stirwright.general.GeneralRelations;
  */
 class PrintedAnswersTest {
     private static final Catalogue CATALOGUE = Catalogue.of(List.of(
-            new Arrival(new DiscTurbine(), "discturbine"),
-            new Arrival(new PitchedBlade(), "pitchedblade"),
-            new Arrival(new GeneralRelations(), "general")));
+            Arrival.of(new DiscTurbine(), "discturbine"),
+            Arrival.of(new PitchedBlade(), "pitchedblade"),
+            Arrival.of(new GeneralRelations(), "general")));
 
     private static final String COLUMNS = "case,family,impeller_diameter_m,vessel_diameter_m,liquid_height_m,blade_width_m,"
             + "clearance_m,baffle_count,baffle_width_m,speed_rev_s,density_kg_m3,model,viscosity_Pa_s,consistency_Pa_sn,"

@@ -21,7 +21,7 @@ final class BlendTime {
 
     /** Np^(1/3) Re, by which the regimes are told apart. */
     private static final Measure POWERED_REYNOLDS = Measure.of("powered_reynolds", "Np^(1/3) Re",
-            (vessel, point) -> poweredReynolds(point));
+            (vessel, point) -> poweredReynolds(point)).byFactor();
 
     private static final double TURBULENT_FROM = 6370;
 

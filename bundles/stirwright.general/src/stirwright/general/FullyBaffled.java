@@ -24,13 +24,14 @@ final class FullyBaffled {
                 .cite(Citation.of("S. Hiraoka, N. Kamei et al., Kagaku Kogaku Ronbunshu 23 (1997) 969-975",
                         "abstract on J-STAGE"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
-                .atLeast(Measure.REYNOLDS, 1e4)
+                .turbulent()
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
                 .atLeast(BAFFLING_OVER_FULL, 1)
                 .notStated(Measure.BLADE_COUNT, "the abstract gives no range")
+                .notStated(Measure.BLADE_ANGLE, "the abstract gives no range")
                 .notStated(Measure.W_OVER_D, "the abstract gives no range")
                 .notStated(Measure.D_OVER_T, "the abstract gives no range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .contains(Effect.BAFFLES)
                 .formula("Np = Npmax; " + BafflePlateau.levelFormula(Blades.PITCHED))
                 .relation((vessel, k) -> {
@@ -39,8 +40,6 @@ final class FullyBaffled {
                 })
                 .remark("Baffles over full baffling: (B/T) nb^0.8/(0.44 Npmax^0.2 (2 angle/pi)^0.72), the criterion "
                         + "of the abstract.")
-                .remark("The level of turbulent flow; the number 10000 is from J. F. Steffe, Rheological Methods in "
-                        + "Food Process Engineering, 2nd ed. (1996), p. 188.")
                 .remark("Four blades at 45 degrees: 1.35, against 1.27 (McCabe), 1.30 (Medek) and 1.37 (Dickey).")
                 .build();
     }

@@ -21,9 +21,6 @@ final class PaddlePower {
             (vessel, point) -> Math.pow(vessel.get(Dimensions.BLADE_COUNT), 0.7)
                     * vessel.ratio(Dimensions.BLADE_WIDTH, Dimensions.IMPELLER_DIAMETER));
 
-    private static final String RANGE_IN_WORDS = "The abstract says laminar to turbulent; 100000 is where our "
-            + "comparison with Nagata's equations ended, not a limit of the source.";
-
     private static final String PADDLE_ON_DISC =
             "Made for paddles; that a disc turbine behaves like one is an assumption, so it is never recommended.";
 
@@ -89,6 +86,7 @@ final class PaddlePower {
         return card.constant("b", 4.5).constant("s", 3)
                 .cite(Sources.kameiBaffled())
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.B_OVER_T, "no range is recalled")
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES)
                 .formula("Np = max(Np0, Npmax (1 + x^-{s})^(-1/{s})); x = {b} " + BafflePlateau.bafflingFormula(blades)
                         + " + Np0/Npmax; " + BafflePlateau.levelFormula(blades) + "; " + FrictionFrame.formula(blades))
@@ -114,13 +112,15 @@ final class PaddlePower {
     }
 
     private static CorrelationBuilder card(String id, String title, Blades blades) {
-        return FrictionFrame.declare(Correlation.of(id, Quantity.POWER_NUMBER, title), blades)
-                .atMost(Measure.REYNOLDS, COMPARED_UP_TO)
+        CorrelationBuilder card = FrictionFrame.declare(Correlation.of(id, Quantity.POWER_NUMBER, title), blades)
+                .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, COMPARED_UP_TO,
+                        "laminar to turbulent in words; our comparison with Nagata's equations ended here")
                 .notStated(Measure.BLADE_COUNT, "recalled as 2 to 8, unsure")
                 .notStated(Measure.W_OVER_D, "recalled as 0.05 to 0.9, unsure")
                 .notStated(Measure.D_OVER_T, "recalled as 0.3 to 0.8, unsure")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
-                .reads(Variable.REYNOLDS)
-                .remark(RANGE_IN_WORDS);
+                .notStated(Measure.H_OVER_T, "no range is recalled")
+                .newtonianData()
+                .reads(Variable.REYNOLDS);
+        return blades == Blades.PITCHED ? card.notStated(Measure.BLADE_ANGLE, "no range is recalled") : card;
     }
 }

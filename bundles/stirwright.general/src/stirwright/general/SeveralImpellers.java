@@ -24,13 +24,11 @@ final class SeveralImpellers {
                 .cite(bates())
                 .transcription(Transcription.FROM_MEMORY)
                 .atLeast(Measure.S_OVER_D, 1)
-                .notStated(SPACING_OVER_VESSEL, "a limit is recalled for disc turbines only")
                 .remark("The full sum is recalled for S/D from 1 to 1.5 on; conflict: for two pitched-blade turbines at "
                         + "S/D 1 also 1.6 to 1.9 times one are reported.")
                 .build();
     }
 
-    /** States one bound more than the general rule, so it goes before it. */
     static Correlation powerOfDiscTurbines() {
         return times("general.np.several-disc-turbines", Quantity.POWER_NUMBER, "powers of several disc turbines add")
                 .families("discturbine")
@@ -64,7 +62,7 @@ final class SeveralImpellers {
                 .notStated(Measure.REYNOLDS, "recalled without a range")
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .formula("times ni")
                 .relation((vessel, k) -> {
                     double count = vessel.get(Dimensions.IMPELLER_COUNT);

@@ -2,11 +2,8 @@ package stirwright.general;
 
 import stirwright.correlation.Citation;
 
-/** The works behind several of this bundle's numbers, and words that several cards share. */
+/** The works behind several of this bundle's numbers. */
 final class Sources {
-
-    static final String NEWTONIAN_DATA =
-            "Newtonian data; other fluids enter through Metzner and Otto's apparent viscosity";
 
     private Sources() {}
 

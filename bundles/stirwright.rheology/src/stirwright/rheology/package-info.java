@@ -6,4 +6,7 @@
  * and free of shared state. Not for fluids that remember (thixotropic, viscoelastic): a steady flow curve does not
  * describe them.
  */
+@Version("1.0.0")
 package stirwright.rheology;
+
+import org.osgi.annotation.versioning.Version;

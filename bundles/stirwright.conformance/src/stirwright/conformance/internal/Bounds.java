@@ -19,11 +19,11 @@ public final class Bounds {
     private Bounds() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             List<Term> subjects = correlation.validity().stream().map(Bound::subject).toList();
             demand(subjects.contains(Measure.REYNOLDS), "Reynolds number (Measure.REYNOLDS)", correlation, findings);
-            demand(subjects.contains(Classifier.BAFFLING) || subjects.contains(Measure.BAFFLE_COUNT),
-                    "baffling (Classifier.BAFFLING)", correlation, findings);
+            // A count alone does not do: what is recommended must state the class.
+            demand(subjects.contains(Classifier.BAFFLING), "baffling (Classifier.BAFFLING)", correlation, findings);
             demand(subjects.contains(Measure.D_OVER_T) || subjects.stream().anyMatch(Bounds::ofWallGap),
                     "impeller over vessel diameter (Measure.D_OVER_T)", correlation, findings);
             demand(subjects.contains(Classifier.FLUID), "fluid (fluids(...) or Classifier.FLUID)", correlation, findings);

@@ -47,6 +47,7 @@ public final class BundleErrors {
     }
 
     private static boolean isOfAnotherCopy(ServiceReference<?> service) {
-        return Stream.of((String[]) service.getProperty(Constants.OBJECTCLASS)).anyMatch(Contribution.class.getName()::equals);
+        String[] names = (String[]) service.getProperty(Constants.OBJECTCLASS);
+        return Stream.of(names).anyMatch(Contribution.class.getName()::equals);
     }
 }

@@ -15,10 +15,10 @@ public final class Citations {
     private Citations() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Family family : workpiece.offer().families()) {
+        for (Family family : workpiece.ownFamilies()) {
             examine(family.id(), family.regimes().citation(), findings);
         }
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             examine(correlation.id(), correlation.citation(), findings);
         }
     }

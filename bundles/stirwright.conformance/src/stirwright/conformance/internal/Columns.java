@@ -5,10 +5,9 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
+import java.util.function.Function;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import stirwright.correlation.Correlation;
-import stirwright.correlation.Family;
 import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Variable;
 
@@ -30,26 +29,35 @@ record Columns(
     static final String EXPECTED = "expected";
     static final String SOURCE = "source";
     static final String FLUID = "fluid";
+    static final String OUTSIDE = "outside";
 
     private static final List<String> NEEDED = List.of(CORRELATION, FAMILY, KIND, EXPECTED, SOURCE);
+    private static final List<String> OPTIONAL = List.of(FLUID, OUTSIDE);
+
+    private static final List<Variable> VARIABLES = List.of(
+            Variable.REYNOLDS, Variable.FROUDE, Variable.FLOW_INDEX, Variable.YIELD_NUMBER, Variable.SPEED,
+            Variable.DENSITY, Variable.VISCOSITY, Variable.POWER_NUMBER, Variable.FLOW_NUMBER,
+            Variable.SHEAR_RATE_CONSTANT);
 
     static Columns of(List<String> header, Workpiece workpiece) {
-        Map<String, Variable> variables = variables(workpiece);
-        Map<String, GeometryParameter> dimensions = dimensions(workpiece);
+        Map<String, Variable> variables = byName(Stream.concat(VARIABLES.stream(),
+                workpiece.correlations().stream().flatMap(c -> c.reads().stream())), Variable::id);
+        Map<String, GeometryParameter> dimensions = byName(
+                workpiece.families().stream().flatMap(f -> f.parameters().stream()), GeometryParameter::column);
         Columns columns = new Columns(new HashMap<>(), new LinkedHashMap<>(), new LinkedHashMap<>(), new ArrayList<>());
         for (int i = 0; i < header.size(); i++) {
             String name = header.get(i).strip();
             if (header.indexOf(header.get(i)) < i) {
                 columns.problems.add("has the column '" + name + "' twice");
-            } else if (NEEDED.contains(name) || name.equals(FLUID)) {
+            } else if (NEEDED.contains(name) || OPTIONAL.contains(name)) {
                 columns.texts.put(name, i);
             } else if (variables.containsKey(name)) {
                 columns.variables.put(i, variables.get(name));
             } else if (dimensions.containsKey(name)) {
                 columns.dimensions.put(i, dimensions.get(name));
             } else {
-                columns.problems.add("has the unknown column '" + name + "'; known are " + String.join(", ", NEEDED)
-                        + ", " + FLUID + ", the variables " + String.join(", ", variables.keySet())
+                columns.problems.add("has the unknown column '" + name + "'; known are " + String.join(", ", NEEDED) + ", "
+                        + String.join(", ", OPTIONAL) + ", the variables " + String.join(", ", variables.keySet())
                         + " and the dimensions " + String.join(", ", dimensions.keySet()));
             }
         }
@@ -58,18 +66,7 @@ record Columns(
         return columns;
     }
 
-    private static Map<String, Variable> variables(Workpiece workpiece) {
-        Map<String, Variable> variables = new LinkedHashMap<>();
-        StandardCase.variables(StandardCase.FLUID, Set.of()).keySet().forEach(v -> variables.put(v.id(), v));
-        workpiece.offer().correlations().stream().map(Correlation::reads)
-                .forEach(reads -> reads.forEach(v -> variables.putIfAbsent(v.id(), v)));
-        return variables;
-    }
-
-    private static Map<String, GeometryParameter> dimensions(Workpiece workpiece) {
-        Map<String, GeometryParameter> dimensions = new LinkedHashMap<>();
-        Stream.concat(workpiece.families().stream(), Stream.of(StandardCase.anyFamily())).map(Family::parameters)
-                .forEach(parameters -> parameters.forEach(p -> dimensions.putIfAbsent(p.column(), p)));
-        return dimensions;
+    private static <T> Map<String, T> byName(Stream<T> terms, Function<T, String> name) {
+        return terms.collect(Collectors.toMap(name, term -> term, (first, again) -> first, LinkedHashMap::new));
     }
 }

@@ -12,7 +12,7 @@ public final class DeclaredReads {
     private DeclaredReads() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             Set<Variable> read = new LinkedHashSet<>();
             List<Situation> probes = workpiece.trials(correlation).probes();
             for (Situation situation : probes) {

@@ -1,10 +1,10 @@
 package stirwright.conformance.internal;
 
-import java.util.List;
-import stirwright.core.CaseRefusedException;
-import stirwright.core.VesselGeometry;
-import stirwright.correlation.ContractException;
+import java.util.HashSet;
+import java.util.Set;
 import stirwright.correlation.Family;
+import stirwright.correlation.Geometry;
+import stirwright.correlation.GeometryParameter;
 
 /** Whether a family's dimensions follow from those that must be given. */
 public final class FamilyGeometry {
@@ -12,15 +12,27 @@ public final class FamilyGeometry {
     private FamilyGeometry() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Family family : workpiece.offer().families()) {
-            for (int baffles : List.of(0, StandardCase.BAFFLES)) {
-                try {
-                    VesselGeometry.resolve(family, StandardCase.given(family, baffles));
-                } catch (CaseRefusedException | ContractException refused) {
-                    findings.add(family.id(), "with " + baffles + " baffles and defaults for the rest: " + refused.getMessage()
-                            + "; a default may read only what the family lists before it");
-                }
+        workpiece.ownFamilies().forEach(family -> examine(family, findings));
+    }
+
+    private static void examine(Family family, Findings findings) {
+        Set<GeometryParameter> listed = new HashSet<>();
+        for (GeometryParameter parameter : family.parameters()) {
+            Set<GeometryParameter> read = new HashSet<>();
+            // Zero and one: a default may ask whether there are baffles at all.
+            for (double value : new double[] {0, 1}) {
+                Geometry reading = other -> {
+                    read.add(other);
+                    return value;
+                };
+                // What is derived may read any dimension and gives NaN where that one was not given.
+                parameter.fallbacks().stream().filter(f -> f.kind() != GeometryParameter.Default.DERIVED)
+                        .forEach(f -> f.value(reading));
             }
+            read.stream().filter(other -> !listed.contains(other)).forEach(other -> findings.add(family.id(),
+                    "the default of " + parameter.column() + " reads " + other.column() + "; a default may read only what"
+                            + " the family lists before it"));
+            listed.add(parameter);
         }
     }
 }

@@ -14,7 +14,7 @@ public final class Ids {
 
     public static void examine(Workpiece workpiece, Findings findings) {
         Set<String> families = new HashSet<>();
-        for (Family family : workpiece.offer().families()) {
+        for (Family family : workpiece.ownFamilies()) {
             if (!families.add(family.id())) {
                 findings.add(family.id(), "the bundle describes this family twice");
             }
@@ -22,21 +22,21 @@ public final class Ids {
                     "the family is described by " + workpiece.others().originOf(other) + " already"));
         }
         Set<String> correlations = new HashSet<>();
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             if (!correlations.add(correlation.id())) {
                 findings.add(correlation.id(), "the bundle has two correlations of this id");
             }
             workpiece.others().entry(correlation.id()).ifPresent(other -> findings.add(correlation.id(),
                     "the id is taken by " + other.origin()));
-            form(correlation, workpiece.offer(), findings);
+            form(correlation, workpiece, findings);
         }
     }
 
-    private static void form(Correlation correlation, Offer offer, Findings findings) {
+    private static void form(Correlation correlation, Workpiece workpiece, Findings findings) {
         String[] parts = correlation.id().split("\\.");
         Set<String> firstWords = new HashSet<>(correlation.families());
-        offer.families().forEach(f -> firstWords.add(f.id()));
-        firstWords.addAll(Arrays.asList(offer.origin().split("[^a-z0-9]+")));
+        workpiece.ownFamilies().forEach(f -> firstWords.add(f.id()));
+        firstWords.addAll(Arrays.asList(workpiece.origin().split("[^a-z0-9]+")));
         if (parts.length != PARTS || !firstWords.contains(parts[0])) {
             findings.add(correlation.id(), "the id must be three parts, 'family.quantity.source'; the first is a family that"
                     + " it is made for or a word of the bundle's symbolic name, here '" + parts[0] + "'");

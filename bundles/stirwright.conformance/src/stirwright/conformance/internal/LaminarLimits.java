@@ -14,10 +14,9 @@ public final class LaminarLimits {
     private LaminarLimits() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             if (correlation.claimsLaminarLimit()) {
-                workpiece.trials(correlation).bases().stream().limit(1)
-                        .forEach(base -> examine(correlation, base, findings));
+                workpiece.trials(correlation).bases().forEach(base -> examine(correlation, base, findings));
             }
         }
     }

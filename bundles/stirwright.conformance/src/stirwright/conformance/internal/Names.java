@@ -10,7 +10,7 @@ public final class Names {
     private Names() {}
 
     public static void examine(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             // A general relation may name families that other bundles will bring; one must be there.
             if (!correlation.families().isEmpty()
                     && correlation.families().stream().allMatch(id -> workpiece.family(id).isEmpty())) {

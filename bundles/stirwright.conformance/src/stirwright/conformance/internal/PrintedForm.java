@@ -11,7 +11,7 @@ public final class PrintedForm {
     private PrintedForm() {}
 
     public static void formula(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             String printed = correlation.formula();
             if (printed.isBlank() || printed.contains("{") || printed.contains("}")) {
                 findings.add(correlation.id(), "the formula prints as '" + printed
@@ -21,7 +21,7 @@ public final class PrintedForm {
     }
 
     public static void applicability(Workpiece workpiece, Findings findings) {
-        for (Correlation correlation : workpiece.offer().correlations()) {
+        for (Correlation correlation : workpiece.correlations()) {
             String when = correlation.appliesWhen();
             if (correlation.modifierFor().isPresent() && (when.isBlank() || when.equals(UNDECLARED))) {
                 findings.add(correlation.id(), "is a modifier and does not say when it applies; use"

@@ -3,12 +3,13 @@ package stirwright.conformance.internal;
 import java.math.BigDecimal;
 import java.util.Arrays;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
+import java.util.Optional;
+import java.util.function.Function;
 import stirwright.core.CaseRefusedException;
+import stirwright.core.VesselGeometry;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 import stirwright.correlation.FluidClass;
@@ -17,6 +18,8 @@ import stirwright.correlation.Variable;
 
 /** Reads one reference row. */
 final class RowReader {
+    private static final String YES = "yes";
+
     private final Workpiece workpiece;
     private final Columns columns;
     private final List<String> cells;
@@ -38,86 +41,74 @@ final class RowReader {
         if (text(Columns.SOURCE).isEmpty()) {
             throw unusable(Columns.SOURCE, "is blank; every number has its source beside it");
         }
-        Map<Variable, Double> variables = variables(correlation);
-        Map<String, Double> given = given(family);
-        Set<String> filledIn = new HashSet<>(StandardCase.given(family, StandardCase.BAFFLES).keySet());
-        filledIn.removeAll(given.keySet());
-        Situation situation = new Situation(dimensions(family, given), variables, fluid());
-        demandWhatIsRead(correlation, situation, filledIn);
-        return new ReferenceRow(place, correlation, kind, expected, situation);
+        if (!List.of("", YES).contains(text(Columns.OUTSIDE))) {
+            throw unusable(Columns.OUTSIDE, "is neither blank nor " + YES);
+        }
+        Situation situation = new Situation(dimensions(family), variables(correlation), fluid());
+        return new ReferenceRow(place, correlation, family, kind, expected, situation, text(Columns.OUTSIDE).equals(YES));
     }
 
     private Family family(Correlation correlation) {
         String id = text(Columns.FAMILY);
-        if (id.isEmpty() && correlation.families().isEmpty()) {
-            return StandardCase.anyFamily();
-        }
-        if (id.isEmpty() && correlation.families().size() > 1) {
-            throw unusable(Columns.FAMILY, "is blank; " + correlation.id() + " is made for " + correlation.families());
+        if (id.isEmpty() && correlation.families().size() != 1) {
+            throw unusable(Columns.FAMILY, "is blank; " + correlation.id() + " is made for "
+                    + (correlation.families().isEmpty() ? "any" : correlation.families()));
         }
         String wanted = id.isEmpty() ? correlation.families().iterator().next() : id;
         if (!correlation.holdsFor(wanted)) {
-            throw unusable(Columns.FAMILY, "is not one that " + correlation.id() + " is made for: " + correlation.families());
+            throw unusable(Columns.FAMILY, "is not one that " + correlation.id() + " is made for: "
+                    + correlation.families());
         }
         return workpiece.family(wanted).orElseThrow(() ->
                 new RowException("family '" + wanted + "' is not installed, so the row cannot be compared"));
     }
 
     private Map<Variable, Double> variables(Correlation correlation) {
-        Map<Variable, Double> variables = new LinkedHashMap<>();
-        columns.variables().forEach((at, variable) -> {
-            if (!cell(at).isEmpty()) {
-                variables.put(variable, number(variable.id(), cell(at)));
-            }
-        });
+        Map<Variable, Double> variables = given(columns.variables(), Variable::id);
         correlation.reads().stream().filter(v -> !variables.containsKey(v)).forEach(v -> {
             throw new RowException("column '" + v.id() + "' is blank, but " + correlation.id() + " reads it");
         });
         return variables;
     }
 
-    private Map<String, Double> given(Family family) {
-        Map<String, Double> given = new HashMap<>();
-        columns.dimensions().forEach((at, parameter) -> {
-            if (!cell(at).isEmpty()) {
-                if (family.parameter(parameter.id()).isEmpty()) {
-                    throw new RowException("column '" + parameter.column() + "' has '" + cell(at) + "', but family "
-                            + family.id() + " has no such dimension");
-                }
-                given.put(parameter.id(), parameter.fromColumn(number(parameter.column(), cell(at))));
+    private Map<GeometryParameter, Double> dimensions(Family family) {
+        Map<String, Double> byId = new HashMap<>();
+        given(columns.dimensions(), GeometryParameter::column).forEach((parameter, value) -> {
+            if (family.parameter(parameter.id()).isEmpty()) {
+                throw new RowException("column '" + parameter.column() + "' has a value, but family " + family.id()
+                        + " has no such dimension");
             }
+            byId.put(parameter.id(), parameter.fromColumn(value));
         });
-        return given;
-    }
-
-    private static Map<GeometryParameter, Double> dimensions(Family family, Map<String, Double> given) {
-        Map<String, Double> all = StandardCase.given(family, StandardCase.BAFFLES);
-        all.putAll(given);
         try {
-            return StandardCase.dimensions(family, all);
+            VesselGeometry geometry = VesselGeometry.resolve(family, byId);
+            Map<GeometryParameter, Double> dimensions = new LinkedHashMap<>();
+            family.parameters().forEach(parameter -> dimensions.put(parameter, geometry.get(parameter)));
+            return dimensions;
         } catch (CaseRefusedException refused) {
             throw new RowException(refused.getMessage());
         }
     }
 
-    /** What has no default may stay blank only where the correlation does not look. */
-    private static void demandWhatIsRead(Correlation correlation, Situation situation, Set<String> filledIn) {
-        ReadLog log = new ReadLog(situation);
-        Outcome.of(correlation, log, log);
-        log.dimensions().stream().filter(p -> filledIn.contains(p.id())).findFirst().ifPresent(p -> {
-            throw new RowException("column '" + p.column() + "' is blank and has no default, but "
-                    + correlation.id() + " reads it");
+    /** The cells that are not blank. */
+    private <T> Map<T, Double> given(Map<Integer, T> terms, Function<T, String> column) {
+        Map<T, Double> given = new LinkedHashMap<>();
+        terms.forEach((at, term) -> {
+            if (!cell(at).isEmpty()) {
+                given.put(term, number(column.apply(term), cell(at)));
+            }
         });
+        return given;
     }
 
     private FluidClass fluid() {
-        String id = columns.texts().containsKey(Columns.FLUID) ? text(Columns.FLUID) : "";
-        return id.isEmpty() ? StandardCase.FLUID : Arrays.stream(FluidClass.values())
+        String id = text(Columns.FLUID);
+        return id.isEmpty() ? FluidClass.SHEAR_THINNING : Arrays.stream(FluidClass.values())
                 .filter(fluid -> fluid.id().equals(id)).findFirst().orElseThrow(() -> unusable(Columns.FLUID,
                         "is none of " + Arrays.stream(FluidClass.values()).map(FluidClass::id).toList()));
     }
 
-    private double number(String column, String text) {
+    private static double number(String column, String text) {
         try {
             return new BigDecimal(text).doubleValue();
         } catch (NumberFormatException notANumber) {
@@ -125,9 +116,9 @@ final class RowReader {
         }
     }
 
+    /** Blank where there is no such column. */
     private String text(String column) {
-        Integer at = columns.texts().get(column);
-        return at == null ? "" : cell(at);
+        return Optional.ofNullable(columns.texts().get(column)).map(this::cell).orElse("");
     }
 
     private String cell(int at) {

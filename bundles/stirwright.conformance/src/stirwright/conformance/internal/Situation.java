@@ -2,6 +2,7 @@ package stirwright.conformance.internal;
 
 import java.util.LinkedHashMap;
 import java.util.Map;
+import stirwright.correlation.Family;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Geometry;
 import stirwright.correlation.GeometryParameter;
@@ -35,6 +36,13 @@ record Situation(Map<GeometryParameter, Double> dimensions, Map<Variable, Double
 
     Situation with(FluidClass other) {
         return new Situation(dimensions, variables, other);
+    }
+
+    /** Whether it keeps to the family's hard limits. */
+    boolean existsIn(Family family) {
+        return dimensions.entrySet().stream().allMatch(
+                        each -> each.getValue() >= each.getKey().min() && each.getValue() <= each.getKey().max())
+                && family.rules().stream().allMatch(rule -> rule.holds(this));
     }
 
     private static <K> Map<K, Double> changed(Map<K, Double> values, K key, double value) {

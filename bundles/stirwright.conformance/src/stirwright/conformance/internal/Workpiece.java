@@ -6,27 +6,42 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Stream;
 import stirwright.conformance.ReferenceFile;
+import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
 import stirwright.core.Entry;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 
-/** What all checks of one subject share: the offer, its reference rows, and cases to try it on. Not thread-safe. */
+/** What all checks of one subject share: what it brings, its reference rows, and cases to try it on. Not thread-safe. */
 public final class Workpiece {
-    private final Offer offer;
+    private final String origin;
+    private final List<Arrival> arrivals;
     private final List<ReferenceFile> files;
     private final Catalogue others;
     private final Map<Correlation, Trials> trials = new HashMap<>();
     private ReferenceRows references;
 
-    public Workpiece(Offer offer, List<ReferenceFile> files, Catalogue others) {
-        this.offer = offer;
+    public Workpiece(String origin, List<Arrival> arrivals, List<ReferenceFile> files, Catalogue others) {
+        this.origin = origin;
+        this.arrivals = List.copyOf(arrivals);
         this.files = List.copyOf(files);
         this.others = others;
     }
 
-    public Offer offer() {
-        return offer;
+    public String origin() {
+        return origin;
+    }
+
+    List<Arrival> arrivals() {
+        return arrivals;
+    }
+
+    public List<Family> ownFamilies() {
+        return arrivals.stream().flatMap(arrival -> arrival.families().stream()).toList();
+    }
+
+    public List<Correlation> correlations() {
+        return arrivals.stream().flatMap(arrival -> arrival.correlations().stream()).toList();
     }
 
     /** What the other bundles contribute. */
@@ -43,12 +58,12 @@ public final class Workpiece {
 
     /** The cases on which a correlation is tried. */
     Trials trials(Correlation correlation) {
-        return trials.computeIfAbsent(correlation, c -> Trials.of(c, this));
+        return trials.computeIfAbsent(correlation, c -> Trials.of(c, references().of(c)));
     }
 
     /** Every family there is, those of the subject first. */
     List<Family> families() {
-        return Stream.concat(offer.families().stream(), others.families().stream()).toList();
+        return Stream.concat(ownFamilies().stream(), others.families().stream()).toList();
     }
 
     Optional<Family> family(String id) {
@@ -57,7 +72,7 @@ public final class Workpiece {
 
     /** A correlation of the subject. */
     Optional<Correlation> own(String id) {
-        return offer.correlations().stream().filter(c -> c.id().equals(id)).findFirst();
+        return correlations().stream().filter(c -> c.id().equals(id)).findFirst();
     }
 
     /** A correlation of the subject or of anybody else. */

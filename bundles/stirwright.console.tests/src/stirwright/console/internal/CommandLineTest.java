@@ -27,9 +27,9 @@ import stirwright.general.GeneralRelations;
 /** The command line as a script sees it: what goes to which stream, and the exit code. */
 class CommandLineTest {
     static final Catalogue CATALOGUE = Catalogue.of(List.of(
-            new Arrival(new DiscTurbine(), "stirwright.family.discturbine 1"),
-            new Arrival(new PitchedBlade(), "stirwright.family.pitchedblade 1"),
-            new Arrival(new GeneralRelations(), "stirwright.general 1")));
+            Arrival.of(new DiscTurbine(), "stirwright.family.discturbine 1"),
+            Arrival.of(new PitchedBlade(), "stirwright.family.pitchedblade 1"),
+            Arrival.of(new GeneralRelations(), "stirwright.general 1")));
 
     private static final String HEAD = "case,family,impeller_diameter_m,vessel_diameter_m,liquid_height_m,clearance_m,"
             + "blade_count,blade_width_m,blade_length_m,blade_thickness_m,baffle_count,baffle_width_m,speed_rev_s,"

@@ -21,7 +21,8 @@ final class CaseView {
 
     static String text(CaseEntry entry, CaseResult result) {
         StringBuilder text = new StringBuilder();
-        Columns.appendWrapped(text, "", entry.name() + ", family " + (result.family().isBlank() ? "not given" : result.family())
+        Columns.appendWrapped(text, "", shortened(entry.name()) + ", family "
+                + (result.family().isBlank() ? "not given" : shortened(result.family()))
                 + ": " + result.status().id(), WIDTH);
         result.flags().forEach(f -> Columns.appendWrapped(text, "  ", "flag: " + f, WIDTH));
         result.refusal().ifPresent(r -> Columns.appendWrapped(text, "  ", r.words(), WIDTH));
@@ -32,6 +33,12 @@ final class CaseView {
             Columns.appendWrapped(text, "  ", CAUTION, WIDTH);
         });
         return text.toString();
+    }
+
+    /** Words of the input as a terminal can bear them: no control characters, not longer than half a line. */
+    static String shortened(String words) {
+        String plain = words.replaceAll("\\p{Cntrl}", "?");
+        return plain.length() <= WIDTH / 2 ? plain : plain.substring(0, WIDTH / 2) + "...";
     }
 
     private static void productAndFlow(StringBuilder text, CandidateResult pick, FluidState state) {
@@ -68,7 +75,7 @@ final class CaseView {
                 : "largest over smallest power of those that qualify: " + Figures.show(result.spread()), WIDTH);
     }
 
-    /** What a row is to its case, readable without colour: the pick first, what is excluded in brackets. */
+    /** What a row is to its case, readable without colour; the summary says what the marks mean. */
     private static String mark(CandidateResult row) {
         return switch (row.role()) {
             case RECOMMENDED -> "> ";

@@ -57,7 +57,7 @@ final class CatalogueView {
         line(text, 6, c.formula());
         line(text, 6, "range: " + String.join("; ", c.validity().stream().map(Bound::words).toList()));
         line(text, 6, "source: " + c.citation());
-        line(text, 6, c.standing().words() + "; digits " + c.transcription().words()
+        line(text, 6, (c.citation().hasSource() ? c.standing().words() : "rule of the trade") + "; digits " + c.transcription().words()
                 + (c.scatter().isPresent()
                         ? String.format(Locale.ROOT, "; scatter %.0f %%", 100 * c.scatter().getAsDouble()) : "")
                 + (c.contains().isEmpty() ? ""

@@ -1,6 +1,7 @@
 package stirwright.console.internal;
 
 import java.io.IOException;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -29,6 +30,9 @@ final class CheckCommand implements Callable<Integer> {
         } catch (JarRefusedException refused) {
             desk.err().println(refused.getMessage());
             return ExitCode.UNUSABLE;
+        } catch (NoSuchFileException missing) {
+            desk.err().println(jar + ": there is no such file");
+            return ExitCode.UNUSABLE;
         } catch (IOException unreadable) {
             desk.err().println(jar + " cannot be read: " + unreadable.getMessage());
             return ExitCode.UNUSABLE;
@@ -37,7 +41,8 @@ final class CheckCommand implements Callable<Integer> {
         report.findings().forEach(f -> Columns.appendWrapped(text, "", f.toString(), CaseView.WIDTH));
         Columns.appendWrapped(text, "", report.bundle() + ": " + count(report.families().size(), "family", "families") + ", "
                 + count(report.correlations().size(), "correlation", "correlations") + ", "
-                + count(report.rows(), "reference row", "reference rows") + " compared; "
+                + count(report.rows(), "reference row", "reference rows") + " compared"
+                + (report.recalledRows() > 0 ? ", " + report.recalledRows() + " of them recalled; " : "; ")
                 + (report.passed() ? "it conforms." : count(report.findings().size(), "finding", "findings") + "."),
                 CaseView.WIDTH);
         desk.out().print(text);

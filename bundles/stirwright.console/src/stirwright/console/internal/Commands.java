@@ -46,7 +46,9 @@ final class Commands {
             desk.out().println("Stirwright " + desk.version());
             return ExitCode.OK;
         }
-        return arguments.length == 0 ? line.execute("help") : line.execute(arguments);
+        boolean asksForHelp = arguments.length == 0
+                || arguments.length == 1 && (arguments[0].equals("--help") || arguments[0].equals("-h"));
+        return asksForHelp ? line.execute("help") : line.execute(arguments);
     }
 
     private static IParameterExceptionHandler wrongUse(Desk desk) {

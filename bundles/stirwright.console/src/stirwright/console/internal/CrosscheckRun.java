@@ -85,7 +85,7 @@ final class CrosscheckRun {
             outputs.forEach(o -> o.add(done.result()));
             summary.add(done.entry(), done.result());
             done.result().refusal().ifPresent(r -> desk.err().println(fileName + " line " + done.entry().line()
-                    + " (case '" + done.entry().name() + "'): " + r.words()));
+                    + " (case '" + CaseView.shortened(done.entry().name()) + "'): " + r.words()));
         }
     }
 

@@ -44,17 +44,20 @@ final class HelpCommand implements Callable<Integer> {
         return ExitCode.OK;
     }
 
-    /** Paragraphs broken to the width of a terminal; rows of tables stay whole. */
+    /** The page as a terminal shows it: paragraphs broken to its width, rows of tables as entries. */
     private static String forTerminal(String page) {
         StringBuilder text = new StringBuilder();
-        page.lines().forEach(line -> {
-            if (line.startsWith("|")) {
-                text.append(line).append('\n');
-            } else {
-                Columns.appendWrapped(text, "", line, CaseView.WIDTH);
-            }
+        page.lines().filter(line -> !line.startsWith("|---")).forEach(line -> {
+            boolean row = line.startsWith("|");
+            Columns.appendWrapped(text, row ? "  " : "", row ? entry(line) : line, CaseView.WIDTH);
         });
         return text.toString();
+    }
+
+    /** "| name | unit | meaning |" as "name [unit] meaning". */
+    private static String entry(String row) {
+        String[] cells = row.substring(1, row.length() - 1).strip().split(" \\| ", 3);
+        return cells.length < 3 ? String.join("  ", cells) : cells[0] + "  [" + cells[1].strip() + "]  " + cells[2].strip();
     }
 
     private static String page(String name) {

@@ -1,8 +1,11 @@
 package stirwright.console.internal;
 
 import java.io.PrintWriter;
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import stirwright.core.CandidateResult;
 import stirwright.core.CaseResult;
@@ -18,20 +21,22 @@ final class Summary {
     /** Cases that ask for the same shear rate of the same fluid compete. */
     private record Contest(double shearRate, Fluid fluid) {}
 
-    private record Entrant(String name, String family, CandidateResult pick) {}
+    private record Entrant(String name, CandidateResult pick) {
+        String words() {
+            return CaseView.shortened(name) + ", " + Figures.show(pick.power()) + " W at "
+                    + pick.state().map(s -> Figures.show(s.speed())).orElse("?") + " rev/s";
+        }
+    }
 
     private final Map<Status, Integer> counts = new EnumMap<>(Status.class);
-    private final Map<Contest, Entrant> least = new LinkedHashMap<>();
-    private final Map<Contest, Integer> entrants = new LinkedHashMap<>();
+    private final Map<Contest, List<Entrant>> contests = new LinkedHashMap<>();
 
     void add(CaseEntry entry, CaseResult result) {
         counts.merge(result.status(), 1, Integer::sum);
         entry.spec().ifPresent(spec -> {
             if (spec.speed() instanceof SpeedDemand.ForShearRate demand && result.pick().isPresent()) {
-                Contest contest = new Contest(demand.value(), spec.fluid());
-                Entrant entrant = new Entrant(entry.name(), result.family(), result.pick().get());
-                entrants.merge(contest, 1, Integer::sum);
-                least.merge(contest, entrant, (a, b) -> b.pick().power() < a.pick().power() ? b : a);
+                contests.computeIfAbsent(new Contest(demand.value(), spec.fluid()), c -> new ArrayList<>())
+                        .add(new Entrant(entry.name(), result.pick().get()));
             }
         });
     }
@@ -43,13 +48,13 @@ final class Summary {
 
     void print(PrintWriter out) {
         StringBuilder text = new StringBuilder();
-        least.forEach((contest, best) -> {
-            if (entrants.get(contest) > 1) {
+        contests.forEach((contest, entrants) -> {
+            if (entrants.size() > 1) {
+                entrants.sort(Comparator.comparingDouble(e -> e.pick().power()));
                 Columns.appendWrapped(text, "", "Least power for " + Figures.show(contest.shearRate()) + " 1/s among "
-                        + entrants.get(contest) + " cases with this fluid: " + best.name() + " (" + best.family() + "), "
-                        + Figures.show(best.pick().power()) + " W at "
-                        + best.pick().state().map(s -> Figures.show(s.speed())).orElse("?") + " rev/s by "
-                        + best.pick().correlation() + ".", CaseView.WIDTH);
+                        + entrants.size() + " cases with this fluid: " + entrants.get(0).words() + "; next "
+                        + entrants.get(1).words() + ". Through the speed, power rests on the shear-rate constant up to its"
+                        + " third power: see what each case says of its constant.", CaseView.WIDTH);
             }
         });
         Columns.appendWrapped(text, "", "Cases: " + count(Status.OK) + " ok, " + count(Status.FLAGGED) + " flagged, "

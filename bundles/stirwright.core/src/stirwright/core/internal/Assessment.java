@@ -5,11 +5,6 @@ import java.util.List;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.correlation.Bound;
-import stirwright.correlation.Classifier;
-import stirwright.correlation.Correlation;
-import stirwright.correlation.Measure;
-import stirwright.correlation.Term;
-import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 
@@ -18,9 +13,11 @@ import stirwright.correlation.Verdict;
  *
  * @param verdict the worst over all bounds, those of the applied modifiers included
  * @param failed each stated bound that fails, with what the case has
+ * @param distance how far beyond its stated bounds the case lies: the sum of the logarithms of the
+ *     ratios, infinite when a class or count fails
  * @param obstacle why it does not qualify, in one sentence; empty when it does
  */
-record Assessment(Verdict verdict, List<String> failed, int notStated, String obstacle) {
+record Assessment(Verdict verdict, List<String> failed, double distance, String obstacle) {
 
     boolean qualifies() {
         return obstacle.isEmpty();
@@ -28,45 +25,54 @@ record Assessment(Verdict verdict, List<String> failed, int notStated, String ob
 
     /** Of a candidate for which no state was found. */
     static Assessment impossible(String reason) {
-        return new Assessment(Verdict.NOT_STATED, List.of(), 0, reason);
+        return new Assessment(Verdict.NOT_STATED, List.of(), Double.POSITIVE_INFINITY, reason);
     }
 
     static Assessment of(Candidate candidate, Point point, FluidState state, double value) {
         if (candidate.correlation().isEmpty()) {
             return new Assessment(Verdict.NOT_STATED, List.of(), 0, "");
         }
-        Correlation correlation = candidate.correlation().get();
-        Verdict verdict = Verdict.INSIDE;
+        Verdict verdict = candidate.verdict(point, state, state.reynolds());
         List<String> failed = new ArrayList<>();
-        int notStated = 0;
-        List<Correlation> all = new ArrayList<>(candidate.modifiers());
-        all.add(0, correlation);
-        for (Correlation part : all) {
-            point.set(Variable.REYNOLDS, state.reynolds(part.reynoldsDefinition()));
-            for (Bound bound : part.validity()) {
+        double distance = verdict.fails() && candidate.failure().isEmpty()
+                ? collectFailures(candidate, point, state, failed) : 0;
+        return new Assessment(verdict, List.copyOf(failed), distance, obstacle(candidate, value, failed, point, state));
+    }
+
+    private static double collectFailures(Candidate candidate, Point point, FluidState state, List<String> failed) {
+        double distance = 0;
+        for (Candidate.Part part : candidate.parts()) {
+            point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds()));
+            String whose = part == candidate.parts().get(0) ? "" : part.correlation().id() + ": ";
+            for (Bound bound : part.correlation().validity()) {
                 Verdict found = bound.verdict(candidate.geometry(), point);
-                verdict = verdict.worseOf(found);
                 if (found.fails()) {
-                    failed.add(bound.found(candidate.geometry(), point) + " is " + found.id() + " ("
-                            + (part == correlation ? "" : part.id() + ": ") + bound.allowance() + ")");
-                } else if (found == Verdict.NOT_STATED && part == correlation) {
-                    notStated++;
+                    failed.add(bound.found(candidate.geometry(), point) + " is " + found.id()
+                            + " (" + whose + bound.allowance() + ")");
+                    distance += distance(bound, candidate, point);
                 }
             }
         }
-        String obstacle = obstacle(correlation, value, failed, point, state);
-        return new Assessment(verdict, List.copyOf(failed), notStated, obstacle);
+        return distance;
+    }
+
+    private static double distance(Bound bound, Candidate candidate, Point point) {
+        if (bound instanceof Bound.Range range) {
+            double value = range.subject().value(candidate.geometry(), point);
+            double ratio = value < range.least() ? range.least() / value : value / range.most();
+            return ratio > 0 ? Math.log(ratio) : Double.POSITIVE_INFINITY;
+        }
+        return Double.POSITIVE_INFINITY;
     }
 
     private static String obstacle(
-            Correlation correlation, double value, List<String> failed, Point point, FluidState state) {
-        if (Double.isNaN(state.reynolds(correlation.reynoldsDefinition()))) {
-            return "its Reynolds number (" + correlation.reynoldsDefinition().title() + ") cannot be computed here";
+            Candidate candidate, double value, List<String> failed, Point point, FluidState state) {
+        String unknown = unknown(candidate, point, state);
+        if (!candidate.failure().isEmpty()) {
+            return "its code fails: " + candidate.failure();
         }
-        for (Variable variable : correlation.reads()) {
-            if (Double.isNaN(point.get(variable))) {
-                return "it needs the " + variable.title() + ", which is not known here";
-            }
+        if (!unknown.isEmpty()) {
+            return unknown;
         }
         if (!(value > 0 && value < Double.POSITIVE_INFINITY)) {
             return "its formula gives no positive number here";
@@ -74,29 +80,22 @@ record Assessment(Verdict verdict, List<String> failed, int notStated, String ob
         if (!failed.isEmpty()) {
             return failed.get(0) + (failed.size() > 1 ? " (and " + (failed.size() - 1) + " more)" : "");
         }
-        if (!stated(correlation, Measure.REYNOLDS)) {
-            return "its source states no range of the Reynolds number";
-        }
-        if (!statesGeometryClass(correlation)) {
-            return "its source does not state the impeller type or whether the vessel was baffled";
-        }
-        if (correlation.transcription() == Transcription.UNSURE) {
-            return "some of its digits are unsure (" + correlation.transcription().words() + ")";
-        }
-        if (!correlation.citation().hasSource()) {
-            return "it has no source (common practice)";
-        }
-        return correlation.standing().recommendable()
-                ? "" : "its standing is " + correlation.standing().words();
+        return Trust.obstacle(candidate);
     }
 
-    /** Blade count or type, and baffled or not. A relation made for named families states the type. */
-    private static boolean statesGeometryClass(Correlation correlation) {
-        boolean type = !correlation.families().isEmpty() || stated(correlation, Measure.BLADE_COUNT);
-        return type && stated(correlation, Classifier.BAFFLING);
-    }
-
-    private static boolean stated(Correlation correlation, Term subject) {
-        return correlation.bound(subject).map(Bound::stated).orElse(false);
+    /** What it reads and nobody knows here, in words; empty when all is known. */
+    static String unknown(Candidate candidate, Point point, FluidState state) {
+        for (Candidate.Part part : candidate.parts()) {
+            if (Double.isNaN(part.reynolds(state, state.reynolds()))) {
+                return "its Reynolds number (" + part.correlation().reynoldsDefinition().title()
+                        + ") cannot be computed here";
+            }
+        }
+        for (Variable variable : candidate.reads()) {
+            if (!variable.equals(Variable.REYNOLDS) && Double.isNaN(point.get(variable))) {
+                return "it needs the " + variable.title() + ", which is not known here";
+            }
+        }
+        return "";
     }
 }

@@ -8,6 +8,7 @@ import java.util.Set;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.VesselGeometry;
+import stirwright.correlation.Bound;
 import stirwright.correlation.BoundCorrelation;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
@@ -17,10 +18,14 @@ import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.ReynoldsDefinition;
 import stirwright.correlation.Variable;
+import stirwright.correlation.Verdict;
 
 /**
  * A correlation, or a given value, applied to one geometry together with the modifiers for the
- * effects that it does not contain.
+ * effects that it does not contain. Not thread-safe.
+ *
+ * <p>What correlations compute is code of other bundles: whatever it throws becomes a value that is
+ * no number and a {@link #failure}, so that one bad contribution costs its own candidate alone.
  */
 final class Candidate {
 
@@ -29,31 +34,33 @@ final class Candidate {
 
     private final Quantity quantity;
     private final Optional<Correlation> correlation;
-    private final Part base;
-    private final List<Part> modifiers;
+    private final List<Part> parts;
+    private final Set<Variable> reads = new LinkedHashSet<>();
     private final Geometry geometry;
     private final Set<GeometryParameter> defaultsRead;
+    private String failure = "";
+    private double givenValue = Double.NaN;
 
-    /** One factor: a correlation bound to the geometry, and the Reynolds number that it means. */
-    private record Part(Optional<Correlation> correlation, BoundCorrelation bound, ReynoldsDefinition reynolds) {
-        static Part of(Correlation correlation, Geometry geometry) {
-            return new Part(Optional.of(correlation), correlation.bind(geometry), correlation.reynoldsDefinition());
-        }
+    /** One factor: a correlation bound to the geometry. */
+    record Part(Correlation correlation, BoundCorrelation bound) {
 
-        double at(Point point, FluidState state) {
-            return bound.at(point.set(Variable.REYNOLDS, state.reynolds(reynolds)));
+        /** The Reynolds number that this correlation means, from that of Metzner and Otto. */
+        double reynolds(FluidState state, double reynolds) {
+            ReynoldsDefinition definition = correlation.reynoldsDefinition();
+            return definition.equals(ReynoldsDefinition.METZNER_OTTO)
+                    ? reynolds : reynolds * state.reynolds(definition) / state.reynolds();
         }
     }
 
     private Candidate(
-            Quantity quantity, Optional<Correlation> correlation, Part base, List<Part> modifiers,
-            Geometry geometry, Set<GeometryParameter> defaultsRead) {
+            Quantity quantity, Optional<Correlation> correlation, List<Part> parts, Geometry geometry,
+            Set<GeometryParameter> defaultsRead) {
         this.quantity = quantity;
         this.correlation = correlation;
-        this.base = base;
-        this.modifiers = List.copyOf(modifiers);
+        this.parts = parts;
         this.geometry = geometry;
         this.defaultsRead = defaultsRead;
+        parts.forEach(p -> reads.addAll(p.correlation().reads()));
     }
 
     /** Applies a correlation with, for each effect that it lacks, the first of the modifiers. */
@@ -61,19 +68,32 @@ final class Candidate {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
         List<Part> parts = new ArrayList<>();
-        Set<Effect> done = new LinkedHashSet<>(correlation.contains());
-        modifiers.stream()
-                .filter(m -> m.appliesTo(geometry))
-                .filter(m -> done.add(m.modifierFor().orElseThrow()))
-                .forEach(m -> parts.add(Part.of(m, geometry)));
-        return new Candidate(correlation.quantity(), Optional.of(correlation),
-                Part.of(correlation, geometry), parts, geometry, defaultsRead);
+        String failure = "";
+        try {
+            parts.add(new Part(correlation, correlation.bind(geometry)));
+            Set<Effect> done = new LinkedHashSet<>(correlation.contains());
+            for (Correlation modifier : modifiers) {
+                Effect effect = modifier.modifierFor().orElseThrow();
+                if (!done.contains(effect) && modifier.appliesTo(geometry)) {
+                    parts.add(new Part(modifier, modifier.bind(geometry)));
+                    done.add(effect);
+                    done.addAll(modifier.contains());
+                }
+            }
+        } catch (RuntimeException | LinkageError broken) {
+            failure = String.valueOf(broken);
+        }
+        Candidate candidate = new Candidate(
+                correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead);
+        candidate.failure = failure;
+        return candidate;
     }
 
     /** A value that the user gave: a total, so no modifier touches it. */
     static Candidate given(Quantity quantity, double value, VesselGeometry vessel) {
-        Part part = new Part(Optional.empty(), p -> value, ReynoldsDefinition.METZNER_OTTO);
-        return new Candidate(quantity, Optional.empty(), part, List.of(), vessel, Set.of());
+        Candidate candidate = new Candidate(quantity, Optional.empty(), List.of(), vessel, Set.of());
+        candidate.givenValue = value;
+        return candidate;
     }
 
     String id() {
@@ -88,6 +108,11 @@ final class Candidate {
         return correlation;
     }
 
+    /** The correlation and the modifiers applied to it; empty for a given value. */
+    List<Part> parts() {
+        return parts;
+    }
+
     Geometry geometry() {
         return geometry;
     }
@@ -97,36 +122,66 @@ final class Candidate {
         return defaultsRead;
     }
 
-    List<Correlation> modifiers() {
-        return modifiers.stream().map(m -> m.correlation().orElseThrow()).toList();
+    Set<Variable> reads() {
+        return reads;
     }
 
-    /** The value, all modifiers included; the point holds the state already. */
+    /** What the contributed code threw; empty when it did not. */
+    String failure() {
+        return failure;
+    }
+
+    /** The value at a state, all modifiers included. */
     double value(Point point, FluidState state) {
-        double value = base.at(point, state);
-        for (Part modifier : modifiers) {
-            value *= modifier.at(point, state);
+        return value(point, state, state.reynolds());
+    }
+
+    /** The value at another Reynolds number; like the verdict called in sweeps, so without iterators. */
+    double value(Point point, FluidState state, double reynolds) {
+        if (correlation.isEmpty()) {
+            return givenValue;
         }
-        return value;
+        if (!failure.isEmpty()) {
+            return Double.NaN;
+        }
+        try {
+            double value = 1;
+            for (int i = 0; i < parts.size(); i++) {
+                Part part = parts.get(i);
+                value *= part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, reynolds)));
+            }
+            return value;
+        } catch (RuntimeException | LinkageError broken) {
+            failure = String.valueOf(broken);
+            return Double.NaN;
+        }
     }
 
-    /** Whether the value can change with the state of the product. */
-    boolean reads(Variable variable) {
-        return correlation.map(c -> c.reads().contains(variable)).orElse(false)
-                || modifiers.stream().anyMatch(m -> m.correlation().orElseThrow().reads().contains(variable));
-    }
-
-    boolean readsNothing() {
-        return correlation.map(c -> c.reads().isEmpty()).orElse(true)
-                && modifiers.stream().allMatch(m -> m.correlation().orElseThrow().reads().isEmpty());
+    /** The worst verdict over all bounds, without words. */
+    Verdict verdict(Point point, FluidState state, double reynolds) {
+        Verdict worst = Verdict.INSIDE;
+        try {
+            for (int i = 0; i < parts.size(); i++) {
+                point.set(Variable.REYNOLDS, parts.get(i).reynolds(state, reynolds));
+                List<Bound> bounds = parts.get(i).correlation().validity();
+                for (int j = 0; j < bounds.size(); j++) {
+                    worst = worst.worseOf(bounds.get(j).verdict(geometry, point));
+                }
+            }
+            return worst;
+        } catch (RuntimeException | LinkageError broken) {
+            failure = String.valueOf(broken);
+            return Verdict.OUTSIDE;
+        }
     }
 
     /** The modifiers in words with the factor that each contributes. */
     List<String> modifiersInWords(Point point, FluidState state) {
-        return modifiers.stream().map(m -> {
-            Correlation c = m.correlation().orElseThrow();
+        return parts.stream().skip(1).map(part -> {
+            Correlation c = part.correlation();
+            double factor = part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds())));
             return c.modifierFor().orElseThrow().title() + ": " + quantity.title() + " times "
-                    + Figures.show(m.at(point, state)) + " by " + c.id()
+                    + Figures.show(factor) + " by " + c.id()
                     + (c.citation().hasSource() ? "" : " (" + c.citation() + ")");
         }).toList();
     }

@@ -4,7 +4,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
-import org.osgi.framework.Bundle;
 import org.osgi.framework.ServiceReference;
 import org.osgi.service.component.annotations.Component;
 import org.osgi.service.component.annotations.Reference;
@@ -28,11 +27,12 @@ public final class ContributionRegistry implements Library {
     private Catalogue current;
 
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
-    synchronized void addContribution(Contribution contribution, ServiceReference<Contribution> reference) {
-        Bundle bundle = reference.getBundle();
-        String origin = bundle == null ? "a bundle that has left" : bundle.getSymbolicName() + " " + bundle.getVersion();
-        arrivals.put(reference, new Arrival(contribution, origin));
-        current = null;
+    void addContribution(Contribution contribution, ServiceReference<Contribution> reference) {
+        Arrival arrival = Arrival.of(contribution, Arrival.origin(reference.getBundle()));
+        synchronized (this) {
+            arrivals.put(reference, arrival);
+            current = null;
+        }
     }
 
     synchronized void removeContribution(ServiceReference<Contribution> reference) {

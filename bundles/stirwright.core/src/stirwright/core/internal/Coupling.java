@@ -1,10 +1,12 @@
 package stirwright.core.internal;
 
+import java.util.Set;
 import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.SpeedDemand;
+import stirwright.correlation.Figures;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Variable;
 import stirwright.rheology.Fluid;
@@ -23,8 +25,15 @@ final class Coupling {
     private static final double FIRST_GUESS = 10;
     private static final double LEAST_CONSTANT = 1e-3;
     private static final double MOST_CONSTANT = 1e5;
+    /** Pa s. Common practice, no source: gases lie above, and nothing that is stirred beyond. */
+    private static final double LEAST_VISCOSITY = 1e-6;
+    private static final double MOST_VISCOSITY = 1e9;
     /** A flow index within this of 1 is a constant viscosity. */
     private static final double NEWTONIAN = 1e-9;
+
+    /** What is known of the product as soon as the shear rate is, whatever the speed. */
+    private static final Set<Variable> BY_SHEAR_RATE_ALONE =
+            Set.of(Variable.FLOW_INDEX, Variable.VISCOSITY, Variable.DENSITY);
 
     private final Fluid fluid;
     private final double diameter;
@@ -40,57 +49,75 @@ final class Coupling {
 
     /** The state at a speed in rev/s. */
     Solution at(double speed, Candidate constant) {
-        if (constant.readsNothing()) {
-            return finished(speed, evaluate(constant, state(speed, FIRST_GUESS)));
+        if (constant.reads().isEmpty()) {
+            return finished(speed, evaluate(constant, state(speed, FIRST_GUESS)), constant);
         }
         double current = FIRST_GUESS;
         for (int step = 0; step < STEPS; step++) {
             double next = evaluate(constant, state(speed, current));
             if (!usable(next)) {
-                break;
+                return step == 0 ? finished(speed, next, constant) : search(speed, constant);
             }
             if (Math.abs(next - current) <= TOLERANCE * next) {
-                return finished(speed, next);
+                return finished(speed, next, constant);
             }
             current = next;
         }
+        return search(speed, constant);
+    }
+
+    /** For loops that plain iteration runs away from. */
+    private Solution search(double speed, Candidate constant) {
         UnivariateFunction gap = ln -> Math.log(evaluate(constant, state(speed, Math.exp(ln)))) - ln;
         double root = Roots.least(gap, Math.log(LEAST_CONSTANT), Math.log(MOST_CONSTANT), TOLERANCE);
         return Double.isNaN(root)
                 ? Solution.failed("the loop between shear rate and shear-rate constant does not converge to "
                         + TOLERANCE + " after " + STEPS + " steps and a search from " + LEAST_CONSTANT
                         + " to " + MOST_CONSTANT)
-                : finished(speed, Math.exp(root));
+                : finished(speed, Math.exp(root), constant);
     }
 
     /** The state at the least speed that gives an average shear rate in 1/s. */
     Solution forShearRate(SpeedDemand.ForShearRate demand, Candidate constant) {
         double shearRate = demand.value();
-        if (constant.readsNothing()) {
-            double value = evaluate(constant, state(1, FIRST_GUESS));
-            return usable(value) ? at(shearRate / value, constant) : finished(1, value);
+        double speed;
+        if (BY_SHEAR_RATE_ALONE.containsAll(constant.reads())) {
+            double value = evaluate(constant, state(1, shearRate));
+            if (!usable(value)) {
+                return finished(1, value, constant);
+            }
+            speed = shearRate / value;
+        } else {
+            // At a known shear rate the fluid is known; only the speed is not.
+            speed = Math.exp(Roots.least(ln -> {
+                double trial = Math.exp(ln);
+                return Math.log(evaluate(constant, state(trial, shearRate / trial)) * trial / shearRate);
+            }, Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), TOLERANCE));
         }
-        // At a known shear rate the fluid is known; only the speed is not.
-        UnivariateFunction gap = ln -> {
-            double speed = Math.exp(ln);
-            return Math.log(evaluate(constant, state(speed, shearRate / speed)) * speed / shearRate);
-        };
-        double root = Roots.least(gap, Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), TOLERANCE);
-        return Double.isNaN(root) ? Solution.failed(Roots.noSpeed(demand)) : at(Math.exp(root), constant);
+        return speed <= Math.exp(Roots.mostLnSpeed(diameter))
+                ? finished(speed, shearRate / speed, constant)
+                : Solution.failed(Roots.noSpeed(demand));
     }
 
     private double evaluate(Candidate constant, FluidState state) {
         point.at(state);
-        if (constant.reads(Variable.FLOW_NUMBER)) {
+        if (constant.reads().contains(Variable.FLOW_NUMBER)) {
             point.set(Variable.FLOW_NUMBER, flowNumber.applyAsDouble(state));
         }
         return constant.value(point, state);
     }
 
-    private Solution finished(double speed, double constant) {
-        return usable(constant)
-                ? Solution.found(state(speed, constant))
-                : Solution.failed("the shear-rate constant has no positive value here");
+    private Solution finished(double speed, double constant, Candidate candidate) {
+        FluidState state = state(speed, usable(constant) ? constant : FIRST_GUESS);
+        if (usable(constant)) {
+            return state.viscosity() >= LEAST_VISCOSITY && state.viscosity() <= MOST_VISCOSITY
+                    ? Solution.found(state)
+                    : Solution.failed("the apparent viscosity " + Figures.show(state.viscosity()) + " Pa s is not from "
+                            + Figures.show(LEAST_VISCOSITY) + " to " + Figures.show(MOST_VISCOSITY) + " Pa s");
+        }
+        String unknown = Assessment.unknown(candidate, point, state);
+        return Solution.failed(!candidate.failure().isEmpty() ? "its code fails: " + candidate.failure()
+                : unknown.isEmpty() ? "the shear-rate constant has no positive value here" : unknown);
     }
 
     private static boolean usable(double constant) {

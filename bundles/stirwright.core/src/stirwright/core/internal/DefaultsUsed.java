@@ -19,18 +19,20 @@ final class DefaultsUsed {
     private final Set<GeometryParameter> matter = new LinkedHashSet<>();
     private final Set<GeometryParameter> used = new LinkedHashSet<>();
 
-    /** @param viscosityVaries whether the power rests on the shear-rate constant */
-    DefaultsUsed(CaseSpec spec, VesselGeometry vessel, ResultAssembly.Row row, boolean viscosityVaries) {
+    /** @param restsOnConstant whether the power rests on the shear-rate constant */
+    DefaultsUsed(CaseSpec spec, VesselGeometry vessel, ResultAssembly.Row row, boolean restsOnConstant) {
         this.vessel = vessel;
         matter.addAll(row.power().trial().candidate().defaultsRead());
-        if (viscosityVaries) {
+        if (restsOnConstant) {
             matter.addAll(readBy(row.constants()));
         }
         used.addAll(readBy(row.constants()));
         used.addAll(readBy(row.flows()));
         used.add(Dimensions.CLEARANCE);
+        // The power per volume, the depth and most ratios rest on it.
+        matter.add(Dimensions.VESSEL_DIAMETER);
         List<GeometryParameter> volume = vessel.defaulted().contains(Dimensions.LIQUID_VOLUME)
-                ? List.of(Dimensions.LIQUID_VOLUME, Dimensions.LIQUID_HEIGHT, Dimensions.VESSEL_DIAMETER)
+                ? List.of(Dimensions.LIQUID_VOLUME, Dimensions.LIQUID_HEIGHT)
                 : List.of(Dimensions.LIQUID_HEIGHT);
         (spec.speed() instanceof SpeedDemand.ForPowerPerVolume ? matter : used).addAll(volume);
     }
@@ -41,12 +43,12 @@ final class DefaultsUsed {
 
     /** Standard geometry on which the pick, or its shear rate, rests. */
     Optional<String> assumedThatMatter() {
-        return inWords(p -> p.defaultKind() == Default.ASSUMED && matter.contains(p));
+        return inWords(p -> vessel.defaultKind(p) == Default.ASSUMED && matter.contains(p));
     }
 
     /** What else was filled in. */
     Optional<String> others() {
-        return inWords(p -> p.defaultKind() == Default.ASSUMED
+        return inWords(p -> vessel.defaultKind(p) == Default.ASSUMED
                 ? used.contains(p) && !matter.contains(p)
                 : used.contains(p) || matter.contains(p));
     }

@@ -7,6 +7,7 @@ import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.Role;
+import stirwright.core.SpeedDemand;
 import stirwright.core.VesselGeometry;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Figures;
@@ -28,13 +29,13 @@ final class Doubts {
         this.row = pickRow;
         this.state = pickRow.power().trial().state().orElseThrow();
         this.anyRecommended = anyRecommended;
-        this.defaults = new DefaultsUsed(spec, vessel, pickRow, viscosityVaries());
+        this.defaults = new DefaultsUsed(spec, vessel, pickRow, restsOnConstant());
     }
 
     List<String> flags() {
         List<String> flags = new ArrayList<>();
         pickDoubts(flags);
-        if (viscosityVaries()) {
+        if (restsOnConstant()) {
             row.constants().pick().filter(c -> !c.sound()).ifPresent(c -> flags.add(constantInDoubt(c)));
         }
         defaults.assumedThatMatter().ifPresent(words -> flags.add("assumed: " + words));
@@ -59,9 +60,9 @@ final class Doubts {
         }
     }
 
-    /** Below a fluid of constant viscosity the shear-rate constant changes nothing but its own column. */
-    private boolean viscosityVaries() {
-        return state.fluid() != FluidClass.NEWTONIAN;
+    /** With a constant viscosity and a speed that does not follow from it, it changes nothing but its own column. */
+    private boolean restsOnConstant() {
+        return state.fluid() != FluidClass.NEWTONIAN || spec.speed() instanceof SpeedDemand.ForShearRate;
     }
 
     private static String constantInDoubt(Selection.Ranked constant) {
@@ -73,8 +74,10 @@ final class Doubts {
         double decades = window.decadesOutside(state.shearRate());
         if (window.known() && decades > 0) {
             flags.add(String.format(Locale.ROOT,
-                    "shear rate %s 1/s is %.1f decades outside the measured window %s to %s 1/s",
-                    Figures.show(state.shearRate()), decades, Figures.show(window.min()), Figures.show(window.max())));
+                    "shear rate %s 1/s is %.1f decades outside the measured window %s", Figures.show(state.shearRate()), decades,
+                    Double.isNaN(window.min()) ? "up to " + Figures.show(window.max()) + " 1/s"
+                            : Double.isNaN(window.max()) ? "from " + Figures.show(window.min()) + " 1/s on"
+                            : Figures.show(window.min()) + " to " + Figures.show(window.max()) + " 1/s"));
         }
     }
 
@@ -96,7 +99,7 @@ final class Doubts {
         row.constants().pick().ifPresent(c -> {
             if (c.role() == Role.CHOSEN) {
                 notes.add("shear-rate constant " + (c.id().equals(Candidate.GIVEN) ? "given in the case" : "chosen in the case"));
-            } else if (!c.sound() && !viscosityVaries()) {
+            } else if (!c.sound() && !restsOnConstant()) {
                 notes.add(constantInDoubt(c) + "; the power does not rest on it");
             }
         });
@@ -104,6 +107,9 @@ final class Doubts {
                 "flow number " + f.id() + " does not qualify: " + f.trial().assessment().obstacle()));
         row.flows().pick().ifPresent(f -> notes.addAll(f.trial().candidate().modifiersInWords(
                 new Point().at(state), state)));
+        for (Candidate.Part part : row.power().trial().candidate().parts()) {
+            part.correlation().remarks().forEach(remark -> notes.add(part.correlation().id() + ": " + remark));
+        }
         if (state.fluid() == FluidClass.YIELD_STRESS) {
             notes.add("yield stress: torque to start a product at rest can exceed the running torque and is not"
                     + " estimated; whether the product moves at the wall is not checked here");

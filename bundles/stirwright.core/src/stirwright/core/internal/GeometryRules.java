@@ -1,20 +1,17 @@
 package stirwright.core.internal;
 
-import static stirwright.correlation.Dimensions.BAFFLE_WIDTH;
-import static stirwright.correlation.Dimensions.BLADE_LENGTH;
-import static stirwright.correlation.Dimensions.BLADE_WIDTH;
-import static stirwright.correlation.Dimensions.CLEARANCE;
 import static stirwright.correlation.Dimensions.IMPELLER_DIAMETER;
-import static stirwright.correlation.Dimensions.LIQUID_HEIGHT;
 import static stirwright.correlation.Dimensions.VESSEL_DIAMETER;
 import static stirwright.correlation.Dimensions.WALL_GAP;
 
 import java.util.Set;
 import stirwright.core.CaseRefusedException;
+import stirwright.core.VesselGeometry;
+import stirwright.correlation.Family;
 import stirwright.correlation.Figures;
-import stirwright.correlation.Geometry;
 import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.GeometryParameter.Kind;
+import stirwright.correlation.GeometryRule;
 
 /** Hard limits: beyond them a geometry does not exist or a unit was mistaken. */
 public final class GeometryRules {
@@ -48,13 +45,13 @@ public final class GeometryRules {
         return "from " + Figures.show(least) + " to " + Figures.show(most);
     }
 
-    /** Checks dimensions against each other; says "below", since equal sizes touch. */
-    public static void checkTogether(Geometry g, Set<String> given) {
-        below(g, IMPELLER_DIAMETER, VESSEL_DIAMETER, 1);
-        below(g, CLEARANCE, LIQUID_HEIGHT, 1);
-        below(g, BAFFLE_WIDTH, VESSEL_DIAMETER, 0.5);
-        below(g, BLADE_WIDTH, IMPELLER_DIAMETER, 1);
-        below(g, BLADE_LENGTH, IMPELLER_DIAMETER, 1);
+    /** Checks dimensions against each other, as the family demands. */
+    public static void checkTogether(Family family, VesselGeometry g, Set<String> given) {
+        for (GeometryRule rule : family.rules()) {
+            if (!rule.holds(g)) {
+                throw refusal(rule.named(), g.get(rule.named()), whose(rule, g) + "is not " + rule.words(g));
+            }
+        }
         double fromDiameters = (g.get(VESSEL_DIAMETER) - g.get(IMPELLER_DIAMETER)) / 2;
         if (given.contains(WALL_GAP.id())
                 && Math.abs(g.get(WALL_GAP) - fromDiameters) > GAP_SHARE * g.get(VESSEL_DIAMETER)) {
@@ -63,12 +60,9 @@ public final class GeometryRules {
         }
     }
 
-    private static void below(Geometry g, GeometryParameter smaller, GeometryParameter larger, double share) {
-        double limit = share * g.get(larger);
-        if (g.get(smaller) >= limit) {
-            throw refusal(smaller, g.get(smaller), "is not below " + (share == 1 ? "" : Figures.show(share) + " times ")
-                    + larger.column() + " " + Figures.show(g.get(larger)));
-        }
+    /** Nobody looks for a value that nobody gave, so it is said to be a default. */
+    private static String whose(GeometryRule rule, VesselGeometry g) {
+        return g.defaulted().contains(rule.named()) ? "(nobody gave it: " + g.defaultInWords(rule.named()) + ") " : "";
     }
 
     private static CaseRefusedException refusal(GeometryParameter parameter, double value, String reason) {

@@ -7,7 +7,6 @@ import java.util.function.Function;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.FlowKind;
 import stirwright.correlation.Standing;
-import stirwright.correlation.Verdict;
 
 /**
  * The order of candidates as the contract page fixes it: approved in-house first, then fewer bounds
@@ -38,6 +37,23 @@ public final class Ranking {
     public static final Comparator<Correlation> BY_TRUST =
             CRITERIA.stream().map(Criterion::order).reduce(Comparator::thenComparing).orElseThrow();
 
+    /** Of modifiers for one effect: those that can be trusted first, then those made for named families. */
+    public static final Comparator<Correlation> MODIFIERS = Comparator.<Correlation, Boolean>comparing(c -> !Trust.in(c))
+            .thenComparing(c -> c.families().isEmpty())
+            .thenComparing(BY_TRUST);
+
+    private static final double DOUBT = Math.log(2);
+
+    /**
+     * Among those that do not qualify, the nearest first; equal ones keep their order. One whose
+     * digits, source or standing are in doubt counts as a factor of two beyond its bounds: better
+     * than a trusted one that is far outside of its range, worse than one that is a little outside.
+     */
+    static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
+            .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
+            .thenComparingDouble(t -> t.assessment().distance() + (t.trustworthy() ? 0 : Ranking.DOUBT))
+            .thenComparing(t -> t.assessment().failed().size());
+
     private Ranking() {}
 
     /** What decided between two, the one ahead first: "bounds not stated 2 before 3". */
@@ -47,15 +63,6 @@ public final class Ranking {
                 .findFirst()
                 .map(c -> c.label() + " " + c.words().apply(ahead) + " before " + c.words().apply(behind))
                 .orElse("equal");
-    }
-
-    /** Among those that do not qualify, the one that comes nearest first; else they keep their order. */
-    static Comparator<Trial> nearestFirst() {
-        return Comparator.<Trial, Boolean>comparing(t -> !t.usable())
-                .thenComparing(t -> !t.trustworthy())
-                .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
-                .thenComparing(t -> t.assessment().verdict().fails() ? t.assessment().verdict() : Verdict.INSIDE)
-                .thenComparing(t -> t.assessment().failed().size());
     }
 
     /** A pumping rate means discharge unless nothing else is there. */

@@ -41,7 +41,7 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
                 .toList();
         List<Trial> rest = trials.stream()
                 .filter(t -> t.candidate().correlation().isPresent() && !qualified.contains(t))
-                .sorted(Ranking.nearestFirst())
+                .sorted(Ranking.NEAREST_FIRST)
                 .toList();
         Optional<Trial> recommended = qualified.stream().findFirst();
         List<Ranked> ranked = new ArrayList<>();

@@ -2,7 +2,6 @@ package stirwright.core.internal;
 
 import java.util.Optional;
 import stirwright.core.FluidState;
-import stirwright.correlation.Transcription;
 
 /**
  * A candidate evaluated at a state.
@@ -18,9 +17,6 @@ record Trial(Candidate candidate, Optional<FluidState> state, double value, Asse
 
     /** Whether its digits, its source and its standing would allow to recommend it elsewhere. */
     boolean trustworthy() {
-        return candidate.correlation()
-                .map(c -> c.transcription() != Transcription.UNSURE && c.citation().hasSource()
-                        && c.standing().recommendable())
-                .orElse(true);
+        return candidate.correlation().map(Trust::in).orElse(true);
     }
 }

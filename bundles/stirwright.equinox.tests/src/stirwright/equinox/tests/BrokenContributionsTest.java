@@ -37,6 +37,7 @@ class BrokenContributionsTest {
                 Specimen.whenSeveral(Specimen.factor()).build());
         assertEquals(List.of(), ConformanceSuite.examine(subject));
         assertEquals(3, subject.rows());
+        assertEquals(1, subject.recalledRows());
     }
 
     @Test
@@ -52,7 +53,8 @@ class BrokenContributionsTest {
             assertFalse(findings.isEmpty(), "nothing was found");
             assertAll(findings.stream().map(f -> () -> assertEquals(broken.check(), f.check(), f.toString())));
             String said = findings.get(0).toString();
-            assertAll(Stream.of(broken.words()).map(w -> () -> assertTrue(said.contains(w), () -> "no '" + w + "' in: " + said)));
+            assertAll(Stream.of(broken.words())
+                    .map(w -> () -> assertTrue(said.contains(w), () -> "no '" + w + "' in: " + said)));
         }));
     }
 }

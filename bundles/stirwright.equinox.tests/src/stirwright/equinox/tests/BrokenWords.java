@@ -21,6 +21,7 @@ import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Family;
 import stirwright.correlation.GeometryParameter;
+import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.equinox.tests.BrokenContributionsTest.Broken;
 
@@ -34,7 +35,8 @@ final class BrokenWords {
         return List.of(
                 new Broken("answers", "a flow number without its kind", throwing(),
                         "specimen.nq.invented", "discharge or circulation"),
-                new Broken("answers", "an empty contribution", subject(List.of(), HEADER, NOBODY), "neither a family nor"),
+                new Broken("answers", "an empty contribution", Subject.of(Specimen.ORIGIN,
+                        List.of(Arrival.of(List::of, Specimen.ORIGIN)), List.of(), NOBODY), "neither a family nor"),
                 new Broken("ids", "one id twice", subject(POWER_ROW, sound(Specimen.power()), sound(Specimen.power())),
                         POWER, "two correlations"),
                 new Broken("ids", "an id that is taken", subject(List.of(family()), HEADER + POWER_ROW,
@@ -51,6 +53,9 @@ final class BrokenWords {
                 new Broken("citation", "no author", cited(Citation.of("??", "p. 3")), "'??'"),
                 new Broken("bounds", "nothing of the fluid", subject(POWER_ROW, sound(Specimen.formula(
                         Specimen.withoutFluid(Specimen.described(Specimen.start()))))), POWER, "fluid"),
+                new Broken("bounds", "a baffle count in place of the class", subject(POWER_ROW, sound(Specimen.formula(
+                        Specimen.withoutBaffling(Specimen.described(Specimen.start())).oneOf(Measure.BAFFLE_COUNT, 4)))),
+                        POWER, "Classifier.BAFFLING"),
                 new Broken("bounds", "a reason that is none", subject(POWER_ROW, sound(Specimen.formula(Specimen
                         .withoutFluid(Specimen.described(Specimen.start())).notStated(Classifier.FLUID, "?")))), "'?'"),
                 new Broken("names", "a shear-rate constant that is not there",
@@ -79,7 +84,7 @@ final class BrokenWords {
     }
 
     private static Catalogue others(List<Family> families, Correlation... correlations) {
-        return Catalogue.of(List.of(new Arrival(Specimen.contribution(families, correlations), "somebody.else 2.0.0")));
+        return Catalogue.of(List.of(Arrival.of(Specimen.contribution(families, correlations), "somebody.else 2.0.0")));
     }
 
     private static Subject named(String id) {
@@ -95,6 +100,6 @@ final class BrokenWords {
         Contribution contribution = () -> List.of(Specimen.bounded(Specimen.described(
                         Correlation.of("specimen.nq.invented", Quantity.FLOW_NUMBER, "invented")))
                 .formula("Nq = 1").relation((g, k) -> p -> 1).build());
-        return Subject.of("invented.specimen 1.0.0", List.of(contribution), List.of(), NOBODY);
+        return Subject.of(Specimen.ORIGIN, List.of(Arrival.of(contribution, Specimen.ORIGIN)), List.of(), NOBODY);
     }
 }

@@ -49,8 +49,9 @@ class JarCheckTest {
         assertTrue(report.passed());
         assertEquals("invented.contract.sample 1.0.0", report.bundle());
         assertEquals(List.of("sampleblade"), report.families());
-        assertEquals(13, report.correlations().size());
-        assertEquals(14, report.rows());
+        assertEquals(16, report.correlations().size());
+        assertEquals(19, report.rows());
+        assertEquals(1, report.recalledRows());
         assertTrue(Framework.catalogue().family("sampleblade").isEmpty(), "the family stays in the library");
     }
 

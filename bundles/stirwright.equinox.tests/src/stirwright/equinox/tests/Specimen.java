@@ -3,6 +3,7 @@ package stirwright.equinox.tests;
 import java.util.List;
 import stirwright.conformance.ReferenceFile;
 import stirwright.conformance.Subject;
+import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
 import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
@@ -20,22 +21,34 @@ import stirwright.correlation.Variable;
 
 /** A contribution that passes every check, in pieces, so that a test breaks one of them. Invented for a test. */
 final class Specimen {
+    static final String ORIGIN = "invented.specimen 1.0.0";
     static final String POWER = "specimen.np.invented";
     static final String KS = "specimen.ks.invented";
     static final String FACTOR = "specimen.np.invented-factor";
     static final Citation SOURCE = Citation.of("Invented for a test (2025)", "p. 1");
 
     static final String HEADER = """
-            # Invented for a test: the formula worked by hand.
-            correlation,family,kind,expected,source,reynolds,flow_index,impeller_count
+            # Invented for a test: the formula worked by hand, in a vessel of D 0.3 m and T 0.9 m.
+            correlation,family,kind,expected,source,outside,impeller_diameter_m,baffle_count,reynolds,flow_index,\
+            impeller_count
             """;
     /** 60/100 + 1.5 */
-    static final String POWER_ROW = POWER + ",,formula,2.1,60/100 + 1.5,100,,\n";
-    static final String KS_ROW = KS + ",,formula,11,11,,,\n";
-    /** 3 times 0.9 */
-    static final String FACTOR_ROW = FACTOR + ",,formula,2.7,3 * 0.9,,,3\n";
+    static final String POWER_ROW = row(POWER, "formula,2.1,60/100 + 1.5", "100,,");
+    static final String KS_ROW = row(KS, "recalled,11,the number itself", "100,,");
+    /** 2 times 0.9 */
+    static final String FACTOR_ROW = row(FACTOR, "formula,1.8,2 * 0.9", "100,,2");
 
     private Specimen() {}
+
+    /**
+     * A row for the specimen's family with D 0.3 m and four baffles.
+     *
+     * @param what kind, expected number and source
+     * @param values of Reynolds number, flow index and impeller count
+     */
+    static String row(String correlation, String what, String values) {
+        return correlation + ",," + what + ",,0.3,4," + values + "\n";
+    }
 
     static Family.Builder family(String id) {
         return Family.of(id, "specimen").description("Invented for a test.").regimes(RegimeLimits.of(10, 1e4, SOURCE));
@@ -50,12 +63,15 @@ final class Specimen {
     }
 
     static CorrelationBuilder withoutFluid(CorrelationBuilder builder) {
-        return withoutReynolds(builder).range(Measure.REYNOLDS, 1, 1e5);
+        return ranges(builder).inClass(Classifier.BAFFLING, Classifier.BAFFLED, Classifier.UNBAFFLED);
     }
 
-    static CorrelationBuilder withoutReynolds(CorrelationBuilder builder) {
-        return builder.inClass(Classifier.BAFFLING, Classifier.BAFFLED, Classifier.UNBAFFLED)
-                .range(Measure.D_OVER_T, 0.2, 0.5);
+    static CorrelationBuilder withoutBaffling(CorrelationBuilder builder) {
+        return ranges(builder).notStated(Classifier.FLUID, "invented without a fluid");
+    }
+
+    private static CorrelationBuilder ranges(CorrelationBuilder builder) {
+        return builder.range(Measure.REYNOLDS, 1, 1e5).range(Measure.D_OVER_T, 0.2, 0.5);
     }
 
     static CorrelationBuilder start() {
@@ -97,7 +113,7 @@ final class Specimen {
     }
 
     static Subject subject(List<Family> families, String file, Catalogue others, Correlation... correlations) {
-        return Subject.of("invented.specimen 1.0.0", List.of(contribution(families, correlations)),
+        return Subject.of(ORIGIN, List.of(Arrival.of(contribution(families, correlations), ORIGIN)),
                 List.of(new ReferenceFile("rows.csv", file)), others);
     }
 

@@ -27,7 +27,7 @@ public final class DiscTurbine implements Contribution {
                 .parameter(Dimensions.BLADE_THICKNESS.assumedAs(
                         "D/50, our choice: no standard value is published",
                         vessel -> vessel.get(Dimensions.IMPELLER_DIAMETER) / 50))
-                .regimes(RegimeLimits.of(10, Sources.TURBULENT_FROM, Sources.steffe("p. 188")))
+                .regimes(RegimeLimits.IN_GENERAL)
                 .build());
     }
 
@@ -43,6 +43,7 @@ public final class DiscTurbine implements Contribution {
                 TurbulentPower.rutherford(),
                 PowerCurves.baffled(),
                 PowerCurves.unbaffled(),
+                PowerCurves.unbaffledTable(),
                 PowerCurves.froudeFactor(),
                 FlowNumbers.hemrajani(),
                 FlowNumbers.mccabe(),

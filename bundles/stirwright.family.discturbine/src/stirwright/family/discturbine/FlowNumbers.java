@@ -23,13 +23,12 @@ final class FlowNumbers {
                         + "Atiemo-Obeng and S. M. Kresta (eds.), Handbook of Industrial Mixing, Wiley (2004), chapter 6"))
                 .transcription(Transcription.FROM_MEMORY)
                 .flow(FlowKind.DISCHARGE)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.D_OVER_T, "recalled for about 1/3, without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("Nq", 0.72)
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .remark("Tables have 0.72 to 0.75, and 0.65 to 0.95 by where the flow is counted.")
                 .build();
     }
@@ -41,13 +40,12 @@ final class FlowNumbers {
                 .cite(Sources.mccabe("chapter 9, list of flow numbers"))
                 .transcription(Transcription.FROM_MEMORY)
                 .flow(FlowKind.CIRCULATION)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("Nq", 1.3)
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .remark("It counts entrained liquid, so it stands beside Cutter's number and not beside 0.72.")
                 .build();
     }
@@ -60,11 +58,11 @@ final class FlowNumbers {
                         + "; recalled from McCabe, Smith and Harriott, chapter 9"))
                 .transcription(Transcription.FROM_MEMORY)
                 .flow(FlowKind.CIRCULATION)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .contains(Effect.DIAMETER_RATIO)
                 .constant("a", 0.92)
                 .formula("Nq = {a} T/D")
@@ -72,7 +70,6 @@ final class FlowNumbers {
                     double nq = k.get("a") * vessel.ratio(Dimensions.VESSEL_DIAMETER, Dimensions.IMPELLER_DIAMETER);
                     return point -> nq;
                 })
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .build();
     }
 }

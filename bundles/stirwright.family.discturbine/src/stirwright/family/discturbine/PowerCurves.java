@@ -30,10 +30,12 @@ final class PowerCurves {
                 .transcription(Transcription.FROM_MEMORY)
                 .range(Measure.REYNOLDS, 1, 1e5)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .oneOf(Measure.BAFFLE_COUNT, 4)
+                .range(Measure.B_OVER_T, Sources.NARROW_BAFFLE, Sources.WIDE_BAFFLE, "T/12 to T/10")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .reads(Variable.REYNOLDS)
                 .curve("phi", 1, 70, 10, 8.5, 100, 3.6, 400, 3.5, 1000, 4.25, 1e4, 5, 1e5, 5)
                 .formula("Np over Re {phi}")
@@ -63,7 +65,7 @@ final class PowerCurves {
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.W_OVER_D, "not given in the two examples")
                 .range(Measure.D_OVER_T, 0.3, 0.334)
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .reads(Variable.REYNOLDS)
                 .curve("phi", 69_600, 1.07, 240_300, 0.72)
                 .formula("Np/Fr^m over Re {phi}")
@@ -79,6 +81,35 @@ final class PowerCurves {
                 .build();
     }
 
+    static Correlation unbaffledTable() {
+        return Correlation.of("discturbine.np.rushton-1950-unbaffled", Quantity.POWER_NUMBER,
+                        "Rushton, Costich and Everett, without baffles, table of 1950")
+                .families(DiscTurbine.ID)
+                .cite(Sources.rushtonTable("columns Re 5, 200 and 1e5"))
+                .transcription(Transcription.CHECKED_AGAINST_SOURCE)
+                .range(Measure.REYNOLDS, 5, 1e5)
+                .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
+                .nominal(Measure.D_OVER_T, 1.0 / 3)
+                .nominal(Measure.H_OVER_T, 1)
+                .nominal(Measure.C_OVER_D, 1)
+                .newtonianData()
+                .contains(Effect.FROUDE)
+                .reads(Variable.REYNOLDS)
+                .curve("Np", 5, 14.2, 200, 3.7, 1e5, 1.15)
+                .formula("Np over Re {Np}")
+                .relation((vessel, k) -> {
+                    ChartCurve np = k.curve("Np");
+                    return point -> np.at(point.reynolds());
+                })
+                .remark("Three printed points; the straight lines between them are ours, and the curve between 200 and "
+                        + "1e5 may well be bent.")
+                .remark("Whether 1.15 is Np or Np/Fr^m is not said; it is taken for Np, which agrees with 0.97 Fr^m "
+                        + "of the power curve without baffles at Fr 0.14.")
+                .build();
+    }
+
     static Correlation froudeFactor() {
         return Correlation.modifier("discturbine.np.froude-rushton-1950", Quantity.POWER_NUMBER, Effect.FROUDE,
                         "surface vortex in a vessel without baffles")
@@ -90,7 +121,7 @@ final class PowerCurves {
                 .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.D_OVER_T, 1.0 / 3)
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .reads(Variable.REYNOLDS, Variable.FROUDE)
                 .constant("a", 1)
                 .constant("b", 40)

@@ -8,14 +8,15 @@ import stirwright.correlation.Effect;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
+import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Transcription;
 
 /** Average shear rate over speed, per revolution. */
 final class ShearRateConstants {
 
     private static final String TRANSITION_ENDS =
-            "Metzner and Otto's abstract says laminar and transition regions; 10000 as the end of the transition "
-            + "is the family's limit (Steffe, p. 188), not theirs.";
+            "Metzner and Otto's abstract says laminar and transition regions; the end of the transition is the "
+            + "family's limit, not theirs.";
 
     private ShearRateConstants() {}
 
@@ -25,7 +26,7 @@ final class ShearRateConstants {
                 .cite(Citation.withoutLocator("A. B. Metzner and R. E. Otto, AIChE J. 3 (1957) 3-10; the value as "
                         + "quoted by J. Wu, L. J. Graham and N. Noui-Mehidi, AIChE J. 52 (2006) 2323-2332"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
-                .atMost(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .atMost(Measure.REYNOLDS, RegimeLimits.IN_GENERAL.turbulentFrom())
                 .notStated(Classifier.BAFFLING, "the abstract does not say")
                 .notStated(Measure.BLADE_COUNT, "the abstract says flat-bladed turbines")
                 .notStated(Measure.D_OVER_T, "the abstract has D 2 to 8 in and T 6 to 22 in, no ratio")
@@ -45,7 +46,7 @@ final class ShearRateConstants {
                         + "AIChE J. 7 (1961) 3-9"))
                 .transcription(Transcription.FROM_MEMORY)
                 .scatter(0.13)
-                .atMost(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .atMost(Measure.REYNOLDS, RegimeLimits.IN_GENERAL.turbulentFrom())
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
                 .oneOf(Measure.BAFFLE_COUNT, 4)
                 .oneOf(Measure.BLADE_COUNT, 6)

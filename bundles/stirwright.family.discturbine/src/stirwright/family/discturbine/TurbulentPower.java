@@ -18,7 +18,8 @@ final class TurbulentPower {
         return Correlation.of("discturbine.np.mccabe-turbulent", Quantity.POWER_NUMBER,
                         "McCabe, Smith and Harriott, turbulent")
                 .families(DiscTurbine.ID)
-                .cite(Sources.mccabe("Example 9.6"))
+                .cite(Sources.mccabe("Example 9.6; the baffles by the heading of the table "
+                        + "of K_L and K_T in chapter 9, from memory"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e4)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
@@ -28,11 +29,10 @@ final class TurbulentPower {
                 .nominal(Measure.W_OVER_D, 0.2)
                 .nominal(Measure.L_OVER_D, 0.25)
                 .notStated(Measure.D_OVER_T, "no range; the worked example has 1/3")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("KT", 5.75)
                 .remark("Conflict: charts have 5, Rushton et al. 6 to 6.3, Laity and Treybal (1957) 5.7; "
                         + "blade and disc thickness account for part of it, see Bujalski et al.")
-                .remark(Sources.MCCABE_HEADING)
                 .build();
     }
 
@@ -50,7 +50,7 @@ final class TurbulentPower {
                 .nominal(Measure.W_OVER_D, 0.2)
                 .nominal(Measure.L_OVER_D, 0.25)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("KT", 6.3)
                 .remark("Conflict: a public transcription of the authors' table has 6.0, for baffles of T/12; "
                         + "McCabe, Smith and Harriott have 5.75.")
@@ -61,19 +61,17 @@ final class TurbulentPower {
         return Correlation.of("discturbine.np.rushton-1950-table", Quantity.POWER_NUMBER,
                         "Rushton, Costich and Everett, turbulent, table of 1950")
                 .families(DiscTurbine.ID)
-                .cite(Sources.rushton("p. 472 as printed in D. W. Hendricks, Fundamentals of Water "
-                        + "Treatment Unit Processes, CRC Press, Table 10.3, p. 258, column Re 1e5"))
+                .cite(Sources.rushtonTable("column Re 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e5)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
                 .nominal(Measure.B_OVER_T, 1.0 / 12)
                 .oneOf(Measure.BLADE_COUNT, 6)
-                .notStated(Measure.W_OVER_D, "the table has no column for it; the figure beside it says 0.33, "
-                        + "other accounts of the same work 0.2")
+                .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
                 .nominal(Measure.D_OVER_T, 1.0 / 3)
                 .nominal(Measure.H_OVER_T, 1)
                 .nominal(Measure.C_OVER_D, 1)
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("K", 6.0)
                 .remark("The column stands for the level part of the curve; for 4 and 12 blades it has 4.3 and 9.9.")
                 .remark("Conflict: older tables have 6.3 for the same work.")
@@ -87,15 +85,16 @@ final class TurbulentPower {
                 .cite(Citation.withoutLocator("W. Bujalski, A. W. Nienow, S. Chatwin and M. Cooke, "
                         + "Chem. Eng. Sci. 42 (1987) 317-326"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.BAFFLE_COUNT, "the paper's baffles are not at hand")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .nominal(Measure.L_OVER_D, 0.25)
                 .notStated(Measure.D_OVER_T, "the paper's range is not at hand")
                 .notStated(Measure.THICKNESS_OVER_D, "the paper's range is not at hand; checked from 0.01 to 0.03")
                 .notStated(Measure.VESSEL_DIAMETER, "the paper's range is not at hand")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .contains(Effect.THICKNESS)
                 .constant("a", 2.512)
                 .constant("b", 0.195)
@@ -107,7 +106,6 @@ final class TurbulentPower {
                     double np = k.get("a") * Math.pow(thickness, -k.get("b")) * Math.pow(metres, k.get("c"));
                     return point -> np;
                 })
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .remark("Within 6 % of Rutherford et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m.")
                 .build();
     }
@@ -119,14 +117,15 @@ final class TurbulentPower {
                 .cite(Citation.of("K. Rutherford, S. M. S. Mahmoudi, K. C. Lee and M. Yianneskis, "
                         + "Chem. Eng. Res. Des. 74A (1996)", "p. 369"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.BAFFLE_COUNT, "the paper's baffles are not at hand")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .nominal(Measure.L_OVER_D, 0.25)
                 .notStated(Measure.D_OVER_T, "the paper's range is not at hand")
                 .range(Measure.THICKNESS_OVER_D, 0.008, 0.034)
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .contains(Effect.THICKNESS)
                 .constant("a", 6.405)
                 .constant("b", 55.673)
@@ -136,7 +135,6 @@ final class TurbulentPower {
                             - k.get("b") * vessel.ratio(Dimensions.BLADE_THICKNESS, Dimensions.IMPELLER_DIAMETER);
                     return point -> np;
                 })
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .remark("Within 6 % of Bujalski et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m.")
                 .build();
     }

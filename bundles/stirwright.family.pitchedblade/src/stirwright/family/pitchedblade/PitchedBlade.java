@@ -18,13 +18,12 @@ public final class PitchedBlade implements Contribution {
     public List<Family> families() {
         return List.of(Family.of(ID, "pitched-blade turbine")
                 .description("Flat blades set at an angle on a hub, as a rule four at 45 degrees; the flow is mixed, "
-                        + "mostly axial. Its regime limits are those of a design text for this impeller; Steffe "
-                        + "(p. 188) has 10 and 10000 for impellers in general.")
+                        + "mostly axial. Its regime limits are those of a design text for this impeller.")
                 .parameter(Dimensions.BLADE_COUNT.assumedAs("4", vessel -> 4))
                 .parameter(Dimensions.BLADE_ANGLE.assumedAs("45 degrees", vessel -> Math.toRadians(45)))
                 .parameter(Dimensions.BLADE_WIDTH.assumedAs(
                         "D/5", vessel -> vessel.get(Dimensions.IMPELLER_DIAMETER) / 5))
-                .regimes(RegimeLimits.of(50, Sources.LUDWIG_TURBULENT_FROM, Sources.ludwig("p. 300")))
+                .regimes(RegimeLimits.of(50, Sources.TURBULENT_FROM, Sources.ludwig("p. 300")))
                 .build());
     }
 

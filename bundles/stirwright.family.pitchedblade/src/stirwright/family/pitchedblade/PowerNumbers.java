@@ -20,7 +20,8 @@ final class PowerNumbers {
         return Correlation.of("pitchedblade.np.mccabe-laminar", Quantity.POWER_NUMBER,
                         "McCabe, Smith and Harriott, laminar")
                 .families(PitchedBlade.ID)
-                .cite(Sources.mccabe("chapter 9, table of K_L and K_T"))
+                .cite(Sources.mccabe("chapter 9, table of K_L and K_T, headed: "
+                        + "four baffles a tenth of the vessel wide (heading from memory)"))
                 .transcription(Transcription.FROM_MEMORY)
                 .atMost(Measure.REYNOLDS, 10)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
@@ -30,10 +31,10 @@ final class PowerNumbers {
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .overReynolds("KL", 44.5)
                 .remark("Kamei and Hiraoka's equations give 47.0 for this impeller at D/T 1/3, 6 % more.")
-                .remark(Sources.MCCABE_HEADING + " In laminar flow baffles do not act.")
+                .remark("In laminar flow baffles do not act.")
                 .build();
     }
 
@@ -41,7 +42,8 @@ final class PowerNumbers {
         return Correlation.of("pitchedblade.np.mccabe-turbulent", Quantity.POWER_NUMBER,
                         "McCabe, Smith and Harriott, turbulent")
                 .families(PitchedBlade.ID)
-                .cite(Sources.mccabe("Example 9.5"))
+                .cite(Sources.mccabe("Example 9.5; the baffles by the heading of the table "
+                        + "of K_L and K_T in chapter 9, from memory"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e4)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
@@ -51,10 +53,9 @@ final class PowerNumbers {
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .notStated(Measure.D_OVER_T, "no range; the worked example has 1/3")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("KT", 1.27)
                 .remark("Conflict: Dickey has 1.37 for the same impeller.")
-                .remark(Sources.MCCABE_HEADING)
                 .build();
     }
 
@@ -68,16 +69,16 @@ final class PowerNumbers {
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 50)
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.BAFFLE_COUNT, "not read in the section")
                 .oneOf(Measure.BLADE_COUNT, 4)
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .notStated(Measure.W_OVER_D, "scaled from 1/5 by the formula, without a range")
                 .notStated(Measure.D_OVER_T, "no range is given")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .reads(Variable.REYNOLDS)
                 .constant("Npt", 1.37)
                 .constant("w", 0.2)
                 .constant("e", 1.25)
-                // The table ends at (700, 1.00); the point at 1000 keeps the curve level beyond it.
                 .curve("Cf", 50, 0.87, 60, 0.88, 70, 0.89, 100, 0.91, 200, 0.95, 400, 0.98, 700, 1, 1000, 1)
                 .constant("q", 5)
                 .formula("Np = {Npt} ((W/D)/{w})^{e} / Cf^{q}, Cf over Re {Cf}, level beyond")
@@ -90,6 +91,7 @@ final class PowerNumbers {
                 })
                 .remark("The table corrects the turbine diameter; that the power number goes with the inverse fifth "
                         + "power of it, from P proportional to D^5 at equal power, is derived here.")
+                .remark("The table ends at Re 700 with the factor 1; the point at 1000 is ours and keeps it there.")
                 .remark("Conflict: McCabe, Smith and Harriott have 1.27 for W/D 1/5.")
                 .build();
     }
@@ -109,7 +111,7 @@ final class PowerNumbers {
                 .range(Measure.D_OVER_T, 0.166, 0.417)
                 .notStated(Measure.C_OVER_D, "recalled as 0.5 to 1.5, unsure")
                 .notStated(Measure.H_OVER_T, "recalled without a range, though the formula has it")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .contains(Effect.CLEARANCE, Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH)
                 .constant("a", 1.507)
                 .constant("b", 0.701)
@@ -137,15 +139,15 @@ final class PowerNumbers {
                 .families(PitchedBlade.ID)
                 .cite(Citation.of("P. Harriott, Chemical Reactor Design, Marcel Dekker (2003)", "Example 7.6"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
-                .atLeast(Measure.REYNOLDS, Sources.TURBULENT_FROM)
+                .turbulent()
                 .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.BAFFLE_COUNT, "not read in the example")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .notStated(Measure.W_OVER_D, "not read in the example")
                 .notStated(Measure.D_OVER_T, "not read in the example")
-                .notStated(Classifier.FLUID, Sources.NEWTONIAN_DATA)
+                .newtonianData()
                 .value("Npt", 1.7)
-                .remark(Sources.TURBULENT_IN_WORDS)
                 .remark("Conflict: other tables have 1.62 to 1.64 for W/D 1/5 and 1.3 to 1.4 for W/D 1/8.")
                 .build();
     }

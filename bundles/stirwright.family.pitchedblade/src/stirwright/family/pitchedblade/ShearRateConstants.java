@@ -12,7 +12,7 @@ final class ShearRateConstants {
 
     private static final String TRANSITION_ENDS =
             "The constant is defined by Metzner and Otto's procedure, whose abstract says laminar and transition "
-            + "regions; 1000 as the end of the transition is the family's limit (Ludwig, p. 300), not theirs.";
+            + "regions; the end of the transition is the family's limit, not theirs.";
 
     private ShearRateConstants() {}
 
@@ -23,7 +23,7 @@ final class ShearRateConstants {
                 .cite(Citation.withoutLocator("compilations of Metzner-Otto constants, among them D. Doraiswamy, "
                         + "R. K. Grenville and A. W. Etchells, Ind. Eng. Chem. Res. 33 (1994) 2253-2258"))
                 .transcription(Transcription.FROM_MEMORY)
-                .atMost(Measure.REYNOLDS, Sources.LUDWIG_TURBULENT_FROM)
+                .atMost(Measure.REYNOLDS, Sources.TURBULENT_FROM)
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .oneOf(Measure.BLADE_COUNT, 4)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
@@ -42,7 +42,7 @@ final class ShearRateConstants {
                         + "AIChE J. 7 (1961) 3-9"))
                 .transcription(Transcription.FROM_MEMORY)
                 .scatter(0.154)
-                .atMost(Measure.REYNOLDS, Sources.LUDWIG_TURBULENT_FROM)
+                .atMost(Measure.REYNOLDS, Sources.TURBULENT_FROM)
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.BLADE_ANGLE, 45)

@@ -6,6 +6,7 @@ import static stirwright.exchange.internal.cases.CaseColumns.FAMILY;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseSpec;
@@ -79,7 +80,7 @@ public final class CaseReader {
     public CaseSpec read(Cells cells) {
         refuseFlaw(cells.row());
         String name = requireName(cells);
-        String family = cells.text(FAMILY);
+        String family = cells.text(FAMILY).toLowerCase(Locale.ROOT);
         if (family.isEmpty()) {
             throw cells.refusal(FAMILY, "is blank; give the id of an impeller family");
         }

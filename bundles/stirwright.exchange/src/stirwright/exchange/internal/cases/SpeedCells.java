@@ -16,9 +16,6 @@ import stirwright.correlation.Figures;
 /** The one speed or target of a row. */
 final class SpeedCells {
 
-    /** m/s; common practice, no source. Beyond it a unit was mistaken. */
-    private static final double MOST_TIP_SPEED = 60;
-
     private static final double SECONDS_PER_MINUTE = 60;
 
     private SpeedCells() {}
@@ -55,9 +52,9 @@ final class SpeedCells {
     }
 
     private static double plausibleTip(Cells cells, String column, double tipSpeed, String hint) {
-        if (tipSpeed > MOST_TIP_SPEED) {
+        if (tipSpeed > SpeedDemand.MOST_TIP_SPEED) {
             throw cells.refusal(column, "means a tip speed of " + Figures.show(tipSpeed) + " m/s, above the limit of "
-                    + Figures.show(MOST_TIP_SPEED) + " m/s (common practice, no source)" + hint);
+                    + Figures.show(SpeedDemand.MOST_TIP_SPEED) + " m/s (common practice, no source)" + hint);
         }
         return tipSpeed;
     }

@@ -55,7 +55,7 @@ public record Grid(
         DecimalVote vote = new DecimalVote();
         for (Optional<Row> next = reader.next(); next.isPresent(); next = reader.next()) {
             Row row = RowChecks.check(next.get(), header, isKnown, separator);
-            if (RowChecks.mayHaveSwallowedLines(row, isKnown)) {
+            if (RowChecks.mayHaveSwallowedLines(row, header, isKnown)) {
                 reader.goOnAfter(row);
             }
             rows.add(row);

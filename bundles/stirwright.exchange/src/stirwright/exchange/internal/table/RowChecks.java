@@ -11,7 +11,9 @@ final class RowChecks {
         }
         for (int i = 0; row.spansLines() && i < row.cells().size(); i++) {
             if (i < known.length && known[i] && holdsBreak(row.cell(i))) {
-                return row.flawed(new Row.Flaw(i, row.cell(i), "begins with a quote that is not closed on its line"));
+                return row.flawed(new Row.Flaw(i, row.cell(i), complete(row, header)
+                        ? "holds a line break; this column takes one line"
+                        : "begins with a quote that is not closed on its line"));
             }
         }
         int width = header.names().size();
@@ -28,8 +30,13 @@ final class RowChecks {
      * Whether a quote may have been taken for one that spans lines, which hold rows of their own. A
      * remark may span lines as it likes, in a column that is not read.
      */
-    static boolean mayHaveSwallowedLines(Row row, boolean[] known) {
-        return row.spansLines() && row.flaw().filter(f -> f.cell() >= known.length || known[f.cell()]).isPresent();
+    static boolean mayHaveSwallowedLines(Row row, Header header, boolean[] known) {
+        return row.spansLines() && !complete(row, header) && row.flaw().filter(f -> f.cell() >= known.length || known[f.cell()]).isPresent();
+    }
+
+    /** A quote that swallowed rows leaves a cell count that only chance makes right. */
+    private static boolean complete(Row row, Header header) {
+        return row.cells().size() == header.names().size();
     }
 
     private static boolean holdsBreak(String cell) {

@@ -1,21 +1,24 @@
 package invented.contract.sample;
 
 import java.util.List;
+import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.FlowKind;
+import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Variable;
 
-/** A flow number, a blend time, and a quantity of this contributor's own; invented. */
+/** A flow number, a blend time, and quantities of this contributor's own; invented. */
 final class Others {
     private static final Quantity WEB_LOAD = Quantity.of("web-load", "web load", "Lw", "Pa");
+    private static final Variable LOAD = Variable.of(WEB_LOAD);
     private static final Variable ROUGHNESS = Variable.of("web_roughness", "web roughness", "rw", "-");
 
     private Others() {}
 
     static List<Correlation> all() {
-        return List.of(flowNumber(), blendTime(), webLoad());
+        return List.of(flowNumber(), blendTime(), webLoad(), webWear(), webDrag(), webLift());
     }
 
     private static Correlation flowNumber() {
@@ -57,6 +60,45 @@ final class Others {
                     return p -> k.get("L") * (1 + p.get(ROUGHNESS)) * p.get(Variable.DENSITY)
                             * p.get(Variable.SPEED) * p.get(Variable.SPEED) * d * d;
                 })
+                .build();
+    }
+
+    /** One number. */
+    private static Correlation webWear() {
+        return SampleFamily.loose(Correlation.of("sampleblade.web-wear.invented",
+                        Quantity.of("web-wear", "wear of the web", "Ww", "-"), "wear of the web"))
+                .families(SampleFamily.ID)
+                .value("w", 0.7)
+                .build();
+    }
+
+    /** A laminar law, with a word on its limit. */
+    private static Correlation webDrag() {
+        return SampleFamily.card(Correlation.of("sampleblade.web-drag.invented",
+                        Quantity.of("web-drag", "drag of the web", "Cw", "-"), "drag of the web"))
+                .families(SampleFamily.ID)
+                .range(Measure.REYNOLDS, 0.1, 10, "the family's limit")
+                .notStated(Classifier.BAFFLING, "invented without baffles")
+                .notStated(Measure.D_OVER_T, "invented without a range")
+                .newtonianData()
+                .overReynolds("d", 24)
+                .build();
+    }
+
+    /** Reads the pick of a quantity of this contributor's own. */
+    private static Correlation webLift() {
+        return SampleFamily.card(Correlation.of("sampleblade.web-lift.invented",
+                        Quantity.of("web-lift", "lift of the web", "Cl", "-"), "lift of the web"))
+                .families(SampleFamily.ID)
+                .turbulent()
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .notStated(Measure.D_OVER_T, "invented without a range")
+                .newtonianData()
+                .atMost(SampleFamily.WEB_REYNOLDS, 2000)
+                .reads(LOAD)
+                .constant("j", 0.01)
+                .formula("Cl = {j} Lw")
+                .relation((g, k) -> p -> k.get("j") * p.get(LOAD))
                 .build();
     }
 }

@@ -24,10 +24,15 @@ final class SampleFamily {
             .withLimits(0.001, 2)
             .assumedAs("D/8", g -> g.get(Dimensions.IMPELLER_DIAMETER) / 8);
 
-    /** Its default reads a parameter of this family. */
+    /** Follows from what the family lists after it, where that was given; else from what it lists before. */
     static final GeometryParameter WEB_HEIGHT = GeometryParameter
             .of("web_height", "web height", Kind.LENGTH, "hw", "height of the web")
+            .derivedAs("s - w", g -> g.get(SampleFamily.WEB_SPAN) - g.get(WEB_WIDTH))
             .assumedAs("2 w", g -> 2 * g.get(WEB_WIDTH));
+
+    static final GeometryParameter WEB_SPAN = GeometryParameter
+            .of("web_span", "web span", Kind.LENGTH, "s", "width and height of the web together")
+            .derivedAs("w + hw", g -> g.get(WEB_WIDTH) + g.get(WEB_HEIGHT));
 
     static final GeometryParameter SLOT_COUNT = GeometryParameter
             .of("slot_count", "slot count", Kind.COUNT, "ns", "slots in one web")
@@ -37,6 +42,8 @@ final class SampleFamily {
     static final Effect SLOTS = Effect.of("web-slots", "slots in the web");
     static final Measure WEB_OVER_D = Measure.ratio(WEB_WIDTH, Dimensions.IMPELLER_DIAMETER);
     static final Measure WEB_AREA = Measure.of("web_area", "web area in m2", (g, p) -> g.get(WEB_WIDTH) * g.get(WEB_HEIGHT));
+    static final Measure WEB_REYNOLDS = Measure.of("web_reynolds", "web Reynolds number",
+            (g, p) -> p.reynolds() * Math.pow(g.ratio(WEB_WIDTH, Dimensions.IMPELLER_DIAMETER), 2)).byFactor();
     static final Classifier WEB = Classifier.of("web", "web",
             (g, p) -> g.ratio(WEB_WIDTH, Dimensions.IMPELLER_DIAMETER) < 0.2 ? "narrow" : "wide");
 
@@ -50,7 +57,10 @@ final class SampleFamily {
                 .parameter(Dimensions.BLADE_ANGLE.withMeaning("to the horizontal").assumedAs("45", g -> Math.PI / 4))
                 .parameter(WEB_WIDTH)
                 .parameter(WEB_HEIGHT)
+                .parameter(WEB_SPAN)
                 .parameter(SLOT_COUNT)
+                .below(WEB_WIDTH, Dimensions.IMPELLER_DIAMETER, 0.5)
+                .rule(SLOT_COUNT, "an even number", g -> g.get(SLOT_COUNT) % 2 == 0)
                 .regimes(RegimeLimits.of(10, 1000, SOURCE))
                 .build();
     }

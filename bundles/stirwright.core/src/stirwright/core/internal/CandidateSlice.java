@@ -1,0 +1,37 @@
+package stirwright.core.internal;
+
+import stirwright.core.FluidState;
+import stirwright.core.Point;
+import stirwright.core.Slice;
+import stirwright.correlation.Variable;
+import stirwright.correlation.Verdict;
+
+/** A candidate swept over one variable from the state of the pick. */
+final class CandidateSlice implements Slice {
+    private final Candidate candidate;
+    private final FluidState state;
+    private final Point point;
+    private final Variable over;
+
+    CandidateSlice(Candidate candidate, FluidState state, Point point, Variable over) {
+        this.candidate = candidate;
+        this.state = state;
+        this.point = point;
+        this.over = over;
+    }
+
+    @Override
+    public void evaluate(double[] values, double[] into, Verdict[] verdicts) {
+        if (values.length != into.length || values.length != verdicts.length) {
+            throw new IllegalArgumentException(values.length + " values into room for " + into.length + " and "
+                    + verdicts.length);
+        }
+        boolean overReynolds = over.equals(Variable.REYNOLDS);
+        for (int i = 0; i < values.length; i++) {
+            double reynolds = overReynolds ? values[i] : state.reynolds();
+            point.set(over, values[i]);
+            into[i] = candidate.value(point, state, reynolds);
+            verdicts[i] = candidate.verdict(point, state, reynolds);
+        }
+    }
+}
