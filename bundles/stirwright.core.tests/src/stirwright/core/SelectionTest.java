@@ -135,6 +135,16 @@ class SelectionTest {
     }
 
     @Test
+    void choosingWhatWouldBeRecommendedIsNoDoubt() {
+        CaseResult result = check(new Choices(Map.of(Quantity.POWER_NUMBER, "invented.np.a"), Map.of()),
+                np("np.a", 5, b -> b), np("np.b", 6, b -> b));
+        assertEquals(Role.CHOSEN, result.pick().orElseThrow().role());
+        assertEquals(Role.CANDIDATE, Invented.row(result, "np.b").role(), "a is ahead of it");
+        assertTrue(Invented.row(result, "np.b").why().startsWith("qualifies, behind invented.np.a"));
+        assertEquals(List.of(), result.flags());
+    }
+
+    @Test
     void chosenOutsideItsBoundsIsFlaggedNotRefused() {
         CaseResult result = check(new Choices(Map.of(Quantity.POWER_NUMBER, "invented.np.b"), Map.of()),
                 np("np.a", 5, b -> b), np("np.b", 6, b -> b.range(Measure.D_OVER_T, 0.6, 0.7)));

@@ -13,7 +13,7 @@ public final class Classifier extends Term {
 
     /** {@link #BAFFLED} or {@link #UNBAFFLED}. How strongly baffled is for number bounds to say. */
     public static final Classifier BAFFLING =
-            of("baffling", "baffling", (g, p) -> g.get(Dimensions.BAFFLE_COUNT) > 0 ? BAFFLED : UNBAFFLED);
+            of("baffling", "vessel", (g, p) -> g.get(Dimensions.BAFFLE_COUNT) > 0 ? BAFFLED : UNBAFFLED);
 
     /** The id of the {@link FluidClass}. */
     public static final Classifier FLUID = of("fluid", "fluid", (g, p) -> p.fluid().id());

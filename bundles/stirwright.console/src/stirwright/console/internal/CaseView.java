@@ -1,6 +1,6 @@
 package stirwright.console.internal;
 
-import java.util.Locale;
+import java.math.BigDecimal;
 import stirwright.core.CandidateResult;
 import stirwright.core.CaseResult;
 import stirwright.core.FluidState;
@@ -65,7 +65,7 @@ final class CaseView {
         for (CandidateResult row : result.candidates()) {
             table.add(mark(row) + row.correlation(), row.verdict().id(), shown(row.powerNumber()),
                     row.state().map(s -> shown(s.speed())).orElse(""), shown(row.power()), shown(row.torque()),
-                    Double.isNaN(row.deviation()) ? "" : String.format(Locale.ROOT, "%+.1f", 100 * row.deviation()));
+                    percent(row.deviation()));
             table.under(row.why());
             row.notes().forEach(table::under);
         }
@@ -83,6 +83,15 @@ final class CaseView {
             case CANDIDATE -> "  ";
             case EXCLUDED -> "x ";
         };
+    }
+
+    /** Signed, to a tenth of a per cent. */
+    private static String percent(double share) {
+        if (!Double.isFinite(share)) {
+            return "";
+        }
+        long tenths = Math.round(1000 * share);
+        return (tenths < 0 ? "" : "+") + BigDecimal.valueOf(tenths, 1).toPlainString();
     }
 
     private static String shown(double value) {

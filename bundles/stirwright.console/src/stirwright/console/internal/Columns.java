@@ -63,6 +63,10 @@ final class Columns {
 
     /** Appends a paragraph broken at spaces to fit a width, later lines indented further. */
     static void appendWrapped(StringBuilder text, String indent, String paragraph, int width) {
+        if (indent.length() + paragraph.length() <= width) {
+            text.append(indent).append(paragraph).append('\n');
+            return;
+        }
         String further = indent + "  ";
         StringBuilder line = new StringBuilder(indent);
         int least = indent.length();

@@ -9,65 +9,81 @@ import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 
 /**
- * How a candidate stands to its bounds at one state, and whether it qualifies.
- *
- * @param verdict the worst over all bounds, those of the applied modifiers included
- * @param failed each stated bound that fails, with what the case has
- * @param distance how far beyond its stated bounds the case lies: the sum of the logarithms of the
- *     ratios, infinite when a class or count fails
- * @param obstacle why it does not qualify, in one sentence; empty when it does
+ * How a candidate stands to its bounds at one state, and whether it qualifies. The words are found
+ * when they are asked for, since most assessments are made on the way to a solution.
  */
-record Assessment(Verdict verdict, List<String> failed, double distance, String obstacle) {
+final class Assessment {
+    private final Verdict verdict;
+    private final double distance;
+    private final List<Failure> failures;
+    private final String problem;
 
-    boolean qualifies() {
-        return obstacle.isEmpty();
+    /** A stated bound that the case fails, and all that it takes to say so. */
+    private record Failure(
+            Candidate candidate, Candidate.Part part, Bound bound, Verdict verdict, Point point, double reynolds) {
+        String words() {
+            point.set(Variable.REYNOLDS, reynolds);
+            String whose = part == candidate.parts().get(0) ? "" : part.correlation().id() + ": ";
+            return bound.found(candidate.geometry(), point) + " is " + verdict.id()
+                    + " (" + whose + bound.allowance() + ")";
+        }
+
+        /** The logarithm of the ratio to the bound; infinite for a class or a count. */
+        double distance() {
+            if (bound instanceof Bound.Range range) {
+                double value = range.subject().value(candidate.geometry(), point);
+                double ratio = value < range.least() ? range.least() / value : value / range.most();
+                return ratio > 0 ? Math.log(ratio) : Double.POSITIVE_INFINITY;
+            }
+            return Double.POSITIVE_INFINITY;
+        }
+    }
+
+    private Assessment(Verdict verdict, double distance, List<Failure> failures, String problem) {
+        this.verdict = verdict;
+        this.distance = distance;
+        this.failures = failures;
+        this.problem = problem;
     }
 
     /** Of a candidate for which no state was found. */
     static Assessment impossible(String reason) {
-        return new Assessment(Verdict.NOT_STATED, List.of(), Double.POSITIVE_INFINITY, reason);
+        return new Assessment(Verdict.NOT_STATED, Double.POSITIVE_INFINITY, List.of(), reason);
     }
 
+    /** @param point holds the state and belongs to this assessment from now on */
     static Assessment of(Candidate candidate, Point point, FluidState state, double value) {
         if (candidate.correlation().isEmpty()) {
-            return new Assessment(Verdict.NOT_STATED, List.of(), 0, "");
+            return new Assessment(Verdict.NOT_STATED, 0, List.of(), "");
         }
+        String unknown = unknown(candidate, point, state);
         Verdict verdict = candidate.verdict(point, state, state.reynolds());
-        List<String> failed = new ArrayList<>();
-        double distance = verdict.fails() && candidate.failure().isEmpty()
-                ? collectFailures(candidate, point, state, failed) : 0;
-        return new Assessment(verdict, List.copyOf(failed), distance, obstacle(candidate, value, failed, point, state));
+        List<Failure> failures = verdict.fails() && candidate.failure().isEmpty()
+                ? failures(candidate, point, state) : List.of();
+        double distance = 0;
+        for (Failure failure : failures) {
+            distance += failure.distance();
+        }
+        return new Assessment(verdict, distance, failures, problem(candidate, value, unknown, failures.isEmpty()));
     }
 
-    private static double collectFailures(Candidate candidate, Point point, FluidState state, List<String> failed) {
-        double distance = 0;
+    private static List<Failure> failures(Candidate candidate, Point point, FluidState state) {
+        List<Failure> failures = new ArrayList<>();
         for (Candidate.Part part : candidate.parts()) {
-            point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds()));
-            String whose = part == candidate.parts().get(0) ? "" : part.correlation().id() + ": ";
+            double reynolds = part.reynolds(state, state.reynolds());
+            point.set(Variable.REYNOLDS, reynolds);
             for (Bound bound : part.correlation().validity()) {
                 Verdict found = bound.verdict(candidate.geometry(), point);
                 if (found.fails()) {
-                    failed.add(bound.found(candidate.geometry(), point) + " is " + found.id()
-                            + " (" + whose + bound.allowance() + ")");
-                    distance += distance(bound, candidate, point);
+                    failures.add(new Failure(candidate, part, bound, found, point, reynolds));
                 }
             }
         }
-        return distance;
+        return failures;
     }
 
-    private static double distance(Bound bound, Candidate candidate, Point point) {
-        if (bound instanceof Bound.Range range) {
-            double value = range.subject().value(candidate.geometry(), point);
-            double ratio = value < range.least() ? range.least() / value : value / range.most();
-            return ratio > 0 ? Math.log(ratio) : Double.POSITIVE_INFINITY;
-        }
-        return Double.POSITIVE_INFINITY;
-    }
-
-    private static String obstacle(
-            Candidate candidate, double value, List<String> failed, Point point, FluidState state) {
-        String unknown = unknown(candidate, point, state);
+    /** What stands in its way apart from bounds; what no case can mend counts only where none fails. */
+    private static String problem(Candidate candidate, double value, String unknown, boolean withinBounds) {
         if (!candidate.failure().isEmpty()) {
             return "its code fails: " + candidate.failure();
         }
@@ -77,10 +93,7 @@ record Assessment(Verdict verdict, List<String> failed, double distance, String 
         if (!(value > 0 && value < Double.POSITIVE_INFINITY)) {
             return "its formula gives no positive number here";
         }
-        if (!failed.isEmpty()) {
-            return failed.get(0) + (failed.size() > 1 ? " (and " + (failed.size() - 1) + " more)" : "");
-        }
-        return Trust.obstacle(candidate);
+        return withinBounds ? candidate.distrust() : "";
     }
 
     /** What it reads and nobody knows here, in words; empty when all is known. */
@@ -97,5 +110,36 @@ record Assessment(Verdict verdict, List<String> failed, double distance, String 
             }
         }
         return "";
+    }
+
+    /** The worst over all bounds, those of the applied modifiers included. */
+    Verdict verdict() {
+        return verdict;
+    }
+
+    /** How far beyond its bounds the case lies: the sum over those that fail. */
+    double distance() {
+        return distance;
+    }
+
+    int failureCount() {
+        return failures.size();
+    }
+
+    boolean qualifies() {
+        return failures.isEmpty() && problem.isEmpty();
+    }
+
+    /** Each stated bound that fails, with what the case has. */
+    List<String> failed() {
+        return failures.stream().map(Failure::words).toList();
+    }
+
+    /** Why it does not qualify, in one sentence; empty when it does. */
+    String obstacle() {
+        if (!problem.isEmpty() || failures.isEmpty()) {
+            return problem;
+        }
+        return failures.get(0).words() + (failures.size() > 1 ? " (and " + (failures.size() - 1) + " more)" : "");
     }
 }

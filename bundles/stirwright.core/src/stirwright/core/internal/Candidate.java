@@ -39,6 +39,7 @@ final class Candidate {
     private final Geometry geometry;
     private final Set<GeometryParameter> defaultsRead;
     private String failure = "";
+    private String distrust;
     private double givenValue = Double.NaN;
 
     /** One factor: a correlation bound to the geometry. */
@@ -124,6 +125,14 @@ final class Candidate {
 
     Set<Variable> reads() {
         return reads;
+    }
+
+    /** What keeps it from being recommended whatever the case; asked for at every state, found once. */
+    String distrust() {
+        if (distrust == null) {
+            distrust = Trust.obstacle(this);
+        }
+        return distrust;
     }
 
     /** What the contributed code threw; empty when it did not. */

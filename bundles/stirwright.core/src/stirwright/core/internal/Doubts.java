@@ -20,15 +20,15 @@ final class Doubts {
     private final VesselGeometry vessel;
     private final ResultAssembly.Row row;
     private final FluidState state;
-    private final boolean anyRecommended;
+    private final boolean anyQualifies;
     private final DefaultsUsed defaults;
 
-    Doubts(CaseSpec spec, VesselGeometry vessel, ResultAssembly.Row pickRow, boolean anyRecommended) {
+    Doubts(CaseSpec spec, VesselGeometry vessel, ResultAssembly.Row pickRow, boolean anyQualifies) {
         this.spec = spec;
         this.vessel = vessel;
         this.row = pickRow;
         this.state = pickRow.power().trial().state().orElseThrow();
-        this.anyRecommended = anyRecommended;
+        this.anyQualifies = anyQualifies;
         this.defaults = new DefaultsUsed(spec, vessel, pickRow, restsOnConstant());
     }
 
@@ -55,7 +55,7 @@ final class Doubts {
         } else if (pick.role() == Role.CHOSEN && !pick.sound()) {
             flags.add("the chosen " + pick.id() + " does not qualify: " + pick.trial().assessment().obstacle());
         }
-        if (!anyRecommended && pick.role() == Role.CHOSEN) {
+        if (!anyQualifies && pick.role() == Role.CHOSEN) {
             flags.add("nothing is recommended: no candidate qualifies");
         }
     }

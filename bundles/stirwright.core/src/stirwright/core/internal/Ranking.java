@@ -52,7 +52,7 @@ public final class Ranking {
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
             .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
             .thenComparingDouble(t -> t.assessment().distance() + (t.trustworthy() ? 0 : Ranking.DOUBT))
-            .thenComparing(t -> t.assessment().failed().size());
+            .thenComparingInt(t -> t.assessment().failureCount());
 
     private Ranking() {}
 

@@ -9,7 +9,6 @@ import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.QuantityResult;
-import stirwright.core.Role;
 import stirwright.core.Status;
 import stirwright.core.VesselGeometry;
 import stirwright.correlation.Correlation;
@@ -43,8 +42,8 @@ final class ResultAssembly {
         Row first = rows.get(0);
         double pickPower = pick.trial().state().orElseThrow().power(pick.trial().value());
         List<CandidateResult> results = rows.stream().map(r -> result(r, pickPower)).toList();
-        boolean anyRecommended = rows.stream().anyMatch(r -> r.power().role() == Role.RECOMMENDED);
-        Doubts doubts = new Doubts(spec, vessel, first, anyRecommended);
+        boolean anyQualifies = rows.stream().anyMatch(r -> r.power().trial().qualifies());
+        Doubts doubts = new Doubts(spec, vessel, first, anyQualifies);
         List<QuantityResult> quantities = new ArrayList<>();
         rows.forEach(r -> quantities.add(quantity(r.power())));
         first.constants().ranked().forEach(r -> quantities.add(quantity(r)));
@@ -82,7 +81,7 @@ final class ResultAssembly {
     private static double spread(List<Row> rows) {
         double[] powers = rows.stream()
                 .map(r -> r.power().trial())
-                .filter(t -> t.candidate().correlation().isPresent() && t.usable() && t.assessment().qualifies())
+                .filter(Trial::qualifies)
                 .mapToDouble(t -> t.state().orElseThrow().power(t.value()))
                 .sorted()
                 .toArray();

@@ -3,6 +3,7 @@ package stirwright.core.internal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import stirwright.core.Role;
 import stirwright.correlation.Correlation;
 
@@ -17,8 +18,12 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
 
     static final Selection NONE = new Selection(List.of(), Optional.empty());
 
-    /** @param why one sentence for why or why not */
-    record Ranked(Trial trial, Role role, String why) {
+    /** @param words one sentence for why or why not, found when it is asked for */
+    record Ranked(Trial trial, Role role, Supplier<String> words) {
+        String why() {
+            return words.get();
+        }
+
         String id() {
             return trial.candidate().id();
         }
@@ -36,43 +41,49 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
      *     recommended one
      */
     static Selection of(List<Trial> trials, Optional<String> chosen, Optional<String> belonging) {
-        List<Trial> qualified = trials.stream()
-                .filter(t -> t.candidate().correlation().isPresent() && t.usable() && t.assessment().qualifies())
-                .toList();
-        List<Trial> rest = trials.stream()
-                .filter(t -> t.candidate().correlation().isPresent() && !qualified.contains(t))
-                .sorted(Ranking.NEAREST_FIRST)
-                .toList();
-        Optional<Trial> recommended = qualified.stream().findFirst();
+        List<Trial> qualified = trials.stream().filter(Trial::qualifies).toList();
+        List<Trial> rest = new ArrayList<>();
         List<Ranked> ranked = new ArrayList<>();
         for (Trial trial : trials) {
             if (isChosen(trial, chosen)) {
-                ranked.add(new Ranked(trial, Role.CHOSEN, chosenWords(trial)));
+                ranked.add(new Ranked(trial, Role.CHOSEN, () -> chosenWords(trial)));
+            } else if (!trial.qualifies()) {
+                rest.add(trial);
             }
         }
         for (Trial trial : qualified) {
             if (!isChosen(trial, chosen)) {
-                boolean best = trial == recommended.get();
+                boolean best = trial == qualified.get(0);
                 ranked.add(new Ranked(trial, best ? Role.RECOMMENDED : Role.CANDIDATE,
-                        best ? recommendedWords(trial, qualified) : behindWords(trial, recommended.get())));
+                        () -> best ? recommendedWords(qualified) : behindWords(trial, qualified.get(0))));
             }
         }
+        rest.sort(Ranking.NEAREST_FIRST);
         for (Trial trial : rest) {
-            if (!isChosen(trial, chosen)) {
-                ranked.add(new Ranked(trial, Role.EXCLUDED, "excluded: " + trial.assessment().obstacle()));
+            ranked.add(new Ranked(trial, Role.EXCLUDED, () -> "excluded: " + trial.assessment().obstacle()));
+        }
+        int pick = pick(ranked, belonging);
+        if (pick > 0) {
+            ranked.add(0, ranked.remove(pick));
+        }
+        return new Selection(List.copyOf(ranked), pick < 0 ? Optional.empty() : Optional.of(ranked.get(0)));
+    }
+
+    /** The place of the pick in the order chosen, recommended, ..., nearest; -1 when no number is usable. */
+    private static int pick(List<Ranked> ranked, Optional<String> belonging) {
+        if (!ranked.isEmpty() && ranked.get(0).role() == Role.CHOSEN) {
+            return 0;
+        }
+        int first = -1;
+        for (int i = 0; i < ranked.size(); i++) {
+            if (ranked.get(i).trial().usable()) {
+                if (belonging.filter(ranked.get(i).id()::equals).isPresent()) {
+                    return i;
+                }
+                first = first < 0 ? i : first;
             }
         }
-        Optional<Ranked> belongs = ranked.stream()
-                .filter(r -> r.role() != Role.CHOSEN && belonging.filter(r.id()::equals).isPresent() && r.trial().usable())
-                .findFirst();
-        Optional<Ranked> pick = ranked.stream().filter(r -> r.role() == Role.CHOSEN).findFirst()
-                .or(() -> belongs)
-                .or(() -> ranked.stream().filter(r -> r.trial().usable()).findFirst());
-        pick.ifPresent(p -> {
-            ranked.remove(p);
-            ranked.add(0, p);
-        });
-        return new Selection(List.copyOf(ranked), pick);
+        return first;
     }
 
     private static boolean isChosen(Trial trial, Optional<String> chosen) {
@@ -91,12 +102,12 @@ record Selection(List<Ranked> ranked, Optional<Ranked> pick) {
         return "chosen in the case" + (obstacle.isEmpty() ? "; it qualifies" : " although " + obstacle);
     }
 
-    private static String recommendedWords(Trial trial, List<Trial> qualified) {
+    private static String recommendedWords(List<Trial> qualified) {
         String start = "recommended: no stated bound fails";
         return qualified.size() < 2
                 ? start + ", and no other candidate qualifies"
                 : start + "; ahead of " + qualified.get(1).candidate().id() + ": "
-                        + Ranking.difference(correlation(trial), correlation(qualified.get(1)));
+                        + Ranking.difference(correlation(qualified.get(0)), correlation(qualified.get(1)));
     }
 
     private static String behindWords(Trial trial, Trial recommended) {

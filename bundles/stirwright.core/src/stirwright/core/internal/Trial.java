@@ -15,6 +15,11 @@ record Trial(Candidate candidate, Optional<FluidState> state, double value, Asse
         return state.isPresent() && value > 0 && value < Double.POSITIVE_INFINITY;
     }
 
+    /** Whether it may be recommended; a given value is no candidate for that. */
+    boolean qualifies() {
+        return candidate.correlation().isPresent() && usable() && assessment.qualifies();
+    }
+
     /** Whether its digits, its source and its standing would allow to recommend it elsewhere. */
     boolean trustworthy() {
         return candidate.correlation().map(Trust::in).orElse(true);

@@ -109,7 +109,7 @@ class ContractCompatibilityTest {
     void everyKindOfBoundStillSpeaks() {
         Correlation curve = SampleJar.correlation("np.invented-curve");
         assertEquals(List.of(
-                "Reynolds number 0.1 to 100000", "baffling baffled or unbaffled", "D/T 0.3 to 0.6",
+                "Reynolds number 0.1 to 100000", "vessel baffled or unbaffled", "D/T 0.3 to 0.6",
                 "fluid newtonian or shear-thinning or yield-stress", "blade count 2 or 4 or 6", "H/T at least 0.5",
                 "C/T at most 0.5", "w/D 0.1219 to 0.1281, nominal 0.125", "web narrow", "web area in m2 at most 0.5",
                 "vessel diameter in m not stated (invented without a scale)"),

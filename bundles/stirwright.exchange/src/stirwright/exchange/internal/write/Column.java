@@ -14,16 +14,41 @@ public sealed interface Column<R> {
 
     String name();
 
-    record Text<R>(String name, Function<R, String> of) implements Column<R> {}
+    /** The cell of a row, with a decimal point and every digit. */
+    String cell(R row);
+
+    record Text<R>(String name, Function<R, String> of) implements Column<R> {
+        @Override
+        public String cell(R row) {
+            return of.apply(row);
+        }
+    }
 
     /** What is not finite means nothing: an empty cell, {@code null} in JSON. */
-    record Number<R>(String name, ToDoubleFunction<R> of) implements Column<R> {}
+    record Number<R>(String name, ToDoubleFunction<R> of) implements Column<R> {
+        @Override
+        public String cell(R row) {
+            double value = of.applyAsDouble(row);
+            return Double.isFinite(value) ? Double.toString(value) : "";
+        }
+    }
 
     /** A count; a negative one means nothing. */
-    record Count<R>(String name, ToIntFunction<R> of) implements Column<R> {}
+    record Count<R>(String name, ToIntFunction<R> of) implements Column<R> {
+        @Override
+        public String cell(R row) {
+            int value = of.applyAsInt(row);
+            return value < 0 ? "" : Integer.toString(value);
+        }
+    }
 
     /** Several sentences: joined by "; " in a cell, an array in JSON. */
-    record Words<R>(String name, Function<R, List<String>> of) implements Column<R> {}
+    record Words<R>(String name, Function<R, List<String>> of) implements Column<R> {
+        @Override
+        public String cell(R row) {
+            return String.join("; ", of.apply(row));
+        }
+    }
 
     static <R> Column<R> text(String name, Function<R, String> of) {
         return new Text<>(name, of);
@@ -43,23 +68,5 @@ public sealed interface Column<R> {
 
     static List<String> names(List<? extends Column<?>> columns) {
         return columns.stream().<String>map(Column::name).toList();
-    }
-
-    /** The cell of a row, with a decimal point and every digit. */
-    default String cell(R row) {
-        return switch (this) {
-            case Text<R> text -> text.of().apply(row);
-            case Number<R> number -> cell(number.of().applyAsDouble(row));
-            case Count<R> count -> cell(count.of().applyAsInt(row));
-            case Words<R> words -> String.join("; ", words.of().apply(row));
-        };
-    }
-
-    private static String cell(double value) {
-        return Double.isFinite(value) ? Double.toString(value) : "";
-    }
-
-    private static String cell(int value) {
-        return value < 0 ? "" : Integer.toString(value);
     }
 }

@@ -1,0 +1,136 @@
+package stirwright.core.internal;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.apache.commons.math3.analysis.UnivariateFunction;
+import stirwright.core.CaseRefusedException;
+import stirwright.core.CaseSpec;
+import stirwright.core.FluidState;
+import stirwright.core.Point;
+import stirwright.core.SpeedDemand;
+import stirwright.core.VesselGeometry;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Dimensions;
+import stirwright.correlation.Figures;
+import stirwright.correlation.Quantity;
+
+/**
+ * Finds the state of the product for each shear-rate constant: at the speed of the case, or at the
+ * speed that meets its target. Not thread-safe.
+ */
+final class StateSolver {
+    /** Power goes with the second to third power of speed. */
+    private static final double POWER_OVER_SPEED = 2.5;
+
+    private final CaseSpec spec;
+    private final List<Candidate> constants;
+    private final Trials trials;
+    private final Coupling coupling;
+    private final double diameter;
+    private final double volume;
+    /** Where the speed does not depend on the power: by the constant that a power correlation belongs with. */
+    private final Map<Optional<String>, Selection> shared = new HashMap<>();
+
+    /** @throws CaseRefusedException when the speed or the tip speed is beyond its limits */
+    StateSolver(CaseSpec spec, VesselGeometry vessel, List<Candidate> constants, Trials trials) {
+        this.spec = spec;
+        this.constants = constants;
+        this.trials = trials;
+        this.diameter = vessel.get(Dimensions.IMPELLER_DIAMETER);
+        this.volume = vessel.get(Dimensions.LIQUID_VOLUME);
+        this.coupling = new Coupling(spec.fluid(), diameter, trials::flowNumber);
+        checkSpeed(spec.speed());
+    }
+
+    private void checkSpeed(SpeedDemand demand) {
+        double tipSpeed = switch (demand) {
+            case SpeedDemand.At at -> Math.PI * diameter * at.value();
+            case SpeedDemand.ForTipSpeed tip -> tip.value();
+            case SpeedDemand.ForShearRate shear -> 0;
+            case SpeedDemand.ForPowerPerVolume power -> 0;
+        };
+        if (tipSpeed > SpeedDemand.MOST_TIP_SPEED) {
+            throw new CaseRefusedException(demand.field(), Figures.show(demand.value()), "gives a tip speed above "
+                    + Figures.show(SpeedDemand.MOST_TIP_SPEED) + " m/s; was a unit mistaken");
+        }
+        if (demand instanceof SpeedDemand.At at && at.value() < SpeedDemand.LEAST_SPEED) {
+            throw new CaseRefusedException(demand.field(), Figures.show(demand.value()), "is below "
+                    + Figures.show(SpeedDemand.LEAST_SPEED) + " rev/s");
+        }
+    }
+
+    /** The constants as far as the pick for a power candidate needs them, each at its own state. */
+    Selection forPick(Candidate power) {
+        Optional<String> belonging = power.correlation().flatMap(Correlation::belongsWith);
+        boolean firstWillDo = belonging.isEmpty() && spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT).isEmpty();
+        return spec.speed() instanceof SpeedDemand.ForPowerPerVolume demand
+                ? select(solveForPower(demand, power, firstWillDo), belonging)
+                : shared.computeIfAbsent(belonging, b -> select(solveForSpeed(), b));
+    }
+
+    /** All constants for a power candidate. */
+    Selection all(Candidate power) {
+        return spec.speed() instanceof SpeedDemand.ForPowerPerVolume demand
+                ? select(solveForPower(demand, power, false), power.correlation().flatMap(Correlation::belongsWith))
+                : forPick(power);
+    }
+
+    private Selection select(List<Trial> solved, Optional<String> belonging) {
+        return Selection.of(solved, spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT), belonging);
+    }
+
+    private List<Trial> solveForSpeed() {
+        return constants.stream().map(c -> tried(c, atSpeed(c))).toList();
+    }
+
+    private Solution atSpeed(Candidate constant) {
+        return switch (spec.speed()) {
+            case SpeedDemand.At at -> coupling.at(at.value(), constant);
+            case SpeedDemand.ForTipSpeed tip -> coupling.at(tip.value() / (Math.PI * diameter), constant);
+            case SpeedDemand.ForShearRate shear -> coupling.forShearRate(shear, constant);
+            case SpeedDemand.ForPowerPerVolume power -> throw new IllegalStateException("depends on the power: " + power);
+        };
+    }
+
+    /** @param firstWillDo whether to stop at the first that qualifies: they come in the order of trust */
+    private List<Trial> solveForPower(SpeedDemand.ForPowerPerVolume demand, Candidate power, boolean firstWillDo) {
+        // Where a power number of 1 would meet it.
+        double near = Math.cbrt(demand.value() * volume / (spec.fluid().density() * Math.pow(diameter, 5)));
+        List<Trial> solved = new ArrayList<>();
+        for (Candidate constant : constants) {
+            Solution solution = forPower(demand, power, constant, near);
+            near = solution.state().map(FluidState::speed).orElse(near);
+            solved.add(tried(constant, solution));
+            if (firstWillDo && solved.getLast().qualifies()) {
+                break;
+            }
+        }
+        return solved;
+    }
+
+    /** @param near a speed to start from */
+    private Solution forPower(SpeedDemand.ForPowerPerVolume demand, Candidate power, Candidate constant, double near) {
+        Solution slowest = coupling.at(SpeedDemand.LEAST_SPEED, constant);
+        if (slowest.state().isEmpty()) {
+            return slowest;
+        }
+        Point point = new Point();
+        UnivariateFunction gap = lnSpeed -> coupling.at(Math.exp(lnSpeed), constant).state()
+                .map(s -> Math.log(s.power(power.value(trials.setUp(point, s, power), s)) / volume / demand.value()))
+                .orElse(Double.NaN);
+        double root = Roots.bySecants(gap, Math.log(near), POWER_OVER_SPEED, Coupling.TOLERANCE);
+        if (!(root >= Roots.leastLnSpeed() && root <= Roots.mostLnSpeed(diameter))) {
+            root = Roots.least(gap, Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), Coupling.TOLERANCE);
+        }
+        return Double.isNaN(root) ? Solution.failed(Roots.noSpeed(demand)) : coupling.at(Math.exp(root), constant);
+    }
+
+    private Trial tried(Candidate constant, Solution solution) {
+        return solution.state()
+                .map(s -> trials.at(s, constant, s.shearRateConstant()))
+                .orElseGet(() -> Trials.nowhere(constant, solution.failure()));
+    }
+}
