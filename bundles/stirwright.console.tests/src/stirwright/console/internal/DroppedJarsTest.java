@@ -20,7 +20,7 @@ class DroppedJarsTest {
     private static Bundle bundle(Path jar, int state) {
         return (Bundle) Proxy.newProxyInstance(Bundle.class.getClassLoader(), new Class<?>[] {Bundle.class},
                 (proxy, method, arguments) -> switch (method.getName()) {
-                    case "getLocation" -> jar.toUri().toString();
+                    case "getLocation" -> "file:" + jar;
                     case "getState" -> state;
                     default -> throw new AssertionError(method);
                 });

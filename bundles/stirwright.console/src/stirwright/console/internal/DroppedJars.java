@@ -35,7 +35,8 @@ final class DroppedJars {
     }
 
     private static Optional<String> problem(Bundle[] installed, Path jar) {
-        String location = jar.toUri().toString();
+        // The installer writes file:/x, this platform's paths file:///x.
+        String location = jar.toAbsolutePath().toFile().toURI().toString();
         Optional<Bundle> bundle = Arrays.stream(installed).filter(b -> b.getLocation().equals(location)).findFirst();
         if (bundle.isEmpty()) {
             return Optional.of("is not a bundle, or its name is installed already; 'stirwright check' says more");
