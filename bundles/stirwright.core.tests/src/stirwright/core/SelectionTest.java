@@ -210,4 +210,15 @@ class SelectionTest {
         assertEquals("invented.nq.discharge", result.pick().orElseThrow().flowCorrelation());
         assertEquals(0.7 * 2 * 0.125, result.pick().orElseThrow().pumping(), 1e-15);
     }
+
+    @Test
+    void withoutQuantitiesTheCandidatesAreTheSame() {
+        CrossCheck full = new CrossCheck(Invented.catalogue(KS, np("np.a", 5, b -> b), np("np.b", 6, b -> b.scatter(0.1))));
+        CaseResult everything = full.check(Invented.water(Choices.NONE));
+        CaseResult power = full.withoutQuantities().check(Invented.water(Choices.NONE));
+        assertEquals(everything.candidates(), power.candidates());
+        assertEquals(everything.notes(), power.notes());
+        assertEquals(3, everything.quantities().size());
+        assertEquals(List.of(), power.quantities());
+    }
 }

@@ -128,7 +128,7 @@ class VesselGeometryTest {
         "liquid_volume | 0 | liquid_volume_m3 | above 0",
         "liquid_volume | 2650 | liquid_volume_m3 | 0.2 to 1.1 times",
         "baffle_width | 0 | baffle_width_m | above 0 while baffle_count is",
-        "impeller_count | 3 | impeller_count | below liquid_height_m",
+        "impeller_count | 3 | impeller_count | few enough for the liquid",
         "clearance | 0.04 | clearance_m | half the height of the blades",
     })
     void hardLimitsNameColumnAndReason(String parameter, double value, String column, String words) {

@@ -10,15 +10,26 @@ import stirwright.correlation.Variable;
  */
 public final class CrossCheck {
     private final Catalogue catalogue;
+    private final boolean everyQuantity;
 
     public CrossCheck(Catalogue catalogue) {
+        this(catalogue, true);
+    }
+
+    private CrossCheck(Catalogue catalogue, boolean everyQuantity) {
         this.catalogue = catalogue;
+        this.everyQuantity = everyQuantity;
+    }
+
+    /** The same without {@link CaseResult#quantities}, for tables of many cases that do not show them. */
+    public CrossCheck withoutQuantities() {
+        return new CrossCheck(catalogue, false);
     }
 
     /** Computes one case; what cannot be computed is refused in the result, never thrown. */
     public CaseResult check(CaseSpec spec) {
         try {
-            return new CaseSolver(catalogue, spec).solve();
+            return new CaseSolver(catalogue, spec).solve(everyQuantity);
         } catch (CaseRefusedException refused) {
             return CaseResult.refused(spec.name(), spec.familyId(), refused.refusal());
         } catch (RuntimeException | LinkageError broken) {

@@ -61,8 +61,12 @@ public sealed interface Bound {
         @Override
         public Verdict verdict(Geometry geometry, OperatingPoint point) {
             double found = subject.value(geometry, point);
-            boolean inside = allowed.stream().anyMatch(a -> subject.verdict(found, a, a) == Verdict.INSIDE);
-            return inside ? Verdict.INSIDE : Verdict.OUTSIDE;
+            for (double one : allowed) {
+                if (subject.verdict(found, one, one) == Verdict.INSIDE) {
+                    return Verdict.INSIDE;
+                }
+            }
+            return Verdict.OUTSIDE;
         }
 
         @Override

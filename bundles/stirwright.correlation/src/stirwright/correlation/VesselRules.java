@@ -35,8 +35,8 @@ final class VesselRules {
                 .below(BLADE_THICKNESS, IMPELLER_DIAMETER, THICKEST)
                 .rule(BAFFLE_WIDTH, "above 0 while baffle_count is",
                         g -> !(g.get(BAFFLE_COUNT) > 0 && g.get(BAFFLE_WIDTH) <= 0))
-                .rule(IMPELLER_COUNT, "such that the uppermost impeller, clearance_m + (count - 1) impeller_spacing_m"
-                        + " above the bottom, is below liquid_height_m", g -> !(top(g) >= g.get(LIQUID_HEIGHT)))
+                .rule(IMPELLER_COUNT, "few enough for the liquid: the uppermost impeller stands clearance_m + (count - 1) impeller_spacing_m"
+                        + " above the bottom", g -> !(top(g) >= g.get(LIQUID_HEIGHT)))
                 .rule(CLEARANCE, "above half the height of the blades", g -> !(g.get(CLEARANCE) <= halfBlade(g)))
                 .rule(LIQUID_VOLUME, "from " + LEAST_FILL + " to " + MOST_FILL + " times pi/4 T^2 H",
                         g -> !(fill(g) < LEAST_FILL || fill(g) > MOST_FILL));

@@ -24,6 +24,7 @@ import stirwright.exchange.internal.write.QuantityColumns;
 public final class Outputs {
     private final Origin origin;
     private final List<Path> inputs;
+    private boolean everyQuantity;
     private final Set<Path> taken = new HashSet<>();
 
     /** @param inputs files that must stay as they are */
@@ -34,11 +35,20 @@ public final class Outputs {
 
     /** @throws UnusableFileException when the name or the place does not do */
     public Output<CaseResult> results(Path file) {
-        return open(file, ResultTable::to, w -> ResultJson.to(w, origin));
+        return open(file, ResultTable::to, w -> {
+            everyQuantity = true;
+            return ResultJson.to(w, origin);
+        });
+    }
+
+    /** Whether a file opened so far shows the candidates for every quantity. */
+    public boolean showEveryQuantity() {
+        return everyQuantity;
     }
 
     /** @throws UnusableFileException when the name or the place does not do */
     public Output<CaseResult> candidates(Path file) {
+        everyQuantity = true;
         return open(file, CandidateTable::to, w -> new JsonOutput<>(w, origin, "candidates",
                 JsonRecords.each(QuantityColumns.ALL, QuantityColumns::rows)));
     }

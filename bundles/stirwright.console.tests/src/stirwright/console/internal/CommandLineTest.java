@@ -141,6 +141,10 @@ class CommandLineTest {
         assertTrue(Files.readString(csv).startsWith("case,family,correlation,role,verdict,failed_bounds,regime,speed_rev_s,"));
         assertTrue(Files.readString(json).contains("\"9.9.9\""));
         assertTrue(Files.readString(candidates).startsWith("case,quantity,correlation,value,role,verdict,"));
+        for (String quantity : List.of("power-number", "shear-rate-constant", "flow-number", "blend-time")) {
+            assertTrue(Files.readString(candidates).contains("good," + quantity + ","), quantity);
+            assertTrue(Files.readString(json).contains("\"" + quantity + "\""), quantity);
+        }
         assertEquals(3, run("crosscheck", table(GOOD), "--out", folder.resolve("r.ods").toString()));
         assertTrue(err.toString().contains(".csv"), err.toString());
     }

@@ -17,6 +17,7 @@ final class Assessment {
     private final double distance;
     private final List<Failure> failures;
     private final String problem;
+    private List<String> failed;
 
     /** A stated bound that the case fails, and all that it takes to say so. */
     private record Failure(
@@ -132,7 +133,10 @@ final class Assessment {
 
     /** Each stated bound that fails, with what the case has. */
     List<String> failed() {
-        return failures.stream().map(Failure::words).toList();
+        if (failed == null) {
+            failed = failures.stream().map(Failure::words).toList();
+        }
+        return failed;
     }
 
     /** Why it does not qualify, in one sentence; empty when it does. */
@@ -140,6 +144,6 @@ final class Assessment {
         if (!problem.isEmpty() || failures.isEmpty()) {
             return problem;
         }
-        return failures.get(0).words() + (failures.size() > 1 ? " (and " + (failures.size() - 1) + " more)" : "");
+        return failed().get(0) + (failures.size() > 1 ? " (and " + (failures.size() - 1) + " more)" : "");
     }
 }

@@ -35,7 +35,7 @@ final class Candidate {
     private final Quantity quantity;
     private final Optional<Correlation> correlation;
     private final List<Part> parts;
-    private final Set<Variable> reads = new LinkedHashSet<>();
+    private final Set<Variable> reads;
     private final Geometry geometry;
     private final Set<GeometryParameter> defaultsRead;
     private String failure = "";
@@ -61,7 +61,13 @@ final class Candidate {
         this.parts = parts;
         this.geometry = geometry;
         this.defaultsRead = defaultsRead;
-        parts.forEach(p -> reads.addAll(p.correlation().reads()));
+        this.reads = parts.size() == 1 ? parts.get(0).correlation().reads() : reads(parts);
+    }
+
+    private static Set<Variable> reads(List<Part> parts) {
+        Set<Variable> all = new LinkedHashSet<>();
+        parts.forEach(p -> all.addAll(p.correlation().reads()));
+        return all;
     }
 
     /** Applies a correlation with, for each effect that it lacks, the first of the modifiers. */
@@ -72,7 +78,7 @@ final class Candidate {
         String failure = "";
         try {
             parts.add(new Part(correlation, correlation.bind(geometry)));
-            Set<Effect> done = new LinkedHashSet<>(correlation.contains());
+            Set<Effect> done = modifiers.isEmpty() ? Set.of() : new LinkedHashSet<>(correlation.contains());
             for (Correlation modifier : modifiers) {
                 Effect effect = modifier.modifierFor().orElseThrow();
                 if (!done.contains(effect) && modifier.appliesTo(geometry)) {

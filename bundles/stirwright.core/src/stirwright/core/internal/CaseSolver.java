@@ -55,8 +55,11 @@ public final class CaseSolver {
     /** A power candidate and the shear-rate constants that were tried for it. */
     private record PowerTrial(Trial trial, Selection constants) {}
 
-    /** @throws CaseRefusedException when no candidate can be computed */
-    public CaseResult solve() {
+    /**
+     * @param everyQuantity whether the result lists the candidates for every quantity
+     * @throws CaseRefusedException when no candidate can be computed
+     */
+    public CaseResult solve(boolean everyQuantity) {
         List<PowerTrial> tried = powers.stream().map(this::tryPower).toList();
         Selection selection = select(tried);
         Selection.Ranked pick = usablePick(selection);
@@ -66,7 +69,14 @@ public final class CaseSolver {
                     ranked == pick ? states.all(ranked.trial().candidate()) : constantsOf(ranked, tried),
                     ranked.trial().state().map(trials::flowsAt).orElse(Selection.NONE)));
         }
-        return new ResultAssembly(spec, family, vessel, pick).assemble(rows, further(pick));
+        return new ResultAssembly(spec, family, vessel, pick)
+                .assemble(rows, everyQuantity ? quantities(selection, rows.get(0), pick) : List.of());
+    }
+
+    private List<Selection> quantities(Selection power, ResultAssembly.Row pickRow, Selection.Ranked pick) {
+        List<Selection> all = new ArrayList<>(List.of(power, pickRow.constants(), pickRow.flows()));
+        all.addAll(further(pick));
+        return all;
     }
 
     /** @throws CaseRefusedException when the case has no pick or no such candidate */

@@ -1,6 +1,5 @@
 package stirwright.core.internal;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import stirwright.core.CandidateResult;
@@ -36,22 +35,19 @@ final class ResultAssembly {
 
     /**
      * @param rows the pick first
-     * @param further the other quantities at the pick
+     * @param listed the quantities whose candidates the result lists
      */
-    CaseResult assemble(List<Row> rows, List<Selection> further) {
+    CaseResult assemble(List<Row> rows, List<Selection> listed) {
         Row first = rows.get(0);
         double pickPower = pick.trial().state().orElseThrow().power(pick.trial().value());
         List<CandidateResult> results = rows.stream().map(r -> result(r, pickPower)).toList();
         boolean anyQualifies = rows.stream().anyMatch(r -> r.power().trial().qualifies());
         Doubts doubts = new Doubts(spec, vessel, first, anyQualifies);
-        List<QuantityResult> quantities = new ArrayList<>();
-        rows.forEach(r -> quantities.add(quantity(r.power())));
-        first.constants().ranked().forEach(r -> quantities.add(quantity(r)));
-        first.flows().ranked().forEach(r -> quantities.add(quantity(r)));
-        further.forEach(s -> s.ranked().forEach(r -> quantities.add(quantity(r))));
+        List<QuantityResult> quantities = listed.stream()
+                .flatMap(s -> s.ranked().stream()).map(ResultAssembly::quantity).toList();
         List<String> flags = doubts.flags();
         return new CaseResult(spec.name(), spec.familyId(), flags.isEmpty() ? Status.OK : Status.FLAGGED,
-                spread(rows), results, List.copyOf(quantities), flags, doubts.notes(), Optional.empty());
+                spread(rows), results, quantities, flags, doubts.notes(), Optional.empty());
     }
 
     private CandidateResult result(Row row, double pickPower) {

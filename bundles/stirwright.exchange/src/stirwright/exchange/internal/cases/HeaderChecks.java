@@ -25,14 +25,14 @@ final class HeaderChecks {
         List<String> missing = new ArrayList<>();
         for (String column : CaseColumns.REQUIRED) {
             if (!header.has(column)) {
-                missing.add(column + hint(column));
+                missing.add("no column " + column + hint(column));
             }
         }
         if (CaseColumns.SPEEDS.stream().noneMatch(header::has)) {
-            missing.add("one of " + String.join(", ", CaseColumns.SPEEDS.stream().map(c -> c + hint(c)).toList()));
+            missing.add("none of the columns " + String.join(", ", CaseColumns.SPEEDS.stream().map(c -> c + hint(c)).toList()));
         }
         if (!missing.isEmpty()) {
-            throw unusable("has no column " + String.join("; no column ", missing));
+            throw unusable("has " + String.join("; ", missing));
         }
         List<String> twice = header.names().stream()
                 .filter(columns::isKnown)

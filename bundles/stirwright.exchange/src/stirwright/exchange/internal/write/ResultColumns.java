@@ -78,12 +78,17 @@ public final class ResultColumns {
         }
 
         Column<R> number(String name, ToDoubleFunction<CandidateResult> value) {
-            return Column.number(name, r -> of.apply(r).map(value::applyAsDouble).orElse(Double.NaN));
+            return Column.number(name, r -> {
+                Optional<CandidateResult> candidate = of.apply(r);
+                return candidate.isPresent() ? value.applyAsDouble(candidate.get()) : Double.NaN;
+            });
         }
 
         Column<R> state(String name, ToDoubleFunction<FluidState> value) {
-            return Column.number(name,
-                    r -> of.apply(r).flatMap(CandidateResult::state).map(value::applyAsDouble).orElse(Double.NaN));
+            return number(name, candidate -> {
+                Optional<FluidState> state = candidate.state();
+                return state.isPresent() ? value.applyAsDouble(state.get()) : Double.NaN;
+            });
         }
     }
 
