@@ -7,12 +7,22 @@ import stirwright.correlation.Variable;
 
 /** A reusable operating point: set its variables, evaluate, set them again. Not thread-safe. */
 public final class Point implements OperatingPoint {
-    private static final int ROOM = 12;
+    /** What every state has, in the order in which {@link #at} fills it in. */
+    private static final Variable[] OF_STATE = {
+        Variable.REYNOLDS, Variable.FROUDE, Variable.FLOW_INDEX, Variable.YIELD_NUMBER, Variable.SPEED,
+        Variable.DENSITY, Variable.VISCOSITY, Variable.SHEAR_RATE_CONSTANT
+    };
+    private static final int ROOM = OF_STATE.length + 4;
 
-    private Variable[] variables = new Variable[ROOM];
+    private Variable[] variables = Arrays.copyOf(OF_STATE, ROOM);
     private double[] values = new double[ROOM];
-    private int size;
+    private int size = OF_STATE.length;
     private FluidClass fluid = FluidClass.NEWTONIAN;
+
+    /** A point at which nothing is known. */
+    public Point() {
+        Arrays.fill(values, 0, size, Double.NaN);
+    }
 
     /** Sets or replaces a variable, in its SI unit. */
     public Point set(Variable variable, double value) {
@@ -36,15 +46,15 @@ public final class Point implements OperatingPoint {
 
     /** Takes over a state; the Reynolds number is Metzner and Otto's until set otherwise. */
     public Point at(FluidState state) {
-        return set(Variable.REYNOLDS, state.reynolds())
-                .set(Variable.FROUDE, state.froude())
-                .set(Variable.FLOW_INDEX, state.flowIndex())
-                .set(Variable.YIELD_NUMBER, state.yieldNumber())
-                .set(Variable.SPEED, state.speed())
-                .set(Variable.DENSITY, state.density())
-                .set(Variable.VISCOSITY, state.viscosity())
-                .set(Variable.SHEAR_RATE_CONSTANT, state.shearRateConstant())
-                .fluid(state.fluid());
+        values[0] = state.reynolds();
+        values[1] = state.froude();
+        values[2] = state.flowIndex();
+        values[3] = state.yieldNumber();
+        values[4] = state.speed();
+        values[5] = state.density();
+        values[6] = state.viscosity();
+        values[7] = state.shearRateConstant();
+        return fluid(state.fluid());
     }
 
     @Override

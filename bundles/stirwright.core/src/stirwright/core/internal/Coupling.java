@@ -22,7 +22,8 @@ final class Coupling {
     static final double TOLERANCE = 1e-12;
 
     private static final int STEPS = 100;
-    private static final double FIRST_GUESS = 10;
+    /** Most published constants are about that. */
+    static final double FIRST_GUESS = 10;
     private static final double LEAST_CONSTANT = 1e-3;
     private static final double MOST_CONSTANT = 1e5;
     /** Pa s. Common practice, no source: gases lie above, and nothing that is stirred beyond. */
@@ -77,26 +78,34 @@ final class Coupling {
                 : finished(speed, Math.exp(root), constant);
     }
 
+    /** Whether the constant follows from the shear rate alone, so that no loop is needed from there. */
+    static boolean followsFromShearRate(Candidate constant) {
+        return BY_SHEAR_RATE_ALONE.containsAll(constant.reads());
+    }
+
+    /** The state at an average shear rate in 1/s, for a constant that follows from it. */
+    Solution atShearRate(double shearRate, Candidate constant) {
+        double value = evaluate(constant, state(1, shearRate));
+        return finished(usable(value) ? shearRate / value : 1, value, constant);
+    }
+
     /** The state at the least speed that gives an average shear rate in 1/s. */
     Solution forShearRate(SpeedDemand.ForShearRate demand, Candidate constant) {
         double shearRate = demand.value();
-        double speed;
-        if (BY_SHEAR_RATE_ALONE.containsAll(constant.reads())) {
-            double value = evaluate(constant, state(1, shearRate));
-            if (!usable(value)) {
-                return finished(1, value, constant);
-            }
-            speed = shearRate / value;
+        Solution solution;
+        if (followsFromShearRate(constant)) {
+            solution = atShearRate(shearRate, constant);
         } else {
             // At a known shear rate the fluid is known; only the speed is not.
-            speed = Math.exp(Roots.least(ln -> {
+            double speed = Math.exp(Roots.least(ln -> {
                 double trial = Math.exp(ln);
                 return Math.log(evaluate(constant, state(trial, shearRate / trial)) * trial / shearRate);
             }, Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), TOLERANCE));
+            solution = Double.isNaN(speed)
+                    ? Solution.failed(Roots.noSpeed(demand)) : finished(speed, shearRate / speed, constant);
         }
-        return speed <= Math.exp(Roots.mostLnSpeed(diameter))
-                ? finished(speed, shearRate / speed, constant)
-                : Solution.failed(Roots.noSpeed(demand));
+        return solution.state().filter(s -> Math.log(s.speed()) > Roots.mostLnSpeed(diameter)).isPresent()
+                ? Solution.failed(Roots.noSpeed(demand)) : solution;
     }
 
     private double evaluate(Candidate constant, FluidState state) {

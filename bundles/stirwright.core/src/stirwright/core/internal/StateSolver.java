@@ -5,7 +5,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.apache.commons.math3.analysis.UnivariateFunction;
+import java.util.function.DoubleFunction;
+import java.util.function.ToDoubleFunction;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
@@ -113,18 +114,34 @@ final class StateSolver {
 
     /** @param near a speed to start from */
     private Solution forPower(SpeedDemand.ForPowerPerVolume demand, Candidate power, Candidate constant, double near) {
+        Point point = new Point();
+        ToDoubleFunction<Solution> gap = solution -> solution.state()
+                .map(s -> Math.log(s.power(power.value(trials.setUp(point, s, power), s)) / volume / demand.value()))
+                .orElse(Double.NaN);
+        // By the shear rate where the fluid follows from it, which spares the inner loop.
+        DoubleFunction<Solution> state = Coupling.followsFromShearRate(constant)
+                ? ln -> coupling.atShearRate(Math.exp(ln), constant) : ln -> coupling.at(Math.exp(ln), constant);
+        double start = Coupling.followsFromShearRate(constant) ? near * Coupling.FIRST_GUESS : near;
+        double root = Roots.bySecants(ln -> gap.applyAsDouble(state.apply(ln)), Math.log(start), POWER_OVER_SPEED,
+                Coupling.TOLERANCE);
+        Solution found = Double.isNaN(root) ? Solution.failed("") : state.apply(root);
+        return found.state().filter(this::withinLimits).isPresent() ? found : scanned(demand, constant, gap);
+    }
+
+    private boolean withinLimits(FluidState state) {
+        double lnSpeed = Math.log(state.speed());
+        return lnSpeed >= Roots.leastLnSpeed() && lnSpeed <= Roots.mostLnSpeed(diameter);
+    }
+
+    /** For powers that do not rise steadily with speed. */
+    private Solution scanned(
+            SpeedDemand.ForPowerPerVolume demand, Candidate constant, ToDoubleFunction<Solution> gap) {
         Solution slowest = coupling.at(SpeedDemand.LEAST_SPEED, constant);
         if (slowest.state().isEmpty()) {
             return slowest;
         }
-        Point point = new Point();
-        UnivariateFunction gap = lnSpeed -> coupling.at(Math.exp(lnSpeed), constant).state()
-                .map(s -> Math.log(s.power(power.value(trials.setUp(point, s, power), s)) / volume / demand.value()))
-                .orElse(Double.NaN);
-        double root = Roots.bySecants(gap, Math.log(near), POWER_OVER_SPEED, Coupling.TOLERANCE);
-        if (!(root >= Roots.leastLnSpeed() && root <= Roots.mostLnSpeed(diameter))) {
-            root = Roots.least(gap, Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), Coupling.TOLERANCE);
-        }
+        double root = Roots.least(ln -> gap.applyAsDouble(coupling.at(Math.exp(ln), constant)),
+                Roots.leastLnSpeed(), Roots.mostLnSpeed(diameter), Coupling.TOLERANCE);
         return Double.isNaN(root) ? Solution.failed(Roots.noSpeed(demand)) : coupling.at(Math.exp(root), constant);
     }
 
