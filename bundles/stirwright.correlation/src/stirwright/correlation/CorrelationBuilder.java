@@ -143,6 +143,21 @@ public final class CorrelationBuilder {
         return bound(new Bound.NotStated(subject, reason));
     }
 
+    /** The source has wall baffles. */
+    public CorrelationBuilder baffled() {
+        return inClass(Classifier.BAFFLING, Classifier.BAFFLED);
+    }
+
+    /** The source has so many wall baffles, each so wide as a share of the vessel diameter. */
+    public CorrelationBuilder baffled(int count, double widthOverVessel) {
+        return baffled().oneOf(Measure.BAFFLE_COUNT, count).nominal(Measure.B_OVER_T, widthOverVessel);
+    }
+
+    /** The source has no baffles. */
+    public CorrelationBuilder unbaffled() {
+        return inClass(Classifier.BAFFLING, Classifier.UNBAFFLED);
+    }
+
     /** For a source with data of Newtonian fluids that is used for others too: no bound on the fluid, and why. */
     public CorrelationBuilder newtonianData() {
         return notStated(Classifier.FLUID,

@@ -1,7 +1,6 @@
 package stirwright.general;
 
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Measure;
@@ -25,7 +24,7 @@ final class FullyBaffled {
                         "abstract on J-STAGE"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .turbulent()
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .atLeast(BAFFLING_OVER_FULL, 1)
                 .notStated(Measure.BLADE_COUNT, "the abstract gives no range")
                 .notStated(Measure.BLADE_ANGLE, "the abstract gives no range")

@@ -1,6 +1,5 @@
 package stirwright.general;
 
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
@@ -70,7 +69,7 @@ final class PaddlePower {
     private static CorrelationBuilder unbaffled(String id, String title, Blades blades) {
         return card(id, title, blades)
                 .cite(Sources.kameiUnbaffled())
-                .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
+                .unbaffled()
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES, Effect.FROUDE)
                 .formula("Np = Np0; " + FrictionFrame.formula(blades))
                 .relation((vessel, k) -> {
@@ -85,7 +84,7 @@ final class PaddlePower {
         BafflePlateau.declareBaffling(card, blades);
         return card.constant("b", 4.5).constant("s", 3)
                 .cite(Sources.kameiBaffled())
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .notStated(Measure.B_OVER_T, "no range is recalled")
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES)
                 .formula("Np = max(Np0, Npmax (1 + x^-{s})^(-1/{s})); x = {b} " + BafflePlateau.bafflingFormula(blades)

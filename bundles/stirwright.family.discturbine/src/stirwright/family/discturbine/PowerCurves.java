@@ -2,7 +2,6 @@ package stirwright.family.discturbine;
 
 import stirwright.correlation.ChartCurve;
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
@@ -29,7 +28,7 @@ final class PowerCurves {
                         + "Fondy and R. R. Corpstein, Ind. Eng. Chem. Process Des. Dev. 2 (1963) 310-314"))
                 .transcription(Transcription.FROM_MEMORY)
                 .range(Measure.REYNOLDS, 1, 1e5)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .oneOf(Measure.BAFFLE_COUNT, 4)
                 .range(Measure.B_OVER_T, Sources.NARROW_BAFFLE, Sources.WIDE_BAFFLE, "T/12 to T/10")
                 .oneOf(Measure.BLADE_COUNT, 6)
@@ -61,7 +60,7 @@ final class PowerCurves {
                         "Example 9.2; Illustration 10.7, p. 525, with Fig. 6.5, curve g, p. 152"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .range(Measure.REYNOLDS, 6.9e4, 2.5e5, "between the two readings, rounded")
-                .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
+                .unbaffled()
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.W_OVER_D, "not given in the two examples")
                 .range(Measure.D_OVER_T, 0.3, 0.334)
@@ -88,7 +87,7 @@ final class PowerCurves {
                 .cite(Sources.rushtonTable("columns Re 5, 200 and 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .range(Measure.REYNOLDS, 5, 1e5)
-                .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
+                .unbaffled()
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
                 .nominal(Measure.D_OVER_T, 1.0 / 3)
@@ -118,7 +117,7 @@ final class PowerCurves {
                 .cite(Sources.mccabe("Example 9.2, after Rushton, Costich and Everett (1950)"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .notStated(Measure.REYNOLDS, "no end is given; up to 300 the factor is 1")
-                .inClass(Classifier.BAFFLING, Classifier.UNBAFFLED)
+                .unbaffled()
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.D_OVER_T, 1.0 / 3)
                 .newtonianData()

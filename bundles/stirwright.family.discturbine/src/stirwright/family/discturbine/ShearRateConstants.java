@@ -47,7 +47,7 @@ final class ShearRateConstants {
                 .transcription(Transcription.FROM_MEMORY)
                 .scatter(0.13)
                 .atMost(Measure.REYNOLDS, RegimeLimits.IN_GENERAL.turbulentFrom())
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .oneOf(Measure.BAFFLE_COUNT, 4)
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .range(Measure.D_OVER_T, 0.182, 0.769)

@@ -1,7 +1,6 @@
 package stirwright.family.discturbine;
 
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
@@ -22,9 +21,7 @@ final class TurbulentPower {
                         + "of K_L and K_T in chapter 9, from memory"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e4)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
-                .oneOf(Measure.BAFFLE_COUNT, 4)
-                .nominal(Measure.B_OVER_T, 0.1)
+                .baffled(4, 0.1)
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .nominal(Measure.L_OVER_D, 0.25)
@@ -43,7 +40,7 @@ final class TurbulentPower {
                 .cite(Sources.rushton(Citation.LOCATOR_NOT_AT_HAND))
                 .transcription(Transcription.FROM_MEMORY)
                 .atLeast(Measure.REYNOLDS, 1e4)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .oneOf(Measure.BAFFLE_COUNT, 4)
                 .range(Measure.B_OVER_T, Sources.NARROW_BAFFLE, Sources.WIDE_BAFFLE)
                 .oneOf(Measure.BLADE_COUNT, 6)
@@ -64,7 +61,7 @@ final class TurbulentPower {
                 .cite(Sources.rushtonTable("column Re 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e5)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .nominal(Measure.B_OVER_T, 1.0 / 12)
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
@@ -86,7 +83,7 @@ final class TurbulentPower {
                         + "Chem. Eng. Sci. 42 (1987) 317-326"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
                 .turbulent()
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .notStated(Measure.BAFFLE_COUNT, "the paper's baffles are not at hand")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
@@ -118,7 +115,7 @@ final class TurbulentPower {
                         + "Chem. Eng. Res. Des. 74A (1996)", "p. 369"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
                 .turbulent()
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .notStated(Measure.BAFFLE_COUNT, "the paper's baffles are not at hand")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)

@@ -2,7 +2,6 @@ package stirwright.family.pitchedblade;
 
 import stirwright.correlation.ChartCurve;
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
@@ -24,9 +23,7 @@ final class PowerNumbers {
                         + "four baffles a tenth of the vessel wide (heading from memory)"))
                 .transcription(Transcription.FROM_MEMORY)
                 .atMost(Measure.REYNOLDS, 10)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
-                .oneOf(Measure.BAFFLE_COUNT, 4)
-                .nominal(Measure.B_OVER_T, 0.1)
+                .baffled(4, 0.1)
                 .oneOf(Measure.BLADE_COUNT, 4)
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .nominal(Measure.W_OVER_D, 0.2)
@@ -46,9 +43,7 @@ final class PowerNumbers {
                         + "of K_L and K_T in chapter 9, from memory"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e4)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
-                .oneOf(Measure.BAFFLE_COUNT, 4)
-                .nominal(Measure.B_OVER_T, 0.1)
+                .baffled(4, 0.1)
                 .oneOf(Measure.BLADE_COUNT, 4)
                 .nominal(Measure.BLADE_ANGLE, 45)
                 .nominal(Measure.W_OVER_D, 0.2)
@@ -68,7 +63,7 @@ final class PowerNumbers {
                         "section 12.1; table as printed in E. E. Ludwig, Applied Process Design, vol. 1, 3rd ed., p. 300"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 50)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .notStated(Measure.BAFFLE_COUNT, "not read in the section")
                 .oneOf(Measure.BLADE_COUNT, 4)
                 .nominal(Measure.BLADE_ANGLE, 45)
@@ -102,9 +97,7 @@ final class PowerNumbers {
                 .cite(Citation.of("J. Medek, Int. Chem. Eng. 20 (1980)", "p. 664"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
                 .atLeast(Measure.REYNOLDS, 1e4)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
-                .oneOf(Measure.BAFFLE_COUNT, 4)
-                .nominal(Measure.B_OVER_T, 0.1)
+                .baffled(4, 0.1)
                 .notStated(Measure.BLADE_COUNT, "recalled as 3 to 12, unsure")
                 .range(Measure.BLADE_ANGLE, 15, 45)
                 .nominal(Measure.W_OVER_D, 0.2)
@@ -140,7 +133,7 @@ final class PowerNumbers {
                 .cite(Citation.of("P. Harriott, Chemical Reactor Design, Marcel Dekker (2003)", "Example 7.6"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .turbulent()
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .notStated(Measure.BAFFLE_COUNT, "not read in the example")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.BLADE_ANGLE, 45)

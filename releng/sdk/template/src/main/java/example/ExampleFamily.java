@@ -3,7 +3,6 @@ package example;
 import java.util.List;
 import org.osgi.service.component.annotations.Component;
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Contribution;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Dimensions;
@@ -39,7 +38,7 @@ public final class ExampleFamily implements Contribution {
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .standing(Standing.IN_HOUSE_DRAFT)
                 .range(Measure.REYNOLDS, 0.1, 1e5)
-                .inClass(Classifier.BAFFLING, Classifier.BAFFLED)
+                .baffled()
                 .range(Measure.D_OVER_T, 0.3, 0.5)
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .fluids(FluidClass.NEWTONIAN, FluidClass.SHEAR_THINNING)
