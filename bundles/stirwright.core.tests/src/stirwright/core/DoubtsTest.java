@@ -85,4 +85,25 @@ class DoubtsTest {
         vessel.put("liquid_height", 0.76);
         assertEquals(Status.OK, check(vessel).status());
     }
+
+    @Test
+    void bafflesThatReachIntoTheSweptCircleAreACaution() {
+        Map<String, Double> vessel = Invented.vessel();
+        vessel.put("impeller_diameter", 1.22);
+        vessel.put("blade_width", 0.244);
+        CaseResult result = check(vessel);
+        assertTrue(result.flags().stream().anyMatch(f -> f.startsWith("caution: baffles of 0.15 m")), result.flags().toString());
+        vessel.put("baffle_width", 0.13);
+        assertTrue(check(vessel).flags().stream().noneMatch(f -> f.contains("baffles")));
+    }
+
+    /** V = 1.3 m3 in T = 1.5 m stands at 0.736 m; the impeller is at 0.5 m. */
+    @Test
+    void theLiquidHeightFollowsFromAGivenVolume() {
+        Map<String, Double> vessel = Invented.vessel();
+        vessel.remove("liquid_height");
+        vessel.put("liquid_volume", 1.3);
+        CaseResult result = check(vessel);
+        assertTrue(result.flags().get(0).startsWith("caution: liquid level 0.2356 m"), result.flags().toString());
+    }
 }

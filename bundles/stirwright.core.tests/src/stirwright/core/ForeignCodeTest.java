@@ -1,6 +1,7 @@
 package stirwright.core;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
@@ -8,10 +9,14 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import stirwright.correlation.Contribution;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
+import stirwright.correlation.Family;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
+import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Relation;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
@@ -87,5 +92,38 @@ class ForeignCodeTest {
 
     private static String why(CaseResult result, String id) {
         return result.quantities().stream().filter(q -> q.id().equals(id)).findFirst().orElseThrow().why();
+    }
+
+    @Test
+    void factorThatFailsCostsOnlyWhatItWouldBeAppliedTo() {
+        Correlation factor = Invented.formula(Correlation.modifier("invented.np.broken", Quantity.POWER_NUMBER, Effect.FROUDE, "t")
+                .families(Invented.FAMILY).cite(Invented.SOURCE).transcription(Transcription.FROM_MEMORY).constant("a", 1),
+                "{a}", (g, k) -> p -> broken());
+        Correlation immune = Invented.constant(Quantity.POWER_NUMBER, "np.immune", 4, b -> b.contains(Effect.FROUDE));
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, GOOD, immune, factor)).check(Invented.water(Choices.NONE));
+        assertEquals("invented.np.immune", result.pick().orElseThrow().correlation());
+        assertEquals(Role.EXCLUDED, Invented.row(result, "np.good").role());
+    }
+
+    @Test
+    void familyWhoseRuleFailsIsRefusedByName() {
+        Contribution broken = new Contribution() {
+            @Override
+            public List<Family> families() {
+                return List.of(Family.of(Invented.FAMILY, "broken").description("invented for a test")
+                        .regimes(RegimeLimits.IN_GENERAL)
+                        .rule(Dimensions.CLEARANCE, "whatever", g -> broken() > 0).build());
+            }
+
+            @Override
+            public List<Correlation> correlations() {
+                return List.of(KS, GOOD);
+            }
+        };
+        CrossCheck check = new CrossCheck(Catalogue.of(List.of(Arrival.of(broken, "broken 1"))));
+        CaseSpec spec = Invented.water(Choices.NONE);
+        assertEquals("family", check.check(spec).refusal().orElseThrow().field());
+        assertEquals("family", assertThrows(CaseRefusedException.class, () -> check.slice(
+                spec, Quantity.POWER_NUMBER, "invented.np.good", Variable.REYNOLDS)).refusal().field());
     }
 }

@@ -2,6 +2,7 @@ package stirwright.core;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
@@ -142,6 +143,13 @@ class SelectionTest {
         assertEquals(Role.CANDIDATE, Invented.row(result, "np.b").role(), "a is ahead of it");
         assertTrue(Invented.row(result, "np.b").why().startsWith("qualifies, behind invented.np.a"));
         assertEquals(List.of(), result.flags());
+    }
+
+    @Test
+    void givenAndChosenExcludeEachOther() {
+        String message = assertThrows(IllegalArgumentException.class, () -> new Choices(
+                Map.of(Quantity.POWER_NUMBER, "invented.np.a"), Map.of(Quantity.POWER_NUMBER, 5.0))).getMessage();
+        assertTrue(message.contains("invented.np.a") && message.contains("5.0"), message);
     }
 
     @Test

@@ -8,6 +8,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Variable;
 import stirwright.rheology.Newtonian;
@@ -106,5 +107,33 @@ class SpeedDemandTest {
                 .check(Invented.demand(new SpeedDemand.ForPowerPerVolume(250), new Newtonian(1)));
         assertEquals(5, result.pick().orElseThrow().powerNumber(), 1e-12);
         assertEquals(250, result.pick().orElseThrow().powerPerVolume(), 1e-7);
+    }
+
+    /** ks = 10 at D = 0.5 m: 1e-4 rev/s is 1e-3 1/s and 1.6e-4 m/s. */
+    @Test
+    void speedsBelowTheLeastAreNoSolution() {
+        for (SpeedDemand demand : List.of(new SpeedDemand.ForShearRate(0.9e-3), new SpeedDemand.ForTipSpeed(1.5e-4),
+                new SpeedDemand.At(0.9e-4))) {
+            CaseResult result = new CrossCheck(Invented.catalogue(KS, FIVE)).check(Invented.demand(demand, new Newtonian(1)));
+            assertEquals(Status.REFUSED, result.status(), demand.toString());
+            assertEquals(demand.field(), result.refusal().orElseThrow().field());
+            assertTrue(result.refusal().orElseThrow().words().contains("0.0001 rev/s"), result.refusal().orElseThrow().words());
+        }
+    }
+
+    /** The one made for baffles cannot meet the target; the other one must not stand in for it. */
+    @Test
+    void oneMadeForAnotherKindOfVesselDoesNotStandIn() {
+        Correlation falling = Invented.formula(
+                Invented.correlation(Quantity.POWER_NUMBER, "np.falling", Variable.REYNOLDS).range(Measure.REYNOLDS, 1, 1e9)
+                        .oneOf(Measure.BLADE_COUNT, 6).constant("a", 1e-9),
+                "{a}", (g, k) -> p -> k.get("a"));
+        Correlation three = Invented.constant(Quantity.POWER_NUMBER, "np.three", 5, b -> b.oneOf(Measure.BLADE_COUNT, 3));
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, falling, three))
+                .check(Invented.demand(new SpeedDemand.ForPowerPerVolume(250), new Newtonian(1)));
+        assertEquals("target_power_per_volume_W_m3", result.refusal().orElseThrow().field());
+        CaseResult alone = new CrossCheck(Invented.catalogue(KS, three))
+                .check(Invented.demand(new SpeedDemand.ForPowerPerVolume(250), new Newtonian(1)));
+        assertEquals(Status.FLAGGED, alone.status(), "named as the nearest when there is no other");
     }
 }

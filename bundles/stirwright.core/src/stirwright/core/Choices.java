@@ -14,9 +14,16 @@ import stirwright.correlation.Quantity;
 public record Choices(Map<Quantity, String> correlations, Map<Quantity, Double> givens) {
     public static final Choices NONE = new Choices(Map.of(), Map.of());
 
+    /** @throws IllegalArgumentException when a quantity is both given and left to a correlation */
     public Choices {
         correlations = Map.copyOf(correlations);
         givens = Map.copyOf(givens);
+        for (Quantity quantity : givens.keySet()) {
+            if (correlations.containsKey(quantity)) {
+                throw new IllegalArgumentException(quantity.title() + ": given as " + givens.get(quantity)
+                        + " and by " + correlations.get(quantity) + "; choose one");
+            }
+        }
     }
 
     public Optional<String> correlation(Quantity quantity) {

@@ -33,9 +33,7 @@ public final class CrossCheck {
         } catch (CaseRefusedException refused) {
             return CaseResult.refused(spec.name(), spec.familyId(), refused.refusal());
         } catch (RuntimeException | LinkageError broken) {
-            // A family's defaults and rules are code of another bundle; it must not cost the other cases.
-            return CaseResult.refused(spec.name(), spec.familyId(),
-                    new Refusal("family", spec.familyId(), "cannot be used, its code fails: " + broken));
+            return CaseResult.refused(spec.name(), spec.familyId(), broken(spec, broken).refusal());
         }
     }
 
@@ -46,6 +44,17 @@ public final class CrossCheck {
      * @throws CaseRefusedException when the case cannot be computed or has no such candidate
      */
     public Slice slice(CaseSpec spec, Quantity quantity, String correlationId, Variable over) {
-        return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
+        try {
+            return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
+        } catch (CaseRefusedException refused) {
+            throw refused;
+        } catch (RuntimeException | LinkageError broken) {
+            throw broken(spec, broken);
+        }
+    }
+
+    /** A family's defaults and rules are code of another bundle; it must not cost the other cases. */
+    private static CaseRefusedException broken(CaseSpec spec, Throwable failure) {
+        return new CaseRefusedException("family", spec.familyId(), "cannot be used, its code fails: " + failure);
     }
 }

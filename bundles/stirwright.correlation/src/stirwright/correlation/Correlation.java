@@ -140,7 +140,7 @@ public final class Correlation {
     /**
      * A correlation like this one with other constants, for an editor and for sensitivity: an
      * {@linkplain Standing#IN_HOUSE_DRAFT in-house draft} with a remark that says what it was
-     * changed card. All else stays, so whoever edits it further says so in the source.
+     * changed from. All else stays, so whoever edits it further says so in the source.
      *
      * @param newId another id than this one's
      * @param constants made from {@link #constants()}: the same names of constants and curves

@@ -1,6 +1,5 @@
 package stirwright.correlation;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;

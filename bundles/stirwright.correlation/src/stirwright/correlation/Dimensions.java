@@ -20,6 +20,8 @@ public final class Dimensions {
 
     public static final GeometryParameter LIQUID_HEIGHT = GeometryParameter.of(
                     "liquid_height", "liquid height", Kind.LENGTH, "H", "liquid height at rest above the bottom")
+            .derivedAs("V/(pi/4 T^2), flat bottom", g -> g.get(Dimensions.LIQUID_VOLUME)
+                    / (Math.PI / 4 * g.get(VESSEL_DIAMETER) * g.get(VESSEL_DIAMETER)))
             .assumedAs("T", g -> g.get(VESSEL_DIAMETER));
 
     public static final GeometryParameter CLEARANCE = GeometryParameter.of(

@@ -15,7 +15,7 @@ class CatalogueTableTest {
     @Test
     void everyCorrelationAndEveryFamily() {
         StringWriter out = new StringWriter();
-        CatalogueTable.writeCsv(Invented.CATALOGUE, out);
+        CatalogueTable.complete(CatalogueTable.csv(out), Invented.CATALOGUE);
         List<NamedCsvRecord> rows = CsvReader.builder().ofNamedCsvRecord(out.toString()).stream().toList();
         assertEquals(List.of("blades.np.firm", "blades.np.narrow", "blades.ks.ten", "blades.nq.plain", ""),
                 rows.stream().map(r -> r.getField("correlation")).toList());
@@ -36,7 +36,7 @@ class CatalogueTableTest {
     @Test
     void jsonHasTheSameMembers() {
         StringWriter out = new StringWriter();
-        CatalogueTable.writeJson(Invented.CATALOGUE, out, new Origin("1", ""));
+        CatalogueTable.complete(CatalogueTable.json(out, new Origin("1", "")), Invented.CATALOGUE);
         Map<String, Object> json = Json.object(out.toString());
         assertEquals(List.of("stirwright", "correlations"), List.copyOf(json.keySet()));
         List<Map<String, Object>> rows = Json.objects(json, "correlations");

@@ -23,16 +23,6 @@ public final class CatalogueTable {
                 JsonRecords.each(CatalogueColumns.ALL, CatalogueColumns::rows));
     }
 
-    /** Writes the whole table as CSV; the writer is left open. */
-    public static void writeCsv(Catalogue catalogue, Writer out) {
-        complete(csv(out), catalogue);
-    }
-
-    /** Writes the whole table as JSON; the writer is left open. */
-    public static void writeJson(Catalogue catalogue, Writer out, Origin origin) {
-        complete(json(out, origin), catalogue);
-    }
-
     static void complete(Output<Catalogue> output, Catalogue catalogue) {
         try (output) {
             output.add(catalogue);

@@ -21,7 +21,7 @@ final class CrosscheckCommand implements Callable<Integer> {
     private List<Path> outputs = new ArrayList<>();
 
     @Option(names = "--candidates", paramLabel = "FILE",
-            description = "also write one row per case, quantity and correlation; .csv")
+            description = "also write one row per case, quantity and correlation; .csv or .json")
     private List<Path> candidates = new ArrayList<>();
 
     CrosscheckCommand(Desk desk) {

@@ -23,7 +23,7 @@ final class FitCommand implements Callable<Integer> {
     @Parameters(paramLabel = "FILE", arity = "1..*", description = "a table of shear rate in 1/s and shear stress in Pa")
     private List<Path> files = new ArrayList<>();
 
-    @Option(names = "--out", paramLabel = "FILE", description = "also write the fit table; .csv; may be repeated")
+    @Option(names = "--out", paramLabel = "FILE", description = "also write the fit table; .csv or .json; may be repeated")
     private List<Path> outputs = new ArrayList<>();
 
     FitCommand(Desk desk) {

@@ -10,6 +10,7 @@ import stirwright.core.Point;
 import stirwright.core.VesselGeometry;
 import stirwright.correlation.Bound;
 import stirwright.correlation.BoundCorrelation;
+import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Figures;
@@ -88,6 +89,7 @@ final class Candidate {
                 }
             }
         } catch (RuntimeException | LinkageError broken) {
+            // See the class comment: code of another bundle.
             failure = String.valueOf(broken);
         }
         Candidate candidate = new Candidate(
@@ -174,7 +176,7 @@ final class Candidate {
 
     /** The worst verdict over all bounds, without words. */
     Verdict verdict(Point point, FluidState state, double reynolds) {
-        Verdict worst = Verdict.INSIDE;
+        Verdict worst = correlation.isPresent() ? Verdict.INSIDE : Verdict.NOT_STATED;
         try {
             for (int i = 0; i < parts.size(); i++) {
                 point.set(Variable.REYNOLDS, parts.get(i).reynolds(state, reynolds));
@@ -192,12 +194,38 @@ final class Candidate {
 
     /** The modifiers in words with the factor that each contributes. */
     List<String> modifiersInWords(Point point, FluidState state) {
-        return parts.stream().skip(1).map(part -> {
-            Correlation c = part.correlation();
-            double factor = part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds())));
-            return c.modifierFor().orElseThrow().title() + ": " + quantity.title() + " times "
-                    + Figures.show(factor) + " by " + c.id()
-                    + (c.citation().hasSource() ? "" : " (" + c.citation() + ")");
-        }).toList();
+        if (!failure.isEmpty()) {
+            return List.of();
+        }
+        try {
+            return parts.stream().skip(1).map(part -> inWords(part, point, state)).toList();
+        } catch (RuntimeException | LinkageError broken) {
+            failure = String.valueOf(broken);
+            return List.of();
+        }
+    }
+
+    private String inWords(Part part, Point point, FluidState state) {
+        Correlation c = part.correlation();
+        double factor = part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds())));
+        return c.modifierFor().orElseThrow().title() + ": " + quantity.title() + " times "
+                + Figures.show(factor) + " by " + c.id()
+                + (c.citation().hasSource() ? "" : " (" + c.citation() + ")");
+    }
+
+    /**
+     * Whether the vessel is of a class for which the correlation was made: baffled or not, blade
+     * count. Known before any state is.
+     */
+    boolean fitsVessel() {
+        Point unknown = new Point();
+        try {
+            return parts.stream().flatMap(p -> p.correlation().validity().stream())
+                    .filter(b -> b instanceof Bound.OneOf || b.subject().equals(Classifier.BAFFLING))
+                    .noneMatch(b -> b.verdict(geometry, unknown).fails());
+        } catch (RuntimeException | LinkageError broken) {
+            failure = String.valueOf(broken);
+            return false;
+        }
     }
 }

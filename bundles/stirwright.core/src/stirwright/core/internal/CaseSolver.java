@@ -106,7 +106,18 @@ public final class CaseSolver {
     }
 
     private Selection.Ranked usablePick(Selection selection) {
-        return selection.pick().filter(p -> p.trial().usable()).orElseThrow(() -> nothingComputed(selection));
+        Selection.Ranked pick = selection.pick().filter(p -> p.trial().usable())
+                .orElseThrow(() -> nothingComputed(selection.ranked().get(0)));
+        // One made for another kind of vessel must not stand in because those made for this kind meet no target.
+        boolean otherVessel = pick.role() == Role.EXCLUDED && !pick.trial().candidate().fitsVessel();
+        selection.ranked().stream()
+                .filter(r -> otherVessel && r.trial().state().isEmpty() && r.trial().trustworthy()
+                        && r.trial().candidate().fitsVessel())
+                .findFirst()
+                .ifPresent(r -> {
+                    throw nothingComputed(r);
+                });
+        return pick;
     }
 
     /** Every other quantity, each correlation at the pick's state with the pick's power and flow number. */
@@ -118,13 +129,13 @@ public final class CaseSolver {
                 .toList();
     }
 
-    /** Nothing has a number, or the correlation that the case asks for has none. */
-    private CaseRefusedException nothingComputed(Selection selection) {
-        Selection.Ranked first = selection.ranked().get(0);
-        String obstacle = first.trial().assessment().obstacle();
-        return first.role() == Role.CHOSEN
-                ? new CaseRefusedException(Choices.field(Quantity.POWER_NUMBER), first.id(), "gives no power: " + obstacle)
-                : new CaseRefusedException(spec.speed().field(), Figures.show(spec.speed().value()),
-                        "leads to no power: " + obstacle);
+    /** No state was found, or the correlation that the case asks for has no number. */
+    private CaseRefusedException nothingComputed(Selection.Ranked ranked) {
+        String obstacle = ranked.trial().assessment().obstacle();
+        if (ranked.role() != Role.CHOSEN || ranked.trial().state().isEmpty()) {
+            return new CaseRefusedException(spec.speed().field(), Figures.show(spec.speed().value()),
+                    "leads to no power: " + obstacle);
+        }
+        return new CaseRefusedException(Choices.field(Quantity.POWER_NUMBER), ranked.id(), "gives no power: " + obstacle);
     }
 }

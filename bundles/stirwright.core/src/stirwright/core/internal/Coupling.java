@@ -104,7 +104,7 @@ final class Coupling {
             solution = Double.isNaN(speed)
                     ? Solution.failed(Roots.noSpeed(demand)) : finished(speed, shearRate / speed, constant);
         }
-        return solution.state().filter(s -> Math.log(s.speed()) > Roots.mostLnSpeed(diameter)).isPresent()
+        return solution.state().filter(s -> !Roots.withinLimits(s.speed(), diameter)).isPresent()
                 ? Solution.failed(Roots.noSpeed(demand)) : solution;
     }
 

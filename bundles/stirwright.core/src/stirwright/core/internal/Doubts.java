@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Locale;
 import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
-import stirwright.core.Point;
 import stirwright.core.Role;
 import stirwright.core.SpeedDemand;
 import stirwright.core.VesselGeometry;
@@ -41,6 +40,7 @@ final class Doubts {
         defaults.assumedThatMatter().ifPresent(words -> flags.add("assumed: " + words));
         outsideWindow(flags);
         levelNearBlades(flags);
+        bafflesNearBlades(flags);
         return List.copyOf(flags);
     }
 
@@ -93,6 +93,14 @@ final class Doubts {
         }
     }
 
+    private void bafflesNearBlades(List<String> flags) {
+        if (vessel.get(Dimensions.BAFFLE_WIDTH) >= vessel.get(Dimensions.WALL_GAP)) {
+            flags.add("caution: baffles of " + Figures.show(vessel.get(Dimensions.BAFFLE_WIDTH)) + " m do not fit into the gap of "
+                    + Figures.show(vessel.get(Dimensions.WALL_GAP)) + " m between blade tip and wall; unless they end above or"
+                    + " below the impeller, blades hit them");
+        }
+    }
+
     List<String> notes() {
         List<String> notes = new ArrayList<>(spec.remarks());
         defaults.others().ifPresent(words -> notes.add("defaults: " + words));
@@ -105,8 +113,6 @@ final class Doubts {
         });
         row.flows().pick().filter(f -> !f.sound()).ifPresent(f -> notes.add(
                 "flow number " + f.id() + " does not qualify: " + f.trial().assessment().obstacle()));
-        row.flows().pick().ifPresent(f -> notes.addAll(f.trial().candidate().modifiersInWords(
-                new Point().at(state), state)));
         for (Candidate.Part part : row.power().trial().candidate().parts()) {
             part.correlation().remarks().forEach(remark -> notes.add(part.correlation().id() + ": " + remark));
         }

@@ -1,5 +1,6 @@
 package stirwright.core.internal;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import stirwright.core.CandidateResult;
@@ -65,7 +66,14 @@ final class ResultAssembly {
                 flow.map(Selection.Ranked::id).orElse(""),
                 flow.flatMap(f -> f.trial().candidate().correlation()).flatMap(Correlation::flowKind),
                 flowNumber, state.map(s -> s.pumping(flowNumber)).orElse(Double.NaN), power / pickPower - 1,
-                state.map(s -> trial.candidate().modifiersInWords(new Point().at(s), s)).orElse(List.of()));
+                state.map(s -> effects(trial, flow, s)).orElse(List.of()));
+    }
+
+    /** The factors in the power number and in the flow number of a row. */
+    private static List<String> effects(Trial power, Optional<Selection.Ranked> flow, FluidState state) {
+        List<String> words = new ArrayList<>(power.candidate().modifiersInWords(new Point().at(state), state));
+        flow.ifPresent(f -> words.addAll(f.trial().candidate().modifiersInWords(new Point().at(state), state)));
+        return List.copyOf(words);
     }
 
     private static QuantityResult quantity(Selection.Ranked ranked) {

@@ -24,8 +24,12 @@ final class Roots {
         return Math.log(SpeedDemand.MOST_TIP_SPEED / (Math.PI * diameter));
     }
 
+    static boolean withinLimits(double speed, double diameter) {
+        return speed >= SpeedDemand.LEAST_SPEED && Math.log(speed) <= mostLnSpeed(diameter);
+    }
+
     static String noSpeed(SpeedDemand demand) {
-        return "no speed from " + SpeedDemand.LEAST_SPEED + " rev/s to a tip speed of " + Figures.show(SpeedDemand.MOST_TIP_SPEED)
+        return "no speed from " + Figures.show(SpeedDemand.LEAST_SPEED) + " rev/s to a tip speed of " + Figures.show(SpeedDemand.MOST_TIP_SPEED)
                 + " m/s meets " + demand.field() + " " + Figures.show(demand.value());
     }
 

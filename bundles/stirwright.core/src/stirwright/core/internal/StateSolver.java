@@ -47,18 +47,18 @@ final class StateSolver {
     }
 
     private void checkSpeed(SpeedDemand demand) {
-        double tipSpeed = switch (demand) {
-            case SpeedDemand.At at -> Math.PI * diameter * at.value();
-            case SpeedDemand.ForTipSpeed tip -> tip.value();
-            case SpeedDemand.ForShearRate shear -> 0;
-            case SpeedDemand.ForPowerPerVolume power -> 0;
+        double speed = switch (demand) {
+            case SpeedDemand.At at -> at.value();
+            case SpeedDemand.ForTipSpeed tip -> tip.value() / (Math.PI * diameter);
+            case SpeedDemand.ForShearRate shear -> SpeedDemand.LEAST_SPEED;
+            case SpeedDemand.ForPowerPerVolume power -> SpeedDemand.LEAST_SPEED;
         };
-        if (tipSpeed > SpeedDemand.MOST_TIP_SPEED) {
+        if (Math.PI * diameter * speed > SpeedDemand.MOST_TIP_SPEED) {
             throw new CaseRefusedException(demand.field(), Figures.show(demand.value()), "gives a tip speed above "
                     + Figures.show(SpeedDemand.MOST_TIP_SPEED) + " m/s; was a unit mistaken");
         }
-        if (demand instanceof SpeedDemand.At at && at.value() < SpeedDemand.LEAST_SPEED) {
-            throw new CaseRefusedException(demand.field(), Figures.show(demand.value()), "is below "
+        if (speed < SpeedDemand.LEAST_SPEED) {
+            throw new CaseRefusedException(demand.field(), Figures.show(demand.value()), "is a speed below "
                     + Figures.show(SpeedDemand.LEAST_SPEED) + " rev/s");
         }
     }
@@ -125,12 +125,7 @@ final class StateSolver {
         double root = Roots.bySecants(ln -> gap.applyAsDouble(state.apply(ln)), Math.log(start), POWER_OVER_SPEED,
                 Coupling.TOLERANCE);
         Solution found = Double.isNaN(root) ? Solution.failed("") : state.apply(root);
-        return found.state().filter(this::withinLimits).isPresent() ? found : scanned(demand, constant, gap);
-    }
-
-    private boolean withinLimits(FluidState state) {
-        double lnSpeed = Math.log(state.speed());
-        return lnSpeed >= Roots.leastLnSpeed() && lnSpeed <= Roots.mostLnSpeed(diameter);
+        return found.state().filter(x -> Roots.withinLimits(x.speed(), diameter)).isPresent() ? found : scanned(demand, constant, gap);
     }
 
     /** For powers that do not rise steadily with speed. */

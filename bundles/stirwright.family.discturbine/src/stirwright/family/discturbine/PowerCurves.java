@@ -96,14 +96,14 @@ final class PowerCurves {
                 .newtonianData()
                 .contains(Effect.FROUDE)
                 .reads(Variable.REYNOLDS)
-                .curve("Np", 5, 14.2, 200, 3.7, 1e5, 1.15)
+                .curve("Np", 5, 14.2, 10, 7.1, 200, 3.7, 1e5, 1.15)
                 .formula("Np over Re {Np}")
                 .relation((vessel, k) -> {
                     ChartCurve np = k.curve("Np");
                     return point -> np.at(point.reynolds());
                 })
-                .remark("Three printed points; the straight lines between them are ours, and the curve between 200 and "
-                        + "1e5 may well be bent.")
+                .remark("Three printed points, and 7.1 at Re 10 by the slope -1 that the same page has up to there; the "
+                        + "straight lines between them are ours, and the curve between 200 and 1e5 may well be bent.")
                 .remark("Whether 1.15 is Np or Np/Fr^m is not said; it is taken for Np, which agrees with 0.97 Fr^m "
                         + "of the power curve without baffles at Fr 0.14.")
                 .build();
