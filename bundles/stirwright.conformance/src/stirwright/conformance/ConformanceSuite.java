@@ -14,6 +14,7 @@ import stirwright.conformance.internal.Names;
 import stirwright.conformance.internal.PrintedForm;
 import stirwright.conformance.internal.RangesFlagged;
 import stirwright.conformance.internal.References;
+import stirwright.conformance.internal.SpokenOf;
 import stirwright.conformance.internal.StatedRange;
 
 /** Every check, in the order in which a contributor would want to mend what they find. */
@@ -48,6 +49,8 @@ public final class ConformanceSuite {
                     LaminarLimits::examine),
             new Check("reads", "A correlation reads the variables that it declares, all of them and no other.",
                     DeclaredReads::examine),
+            new Check("spoken of", "Every dimension that a correlation reads is spoken of by a bound, stated or not.",
+                    SpokenOf::examine),
             new Check("constants", "Every constant and curve that the formula prints is held by a reference row.",
                     ConstantsUsed::examine));
 

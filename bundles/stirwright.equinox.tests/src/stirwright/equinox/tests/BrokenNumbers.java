@@ -67,6 +67,7 @@ final class BrokenNumbers {
                 // The row has impeller count 1, of which every power is 1.
                 new Broken("constants", "an exponent that no row holds", subject(POWER_ROW, Specimen.bounded(
                                 Specimen.described(Specimen.start())).constant("a", 2.1).constant("e", 0.5)
+                        .notStated(Measure.IMPELLER_COUNT, "invented without a range")
                         .formula("Np = {a} ni^{e}").relation((g, k) -> p -> k.get("a")
                                 * Math.pow(g.get(Dimensions.IMPELLER_COUNT), k.get("e"))).build()),
                         POWER, "'e'", "no reference row"),
@@ -88,7 +89,8 @@ final class BrokenNumbers {
     private static Subject aSlopeInTheSecondFamily() {
         List<Family> families = List.of(Specimen.family("specimen").build(),
                 Specimen.family("second").parameter(Dimensions.BLADE_COUNT.usually("6", g -> 6)).build());
-        Correlation sloped = Specimen.power().families("second").laminarLimit().relation((g, k) -> {
+        Correlation sloped = Specimen.power().families("second").laminarLimit()
+                .notStated(Measure.BLADE_COUNT, "invented without a range").relation((g, k) -> {
             double slope = g.get(Dimensions.BLADE_COUNT) > 0 ? 0.9 : 1;
             return p -> k.get("a") / 100 * Math.pow(100 / p.reynolds(), slope) + k.get("b");
         }).build();

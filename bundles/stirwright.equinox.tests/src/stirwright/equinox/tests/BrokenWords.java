@@ -58,6 +58,9 @@ final class BrokenWords {
                         POWER, "Classifier.BAFFLING"),
                 new Broken("bounds", "a reason that is none", subject(POWER_ROW, sound(Specimen.formula(Specimen
                         .withoutFluid(Specimen.described(Specimen.start())).notStated(Classifier.FLUID, "?")))), "'?'"),
+                new Broken("spoken of", "a dimension that no bound speaks of", subject(POWER_ROW, Specimen.power()
+                        .relation((g, k) -> p -> (k.get("a") / p.reynolds() + k.get("b"))
+                                * (g.get(Dimensions.CLEARANCE) > 0 ? 1 : 2)).build()), POWER, "clearance"),
                 new Broken("names", "a shear-rate constant that is not there",
                         subject(POWER_ROW, sound(Specimen.power().belongsWith(KS))), KS, "not installed"),
                 new Broken("names", "a shear-rate constant that is none",

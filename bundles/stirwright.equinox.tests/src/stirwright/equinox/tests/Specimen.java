@@ -99,6 +99,7 @@ final class Specimen {
     static CorrelationBuilder factor() {
         return bounded(described(Correlation.modifier(
                         FACTOR, Quantity.POWER_NUMBER, Effect.SEVERAL_IMPELLERS, "invented")))
+                .notStated(Measure.IMPELLER_COUNT, "invented without a range")
                 .constant("f", 0.9).formula("{f} ni")
                 .relation((g, k) -> p -> k.get("f") * g.get(Dimensions.IMPELLER_COUNT));
     }
