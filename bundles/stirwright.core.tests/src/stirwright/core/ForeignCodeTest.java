@@ -66,6 +66,15 @@ class ForeignCodeTest {
     }
 
     @Test
+    void powerNumberThatFailsOnTheWayToATargetIsNamed() {
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, GOOD, np((g, k) -> p -> broken())))
+                .check(Invented.demand(new SpeedDemand.ForPowerPerVolume(250), new PowerLaw(2, 0.5)));
+        assertEquals("invented.np.good", result.pick().orElseThrow().correlation());
+        assertTrue(Invented.row(result, "np.broken").why().contains("code fails: java.lang.IllegalStateException: broken"),
+                Invented.row(result, "np.broken").why());
+    }
+
+    @Test
     void shearRateConstantThatFailsIsNamed() {
         Correlation ks = Invented.formula(Invented.anywhere(Quantity.SHEAR_RATE_CONSTANT, "ks.broken", Variable.REYNOLDS)
                 .constant("a", 1), "{a}", (g, k) -> p -> broken());

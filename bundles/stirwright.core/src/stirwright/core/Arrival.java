@@ -3,6 +3,7 @@ package stirwright.core;
 import java.util.List;
 import java.util.Optional;
 import org.osgi.framework.Bundle;
+import stirwright.core.internal.ForeignCode;
 import stirwright.correlation.Contribution;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
@@ -17,13 +18,12 @@ public record Arrival(String origin, List<Family> families, List<Correlation> co
 
     /** Asks a contribution once. */
     public static Arrival of(Contribution contribution, String origin) {
-        try {
-            return new Arrival(origin, List.copyOf(contribution.families()),
-                    List.copyOf(contribution.correlations()), Optional.empty());
-        } catch (RuntimeException | LinkageError failure) {
-            // Code of another bundle: whatever it throws must not take the other families down.
-            return new Arrival(origin, List.of(), List.of(), Optional.of(String.valueOf(failure)));
-        }
+        ForeignCode foreign = new ForeignCode();
+        List<Family> families = foreign.call(() -> List.copyOf(contribution.families()), List.of());
+        List<Correlation> correlations = foreign.call(() -> List.copyOf(contribution.correlations()), List.of());
+        return foreign.failure().isEmpty()
+                ? new Arrival(origin, families, correlations, Optional.empty())
+                : new Arrival(origin, List.of(), List.of(), Optional.of(foreign.failure()));
     }
 
     /** How messages name a bundle; null is a bundle that has left. */

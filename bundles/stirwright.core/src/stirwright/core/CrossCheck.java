@@ -32,8 +32,6 @@ public final class CrossCheck {
             return new CaseSolver(catalogue, spec).solve(everyQuantity);
         } catch (CaseRefusedException refused) {
             return CaseResult.refused(spec.name(), spec.familyId(), refused.refusal());
-        } catch (RuntimeException | LinkageError broken) {
-            return CaseResult.refused(spec.name(), spec.familyId(), broken(spec, broken).refusal());
         }
     }
 
@@ -44,17 +42,6 @@ public final class CrossCheck {
      * @throws CaseRefusedException when the case cannot be computed or has no such candidate
      */
     public Slice slice(CaseSpec spec, Quantity quantity, String correlationId, Variable over) {
-        try {
-            return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
-        } catch (CaseRefusedException refused) {
-            throw refused;
-        } catch (RuntimeException | LinkageError broken) {
-            throw broken(spec, broken);
-        }
-    }
-
-    /** A family's defaults and rules are code of another bundle; it must not cost the other cases. */
-    private static CaseRefusedException broken(CaseSpec spec, Throwable failure) {
-        return new CaseRefusedException("family", spec.familyId(), "cannot be used, its code fails: " + failure);
+        return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
     }
 }

@@ -24,8 +24,6 @@ public final class Main {
     }
 
     // EclipseStarter is marked as internal, yet it is what the platform's own launcher calls.
-    // Everything is caught: what got here must end in words and an exit code, since threads of the framework would
-    // keep the process alive after the main thread died.
     @SuppressWarnings("restriction")
     private static int run(String[] arguments) {
         try {
@@ -36,6 +34,8 @@ public final class Main {
                 EclipseStarter.shutdown();
             }
         } catch (Throwable failure) {
+            // Everything is caught: what got here must end in words and an exit code, since threads of the framework
+            // would keep the process alive after the main thread died.
             System.err.println("stirwright: could not be started: " + failure + kept(failure));
             return UNUSABLE;
         }

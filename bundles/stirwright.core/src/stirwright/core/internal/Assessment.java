@@ -25,7 +25,9 @@ final class Assessment {
         String words() {
             point.set(Variable.REYNOLDS, reynolds);
             String whose = part == candidate.parts().get(0) ? "" : part.correlation().id() + ": ";
-            return bound.found(candidate.geometry(), point) + " is " + verdict.id()
+            String found = candidate.foreign().call(
+                    () -> bound.found(candidate.geometry(), point), bound.subject().title());
+            return found + " is " + verdict.id()
                     + " (" + whose + bound.allowance() + ")";
         }
 
@@ -58,13 +60,11 @@ final class Assessment {
             return new Assessment(Verdict.NOT_STATED, 0, List.of(), "");
         }
         String unknown = unknown(candidate, point, state);
-        Verdict verdict = candidate.verdict(point, state, state.reynolds());
-        List<Failure> failures = verdict.fails() && candidate.failure().isEmpty()
-                ? failures(candidate, point, state) : List.of();
-        double distance = 0;
-        for (Failure failure : failures) {
-            distance += failure.distance();
-        }
+        Verdict verdict = candidate.verdict(point, state);
+        List<Failure> failures = verdict.fails()
+                ? candidate.foreign().call(() -> failures(candidate, point, state), List.of()) : List.of();
+        double distance = failures.isEmpty() ? 0 : candidate.foreign().call(
+                () -> failures.stream().mapToDouble(Failure::distance).sum(), Double.POSITIVE_INFINITY);
         return new Assessment(verdict, distance, failures, problem(candidate, value, unknown, failures.isEmpty()));
     }
 
@@ -85,8 +85,8 @@ final class Assessment {
 
     /** What stands in its way apart from bounds; what no case can mend counts only where none fails. */
     private static String problem(Candidate candidate, double value, String unknown, boolean withinBounds) {
-        if (!candidate.failure().isEmpty()) {
-            return "its code fails: " + candidate.failure();
+        if (!candidate.foreign().failure().isEmpty()) {
+            return "its code fails: " + candidate.foreign().failure();
         }
         if (!unknown.isEmpty()) {
             return unknown;

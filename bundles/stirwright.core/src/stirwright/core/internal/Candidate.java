@@ -26,7 +26,7 @@ import stirwright.correlation.Verdict;
  * effects that it does not contain. Not thread-safe.
  *
  * <p>What correlations compute is code of other bundles: whatever it throws becomes a value that is
- * no number and a {@link #failure}, so that one bad contribution costs its own candidate alone.
+ * no number and a failure in {@link #foreign}, so that it costs its own candidate alone.
  */
 final class Candidate {
 
@@ -39,7 +39,7 @@ final class Candidate {
     private final Set<Variable> reads;
     private final Geometry geometry;
     private final Set<GeometryParameter> defaultsRead;
-    private String failure = "";
+    private final ForeignCode foreign;
     private String distrust;
     private double givenValue = Double.NaN;
 
@@ -56,7 +56,8 @@ final class Candidate {
 
     private Candidate(
             Quantity quantity, Optional<Correlation> correlation, List<Part> parts, Geometry geometry,
-            Set<GeometryParameter> defaultsRead) {
+            Set<GeometryParameter> defaultsRead, ForeignCode foreign) {
+        this.foreign = foreign;
         this.quantity = quantity;
         this.correlation = correlation;
         this.parts = parts;
@@ -75,32 +76,31 @@ final class Candidate {
     static Candidate of(Correlation correlation, List<Correlation> modifiers, VesselGeometry vessel) {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
+        ForeignCode foreign = new ForeignCode();
+        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, geometry), List.of());
+        return new Candidate(
+                correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead, foreign);
+    }
+
+    private static List<Part> parts(Correlation correlation, List<Correlation> modifiers, Geometry geometry) {
         List<Part> parts = new ArrayList<>();
-        String failure = "";
-        try {
-            parts.add(new Part(correlation, correlation.bind(geometry)));
-            Set<Effect> done = modifiers.isEmpty() ? Set.of() : new LinkedHashSet<>(correlation.contains());
-            for (Correlation modifier : modifiers) {
-                Effect effect = modifier.modifierFor().orElseThrow();
-                if (!done.contains(effect) && modifier.appliesTo(geometry)) {
-                    parts.add(new Part(modifier, modifier.bind(geometry)));
-                    done.add(effect);
-                    done.addAll(modifier.contains());
-                }
+        parts.add(new Part(correlation, correlation.bind(geometry)));
+        Set<Effect> done = new LinkedHashSet<>(correlation.contains());
+        for (Correlation modifier : modifiers) {
+            Effect effect = modifier.modifierFor().orElseThrow();
+            if (!done.contains(effect) && modifier.appliesTo(geometry)) {
+                parts.add(new Part(modifier, modifier.bind(geometry)));
+                done.add(effect);
+                done.addAll(modifier.contains());
             }
-        } catch (RuntimeException | LinkageError broken) {
-            // See the class comment: code of another bundle.
-            failure = String.valueOf(broken);
         }
-        Candidate candidate = new Candidate(
-                correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead);
-        candidate.failure = failure;
-        return candidate;
+        return parts;
     }
 
     /** A value that the user gave: a total, so no modifier touches it. */
     static Candidate given(Quantity quantity, double value, VesselGeometry vessel) {
-        Candidate candidate = new Candidate(quantity, Optional.empty(), List.of(), vessel, Set.of());
+        Candidate candidate = new Candidate(
+                quantity, Optional.empty(), List.of(), vessel, Set.of(), new ForeignCode());
         candidate.givenValue = value;
         return candidate;
     }
@@ -143,66 +143,54 @@ final class Candidate {
         return distrust;
     }
 
-    /** What the contributed code threw; empty when it did not. */
-    String failure() {
-        return failure;
+    /** Where its contributed code is run, and what it threw. */
+    ForeignCode foreign() {
+        return foreign;
     }
 
-    /** The value at a state, all modifiers included. */
+    /** The value at a state, all modifiers included; NaN when its code fails. */
     double value(Point point, FluidState state) {
-        return value(point, state, state.reynolds());
-    }
-
-    /** The value at another Reynolds number; like the verdict called in sweeps, so without iterators. */
-    double value(Point point, FluidState state, double reynolds) {
-        if (correlation.isEmpty()) {
-            return givenValue;
-        }
-        if (!failure.isEmpty()) {
-            return Double.NaN;
-        }
-        try {
-            double value = 1;
-            for (int i = 0; i < parts.size(); i++) {
-                Part part = parts.get(i);
-                value *= part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, reynolds)));
-            }
-            return value;
-        } catch (RuntimeException | LinkageError broken) {
-            failure = String.valueOf(broken);
-            return Double.NaN;
-        }
+        return foreign.call(() -> product(point, state, state.reynolds()), Double.NaN);
     }
 
     /** The worst verdict over all bounds, without words. */
-    Verdict verdict(Point point, FluidState state, double reynolds) {
-        Verdict worst = correlation.isPresent() ? Verdict.INSIDE : Verdict.NOT_STATED;
-        try {
-            for (int i = 0; i < parts.size(); i++) {
-                point.set(Variable.REYNOLDS, parts.get(i).reynolds(state, reynolds));
-                List<Bound> bounds = parts.get(i).correlation().validity();
-                for (int j = 0; j < bounds.size(); j++) {
-                    worst = worst.worseOf(bounds.get(j).verdict(geometry, point));
-                }
-            }
-            return worst;
-        } catch (RuntimeException | LinkageError broken) {
-            failure = String.valueOf(broken);
-            return Verdict.OUTSIDE;
+    Verdict verdict(Point point, FluidState state) {
+        return foreign.call(() -> worst(point, state, state.reynolds()), Verdict.OUTSIDE);
+    }
+
+    /**
+     * The value at any Reynolds number (Metzner and Otto's). For sweeps: it allocates nothing, and what
+     * its code throws is for the caller to guard.
+     */
+    double product(Point point, FluidState state, double reynolds) {
+        if (correlation.isEmpty()) {
+            return givenValue;
         }
+        double value = parts.isEmpty() ? Double.NaN : 1;
+        for (int i = 0; i < parts.size(); i++) {
+            Part part = parts.get(i);
+            value *= part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, reynolds)));
+        }
+        return value;
+    }
+
+    /** The worst verdict at any Reynolds number, for sweeps as well. */
+    Verdict worst(Point point, FluidState state, double reynolds) {
+        Verdict worst = correlation.isPresent() ? Verdict.INSIDE : Verdict.NOT_STATED;
+        for (int i = 0; i < parts.size(); i++) {
+            point.set(Variable.REYNOLDS, parts.get(i).reynolds(state, reynolds));
+            List<Bound> bounds = parts.get(i).correlation().validity();
+            for (int j = 0; j < bounds.size(); j++) {
+                worst = worst.worseOf(bounds.get(j).verdict(geometry, point));
+            }
+        }
+        return worst;
     }
 
     /** The modifiers in words with the factor that each contributes. */
     List<String> modifiersInWords(Point point, FluidState state) {
-        if (!failure.isEmpty()) {
-            return List.of();
-        }
-        try {
-            return parts.stream().skip(1).map(part -> inWords(part, point, state)).toList();
-        } catch (RuntimeException | LinkageError broken) {
-            failure = String.valueOf(broken);
-            return List.of();
-        }
+        return parts.size() < 2 ? List.of()
+                : foreign.call(() -> parts.stream().skip(1).map(part -> inWords(part, point, state)).toList(), List.of());
     }
 
     private String inWords(Part part, Point point, FluidState state) {
@@ -219,13 +207,8 @@ final class Candidate {
      */
     boolean fitsVessel() {
         Point unknown = new Point();
-        try {
-            return parts.stream().flatMap(p -> p.correlation().validity().stream())
-                    .filter(b -> b instanceof Bound.OneOf || b.subject().equals(Classifier.BAFFLING))
-                    .noneMatch(b -> b.verdict(geometry, unknown).fails());
-        } catch (RuntimeException | LinkageError broken) {
-            failure = String.valueOf(broken);
-            return false;
-        }
+        return foreign.call(() -> parts.stream().flatMap(p -> p.correlation().validity().stream())
+                .filter(b -> b instanceof Bound.OneOf || b.subject().equals(Classifier.BAFFLING))
+                .noneMatch(b -> b.verdict(geometry, unknown).fails()), false);
     }
 }

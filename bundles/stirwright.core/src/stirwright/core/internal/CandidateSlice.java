@@ -1,5 +1,6 @@
 package stirwright.core.internal;
 
+import java.util.Arrays;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.Slice;
@@ -26,12 +27,20 @@ final class CandidateSlice implements Slice {
             throw new IllegalArgumentException(values.length + " values into room for " + into.length + " and "
                     + verdicts.length);
         }
+        // What a failing code leaves untouched.
+        Arrays.fill(into, Double.NaN);
+        Arrays.fill(verdicts, Verdict.OUTSIDE);
+        candidate.foreign().call(() -> sweep(values, into, verdicts), false);
+    }
+
+    private boolean sweep(double[] values, double[] into, Verdict[] verdicts) {
         boolean overReynolds = over.equals(Variable.REYNOLDS);
         for (int i = 0; i < values.length; i++) {
             double reynolds = overReynolds ? values[i] : state.reynolds();
             point.set(over, values[i]);
-            into[i] = candidate.value(point, state, reynolds);
-            verdicts[i] = candidate.verdict(point, state, reynolds);
+            into[i] = candidate.product(point, state, reynolds);
+            verdicts[i] = candidate.worst(point, state, reynolds);
         }
+        return true;
     }
 }

@@ -36,11 +36,19 @@ public final class CaseSolver {
         this.family = catalogue.family(spec.familyId()).orElseThrow(() -> new CaseRefusedException(
                 "family", spec.familyId(), "is not installed; there are "
                         + String.join(", ", catalogue.families().stream().map(Family::id).sorted().toList())));
-        this.vessel = VesselGeometry.resolve(family, spec.geometry());
+        this.vessel = resolved();
         this.candidates = new Candidates(catalogue, family, vessel, spec);
         this.powers = needed(Quantity.POWER_NUMBER);
         this.trials = new Trials(candidates.of(Quantity.FLOW_NUMBER), spec.choices());
         this.states = new StateSolver(spec, vessel, needed(Quantity.SHEAR_RATE_CONSTANT), trials);
+    }
+
+    /** A family's defaults and rules are code of another bundle. */
+    private VesselGeometry resolved() {
+        ForeignCode foreign = new ForeignCode();
+        return foreign.call(() -> Optional.of(VesselGeometry.resolve(family, spec.geometry())), Optional.<VesselGeometry>empty())
+                .orElseThrow(() -> new CaseRefusedException(
+                        "family", family.id(), "cannot be used, its code fails: " + foreign.failure()));
     }
 
     private List<Candidate> needed(Quantity quantity) {

@@ -125,7 +125,7 @@ final class Coupling {
                             + Figures.show(LEAST_VISCOSITY) + " to " + Figures.show(MOST_VISCOSITY) + " Pa s");
         }
         String unknown = Assessment.unknown(candidate, point, state);
-        return Solution.failed(!candidate.failure().isEmpty() ? "its code fails: " + candidate.failure()
+        return Solution.failed(!candidate.foreign().failure().isEmpty() ? "its code fails: " + candidate.foreign().failure()
                 : unknown.isEmpty() ? "the shear-rate constant has no positive value here" : unknown);
     }
 

@@ -102,7 +102,7 @@ final class StateSolver {
         double near = Math.cbrt(demand.value() * volume / (spec.fluid().density() * Math.pow(diameter, 5)));
         List<Trial> solved = new ArrayList<>();
         for (Candidate constant : constants) {
-            Solution solution = forPower(demand, power, constant, near);
+            Solution solution = guarded(demand, power, constant, near);
             near = solution.state().map(FluidState::speed).orElse(near);
             solved.add(tried(constant, solution));
             if (firstWillDo && solved.getLast().qualifies()) {
@@ -112,11 +112,20 @@ final class StateSolver {
         return solved;
     }
 
+    /** Guards the power number's code once for all the steps to a solution, which are many. */
+    private Solution guarded(SpeedDemand.ForPowerPerVolume demand, Candidate power, Candidate constant, double near) {
+        Optional<Solution> solution = power.foreign().call(
+                () -> Optional.of(forPower(demand, power, constant, near)), Optional.empty());
+        return solution.orElseGet(() -> Solution.failed(
+                "the power number's code fails: " + power.foreign().failure()));
+    }
+
     /** @param near a speed to start from */
     private Solution forPower(SpeedDemand.ForPowerPerVolume demand, Candidate power, Candidate constant, double near) {
         Point point = new Point();
         ToDoubleFunction<Solution> gap = solution -> solution.state()
-                .map(s -> Math.log(s.power(power.value(trials.setUp(point, s, power), s)) / volume / demand.value()))
+                .map(s -> Math.log(s.power(power.product(trials.setUp(point, s, power), s, s.reynolds()))
+                        / volume / demand.value()))
                 .orElse(Double.NaN);
         // By the shear rate where the fluid follows from it, which spares the inner loop.
         DoubleFunction<Solution> state = Coupling.followsFromShearRate(constant)
