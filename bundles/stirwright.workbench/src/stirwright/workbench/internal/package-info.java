@@ -1,0 +1,2 @@
+/** The window. */
+package stirwright.workbench.internal;
