@@ -132,7 +132,7 @@ class ForeignCodeTest {
         CrossCheck check = new CrossCheck(Catalogue.of(List.of(Arrival.of(broken, "broken 1"))));
         CaseSpec spec = Invented.water(Choices.NONE);
         assertEquals("family", check.check(spec).refusal().orElseThrow().field());
-        assertEquals("family", assertThrows(CaseRefusedException.class, () -> check.slice(
-                spec, Quantity.POWER_NUMBER, "invented.np.good", Variable.REYNOLDS)).refusal().field());
+        assertEquals("family", assertThrows(CaseRefusedException.class, () -> check.open(spec).slice(
+                Quantity.POWER_NUMBER, "invented.np.good", Variable.REYNOLDS)).refusal().field());
     }
 }

@@ -32,8 +32,8 @@ class SliceTest {
             .families(Invented.FAMILY).cite(Invented.SOURCE).transcription(Transcription.FROM_MEMORY).value("f", 2).build();
 
     private static Slice slice(Correlation power) {
-        return new CrossCheck(Invented.catalogue(KS, DOUBLE, power)).slice(
-                Invented.at(2, new PowerLaw(80, 0.5)), Quantity.POWER_NUMBER, "invented.np.laminar", Variable.REYNOLDS);
+        return new CrossCheck(Invented.catalogue(KS, DOUBLE, power)).open(Invented.at(2, new PowerLaw(80, 0.5))).slice(
+                Quantity.POWER_NUMBER, "invented.np.laminar", Variable.REYNOLDS);
     }
 
     @Test
@@ -61,8 +61,8 @@ class SliceTest {
     @Test
     void refusesWhatIsNotThere() {
         CrossCheck check = new CrossCheck(Invented.catalogue(KS, DOUBLE, laminar(ReynoldsDefinition.METZNER_OTTO)));
-        assertThrows(CaseRefusedException.class, () -> check.slice(
-                Invented.at(2, new PowerLaw(80, 0.5)), Quantity.POWER_NUMBER, "invented.np.none", Variable.REYNOLDS));
+        assertThrows(CaseRefusedException.class, () -> check.open(
+                Invented.at(2, new PowerLaw(80, 0.5))).slice(Quantity.POWER_NUMBER, "invented.np.none", Variable.REYNOLDS));
         assertThrows(IllegalArgumentException.class, () -> slice(laminar(ReynoldsDefinition.METZNER_OTTO))
                 .evaluate(new double[2], new double[3], new Verdict[2]));
     }

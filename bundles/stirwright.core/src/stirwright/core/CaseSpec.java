@@ -19,4 +19,9 @@ public record CaseSpec(
         geometry = Map.copyOf(geometry);
         remarks = List.copyOf(remarks);
     }
+
+    /** The same case at another speed or for another target. */
+    public CaseSpec with(SpeedDemand otherSpeed) {
+        return new CaseSpec(name, familyId, geometry, otherSpeed, fluid, choices, remarks);
+    }
 }

@@ -1,8 +1,7 @@
 package stirwright.core;
 
+import java.util.Optional;
 import stirwright.core.internal.CaseSolver;
-import stirwright.correlation.Quantity;
-import stirwright.correlation.Variable;
 
 /**
  * Applies every installed correlation of a family to a case and compares them. The window, the
@@ -28,20 +27,17 @@ public final class CrossCheck {
 
     /** Computes one case; what cannot be computed is refused in the result, never thrown. */
     public CaseResult check(CaseSpec spec) {
-        try {
-            return new CaseSolver(catalogue, spec).solve(everyQuantity);
-        } catch (CaseRefusedException refused) {
-            return CaseResult.refused(spec.name(), spec.familyId(), refused.refusal());
-        }
+        return open(spec).result();
     }
 
-    /**
-     * A candidate of a case over one variable.
-     *
-     * @param correlationId of a correlation for the quantity, or "given"
-     * @throws CaseRefusedException when the case cannot be computed or has no such candidate
-     */
-    public Slice slice(CaseSpec spec, Quantity quantity, String correlationId, Variable over) {
-        return new CaseSolver(catalogue, spec).slice(quantity, correlationId, over);
+    /** Computes one case and keeps what its curves are drawn from; refuses as {@link #check} does. */
+    public OpenCase open(CaseSpec spec) {
+        Optional<CaseSolver> solver = Optional.empty();
+        try {
+            solver = Optional.of(new CaseSolver(catalogue, spec));
+            return new OpenCase(solver.get().solve(everyQuantity), solver);
+        } catch (CaseRefusedException refused) {
+            return new OpenCase(CaseResult.refused(spec.name(), spec.familyId(), refused.refusal()), solver);
+        }
     }
 }

@@ -5,6 +5,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import stirwright.core.BoundFinding;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.VesselGeometry;
@@ -185,6 +186,20 @@ final class Candidate {
             }
         }
         return worst;
+    }
+
+    /** Every bound with what the case has at a state; what fails to answer is left out. */
+    List<BoundFinding> findings(Point point, FluidState state) {
+        List<BoundFinding> all = new ArrayList<>();
+        for (Part part : parts) {
+            String whose = part == parts.get(0) ? "" : part.correlation().id() + ": ";
+            point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds()));
+            for (Bound bound : part.correlation().validity()) {
+                foreign.call(() -> all.add(new BoundFinding(whose + bound.words(), bound.found(geometry, point),
+                        bound.verdict(geometry, point))), false);
+            }
+        }
+        return all;
     }
 
     /** The modifiers in words with the factor that each contributes. */

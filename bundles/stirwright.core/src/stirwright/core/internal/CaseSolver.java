@@ -1,8 +1,11 @@
 package stirwright.core.internal;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import stirwright.core.BoundFinding;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
@@ -29,6 +32,11 @@ public final class CaseSolver {
     private final List<Candidate> powers;
     private final Trials trials;
     private final StateSolver states;
+    /** What {@link #solve} found, for the curves. */
+    private List<PowerTrial> tried;
+    private Selection.Ranked pick;
+    /** The candidates again, so that code that fails far from the case fails in the drawing alone. */
+    private final Map<Quantity, List<Candidate>> drawn = new HashMap<>();
 
     /** @throws CaseRefusedException naming the field and the value that stand in the way */
     public CaseSolver(Catalogue catalogue, CaseSpec spec) {
@@ -68,9 +76,9 @@ public final class CaseSolver {
      * @throws CaseRefusedException when no candidate can be computed
      */
     public CaseResult solve(boolean everyQuantity) {
-        List<PowerTrial> tried = powers.stream().map(this::tryPower).toList();
+        tried = powers.stream().map(this::tryPower).toList();
         Selection selection = select(tried);
-        Selection.Ranked pick = usablePick(selection);
+        pick = usablePick(selection);
         List<ResultAssembly.Row> rows = new ArrayList<>();
         for (Selection.Ranked ranked : selection.ranked()) {
             rows.add(new ResultAssembly.Row(ranked,
@@ -87,13 +95,43 @@ public final class CaseSolver {
         return all;
     }
 
-    /** @throws CaseRefusedException when the case has no pick or no such candidate */
+    /** The vessel with every blank filled. */
+    public VesselGeometry vessel() {
+        return vessel;
+    }
+
+    /**
+     * Only after {@link #solve}.
+     *
+     * @throws CaseRefusedException when the case has no such candidate
+     */
     public Slice slice(Quantity quantity, String correlationId, Variable over) {
-        Selection.Ranked pick = usablePick(select(powers.stream().map(this::tryPower).toList()));
-        Candidate candidate = candidates.of(quantity).stream().filter(c -> c.id().equals(correlationId)).findFirst()
+        Candidate candidate = candidate(quantity, correlationId);
+        return new CandidateSlice(candidate, pick.trial().state().orElseThrow(), trials.point(pick, candidate), over);
+    }
+
+    /**
+     * Only after {@link #solve}.
+     *
+     * @throws CaseRefusedException when the case has no such candidate
+     */
+    public List<BoundFinding> bounds(Quantity quantity, String correlationId) {
+        Candidate candidate = candidate(quantity, correlationId);
+        FluidState state = ownState(candidate);
+        return candidate.findings(trials.setUp(trials.point(pick, candidate), state, candidate), state);
+    }
+
+    /** A power candidate may have a speed of its own; everything else is seen at the pick's state. */
+    private FluidState ownState(Candidate candidate) {
+        return tried.stream().filter(t -> t.trial().candidate().id().equals(candidate.id()))
+                .findFirst().flatMap(t -> t.trial().state()).orElseGet(() -> pick.trial().state().orElseThrow());
+    }
+
+    private Candidate candidate(Quantity quantity, String correlationId) {
+        return drawn.computeIfAbsent(quantity, candidates::of).stream()
+                .filter(c -> c.id().equals(correlationId)).findFirst()
                 .orElseThrow(() -> new CaseRefusedException(Choices.field(quantity), correlationId,
                         "is not a candidate for the " + quantity.title() + " of family " + family.id()));
-        return new CandidateSlice(candidate, pick.trial().state().orElseThrow(), trials.point(pick, candidate), over);
     }
 
     private PowerTrial tryPower(Candidate power) {

@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
+import java.util.concurrent.CopyOnWriteArrayList;
 import org.osgi.framework.ServiceReference;
 import org.osgi.service.component.annotations.Component;
 import org.osgi.service.component.annotations.Reference;
@@ -24,6 +25,7 @@ public final class ContributionRegistry implements Library {
 
     private final Map<ServiceReference<Contribution>, Arrival> arrivals =
             new TreeMap<>(INSTALLED_FIRST);
+    private final List<Runnable> listeners = new CopyOnWriteArrayList<>();
     private Catalogue current;
 
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
@@ -33,11 +35,23 @@ public final class ContributionRegistry implements Library {
             arrivals.put(reference, arrival);
             current = null;
         }
+        listeners.forEach(Runnable::run);
     }
 
-    synchronized void removeContribution(ServiceReference<Contribution> reference) {
-        arrivals.remove(reference);
-        current = null;
+    void removeContribution(ServiceReference<Contribution> reference) {
+        synchronized (this) {
+            arrivals.remove(reference);
+            current = null;
+        }
+        listeners.forEach(Runnable::run);
+    }
+
+    @Override
+    public Listening listen(Runnable listener) {
+        // A wrapper, so that each listening ends by itself even when one listener is given twice.
+        Runnable own = listener::run;
+        listeners.add(own);
+        return () -> listeners.remove(own);
     }
 
     @Override

@@ -6,10 +6,12 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 import org.osgi.framework.Bundle;
 import stirwright.core.Catalogue;
+import stirwright.core.Library;
 
 /** Families arrive and leave while the workbench runs. */
 class DiscoveryTest {
@@ -41,6 +43,23 @@ class DiscoveryTest {
         assertTrue(before.family(FAMILY).isPresent(), "a snapshot changed under its reader");
         bundle.start();
         assertTrue(Framework.becomes(DiscoveryTest::present), "the family has not come back");
+    }
+
+    @Test
+    void whoListensIsToldOfArrivalsAndDepartures() throws Exception {
+        AtomicInteger told = new AtomicInteger();
+        Library library = Framework.library();
+        Bundle bundle;
+        try (Library.Listening listening = library.listen(told::incrementAndGet)) {
+            bundle = install(TinyBundle.named("wanderer.component").component(Wanderer.class));
+            assertTrue(Framework.becomes(() -> told.get() == 1), "nobody told of the arrival");
+            assertTrue(present(), "told before the family was there");
+            bundle.stop();
+            assertTrue(Framework.becomes(() -> told.get() == 2), "nobody told of the departure");
+        }
+        bundle.start();
+        assertTrue(Framework.becomes(DiscoveryTest::present), "the family has not come back");
+        assertEquals(2, told.get(), "told after the listening ended");
     }
 
     @Test

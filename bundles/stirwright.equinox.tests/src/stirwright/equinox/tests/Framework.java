@@ -33,11 +33,15 @@ final class Framework {
 
     /** What the workbench sees at this moment. */
     static Catalogue catalogue() {
+        return library().catalogue();
+    }
+
+    static Library library() {
         ServiceReference<Library> reference = context().getServiceReference(Library.class);
         if (reference == null) {
             throw new AssertionError("no service " + Library.class.getName());
         }
-        return context().getService(reference).catalogue();
+        return context().getService(reference);
     }
 
     /** Installs and starts a bundle; the caller uninstalls it. */
