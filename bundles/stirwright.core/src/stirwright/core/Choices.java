@@ -40,7 +40,12 @@ public record Choices(Map<Quantity, String> correlations, Map<Quantity, Double> 
         if (quantity.equals(Quantity.POWER_NUMBER)) {
             return "correlation";
         }
-        String name = quantity.equals(Quantity.SHEAR_RATE_CONSTANT) ? "shear_rate" : quantity.id().replace('-', '_');
+        String name = quantity.equals(Quantity.SHEAR_RATE_CONSTANT) ? "shear_rate" : givenField(quantity);
         return name + "_correlation";
+    }
+
+    /** The name of the input that gives a value for a quantity. */
+    public static String givenField(Quantity quantity) {
+        return quantity.id().replace('-', '_');
     }
 }

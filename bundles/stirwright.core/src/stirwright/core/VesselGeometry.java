@@ -106,10 +106,15 @@ public final class VesselGeometry implements Geometry {
 
     /** What stands in for a parameter that nobody gave, in words, for instance "blade_width_m = 0.122 (D/5)". */
     public String defaultInWords(GeometryParameter parameter) {
+        return parameter.column() + " = " + defaultValueInWords(parameter);
+    }
+
+    /** The same without the name, for instance "0.122 (D/5)". */
+    public String defaultValueInWords(GeometryParameter parameter) {
         int at = indexOf(parameter);
         String value = Figures.show(parameter.toColumn(values[at]));
         String words = filled[at].by().words();
-        return parameter.column() + " = " + value + (words.startsWith(value) ? "" : " (" + words + ")");
+        return value + (words.startsWith(value) ? "" : " (" + words + ")");
     }
 
     /**

@@ -63,7 +63,7 @@ public final class CaseSolver {
         List<Candidate> all = candidates.of(quantity);
         if (all.isEmpty()) {
             throw new CaseRefusedException("family", family.id(), "has no installed correlation for the "
-                    + quantity.title() + "; give a value in the column " + quantity.id().replace('-', '_'));
+                    + quantity.title() + "; give a value in the column " + Choices.givenField(quantity));
         }
         return all;
     }
