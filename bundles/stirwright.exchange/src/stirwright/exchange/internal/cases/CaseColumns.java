@@ -7,6 +7,8 @@ import java.util.Set;
 import java.util.stream.Stream;
 import stirwright.core.Catalogue;
 import stirwright.correlation.GeometryParameter;
+import stirwright.exchange.CaseField;
+import stirwright.exchange.CaseFields;
 import stirwright.rheology.ModelKind;
 import stirwright.rheology.Parameter;
 
@@ -43,13 +45,12 @@ public final class CaseColumns {
             "baffle_width_m");
 
     /** What settles the speed; a row gives exactly one. */
-    static final List<String> SPEEDS =
-            List.of(SPEED_RPM, SPEED_REV_S, TARGET_SHEAR_RATE, TARGET_POWER_PER_VOLUME, TARGET_TIP_SPEED);
+    static final List<String> SPEEDS = columns(CaseFields.SPEEDS);
 
     static final List<String> REQUIRED = List.of(CASE, FAMILY, IMPELLER_DIAMETER, DENSITY, MODEL);
 
-    private static final List<String> OTHER_NUMBERS = List.of(
-            DENSITY, SHEAR_RATE_CONSTANT, POWER_NUMBER, FLOW_NUMBER, SHEAR_RATE_MIN, SHEAR_RATE_MAX);
+    private static final List<String> OTHER_NUMBERS =
+            columns(List.of(CaseFields.DENSITY), CaseFields.GIVEN, CaseFields.MEASURED_WINDOW);
 
     private final Set<String> dimensions = new LinkedHashSet<>(DIMENSIONS);
     private final Set<String> numeric = new LinkedHashSet<>();
@@ -73,6 +74,11 @@ public final class CaseColumns {
                 .map(Parameter::column)
                 .distinct()
                 .toList();
+    }
+
+    @SafeVarargs
+    private static List<String> columns(List<CaseField>... fields) {
+        return Stream.of(fields).flatMap(List::stream).map(CaseField::column).toList();
     }
 
     /** Dimensions of the vessel and the impeller. */
