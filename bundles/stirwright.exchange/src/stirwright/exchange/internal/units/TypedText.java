@@ -16,7 +16,7 @@ public final class TypedText {
     /** 1,350: neither a leading zero nor the count of digits tells a decimal comma from a thousands separator. */
     private static final Pattern EITHER = Pattern.compile("[+-]?[1-9][0-9]{0,2},[0-9]{3}(?:[eE].*)?");
     /** A second number, unless it is the 1 of 1/s. */
-    private static final Pattern SECOND_NUMBER = Pattern.compile("['\u2019,.]?(?!1\\s*/)[0-9].*", Pattern.DOTALL);
+    private static final Pattern SECOND_NUMBER = Pattern.compile("['\u2019,.]?(?!1\\s*/\\s*[^0-9\\s])[0-9].*", Pattern.DOTALL);
     private static final int LONGEST = 100;
 
     private TypedText() {}

@@ -14,7 +14,7 @@ final class UnitGrammar {
     private static final Pattern FACTOR = Pattern.compile("([A-Za-z\u00B0]+)(?:(\\^n)|\\^?(-?[1-9]))?");
     /** Pas and mPas are written for Pa s and mPa s. */
     private static final Pattern JOINED = Pattern.compile("(?<![A-Za-z])([mk]?)Pas(?![A-Za-z])");
-    private static final Pattern GALLON = Pattern.compile("(?<![A-Za-z])(US|imp)\\.? gal(?:lons?)?(?![A-Za-z])");
+    private static final Pattern GALLON = Pattern.compile("(?<![A-Za-z])(US|imp) +gal(?:lons?)?(?![A-Za-z])");
     private static final String RAISED = "\u2070\u00B9\u00B2\u00B3\u2074\u2075\u2076\u2077\u2078\u2079";
 
     private UnitGrammar() {}
@@ -24,6 +24,9 @@ final class UnitGrammar {
      * @throws UnitRefusedException when it is no unit or can be read in two ways
      */
     static Unit<?> parse(String typed, UnitKind kind) throws UnitRefusedException {
+        if (typed.equals(UnitKind.NUMBER.unit())) {
+            return AbstractUnit.ONE;
+        }
         String[] sides = plain(typed).split("/", -1);
         if (sides[0].isBlank()) {
             throw new UnitRefusedException("has a unit that begins with a slash; write a space and then 1/s, for instance");
