@@ -77,7 +77,7 @@ unlock() { exec 9>&-; }
 # hash_sources FIND-EXPRESSION...: one hash over the names and contents of the source files that match.
 hash_sources() {
   (cd "$top" && find pom.xml LICENSE .mvn bundles features releng \
-    \( -path 'bundles/*/target' -o -path 'features/*/target' -o -path 'releng/*/target' \) -prune -o -type f "$@" -print0 \
+    \( -path 'bundles/*/target' -o -path 'bundles/*/src-gen' -o -path 'features/*/target' -o -path 'releng/*/target' \) -prune -o -type f "$@" -print0 \
     | LC_ALL=C sort -z | xargs -0 sha256sum | sha256sum | cut -d' ' -f1)
 }
 

@@ -1,0 +1,70 @@
+package stirwright.study.internal;
+
+import java.util.Comparator;
+import java.util.List;
+import org.eclipse.emf.ecore.resource.Resource.Diagnostic;
+import org.eclipse.emf.ecore.xmi.ClassNotFoundException;
+import org.eclipse.emf.ecore.xmi.FeatureNotFoundException;
+import org.eclipse.emf.ecore.xmi.IllegalValueException;
+import org.eclipse.emf.ecore.xmi.PackageNotFoundException;
+import org.eclipse.emf.ecore.xmi.UnresolvedReferenceException;
+import org.xml.sax.SAXParseException;
+
+/** The first thing that kept a file from being read, in words. */
+final class ReadProblems {
+    static final String NOT_A_STUDY = "is not a study; name one, a file that Stirwright saved";
+
+    private static final String NEWER = ", which this version of Stirwright does not know; a newer one may have written"
+            + " it, so open the study with that";
+
+    private ReadProblems() {}
+
+    /**
+     * @param failure what ended the reading; null when it came to the end
+     * @param within whether a study had begun
+     */
+    static NoStudyException of(Exception failure, List<Diagnostic> errors, boolean within) {
+        SAXParseException syntax = syntax(failure, errors);
+        if (syntax != null) {
+            return new NoStudyException(syntax(syntax, within), syntax);
+        }
+        if (!within) {
+            return new NoStudyException(NOT_A_STUDY, failure);
+        }
+        return errors.stream().min(Comparator.comparingInt(Diagnostic::getLine))
+                .map(first -> new NoStudyException("line " + first.getLine() + " " + words(first), failure))
+                .orElseGet(() -> new NoStudyException("is a damaged study; take a copy of it", failure));
+    }
+
+    private static SAXParseException syntax(Exception failure, List<Diagnostic> errors) {
+        for (Throwable cause = failure; cause != null; cause = cause.getCause()) {
+            if (cause instanceof SAXParseException found) {
+                return found;
+            }
+        }
+        return errors.stream().filter(Exception.class::isInstance).map(e -> ((Exception) e).getCause())
+                .filter(SAXParseException.class::isInstance).map(SAXParseException.class::cast).findFirst().orElse(null);
+    }
+
+    private static String syntax(SAXParseException syntax, boolean within) {
+        if (syntax.getMessage().contains("DOCTYPE")) {
+            return "line " + syntax.getLineNumber() + " declares a document type, which no study has; delete the declaration";
+        }
+        return !within && syntax.getLineNumber() <= 1 ? NOT_A_STUDY
+                : "line " + syntax.getLineNumber() + " is damaged XML (" + syntax.getMessage().strip()
+                        + "); mend the line or take a copy of the file";
+    }
+
+    private static String words(Diagnostic error) {
+        return switch (error) {
+            case FeatureNotFoundException feature -> "has '" + feature.getName() + "'" + NEWER;
+            case ClassNotFoundException type -> "has '" + type.getName() + "'" + NEWER;
+            case PackageNotFoundException namespace -> "has something of '" + namespace.uri() + "'" + NEWER;
+            case UnresolvedReferenceException reference -> "refers to '" + reference.getReference()
+                    + "', which is not in the study; name one that is";
+            case IllegalValueException value -> "has the " + value.getFeature().getName() + " '" + value.getValue()
+                    + "', which does not do there; write another";
+            default -> "cannot be read (" + error.getMessage() + "); mend the line or take a copy of the file";
+        };
+    }
+}

@@ -1,0 +1,2 @@
+/** Runs in the build, before the bundle that it writes for; no part of the product. */
+package stirwright.modelgen;
