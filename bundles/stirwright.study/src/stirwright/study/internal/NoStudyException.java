@@ -4,8 +4,9 @@ package stirwright.study.internal;
 public final class NoStudyException extends Exception {
     private static final long serialVersionUID = 1L;
 
+    /** @param problem is put on one line, since it may quote the file */
     NoStudyException(String problem, Throwable cause) {
-        super(problem, cause);
+        super(problem.replaceAll("[\\p{Cntrl}\\s\\u2028\\u2029]+", " "), cause);
     }
 
     NoStudyException(String problem) {

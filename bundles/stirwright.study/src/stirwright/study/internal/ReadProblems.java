@@ -51,7 +51,7 @@ final class ReadProblems {
             return "line " + syntax.getLineNumber() + " declares a document type, which no study has; delete the declaration";
         }
         return !within && syntax.getLineNumber() <= 1 ? NOT_A_STUDY
-                : "line " + syntax.getLineNumber() + " is damaged XML (" + syntax.getMessage().strip()
+                : "line " + syntax.getLineNumber() + " is damaged XML (" + syntax.getMessage().strip().replaceAll("\\.$", "")
                         + "); mend the line or take a copy of the file";
     }
 
