@@ -13,6 +13,7 @@ import org.osgi.framework.ServiceReference;
 import org.osgi.framework.Version;
 import stirwright.conformance.JarCheck;
 import stirwright.core.Library;
+import stirwright.trust.DropIns;
 
 /** Where Equinox hands over: finds the library service and runs one command. */
 public final class Application implements IApplication {
@@ -27,14 +28,14 @@ public final class Application implements IApplication {
         try (PrintWriter out = writer(FileDescriptor.out, "stdout.encoding");
                 PrintWriter err = writer(FileDescriptor.err, "stderr.encoding")) {
             ServiceReference<Library> reference = bundles.getServiceReference(Library.class);
-            if (reference == null) {
+            ServiceReference<DropIns> door = bundles.getServiceReference(DropIns.class);
+            if (reference == null || door == null) {
                 err.println("Stirwright's core did not start: the installation is incomplete; unpack it again.");
                 return ExitCode.UNUSABLE;
             }
             Library library = bundles.getService(reference);
-            DroppedJars.unusable(bundles.getBundles(), System.getProperty("felix.fileinstall.dir")).forEach(err::println);
-            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), out, err,
-                    release(bundles.getBundle().getVersion()));
+            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), bundles.getService(door), out,
+                    err, release(bundles.getBundle().getVersion()));
             return Commands.run(desk, arguments);
         }
     }

@@ -36,7 +36,12 @@ final class Commands {
                 .addSubcommand(new FitCommand(desk))
                 .addSubcommand(new DemoCommand(desk))
                 .addSubcommand(new CheckCommand(desk))
+                .addSubcommand(new TrustCommand(desk))
                 .addSubcommand(new HelpCommand(desk));
+        // Who decides on a jar need not be told that it asks.
+        Door door = new Door(desk.dropIns());
+        (arguments.length > 0 && arguments[0].equals(TrustCommand.NAME) ? door.problems() : door.news())
+                .forEach(desk.err()::println);
         line.setOut(desk.out()).setErr(desk.err())
                 .setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF))
                 .setExpandAtFiles(false)

@@ -7,17 +7,20 @@ import java.util.function.Supplier;
 import stirwright.conformance.JarRefusedException;
 import stirwright.conformance.JarReport;
 import stirwright.core.Catalogue;
+import stirwright.trust.DropIns;
 
 /**
  * What every command works with.
  *
  * @param catalogue what is installed at this moment
  * @param jarCheck the conformance suite over a jar
+ * @param dropIns the bundles in the folder families, and the user's word on them
  * @param out results alone
  * @param err every message
  * @param version of the product
  */
-record Desk(Supplier<Catalogue> catalogue, JarChecker jarCheck, PrintWriter out, PrintWriter err, String version) {
+record Desk(Supplier<Catalogue> catalogue, JarChecker jarCheck, DropIns dropIns, PrintWriter out, PrintWriter err,
+        String version) {
 
     /** Runs the conformance suite over a jar. */
     @FunctionalInterface

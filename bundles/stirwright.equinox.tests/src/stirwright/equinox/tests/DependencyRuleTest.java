@@ -31,6 +31,7 @@ class DependencyRuleTest {
             Map.entry("correlation", Set.of()),
             Map.entry("rheology", Set.of()),
             Map.entry("start", Set.of()),
+            Map.entry("trust", Set.of()),
             Map.entry("chart", Set.of()),
             Map.entry("study", Set.of()),
             Map.entry("family", Set.of("correlation")),
@@ -39,8 +40,8 @@ class DependencyRuleTest {
             Map.entry("core", Set.of("correlation", "rheology")),
             Map.entry("conformance", Set.of("correlation", "core")),
             Map.entry("exchange", Set.of("correlation", "rheology", "core", "study")),
-            Map.entry("console", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance")),
-            Map.entry("workbench", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "chart")));
+            Map.entry("console", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "trust")),
+            Map.entry("workbench", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "trust", "chart")));
 
     private static final Set<String> EXPORT_NOTHING = Set.of("family", "general", "sheet", "start");
 

@@ -1,0 +1,34 @@
+package stirwright.console.internal;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import stirwright.trust.DropIn;
+import stirwright.trust.DropIns;
+
+/** What a run tells of jars in the drop-in folder, a line each. Running and declined ones are no news. */
+record Door(DropIns dropIns) {
+
+    List<String> problems() {
+        return dropIns.problems();
+    }
+
+    List<String> news() {
+        List<String> lines = new ArrayList<>(problems());
+        for (DropIn dropIn : dropIns.list()) {
+            switch (dropIn.state()) {
+                case ASKS -> lines.add(dropIn.file() + " (" + dropIn.bundle() + ") does not run: its content is not approved;"
+                        + " where you trust it: stirwright trust " + quoted(dropIn.file()));
+                case UNUSABLE -> lines.add(dropIn.file() + ": " + dropIn.message());
+                case RUNNING, DECLINED -> { }
+            }
+        }
+        return lines;
+    }
+
+    /** As a shell takes it for one word. */
+    private static String quoted(Path file) {
+        String path = file.toString();
+        return path.matches("[\\w./:\\\\@%+=,-]+") ? path : "'" + path.replace("'", "'\\''") + "'";
+    }
+}
