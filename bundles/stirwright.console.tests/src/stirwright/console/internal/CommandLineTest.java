@@ -47,7 +47,7 @@ class CommandLineTest {
     private int run(String... arguments) {
         Desk desk = new Desk(() -> CATALOGUE, jar -> {
             throw new JarRefusedException(jar + " is refused by the test");
-        }, new PrintWriter(out), new PrintWriter(err), "9.9.9");
+        }, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "9.9.9");
         return Commands.run(desk, arguments);
     }
 
