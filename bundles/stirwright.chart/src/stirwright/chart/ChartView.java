@@ -1,0 +1,104 @@
+package stirwright.chart;
+
+import java.util.Set;
+import java.util.function.Consumer;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.widgets.Composite;
+import stirwright.chart.internal.Board;
+import stirwright.chart.internal.Keys;
+import stirwright.chart.internal.Pointer;
+import stirwright.chart.internal.Voice;
+
+/**
+ * Shows a picture: curves over one variable, regime bands, an operating point and a cursor that reads all curves at once.
+ * Every call is made on the UI thread.
+ *
+ * <p>Mouse: resting reads, the wheel zooms about the pointer, a drawn rectangle zooms, the right or middle button moves what
+ * is in view, a double click shows everything, a click near a curve or on its name selects it. Keys: left and right move the
+ * cursor by one pixel, with Ctrl by ten, with Shift by fifty; up and down change the emphasised curve and Enter selects it;
+ * Home and End go to the edges, Escape clears, + and - zoom about the cursor, 0 shows everything.
+ */
+public final class ChartView extends Composite {
+    private final Board board;
+    private final Voice voice;
+
+    /** A view without curves. */
+    public ChartView(Composite parent, Palette palette) {
+        super(parent, SWT.NONE);
+        setLayout(new FillLayout());
+        board = new Board(this, palette);
+        new Pointer(board);
+        new Keys(board);
+        voice = new Voice(board);
+    }
+
+    /** Shows a picture; a zoom stays when title, unit and kind of both axes stay, else everything is shown. */
+    public void show(Picture picture) {
+        checkWidget();
+        board.show(picture);
+    }
+
+    /** Draws one curve stronger; null for none. */
+    public void highlight(String curveId) {
+        checkWidget();
+        board.highlight(curveId);
+    }
+
+    /** Leaves out these curves, those of later pictures included, until it is called again. */
+    public void setHidden(Set<String> curveIds) {
+        checkWidget();
+        board.hide(curveIds);
+    }
+
+    /** Changes the colours. */
+    public void setPalette(Palette palette) {
+        checkWidget();
+        board.palette(palette);
+    }
+
+    /** Takes a zoom back. */
+    public void reset() {
+        checkWidget();
+        board.fit();
+    }
+
+    /** Whether something else than the whole picture is in view. */
+    public boolean zoomed() {
+        checkWidget();
+        return board.zoomed();
+    }
+
+    /** Tells what the curves say wherever the cursor goes. */
+    public void onPointed(Consumer<Reading> listener) {
+        board.onPointed(listener);
+    }
+
+    /** Tells the id of a curve that the user clicks, by mouse or by Enter. */
+    public void onSelected(Consumer<String> listener) {
+        board.onSelected(listener);
+    }
+
+    /** What a screen reader is told: what the chart shows, then the reading at the cursor. */
+    public String spokenWords() {
+        checkWidget();
+        return voice.name() + ". " + voice.description();
+    }
+
+    /**
+     * The picture as it is in view, without cursor, in a size and in colours of its own, for instance for a report.
+     *
+     * @return an image that the caller disposes
+     */
+    public Image image(int width, int height, Palette palette) {
+        checkWidget();
+        return board.image(width, height, palette);
+    }
+
+    @Override
+    public boolean setFocus() {
+        checkWidget();
+        return board.plotArea().forceFocus();
+    }
+}

@@ -1,0 +1,60 @@
+package stirwright.chart.internal;
+
+import org.eclipse.swt.accessibility.ACC;
+import org.eclipse.swt.accessibility.Accessible;
+import org.eclipse.swt.accessibility.AccessibleAdapter;
+import org.eclipse.swt.accessibility.AccessibleControlAdapter;
+import org.eclipse.swt.accessibility.AccessibleControlEvent;
+import org.eclipse.swt.accessibility.AccessibleEvent;
+import stirwright.chart.Picture;
+
+/** What a screen reader is told. */
+public final class Voice {
+    private final Board board;
+
+    public Voice(Board board) {
+        this.board = board;
+        Accessible accessible = board.plotArea().getAccessible();
+        accessible.addAccessibleListener(new AccessibleAdapter() {
+            @Override
+            public void getName(AccessibleEvent event) {
+                event.result = name();
+            }
+
+            @Override
+            public void getDescription(AccessibleEvent event) {
+                event.result = description();
+            }
+        });
+        accessible.addAccessibleControlListener(new AccessibleControlAdapter() {
+            @Override
+            public void getRole(AccessibleControlEvent event) {
+                event.detail = ACC.ROLE_GRAPHIC;
+            }
+
+            @Override
+            public void getValue(AccessibleControlEvent event) {
+                event.result = description();
+            }
+        });
+        board.onSpoken(() -> accessible.sendEvent(ACC.EVENT_DESCRIPTION_CHANGED, new Object[] {"", description()}));
+    }
+
+    /** What the chart shows. */
+    public String name() {
+        Picture picture = board.picture();
+        return board.scene().empty() ? "Chart" : "Chart: " + picture.y().words() + " over " + picture.x().words();
+    }
+
+    /** The reading at the cursor; without one, what there is to read and how. */
+    public String description() {
+        if (board.scene().empty()) {
+            return board.picture().emptyMessage();
+        }
+        if (board.cursor() != null) {
+            return board.cursor().words(board.scene());
+        }
+        int count = board.scene().traces().size();
+        return (count == 1 ? "1 curve." : count + " curves.") + " Arrow keys read the values, + and - zoom, 0 shows everything.";
+    }
+}

@@ -1,0 +1,2 @@
+/** How the chart view is made; for nobody else. */
+package stirwright.chart.internal;
