@@ -1,6 +1,7 @@
 package stirwright.exchange;
 
 import java.util.Optional;
+import java.util.function.Supplier;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
@@ -8,8 +9,9 @@ import stirwright.core.CrossCheck;
 import stirwright.core.Refusal;
 import stirwright.exchange.internal.cases.CaseReader;
 import stirwright.exchange.internal.cases.Cells;
+import stirwright.exchange.internal.cases.StudyRow;
 
-/** One row of a case table: a case, or the reason why it is none. Immutable. */
+/** One row of a case table or one case of a study: a case, or the reason why it is none. Immutable. */
 public final class CaseEntry {
     private final Cells cells;
     private final String name;
@@ -26,22 +28,35 @@ public final class CaseEntry {
     }
 
     static CaseEntry of(CaseReader reader, Cells cells) {
+        return of(reader, cells, () -> reader.read(cells));
+    }
+
+    static CaseEntry of(CaseReader reader, StudyRow row) {
+        return of(reader, row.cells(), () -> row.read(reader));
+    }
+
+    private static CaseEntry of(CaseReader reader, Cells cells, Supplier<CaseSpec> read) {
         Optional<CaseSpec> spec = Optional.empty();
         Optional<Refusal> refusal = Optional.empty();
         try {
-            spec = Optional.of(reader.read(cells));
+            spec = Optional.of(read.get());
         } catch (CaseRefusedException refused) {
             refusal = Optional.of(refused.refusal());
         }
         return new CaseEntry(cells, reader.name(cells), reader.family(cells), spec, refusal);
     }
 
-    /** The line of the file on which the row begins, from 1. */
+    /** Where the case stands: "line 12" of a table, "case 3" of a study. */
+    public String place() {
+        return cells.place();
+    }
+
+    /** The line of the table on which the row begins, from 1; 0 for a case of a study. */
     public int line() {
         return cells.row().line();
     }
 
-    /** The case's name; "line 12" for a row where none can be read. */
+    /** The case's name; its {@link #place} where none can be read. */
     public String name() {
         return name;
     }

@@ -9,11 +9,12 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 @Command(name = "crosscheck",
-        description = "Computes every case of a case table with every correlation of its family and compares them.")
+        description = "Computes every case of a case table or a study with every correlation of its family and compares"
+                + " them.")
 final class CrosscheckCommand implements Callable<Integer> {
     private final Desk desk;
 
-    @Parameters(paramLabel = "FILE", description = "a case table (see 'stirwright help tables')")
+    @Parameters(paramLabel = "FILE", description = "a case table or a study (see 'stirwright help tables')")
     private Path file;
 
     @Option(names = "--out", paramLabel = "FILE",

@@ -19,7 +19,7 @@ import stirwright.exchange.Origin;
 import stirwright.exchange.Output;
 import stirwright.exchange.Outputs;
 
-/** Reads a case table, checks its cases on all cores in their order, prints and writes the results. */
+/** Reads a case table or a study, checks its cases on all cores in their order, prints and writes the results. */
 final class CrosscheckRun {
 
     /** Cases that are computed before the next are printed: enough to keep the cores busy. */
@@ -85,7 +85,7 @@ final class CrosscheckRun {
             desk.out().println(done.text());
             outputs.forEach(o -> o.add(done.result()));
             summary.add(done.entry(), done.result());
-            done.result().refusal().ifPresent(r -> desk.err().println(fileName + " line " + done.entry().line()
+            done.result().refusal().ifPresent(r -> desk.err().println(fileName + " " + done.entry().place()
                     + " (case '" + CaseView.shortened(done.entry().name()) + "'): " + r.words()));
         }
     }

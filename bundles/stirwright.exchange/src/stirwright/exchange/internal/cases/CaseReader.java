@@ -4,6 +4,7 @@ import static stirwright.exchange.internal.cases.CaseColumns.CASE;
 import static stirwright.exchange.internal.cases.CaseColumns.FAMILY;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
@@ -13,59 +14,29 @@ import stirwright.core.CaseSpec;
 import stirwright.core.Catalogue;
 import stirwright.core.Choices;
 import stirwright.core.SpeedDemand;
-import stirwright.exchange.UnusableFileException;
-import stirwright.exchange.internal.table.Grid;
-import stirwright.exchange.internal.table.Header;
-import stirwright.exchange.internal.table.Row;
-import stirwright.exchange.internal.table.TextFile;
 import stirwright.exchange.internal.table.Texts;
 import stirwright.rheology.Fluid;
 
-/** Turns the rows of a table into cases. */
+/** Turns rows into cases. */
 public final class CaseReader {
     private final Catalogue catalogue;
-    private final Grid grid;
-    private final List<String> messages;
     private final GeometryCells geometry;
-    private final Map<String, Integer> linesByName = new HashMap<>();
+    private final Map<String, String> placesByName = new HashMap<>();
 
-    private CaseReader(Catalogue catalogue, Grid grid, CaseColumns columns, List<String> messages) {
+    /** @param dimensions the columns of dimensions that any row may have */
+    CaseReader(Catalogue catalogue, Collection<String> dimensions) {
         this.catalogue = catalogue;
-        this.grid = grid;
-        this.messages = messages;
-        this.geometry = new GeometryCells(columns.dimensions().stream().filter(grid.header()::has).toList());
+        this.geometry = new GeometryCells(List.copyOf(dimensions));
     }
 
-    /** @throws UnusableFileException when the file is no case table */
-    public static CaseReader open(TextFile file, Catalogue catalogue) {
-        CaseColumns columns = new CaseColumns(catalogue);
-        Grid grid = Grid.read(file, columns::isKnown, columns::isNumeric);
-        HeaderChecks checks = new HeaderChecks(file, grid.header(), columns);
-        checks.require();
-        List<String> messages = new ArrayList<>(grid.messages());
-        messages.addAll(checks.messages());
-        if (grid.rows().isEmpty()) {
-            throw new UnusableFileException(file.path(),
-                    "has a header and no case; write one row for each case");
-        }
-        return new CaseReader(catalogue, grid, columns, messages);
-    }
-
-    public List<String> messages() {
-        return messages;
-    }
-
-    public List<Row> rows() {
-        return grid.rows();
-    }
-
-    public Cells cells(Row row) {
-        return new Cells(grid.header(), row, grid.decimal());
+    /** For rows that come from no table, and so may have any column. */
+    public static CaseReader ofAnyColumn(Catalogue catalogue) {
+        return new CaseReader(catalogue, new CaseColumns(catalogue).dimensions());
     }
 
     /** What to call the case of a row, though the row may be unreadable. */
     public String name(Cells cells) {
-        return cells.given(CASE) ? whole(cells, CASE) : "line " + cells.row().line();
+        return cells.given(CASE) ? whole(cells, CASE) : cells.place();
     }
 
     public String family(Cells cells) {
@@ -78,7 +49,7 @@ public final class CaseReader {
 
     /** @throws CaseRefusedException naming the column and the value as typed */
     public CaseSpec read(Cells cells) {
-        refuseFlaw(cells.row());
+        refuseFlaw(cells);
         String name = requireName(cells);
         String family = cells.text(FAMILY).toLowerCase(Locale.ROOT);
         if (family.isEmpty()) {
@@ -94,23 +65,22 @@ public final class CaseReader {
         return new CaseSpec(name, family, dimensions, speed, fluid, choices, remarks);
     }
 
-    private void refuseFlaw(Row row) {
-        row.flaw().ifPresent(flaw -> {
-            Header header = grid.header();
-            throw new CaseRefusedException(header.nameAt(flaw.cell()), Texts.show(flaw.value()),
-                    flaw.reason() + " (line " + row.line() + ")");
+    private static void refuseFlaw(Cells cells) {
+        cells.row().flaw().ifPresent(flaw -> {
+            throw new CaseRefusedException(cells.header().nameAt(flaw.cell()), Texts.show(flaw.value()),
+                    flaw.reason() + " (" + cells.place() + ")");
         });
     }
 
     private String requireName(Cells cells) {
         if (!cells.given(CASE)) {
-            throw cells.refusal(CASE, "is blank on line " + cells.row().line() + "; every row needs a name");
+            throw cells.refusal(CASE, "is blank (" + cells.place() + "); every case needs a name");
         }
         String name = cells.text(CASE);
-        Integer first = linesByName.putIfAbsent(name, cells.row().line());
+        String first = placesByName.putIfAbsent(name, cells.place());
         if (first != null) {
-            throw cells.refusal(CASE, "on line " + cells.row().line() + " is the name of the case on line " + first
-                    + " too; names are unique in a file");
+            throw cells.refusal(CASE, "is the name of two cases, " + first + " and " + cells.place()
+                    + "; names are unique in a file");
         }
         return name;
     }

@@ -9,8 +9,12 @@ import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.Row;
 import stirwright.exchange.internal.table.Texts;
 
-/** The cells of one row by the names of their columns. */
-public record Cells(Header header, Row row, DecimalSign decimal) {
+/**
+ * The cells of one row by the names of their columns.
+ *
+ * @param place where the row stands, for messages, for instance "line 4"
+ */
+public record Cells(Header header, Row row, DecimalSign decimal, String place) {
 
     /** As typed, trimmed; empty when blank or when there is no such column. */
     String text(String column) {

@@ -3,6 +3,8 @@ package stirwright.exchange.internal.cases;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Stream;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.Choices;
 import stirwright.correlation.Quantity;
@@ -17,7 +19,20 @@ final class ChoiceCells {
             new Choice(Quantity.SHEAR_RATE_CONSTANT, CaseColumns.SHEAR_RATE_CORRELATION, CaseColumns.SHEAR_RATE_CONSTANT),
             new Choice(Quantity.FLOW_NUMBER, CaseColumns.FLOW_NUMBER_CORRELATION, CaseColumns.FLOW_NUMBER));
 
+    /** The columns of given values. */
+    static final List<String> VALUES = ALL.stream().map(Choice::value).toList();
+
     private ChoiceCells() {}
+
+    /** The quantities that have columns for being settled by hand. */
+    static Stream<Quantity> quantities() {
+        return ALL.stream().map(Choice::quantity);
+    }
+
+    /** The column of a quantity's given value; empty when there is none. */
+    static Optional<String> valueColumn(Quantity quantity) {
+        return ALL.stream().filter(c -> c.quantity().equals(quantity)).map(Choice::value).findFirst();
+    }
 
     /** @throws CaseRefusedException when a value is not above 0, or stands beside a correlation */
     static Choices read(Cells cells) {

@@ -42,7 +42,7 @@ public record Grid(
         for (int i = 0; i < first.cells().size(); i++) {
             names.add("column " + (i + 1));
         }
-        Header header = new Header(new Row(0, names, false, Optional.empty()));
+        Header header = Header.of(names);
         return read(file, separator, header, new RowReader(file.text(), separator), name -> true, name -> true);
     }
 

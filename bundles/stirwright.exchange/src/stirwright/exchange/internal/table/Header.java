@@ -3,6 +3,7 @@ package stirwright.exchange.internal.table;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /** The names of a table's columns. */
 public final class Header {
@@ -14,6 +15,11 @@ public final class Header {
         for (int i = 0; i < row.cells().size(); i++) {
             positions.putIfAbsent(row.cell(i), i);
         }
+    }
+
+    /** Names that come from no file. */
+    public static Header of(List<String> names) {
+        return new Header(new Row(0, names, false, Optional.empty()));
     }
 
     public int line() {
