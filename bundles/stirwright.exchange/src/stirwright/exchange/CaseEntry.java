@@ -83,7 +83,7 @@ public final class CaseEntry {
     }
 
     /** The core knows numbers in SI units; the author of the file knows what stands in the cell. */
-    private CaseResult asTyped(CaseResult result) {
+    public CaseResult asTyped(CaseResult result) {
         return result.refusal()
                 .map(r -> CaseResult.refused(name, family, cells.asTyped(r)))
                 .orElse(result);

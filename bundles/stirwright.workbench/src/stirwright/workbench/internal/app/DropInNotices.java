@@ -1,0 +1,100 @@
+package stirwright.workbench.internal.app;
+
+import jakarta.annotation.PostConstruct;
+import jakarta.annotation.PreDestroy;
+import jakarta.inject.Inject;
+import java.io.UncheckedIOException;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import org.eclipse.e4.core.di.annotations.Optional;
+import org.eclipse.swt.program.Program;
+import org.eclipse.swt.widgets.Display;
+import stirwright.trust.DropIn;
+import stirwright.trust.DropIns;
+import stirwright.workbench.internal.Messages;
+
+/** Asks about jars that were dropped in and may not run yet, and tells about those that cannot. */
+public final class DropInNotices {
+    private static final String PREFIX = "dropin ";
+
+    @Inject
+    private Notices notices;
+
+    @Inject
+    @Optional
+    private DropIns dropIns;
+
+    private AutoCloseable listening;
+
+    @PostConstruct
+    void watch() {
+        if (dropIns != null) {
+            Display display = Display.getCurrent();
+            listening = dropIns.listen(() -> display.asyncExec(this::show));
+            show();
+        }
+    }
+
+    @PreDestroy
+    void end() throws Exception {
+        if (listening != null) {
+            listening.close();
+        }
+    }
+
+    private void show() {
+        List<DropIn> all = dropIns.list();
+        Set<String> current = Stream.concat(
+                all.stream().filter(this::needsWords).map(DropInNotices::key),
+                dropIns.problems().stream().map(p -> PREFIX + p)).collect(Collectors.toSet());
+        notices.removeIf(key -> key.startsWith(PREFIX) && !current.contains(key));
+        all.stream().filter(this::needsWords).forEach(this::put);
+        dropIns.problems().forEach(p -> notices.put(new Notice(PREFIX + p, p, List.of())));
+    }
+
+    private boolean needsWords(DropIn one) {
+        return one.state() == DropIn.State.ASKS || one.state() == DropIn.State.UNUSABLE;
+    }
+
+    private static String key(DropIn one) {
+        return PREFIX + one.file() + " " + one.sha256() + " " + one.state() + " " + one.message();
+    }
+
+    private void put(DropIn one) {
+        if (one.state() == DropIn.State.UNUSABLE) {
+            notices.put(new Notice(key(one),
+                    Messages.bind(Messages.DropIn_unusable, one.file().getFileName(), one.message()), List.of()));
+            return;
+        }
+        notices.put(new Notice(key(one), Messages.bind(Messages.DropIn_asks,
+                new Object[] {one.file().getFileName(), one.bundle(), one.sha256()}),
+                List.of(new Notice.Action(Messages.DropIn_approve, () -> settle(() -> dropIns.approve(one))),
+                        new Notice.Action(Messages.DropIn_decline, () -> settle(() -> dropIns.decline(one.sha256()))))));
+    }
+
+    private void settle(Runnable word) {
+        try {
+            word.run();
+        } catch (UncheckedIOException unwritable) {
+            notices.put(new Notice(PREFIX + "list", unwritable.getMessage(), List.of()));
+        }
+    }
+
+    /** Asks again about those that were declined. */
+    public void askAgain() {
+        if (dropIns != null) {
+            dropIns.list().stream().filter(d -> d.state() == DropIn.State.DECLINED)
+                    .forEach(d -> settle(() -> dropIns.forget(d.sha256())));
+            show();
+        }
+    }
+
+    /** Shows the folder that jars are dropped into. */
+    public void openFolder() {
+        if (dropIns != null) {
+            Program.launch(dropIns.folder().toString());
+        }
+    }
+}

@@ -1,0 +1,110 @@
+package stirwright.workbench.internal.app;
+
+import jakarta.annotation.PostConstruct;
+import jakarta.inject.Inject;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Display;
+import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Link;
+import stirwright.core.CaseResult;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.Problems;
+import stirwright.workbench.internal.session.Session;
+import stirwright.workbench.internal.widgets.Looks;
+
+/** The line at the bottom that never goes: an estimate, and who is responsible; beside it how the case stands. */
+public final class StandingLine {
+    /** When work counts as long enough to be told. */
+    private static final int LONG_MILLIS = 500;
+
+    @Inject
+    private Session session;
+
+    @Inject
+    private Problems problems;
+
+    @Inject
+    private Looks looks;
+
+    private Link state;
+
+    @PostConstruct
+    void create(Composite parent) {
+        Composite line = looks.area(parent);
+        GridLayout layout = new GridLayout(2, false);
+        layout.marginWidth = 3 * Looks.STEP;
+        layout.marginHeight = Looks.STEP;
+        line.setLayout(layout);
+        Label standing = looks.quiet(line, SWT.NONE, Messages.Standing_line);
+        standing.setFont(looks.small());
+        standing.setToolTipText(Messages.Standing_line);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
+        data.widthHint = 100;
+        standing.setLayoutData(data);
+        state = looks.onPage(new Link(line, SWT.NONE));
+        state.setLinkForeground(looks.palette().accent());
+        state.addListener(SWT.Selection, e -> act());
+        problems.listen(this::show);
+        session.onStudy(() -> {
+            show();
+            watch(line.getDisplay());
+        });
+        session.onOutcome(this::show);
+        show();
+    }
+
+    /** Once work takes long, it is told, with the way to stop it. */
+    private void watch(Display display) {
+        display.timerExec(LONG_MILLIS, () -> {
+            if (!state.isDisposed() && session.busy()) {
+                show();
+                watch(display);
+            }
+        });
+    }
+
+    private void act() {
+        if (problems.count() > 0) {
+            problems.jump();
+        } else if (session.busy()) {
+            session.stop();
+            show();
+        }
+    }
+
+    private void show() {
+        if (state.isDisposed()) {
+            return;
+        }
+        String words = words();
+        if (!state.getText().equals(words)) {
+            state.setText(words);
+            state.requestLayout();
+        }
+    }
+
+    private String words() {
+        if (problems.count() > 0) {
+            return "<a>" + Messages.bind(Messages.Standing_problems, problems.count()) + "</a>";
+        }
+        if (session.defect() != null) {
+            return Messages.bind(Messages.Standing_defect, String.valueOf(session.defect()));
+        }
+        if (session.busy() && session.outcome().isPresent()) {
+            return Messages.Standing_busy + " <a>" + Messages.Standing_stop + "</a>";
+        }
+        return session.outcome().map(o -> status(o.main().result())).orElse("");
+    }
+
+    private static String status(CaseResult result) {
+        return switch (result.status()) {
+            case OK -> Messages.bind(Messages.Standing_ok, result.name());
+            case FLAGGED -> Messages.bind(result.flags().size() == 1 ? Messages.Standing_flaggedOnce : Messages.Standing_flagged,
+                    result.name(), result.flags().size());
+            case REFUSED -> Messages.bind(Messages.Standing_refused, result.name());
+        };
+    }
+}

@@ -1,0 +1,2 @@
+/** What the menus and keys do. */
+package stirwright.workbench.internal.handlers;

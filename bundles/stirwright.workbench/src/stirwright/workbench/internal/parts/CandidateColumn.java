@@ -1,0 +1,121 @@
+package stirwright.workbench.internal.parts;
+
+import java.util.Comparator;
+import java.util.Locale;
+import java.util.function.Function;
+import java.util.function.ToDoubleFunction;
+import stirwright.core.Role;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Figures;
+import stirwright.correlation.Verdict;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.Row;
+import stirwright.workbench.internal.session.View;
+
+/** The columns of the candidates, with how each is read and sorted. */
+enum CandidateColumn {
+    CANDIDATE(30, Row::title),
+    FAMILY(18, Row::familyTitle),
+    VALUE(11, Row::value, v -> Figures.show(v)),
+    POWER(11, Row::power, v -> Figures.show(v)),
+    TORQUE(11, Row::torque, v -> Figures.show(v)),
+    DEVIATION(10, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
+    VERDICT(12, r -> verdict(r.verdict()), Comparator.comparing(Row::verdict)),
+    ROLE(14, r -> role(r), Comparator.comparing(Row::role)),
+    FAILS(26, r -> String.join("; ", r.failedBounds())),
+    SOURCE(22, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
+    GRADE(20, r -> r.correlation().map(CandidateColumn::grade).orElse(""));
+
+    private final int share;
+    private final Function<Row, String> text;
+    private final Comparator<Row> order;
+    private final boolean number;
+
+    CandidateColumn(int share, Function<Row, String> text) {
+        this(share, text, Comparator.comparing(text));
+    }
+
+    CandidateColumn(int share, Function<Row, String> text, Comparator<Row> order) {
+        this.share = share;
+        this.text = text;
+        this.order = order;
+        this.number = false;
+    }
+
+    CandidateColumn(int share, ToDoubleFunction<Row> value, Function<Double, String> format) {
+        this.share = share;
+        this.text = r -> Double.isFinite(value.applyAsDouble(r)) ? format.apply(value.applyAsDouble(r)) : "";
+        this.order = Comparator.comparingDouble(value);
+        this.number = true;
+    }
+
+    /** Its share of the table's width, beside those of the other columns. */
+    int share() {
+        return share;
+    }
+
+    boolean number() {
+        return number;
+    }
+
+    String text(Row row) {
+        return text.apply(row);
+    }
+
+    Comparator<Row> order() {
+        return order;
+    }
+
+    /** Whether a view has it. */
+    boolean shownIn(View view, boolean severalFamilies) {
+        return switch (this) {
+            case FAMILY -> severalFamilies;
+            case POWER -> view == View.POWER_NUMBER || view == View.POWER;
+            case TORQUE -> view == View.TORQUE;
+            default -> true;
+        };
+    }
+
+    String title(View view) {
+        return switch (this) {
+            case CANDIDATE -> Messages.bind(Messages.Column_candidate, view.quantity().title());
+            case FAMILY -> Messages.Column_family;
+            case VALUE -> view.quantity().symbol();
+            case POWER -> Messages.Column_power;
+            case TORQUE -> Messages.Column_torque;
+            case DEVIATION -> Messages.Column_deviation;
+            case VERDICT -> Messages.Column_verdict;
+            case ROLE -> Messages.Column_role;
+            case FAILS -> Messages.Column_fails;
+            case SOURCE -> Messages.Column_source;
+            case GRADE -> Messages.Column_grade;
+        };
+    }
+
+    static String verdict(Verdict verdict) {
+        return switch (verdict) {
+            case INSIDE -> Messages.Verdict_inside;
+            case NOT_STATED -> Messages.Verdict_notStated;
+            case NEAR -> Messages.Verdict_near;
+            case OUTSIDE -> Messages.Verdict_outside;
+        };
+    }
+
+    /** A pick that was neither chosen nor recommended is only the nearest. */
+    static String role(Row row) {
+        if (row.pick() && (row.role() == Role.CANDIDATE || row.role() == Role.EXCLUDED)) {
+            return Messages.Role_nearest;
+        }
+        return switch (row.role()) {
+            case RECOMMENDED -> Messages.Role_recommended;
+            case CHOSEN -> Messages.Role_chosen;
+            case CANDIDATE -> Messages.Role_candidate;
+            case EXCLUDED -> Messages.Role_excluded;
+        };
+    }
+
+    static String grade(Correlation correlation) {
+        return (correlation.citation().hasSource() ? correlation.standing().words() : Messages.Grade_ruleOfTrade) + ", "
+                + correlation.transcription().words();
+    }
+}

@@ -1,0 +1,192 @@
+package stirwright.workbench.internal.parts;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Rectangle;
+import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Event;
+import org.eclipse.swt.widgets.Table;
+import org.eclipse.swt.widgets.TableColumn;
+import org.eclipse.swt.widgets.TableItem;
+import stirwright.chart.CurveStyle;
+import stirwright.correlation.Verdict;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.Outcome;
+import stirwright.workbench.internal.session.Row;
+import stirwright.workbench.internal.session.Session;
+import stirwright.workbench.internal.widgets.Aligned;
+import stirwright.workbench.internal.widgets.Looks;
+import stirwright.workbench.internal.widgets.Names;
+
+/**
+ * The candidates, a row each: the check mark switches the curve, its swatch is the chart's legend, a click on a column's
+ * head sorts.
+ */
+final class CandidateTable extends Composite {
+    /** For the check mark and the swatch. */
+    private static final int SWATCH_WIDTH = 68;
+    private static final int SWATCH_INSET = 26;
+
+    private final Looks looks;
+    private final Session session;
+    private final Table table;
+    private final List<CandidateColumn> columns = new ArrayList<>();
+    private CandidateColumn sortedBy;
+    private boolean descending;
+
+    CandidateTable(Composite parent, Looks looks, Session session) {
+        super(parent, SWT.NONE);
+        this.looks = looks;
+        this.session = session;
+        setLayout(new FillLayout());
+        table = Names.name(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE), Messages.Table_name);
+        table.setHeaderVisible(true);
+        table.setBackground(looks.palette().surface());
+        table.setForeground(looks.palette().text());
+        table.addListener(SWT.Selection, this::selected);
+        table.addListener(SWT.PaintItem, this::paintSwatch);
+        table.addListener(SWT.Resize, e -> fit());
+        session.onOutcome(this::show);
+        session.onSelection(this::showSelection);
+        session.outcome().ifPresent(o -> show());
+    }
+
+    private void show() {
+        Outcome outcome = session.outcome().orElseThrow();
+        makeColumns(outcome);
+        List<Row> rows = sorted(outcome.rows());
+        table.setRedraw(false);
+        while (table.getItemCount() > rows.size()) {
+            table.getItem(table.getItemCount() - 1).dispose();
+        }
+        while (table.getItemCount() < rows.size()) {
+            new TableItem(table, SWT.NONE);
+        }
+        for (int c = 0; c < columns.size(); c++) {
+            fill(c, rows);
+        }
+        for (int r = 0; r < rows.size(); r++) {
+            TableItem item = table.getItem(r);
+            Row row = rows.get(r);
+            item.setData(row);
+            item.setFont(row.pick() ? looks.strong() : null);
+            item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, colour(row.verdict()));
+        }
+        table.setRedraw(true);
+        showSelection();
+    }
+
+    private void fill(int c, List<Row> rows) {
+        List<String> texts = rows.stream().map(columns.get(c)::text).toList();
+        List<String> shown = columns.get(c).number() ? Aligned.atDecimalSign(texts) : texts;
+        for (int r = 0; r < shown.size(); r++) {
+            TableItem item = table.getItem(r);
+            if (!item.getText(c + 1).equals(shown.get(r))) {
+                item.setText(c + 1, shown.get(r));
+            }
+        }
+    }
+
+    private org.eclipse.swt.graphics.Color colour(Verdict verdict) {
+        return switch (verdict) {
+            case INSIDE -> looks.palette().inside();
+            case NOT_STATED -> looks.palette().notStated();
+            case NEAR -> looks.palette().near();
+            case OUTSIDE -> looks.palette().outside();
+        };
+    }
+
+    private List<Row> sorted(List<Row> rows) {
+        if (sortedBy == null) {
+            return rows;
+        }
+        Comparator<Row> order = descending ? sortedBy.order().reversed() : sortedBy.order();
+        return rows.stream().sorted(order).toList();
+    }
+
+    private void makeColumns(Outcome outcome) {
+        List<CandidateColumn> wanted = Arrays.stream(CandidateColumn.values())
+                .filter(c -> c.shownIn(outcome.view(), outcome.sheets().size() > 1)).toList();
+        if (!wanted.equals(columns)) {
+            for (TableColumn old : table.getColumns()) {
+                old.dispose();
+            }
+            columns.clear();
+            columns.addAll(wanted);
+            TableColumn swatch = new TableColumn(table, SWT.LEFT);
+            swatch.setText(Messages.Column_curve);
+            swatch.setWidth(SWATCH_WIDTH);
+            columns.forEach(this::makeColumn);
+            if (!columns.contains(sortedBy)) {
+                sortedBy = null;
+            }
+            fit();
+        }
+        for (int c = 0; c < columns.size(); c++) {
+            table.getColumn(c + 1).setText(columns.get(c).title(outcome.view()));
+        }
+    }
+
+    private void makeColumn(CandidateColumn column) {
+        TableColumn made = new TableColumn(table, column.number() ? SWT.RIGHT : SWT.LEFT);
+        made.addListener(SWT.Selection, e -> sortBy(made, column));
+    }
+
+    private void sortBy(TableColumn clicked, CandidateColumn column) {
+        descending = sortedBy == column && !descending;
+        sortedBy = column;
+        table.setSortColumn(clicked);
+        table.setSortDirection(descending ? SWT.DOWN : SWT.UP);
+        session.outcome().ifPresent(o -> show());
+    }
+
+    /** Shares the width out, so that nothing has to be scrolled sideways. */
+    private void fit() {
+        int width = table.getClientArea().width - SWATCH_WIDTH;
+        int shares = columns.stream().mapToInt(CandidateColumn::share).sum();
+        if (width <= 0 || shares == 0 || table.getColumnCount() == 0) {
+            return;
+        }
+        for (int c = 0; c < columns.size(); c++) {
+            table.getColumn(c + 1).setWidth(width * columns.get(c).share() / shares);
+        }
+    }
+
+    private void selected(Event event) {
+        Row row = (Row) event.item.getData();
+        if (event.detail == SWT.CHECK) {
+            session.setHidden(row.key(), !((TableItem) event.item).getChecked());
+        } else {
+            session.select(row.key());
+        }
+    }
+
+    private void showSelection() {
+        String key = session.selected().map(Row::key).orElse("");
+        for (TableItem item : table.getItems()) {
+            Row row = (Row) item.getData();
+            item.setChecked(!session.hidden().contains(row.key()));
+            if (row.key().equals(key) && (table.getSelectionCount() == 0 || table.getSelection()[0] != item)) {
+                table.setSelection(item);
+            }
+        }
+    }
+
+    private void paintSwatch(Event event) {
+        if (event.index == 0 && event.item.getData() instanceof Row row) {
+            Rectangle cell = ((TableItem) event.item).getBounds(0);
+            CurveStyle.paintSwatch(event.gc,
+                    new Rectangle(cell.x + 2, cell.y, SWATCH_WIDTH - SWATCH_INSET - Looks.STEP, cell.height), row.style(),
+                    row.pick(), looks.palette());
+        }
+    }
+
+    @Override
+    public boolean setFocus() {
+        return table.setFocus();
+    }
+}

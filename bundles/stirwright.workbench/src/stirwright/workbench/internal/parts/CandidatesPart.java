@@ -1,0 +1,39 @@
+package stirwright.workbench.internal.parts;
+
+import jakarta.annotation.PostConstruct;
+import jakarta.inject.Inject;
+import org.eclipse.e4.ui.di.Focus;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.SashForm;
+import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.widgets.Composite;
+import stirwright.workbench.internal.session.Session;
+import stirwright.workbench.internal.widgets.Looks;
+
+/** The candidates for the quantity on the chart, and the card of the selected one beside them. */
+public final class CandidatesPart {
+    private static final int[] SHARES = {62, 38};
+
+    @Inject
+    private Session session;
+
+    @Inject
+    private Looks looks;
+
+    private CandidateTable table;
+
+    @PostConstruct
+    void create(Composite parent) {
+        parent.setLayout(new FillLayout());
+        SashForm halves = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
+        halves.setSashWidth(Looks.STEP);
+        table = new CandidateTable(halves, looks, session);
+        new CardView(halves, looks, session);
+        halves.setWeights(SHARES);
+    }
+
+    @Focus
+    void focus() {
+        table.setFocus();
+    }
+}

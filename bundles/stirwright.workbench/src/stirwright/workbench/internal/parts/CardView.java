@@ -1,0 +1,114 @@
+package stirwright.workbench.internal.parts;
+
+import java.util.Optional;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.StyledText;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Button;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Text;
+import stirwright.core.Role;
+import stirwright.correlation.Quantity;
+import stirwright.study.Case;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.CaseEdits;
+import stirwright.workbench.internal.session.Outcome;
+import stirwright.workbench.internal.session.Row;
+import stirwright.workbench.internal.session.Session;
+import stirwright.workbench.internal.widgets.Looks;
+import stirwright.workbench.internal.widgets.Names;
+
+/** The card of the selected candidate: why or why not, formula, range, source; and the pick with its reason. */
+final class CardView extends Composite {
+    private final Session session;
+    private final CaseEdits edits;
+    private final StyledText card;
+    private final Text reason;
+    private final Button pick;
+    private final Button unpick;
+    private final Composite foot;
+
+    CardView(Composite parent, Looks looks, Session session) {
+        super(parent, SWT.NONE);
+        this.session = session;
+        this.edits = new CaseEdits(session);
+        looks.onPage(this);
+        GridLayout layout = new GridLayout(1, false);
+        layout.marginHeight = Looks.STEP;
+        layout.verticalSpacing = Looks.STEP;
+        setLayout(layout);
+        card = Names.name(new StyledText(this, SWT.READ_ONLY | SWT.WRAP | SWT.V_SCROLL), Messages.Card_name);
+        looks.onPage(card);
+        card.setAlwaysShowScrollBars(false);
+        card.setMargins(Looks.STEP, Looks.STEP, Looks.STEP, Looks.STEP);
+        card.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
+        // Tab leaves the card as it leaves every other control.
+        card.addListener(SWT.Traverse, e -> e.doit |= e.detail == SWT.TRAVERSE_TAB_NEXT || e.detail == SWT.TRAVERSE_TAB_PREVIOUS);
+        foot = looks.area(this);
+        foot.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false));
+        GridLayout footLayout = new GridLayout(3, false);
+        footLayout.marginWidth = 0;
+        footLayout.marginHeight = 0;
+        foot.setLayout(footLayout);
+        reason = Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName);
+        reason.setMessage(Messages.Card_reason);
+        reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        reason.addListener(SWT.Modify, e -> enable());
+        reason.addListener(SWT.DefaultSelection, e -> pickThis());
+        pick = looks.button(foot, Messages.Card_pick, this::pickThis);
+        unpick = looks.button(foot, Messages.Card_unpick, this::leaveIt);
+        unpick.setToolTipText(Messages.Card_unpickTip);
+        session.onOutcome(this::show);
+        session.onSelection(this::show);
+        show();
+    }
+
+    private void show() {
+        Optional<Row> row = session.selected();
+        Outcome outcome = session.outcome().orElse(null);
+        CardText text = outcome == null ? CardText.NOTHING : CardText.of(outcome, row);
+        if (!card.getText().equals(text.words())) {
+            boolean same = row.map(Row::key).equals(Optional.ofNullable(card.getData()));
+            int top = card.getTopIndex();
+            card.setText(text.words());
+            card.setStyleRanges(text.styles());
+            card.setTopIndex(same ? top : 0);
+        }
+        row.map(Row::key).ifPresentOrElse(card::setData, () -> card.setData(null));
+        enable();
+    }
+
+    /** A reason is asked for whoever is not recommended; only candidates of the case's own family can be picked. */
+    private void enable() {
+        Optional<Row> row = session.selected();
+        boolean own = row.isPresent() && row.get().familyId().equals(session.familyId());
+        boolean pickable = own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
+        boolean chosen = session.outcome().map(o -> o.rows().stream()
+                .anyMatch(r -> r.role() == Role.CHOSEN && r.familyId().equals(session.familyId()))).orElse(false);
+        reason.setEnabled(pickable);
+        pick.setEnabled(pickable && !reason.getText().isBlank());
+        unpick.setEnabled(chosen);
+    }
+
+    private void pickThis() {
+        if (pick.isEnabled()) {
+            Row row = session.selected().orElseThrow();
+            String words = reason.getText().strip();
+            reason.setText("");
+            edits.pick(theCase(), quantity(), row.correlationId(), words);
+        }
+    }
+
+    private void leaveIt() {
+        edits.unpick(theCase(), quantity());
+    }
+
+    private Case theCase() {
+        return session.current().orElseThrow();
+    }
+
+    private Quantity quantity() {
+        return session.outcome().orElseThrow().view().quantity();
+    }
+}

@@ -1,0 +1,137 @@
+package stirwright.workbench.internal.parts;
+
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Consumer;
+import org.eclipse.swt.widgets.Composite;
+import stirwright.correlation.Family;
+import stirwright.exchange.CaseField;
+import stirwright.exchange.CaseFields;
+import stirwright.rheology.ModelKind;
+import stirwright.study.Case;
+import stirwright.study.Fluid;
+import stirwright.study.Impeller;
+import stirwright.study.Part;
+import stirwright.study.Vessel;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.CaseEdits;
+import stirwright.workbench.internal.session.Demands;
+import stirwright.workbench.internal.session.Session;
+import stirwright.workbench.internal.widgets.Form;
+
+/** The groups of fields, from the case's name to the values given in place of correlations. */
+final class CaseGroups {
+    private final CaseForm fields;
+    private final Form form;
+    private final Session session;
+    private final CaseEdits edits;
+
+    CaseGroups(CaseForm fields, Form form, Session session, CaseEdits edits) {
+        this.fields = fields;
+        this.form = form;
+        this.session = session;
+        this.edits = edits;
+    }
+
+    void theCase(Case c) {
+        Composite head = form.heading(Messages.Case_heading);
+        form.looks().link(head, Messages.Case_duplicate, () -> edits.duplicateCase(c));
+        if (session.editor().study().getCases().size() > 1) {
+            form.looks().link(head, Messages.Case_remove, () -> edits.removeCase(c));
+        }
+        List<Case> all = session.editor().study().getCases();
+        form.choice(Messages.Case_case, all.stream().map(Case::getName).map(String::valueOf).toList(), all.indexOf(c),
+                i -> session.turnTo(all.get(i)));
+        fields.text(Messages.Case_name, c::getName, name -> edits.rename(c, name));
+    }
+
+    void speed(Case c) {
+        form.heading(Messages.Case_speed);
+        List<CaseField> kinds = CaseFields.SPEEDS;
+        CaseField now = Demands.field(c);
+        form.choice(Messages.Case_demand, kinds.stream().map(Demands::title).toList(), kinds.indexOf(now),
+                i -> edits.demand(c, kinds.get(i).column(), Demands.equivalent(session.outcome(), kinds.get(i))));
+        fields.number(CaseForm.capital(now.title()), now,
+                () -> Demands.value(c), value -> edits.demand(c, now.column(), value));
+    }
+
+    void fluid(Case c) {
+        Fluid fluid = c.getFluid();
+        Composite head = form.heading(Messages.Case_fluid);
+        part(Messages.Case_fluid, session.editor().study().getFluids(), fluid, f -> edits.use(c, f));
+        if (fluid == null) {
+            return;
+        }
+        form.looks().link(head, Messages.Case_copy, () -> edits.copyFluid(c));
+        fields.text(Messages.Case_name, fluid::getName, name -> edits.rename(Messages.Edit_name, fluid, name));
+        List<ModelKind> kinds = Arrays.asList(ModelKind.values());
+        Optional<ModelKind> kind = Optional.ofNullable(fluid.getModel()).flatMap(ModelKind::byId);
+        form.choice(Messages.Case_model, kinds.stream().map(CaseGroups::title).toList(),
+                kind.map(kinds::indexOf).orElse(-1), i -> edits.model(fluid, kinds.get(i).id()));
+        kind.ifPresent(k -> CaseFields.model(k).forEach(f -> fields.number(f, fluid.getAmounts())));
+        fields.number(CaseFields.DENSITY, fluid.getAmounts());
+        CaseFields.MEASURED_WINDOW.forEach(f -> fields.number(f, fluid.getAmounts()));
+    }
+
+    void vessel(Case c) {
+        Vessel vessel = c.getVessel();
+        Composite head = form.heading(Messages.Case_vessel);
+        part(Messages.Case_vessel, session.editor().study().getVessels(), vessel, v -> edits.use(c, v));
+        if (vessel != null) {
+            form.looks().link(head, Messages.Case_copy, () -> edits.copyVessel(c));
+            fields.text(Messages.Case_name, vessel::getName, name -> edits.rename(Messages.Edit_name, vessel, name));
+            family().ifPresent(f -> CaseFields.vessel(f).forEach(d -> fields.number(d, vessel.getAmounts())));
+        }
+    }
+
+    void impeller(Case c, List<Family> families) {
+        Impeller impeller = c.getImpeller();
+        Composite head = form.heading(Messages.Case_impeller);
+        part(Messages.Case_impeller, session.editor().study().getImpellers(), impeller, i -> edits.use(c, i));
+        if (impeller == null) {
+            return;
+        }
+        form.looks().link(head, Messages.Case_copy, () -> edits.copyImpeller(c));
+        fields.text(Messages.Case_name, impeller::getName, name -> edits.rename(Messages.Edit_name, impeller, name));
+        List<String> ids = families.stream().map(Family::id).toList();
+        form.choice(Messages.Case_family, families.stream().map(Family::title).toList(), ids.indexOf(session.familyId()),
+                i -> edits.family(c, impeller, ids.get(i)));
+        family().ifPresent(f -> CaseFields.impeller(f).forEach(d -> fields.number(d, impeller.getAmounts())));
+    }
+
+    void compare(Case c, List<Family> families) {
+        if (families.size() > 1) {
+            form.heading(Messages.Case_compare);
+            families.stream().filter(f -> !f.id().equals(session.familyId()))
+                    .forEach(f -> form.check(f.title(), c.getCompared().contains(f.id()),
+                            on -> edits.compare(c, f.id(), on)));
+        }
+    }
+
+    void given(Case c) {
+        form.heading(Messages.Case_given);
+        CaseFields.GIVEN.forEach(f -> fields.number(f, c.getAmounts()));
+    }
+
+    private <P extends Part> void part(String title, List<P> all, P current, Consumer<P> use) {
+        form.choice(title, all.stream().map(Part::getName).map(String::valueOf).toList(), all.indexOf(current),
+                i -> use.accept(all.get(i)));
+    }
+
+    private Optional<Family> family() {
+        return session.catalogue().family(session.familyId());
+    }
+
+    private static String title(ModelKind kind) {
+        return switch (kind) {
+            case NEWTONIAN -> Messages.Model_newtonian;
+            case POWER_LAW -> Messages.Model_powerLaw;
+            case BINGHAM -> Messages.Model_bingham;
+            case HERSCHEL_BULKLEY -> Messages.Model_herschelBulkley;
+            case CASSON -> Messages.Model_casson;
+            case CROSS -> Messages.Model_cross;
+            case CARREAU -> Messages.Model_carreau;
+        };
+    }
+}

@@ -1,0 +1,121 @@
+package stirwright.workbench.internal.parts;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Label;
+import stirwright.core.CandidateResult;
+import stirwright.core.FluidState;
+import stirwright.correlation.Figures;
+import stirwright.correlation.FlowKind;
+import stirwright.correlation.Regime;
+import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.Sheet;
+import stirwright.workbench.internal.widgets.Looks;
+
+/** What the pick gives, in one line of figures, with the caution that belongs to power and torque. */
+final class ResultStrip extends Composite {
+    private static final double MINUTE = 60;
+
+    private final List<Label> values = new ArrayList<>();
+    private final List<Label> remarks = new ArrayList<>();
+    private final Looks looks;
+
+    /** A figure and, in small words, what stands behind it. */
+    private record Item(String value, String remark) {
+        private static final Item NONE = new Item("", "");
+    }
+
+    ResultStrip(Composite parent, Looks looks) {
+        super(parent, SWT.NONE);
+        this.looks = looks;
+        looks.onPage(this);
+        setBackgroundMode(SWT.INHERIT_FORCE);
+        List<String> captions = List.of(Messages.Strip_power, Messages.Strip_torque, Messages.Strip_powerPerVolume,
+                Messages.Strip_speed, Messages.Strip_reynolds, Messages.Strip_shearRate, Messages.Strip_viscosity,
+                Messages.Strip_pumping);
+        GridLayout layout = new GridLayout(captions.size(), true);
+        layout.marginWidth = 0;
+        layout.marginHeight = 0;
+        layout.verticalSpacing = 0;
+        layout.horizontalSpacing = 2 * Looks.STEP;
+        setLayout(layout);
+        captions.forEach(c -> cell(caption(c)));
+        captions.forEach(c -> values.add(cell(figure())));
+        captions.forEach(c -> remarks.add(cell(caption(""))));
+        Label caution = caption(Messages.Strip_caution);
+        caution.setForeground(looks.palette().near());
+        caution.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false, captions.size(), 1));
+        caution.setToolTipText(Messages.Standing_line);
+    }
+
+    private Label caption(String text) {
+        Label label = looks.quiet(this, SWT.NONE, text);
+        label.setFont(looks.small());
+        return label;
+    }
+
+    private Label figure() {
+        Label label = looks.label(this, SWT.NONE, " ");
+        label.setFont(looks.figure());
+        return label;
+    }
+
+    private static Label cell(Label label) {
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false);
+        data.widthHint = 16 * Looks.STEP;
+        label.setLayoutData(data);
+        return label;
+    }
+
+    void show(Sheet sheet) {
+        List<Item> items = sheet.result().pick().filter(p -> p.state().isPresent()).map(ResultStrip::items).orElse(List.of());
+        for (int i = 0; i < values.size(); i++) {
+            Item item = i < items.size() ? items.get(i) : Item.NONE;
+            set(values.get(i), item.value());
+            set(remarks.get(i), item.remark());
+            remarks.get(i).setToolTipText(item.remark());
+        }
+    }
+
+    private static void set(Label label, String text) {
+        if (!label.getText().equals(text)) {
+            label.setText(text);
+        }
+    }
+
+    private static List<Item> items(CandidateResult pick) {
+        FluidState state = pick.state().orElseThrow();
+        return List.of(
+                new Item(shown(pick.power(), "W"), "Np " + Figures.show(pick.powerNumber())),
+                new Item(shown(pick.torque(), "N m"), ""),
+                new Item(shown(pick.powerPerVolume(), "W/m3"), ""),
+                new Item(shown(MINUTE * state.speed(), "rev/min"),
+                        Messages.bind(Messages.Strip_tipSpeed, Figures.show(state.tipSpeed()))),
+                new Item(Figures.show(state.reynolds()), pick.regime().map(ResultStrip::regime).orElse("")),
+                new Item(shown(state.shearRate(), "1/s"),
+                        Messages.bind(Messages.Strip_perRevolution, Figures.show(state.shearRateConstant()))),
+                new Item(shown(state.viscosity(), "Pa s"), Messages.Strip_atShearRate),
+                Double.isNaN(pick.pumping()) ? Item.NONE
+                        : new Item(shown(pick.pumping(), "m3/s"), pick.flowKind().map(ResultStrip::kind).orElse("")));
+    }
+
+    private static String shown(double value, String unit) {
+        return Double.isNaN(value) ? "" : Figures.show(value) + " " + unit;
+    }
+
+    private static String regime(Regime regime) {
+        return switch (regime) {
+            case LAMINAR -> Messages.Regime_laminar;
+            case TRANSITIONAL -> Messages.Regime_transitional;
+            case TURBULENT -> Messages.Regime_turbulent;
+        };
+    }
+
+    private static String kind(FlowKind kind) {
+        return kind == FlowKind.DISCHARGE ? Messages.Strip_discharge : Messages.Strip_circulation;
+    }
+}

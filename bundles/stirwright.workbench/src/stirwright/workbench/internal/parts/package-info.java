@@ -1,0 +1,2 @@
+/** The zones of the window. */
+package stirwright.workbench.internal.parts;

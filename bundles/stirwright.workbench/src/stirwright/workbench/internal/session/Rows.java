@@ -1,0 +1,76 @@
+package stirwright.workbench.internal.session;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import stirwright.core.CandidateResult;
+import stirwright.core.Catalogue;
+import stirwright.core.Entry;
+import stirwright.core.FluidState;
+import stirwright.core.QuantityResult;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Quantity;
+import stirwright.workbench.internal.Messages;
+
+/** The candidates of all families shown, for one quantity. */
+final class Rows {
+    private final Catalogue catalogue;
+    private final Quantity quantity;
+    private final Map<String, Integer> styles = new HashMap<>();
+    private final List<Row> rows = new ArrayList<>();
+
+    private Rows(Catalogue catalogue, Quantity quantity) {
+        this.catalogue = catalogue;
+        this.quantity = quantity;
+    }
+
+    static List<Row> of(Catalogue catalogue, Quantity quantity, List<Sheet> sheets) {
+        Rows rows = new Rows(catalogue, quantity);
+        sheets.forEach(rows::styleAll);
+        sheets.stream().filter(Sheet::computed).forEach(rows::add);
+        return List.copyOf(rows.rows);
+    }
+
+    /** By the order of the ids and not by that of the results, so that a curve keeps its colour while numbers change. */
+    private void styleAll(Sheet sheet) {
+        catalogue.correlations(quantity, sheet.familyId()).stream().map(Correlation::id).sorted()
+                .forEach(id -> style(sheet, id));
+    }
+
+    private int style(Sheet sheet, String id) {
+        return styles.computeIfAbsent(Row.key(sheet.familyId(), id), key -> styles.size());
+    }
+
+    private void add(Sheet sheet) {
+        if (quantity.equals(Quantity.POWER_NUMBER)) {
+            List<CandidateResult> results = sheet.result().candidates();
+            results.forEach(r -> addPower(sheet, r, r == results.get(0)));
+        } else {
+            List<QuantityResult> results = sheet.result().quantities().stream()
+                    .filter(q -> q.quantity().equals(quantity)).toList();
+            results.forEach(r -> addOther(sheet, r, r == results.get(0)));
+        }
+    }
+
+    private void addPower(Sheet sheet, CandidateResult r, boolean pick) {
+        double reference = rows.isEmpty() ? r.power() : rows.get(0).power();
+        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.correlation(), title(r.correlation()),
+                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), pick, r.role(),
+                r.powerNumber(), r.state().map(FluidState::speed).orElse(Double.NaN), r.power(), r.torque(),
+                r.power() / reference - 1, r.verdict(), r.failedBounds(), r.why()));
+    }
+
+    private void addOther(Sheet sheet, QuantityResult r, boolean pick) {
+        double reference = rows.isEmpty() ? r.value() : rows.get(0).value();
+        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.id(), title(r.id()), r.correlation(), style(sheet, r.id()),
+                pick, r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
+                r.failedBounds(), r.why()));
+    }
+
+    private String title(String id) {
+        Optional<Correlation> correlation = catalogue.entry(id).map(Entry::correlation);
+        return correlation.map(Correlation::title).orElse(Messages.Row_given);
+    }
+}

@@ -1,0 +1,129 @@
+package stirwright.workbench.internal.widgets;
+
+import java.util.List;
+import java.util.function.IntConsumer;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Button;
+import org.eclipse.swt.widgets.Combo;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Text;
+
+/** A column of labelled fields: labels flush right, fields, units in grey. */
+public final class Form extends Composite {
+    private static final int COLUMNS = 3;
+    private static final int LABEL_WIDTH = 28 * Looks.STEP;
+    private static final int UNIT_WIDTH = 12 * Looks.STEP;
+    private static final int FIELD_WIDTH = 20 * Looks.STEP;
+
+    private final Looks looks;
+
+    public Form(Composite parent, Looks looks) {
+        super(parent, SWT.NONE);
+        this.looks = looks;
+        looks.onPage(this);
+        setBackgroundMode(SWT.INHERIT_FORCE);
+        GridLayout layout = new GridLayout(COLUMNS, false);
+        layout.marginWidth = 3 * Looks.STEP;
+        layout.marginHeight = 2 * Looks.STEP;
+        layout.verticalSpacing = Looks.STEP;
+        layout.horizontalSpacing = 2 * Looks.STEP;
+        setLayout(layout);
+    }
+
+    public Looks looks() {
+        return looks;
+    }
+
+    /** A heading with, at its end, the words that act on the group. */
+    public Composite heading(String title) {
+        Composite line = looks.area(this);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, COLUMNS, 1);
+        data.verticalIndent = getChildren().length > 1 ? 2 * Looks.STEP : 0;
+        line.setLayoutData(data);
+        GridLayout layout = new GridLayout(4, false);
+        layout.marginWidth = 0;
+        layout.marginHeight = 0;
+        line.setLayout(layout);
+        Label label = looks.label(line, SWT.NONE, title);
+        label.setFont(looks.strong());
+        label.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        return line;
+    }
+
+    /** A choice among words; the unit's column stays empty. */
+    public Combo choice(String title, List<String> words, int current, IntConsumer chosen) {
+        caption(title);
+        Combo combo = Names.name(new Combo(this, SWT.READ_ONLY | SWT.DROP_DOWN), title);
+        combo.setItems(words.toArray(String[]::new));
+        if (current >= 0) {
+            combo.select(current);
+        }
+        combo.addListener(SWT.Selection, e -> chosen.accept(combo.getSelectionIndex()));
+        // The wheel scrolls the form; it must not change a case in passing.
+        combo.addListener(SWT.MouseVerticalWheel, e -> e.doit = false);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
+        data.widthHint = FIELD_WIDTH + UNIT_WIDTH;
+        combo.setLayoutData(data);
+        return combo;
+    }
+
+    /** A line of plain text. */
+    public Text text(String title, String value) {
+        caption(title);
+        Text text = Names.name(new Text(this, SWT.BORDER), title);
+        text.setText(value);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
+        data.widthHint = FIELD_WIDTH;
+        text.setLayoutData(data);
+        return text;
+    }
+
+    /** A field for a number with the unit behind it. */
+    Text number(String title, String unit) {
+        caption(title);
+        String shownUnit = unit.equals("-") ? "" : unit;
+        Text text = Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), shownUnit.isEmpty() ? title : title + ", " + shownUnit);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
+        data.widthHint = FIELD_WIDTH;
+        text.setLayoutData(data);
+        Label behind = looks.quiet(this, SWT.NONE, shownUnit);
+        GridData unitData = new GridData(SWT.LEFT, SWT.CENTER, false, false);
+        unitData.widthHint = UNIT_WIDTH;
+        behind.setLayoutData(unitData);
+        return text;
+    }
+
+    /** A line of words below a field, hidden while it has nothing to say. */
+    Label remark() {
+        Label label = looks.label(this, SWT.WRAP, "");
+        label.setFont(looks.small());
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, COLUMNS, 1);
+        data.exclude = true;
+        data.widthHint = LABEL_WIDTH + FIELD_WIDTH;
+        label.setLayoutData(data);
+        label.setVisible(false);
+        return label;
+    }
+
+    /** Something to switch on and off. */
+    public Button check(String words, boolean on, java.util.function.Consumer<Boolean> switched) {
+        new Label(this, SWT.NONE);
+        Button button = looks.onPage(new Button(this, SWT.CHECK));
+        button.setText(words);
+        button.setSelection(on);
+        button.addListener(SWT.Selection, e -> switched.accept(button.getSelection()));
+        button.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
+        return button;
+    }
+
+    private void caption(String title) {
+        Label label = looks.label(this, SWT.RIGHT, title);
+        GridData data = new GridData(SWT.RIGHT, SWT.CENTER, false, false);
+        data.widthHint = LABEL_WIDTH;
+        label.setLayoutData(data);
+        label.setToolTipText(title);
+    }
+}

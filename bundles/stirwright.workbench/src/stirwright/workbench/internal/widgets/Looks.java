@@ -1,0 +1,98 @@
+package stirwright.workbench.internal.widgets;
+
+import org.eclipse.jface.resource.FontDescriptor;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Font;
+import org.eclipse.swt.widgets.Button;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Display;
+import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Link;
+import stirwright.chart.Palette;
+
+/** Colours, fonts and distances of the whole window. Lives as long as the display. */
+public final class Looks {
+    /** The step of all distances, in points. */
+    public static final int STEP = 4;
+
+    private final Palette palette;
+    private final Font strong;
+    private final Font small;
+    private final Font figure;
+
+    public Looks(Display display) {
+        palette = Palette.of(display);
+        FontDescriptor system = FontDescriptor.createFrom(display.getSystemFont());
+        strong = system.setStyle(SWT.BOLD).createFont(display);
+        small = system.increaseHeight(-1).createFont(display);
+        figure = system.increaseHeight(1).setStyle(SWT.BOLD).createFont(display);
+        display.disposeExec(() -> {
+            strong.dispose();
+            small.dispose();
+            figure.dispose();
+        });
+    }
+
+    public Palette palette() {
+        return palette;
+    }
+
+    /** For headings. */
+    public Font strong() {
+        return strong;
+    }
+
+    /** For captions and remarks. */
+    public Font small() {
+        return small;
+    }
+
+    /** For the numbers that are looked for first. */
+    public Font figure() {
+        return figure;
+    }
+
+    /** Puts a control on the page. */
+    public <C extends Control> C onPage(C control) {
+        control.setBackground(palette.page());
+        control.setForeground(palette.text());
+        return control;
+    }
+
+    /** An empty area of the page. */
+    public Composite area(Composite parent) {
+        Composite area = onPage(new Composite(parent, SWT.NONE));
+        area.setBackgroundMode(SWT.INHERIT_FORCE);
+        return area;
+    }
+
+    public Label label(Composite parent, int style, String text) {
+        Label label = onPage(new Label(parent, style));
+        label.setText(text);
+        return label;
+    }
+
+    /** Words that recede. */
+    public Label quiet(Composite parent, int style, String text) {
+        Label label = label(parent, style, text);
+        label.setForeground(palette.quiet());
+        return label;
+    }
+
+    /** Words that act, in place of a button where there are many. */
+    public Link link(Composite parent, String text, Runnable action) {
+        Link link = onPage(new Link(parent, SWT.NONE));
+        link.setText("<a>" + text + "</a>");
+        link.setLinkForeground(palette.accent());
+        link.addListener(SWT.Selection, e -> action.run());
+        return link;
+    }
+
+    public Button button(Composite parent, String verb, Runnable action) {
+        Button button = new Button(parent, SWT.PUSH);
+        button.setText(verb);
+        button.addListener(SWT.Selection, e -> action.run());
+        return button;
+    }
+}

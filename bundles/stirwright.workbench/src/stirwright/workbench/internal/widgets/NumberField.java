@@ -1,0 +1,144 @@
+package stirwright.workbench.internal.widgets;
+
+import java.util.function.DoubleConsumer;
+import java.util.function.DoubleSupplier;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Text;
+import stirwright.exchange.CaseField;
+import stirwright.exchange.TypedNumber;
+
+/**
+ * A number of the case as people type it, with another unit if they like. What cannot be read stays in the field with the
+ * reason below it, and the study keeps its last value until the text can be read.
+ */
+public final class NumberField {
+    private final CaseField field;
+    private final DoubleSupplier stored;
+    private final DoubleConsumer store;
+    private final Runnable problemChanged;
+    private final Text text;
+    private final Label remark;
+    private final Looks looks;
+    private String problem = "";
+    private boolean refreshing;
+
+    /**
+     * @param stored what the study has, in the column's unit; NaN for nothing
+     * @param store receives what was typed, NaN for a blank
+     * @param left called when the focus leaves the field
+     * @param problemChanged called when the text becomes readable or unreadable
+     */
+    public NumberField(
+            Form form, String title, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
+            Runnable problemChanged) {
+        this.field = field;
+        this.stored = stored;
+        this.store = store;
+        this.problemChanged = problemChanged;
+        this.looks = form.looks();
+        this.text = form.number(title, field.unit());
+        this.remark = form.remark();
+        text.setText(TypedNumber.show(stored.getAsDouble()));
+        text.addListener(SWT.Modify, e -> typed());
+        text.addListener(SWT.FocusOut, e -> {
+            settle();
+            left.run();
+        });
+        text.addListener(SWT.DefaultSelection, e -> settle());
+    }
+
+    public String column() {
+        return field.column();
+    }
+
+    /** Why the text cannot be read; empty when it can. */
+    public String problem() {
+        return problem;
+    }
+
+    public Text control() {
+        return text;
+    }
+
+    private void typed() {
+        if (refreshing) {
+            return;
+        }
+        switch (TypedNumber.read(text.getText(), field)) {
+            case TypedNumber.Value value -> {
+                setProblem("");
+                store.accept(value.value());
+            }
+            case TypedNumber.Blank blank -> {
+                setProblem("");
+                store.accept(Double.NaN);
+            }
+            case TypedNumber.Problem unreadable -> setProblem(unreadable.words());
+        }
+    }
+
+    private void setProblem(String words) {
+        boolean change = problem.isEmpty() != words.isEmpty();
+        problem = words;
+        showRemark(words);
+        if (change) {
+            problemChanged.run();
+        }
+    }
+
+    /** Once it is left, the field shows the number in its own unit. */
+    private void settle() {
+        if (problem.isEmpty()) {
+            put(TypedNumber.show(stored.getAsDouble()));
+        }
+    }
+
+    /** Takes over what the study has, unless the text says the same already or cannot be read yet. */
+    public void refresh() {
+        boolean same = switch (TypedNumber.read(text.getText(), field)) {
+            case TypedNumber.Value value -> Double.compare(value.value(), stored.getAsDouble()) == 0;
+            case TypedNumber.Blank blank -> Double.isNaN(stored.getAsDouble());
+            case TypedNumber.Problem unreadable -> text.isFocusControl();
+        };
+        if (!same) {
+            put(TypedNumber.show(stored.getAsDouble()));
+            setProblem("");
+        }
+    }
+
+    private void put(String words) {
+        if (!text.getText().equals(words)) {
+            refreshing = true;
+            text.setText(words);
+            refreshing = false;
+        }
+    }
+
+    /** What stands in while the field is blank, for instance "0.2 (T/3)". */
+    public void showDefault(String words) {
+        if (!text.getMessage().equals(words)) {
+            text.setMessage(words);
+            text.setToolTipText(words.isEmpty() ? null : words);
+        }
+    }
+
+    /** What the calculation has against the value; the field's own problem goes before it. */
+    public void showRefusal(String words) {
+        if (problem.isEmpty()) {
+            showRemark(words);
+        }
+    }
+
+    private void showRemark(String words) {
+        if (remark.getText().equals(words)) {
+            return;
+        }
+        remark.setText(words);
+        remark.setForeground(looks.palette().outside());
+        remark.setVisible(!words.isEmpty());
+        ((GridData) remark.getLayoutData()).exclude = words.isEmpty();
+        remark.requestLayout();
+    }
+}

@@ -1,0 +1,2 @@
+/** Looks and controls that know nothing of a case. */
+package stirwright.workbench.internal.widgets;
