@@ -65,6 +65,33 @@ find_maven() {
   rm -rf "$fetched"
 }
 
+# start_display: a screen in memory for the tests of the window, on a free number; ends with the shell.
+start_display() {
+  local number=$tools/display.$$ waited=0
+  command -v Xvfb >/dev/null || install xvfb || die "the window's tests need Xvfb (on Debian the package xvfb)."
+  has_library libgtk-3.so.0 || install libgtk-3-0t64 libgtk-3-0 || die "the window's tests need GTK 3 (on Debian libgtk-3-0)."
+  has_font || install fonts-dejavu-core || die "the window's tests need a font (on Debian fonts-dejavu-core)."
+  Xvfb -displayfd 7 -screen 0 1600x1200x24 -nolisten tcp 7>"$number" 8>&- 9>&- 2>"$tools/display.log" >&2 &
+  display=$!
+  trap stop_display EXIT
+  while [ ! -s "$number" ]; do
+    kill -0 "$display" 2>/dev/null && [ $((waited += 1)) -le 100 ] \
+      || die "Xvfb did not start; see $tools/display.log. The window's tests cannot run without it."
+    sleep 0.1
+  done
+  export DISPLAY=:$(cat "$number") GDK_BACKEND=x11 NO_AT_BRIDGE=1
+  unset WAYLAND_DISPLAY GDK_SCALE
+}
+
+stop_display() {
+  kill "$display" 2>/dev/null || true
+  rm -f "$tools/display.$$"
+}
+
+has_library() { PATH=$PATH:/sbin:/usr/sbin ldconfig -p 2>/dev/null | grep -F "$1" >/dev/null; }
+
+has_font() { find /usr/share/fonts /usr/local/share/fonts -name '*.[to]tf' 2>/dev/null | grep . >/dev/null; }
+
 # One build at a time in a checkout. Ends by itself with the shell, or by `unlock`.
 lock() {
   mkdir -p "$tools"

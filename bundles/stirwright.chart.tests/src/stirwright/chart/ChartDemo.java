@@ -9,6 +9,7 @@ import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Image;
 import org.eclipse.swt.graphics.ImageData;
 import org.eclipse.swt.graphics.ImageLoader;
+import org.eclipse.swt.graphics.RGB;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Display;
@@ -16,8 +17,8 @@ import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Shell;
 
 /**
- * Shows invented curves in a window; with a folder as argument it writes pictures there instead: light, dark and grey. Pictures
- * for a screen of 200 % come with {@code -Dswt.autoScale=200}.
+ * Shows invented curves in a window; with a folder as argument it writes pictures there instead: light, dark and grey, as
+ * captured from the screen, and as painted for a screen of 200 %.
  */
 public final class ChartDemo {
     private final Display display = new Display();
@@ -50,26 +51,31 @@ public final class ChartDemo {
         for (Palette palette : new Palette[] {Palette.light(), Palette.dark()}) {
             String theme = palette.isDark() ? "dark" : "light";
             view.setPalette(palette);
-            save(folder, theme + "-few", Invented.few(), none -> { });
-            save(folder, theme + "-few-hover", Invented.few(), chart -> point(chart, 300, 220));
-            save(folder, theme + "-many", Invented.many(25), none -> { });
-            save(folder, theme + "-many-hover", Invented.many(25), chart -> point(chart, 420, 260));
-            save(folder, theme + "-linear-hover", Invented.linear(), chart -> point(chart, 600, 150));
-            save(folder, theme + "-empty", Picture.empty("No candidate has a curve for this case. Choose an impeller in the case to see its curves."), none -> { });
+            save(folder, palette, theme + "-few", Invented.few(), none -> { });
+            save(folder, palette, theme + "-few-hover", Invented.few(), chart -> point(chart, 300, 220));
+            save(folder, palette, theme + "-many", Invented.many(25), none -> { });
+            save(folder, palette, theme + "-many-hover", Invented.many(25), chart -> point(chart, 420, 260));
+            save(folder, palette, theme + "-linear-hover", Invented.linear(), chart -> point(chart, 600, 150));
+            save(folder, palette, theme + "-empty", 
+                    Picture.empty("No candidate has a curve for this case. Choose an impeller in the case to see its curves."), none -> { });
         }
     }
 
-    private void save(Path folder, String name, Picture picture, Consumer<ChartView> act) throws IOException {
+    private void save(Path folder, Palette palette, String name, Picture picture, Consumer<ChartView> act) throws IOException {
         view.reset();
         view.show(picture);
         act.accept(view);
         settle(display);
         ImageData data = capture(view);
+        write(folder.resolve(name + ".png"), data);
+        write(folder.resolve(name + "-grey.png"), grey(data));
+        write(folder.resolve(name + "-200.png"), view.image(900, 600, 2, palette));
+    }
+
+    private static void write(Path file, ImageData data) {
         ImageLoader loader = new ImageLoader();
         loader.data = new ImageData[] {data};
-        loader.save(folder.resolve(name + ".png").toString(), SWT.IMAGE_PNG);
-        loader.data = new ImageData[] {grey(data)};
-        loader.save(folder.resolve(name + "-grey.png").toString(), SWT.IMAGE_PNG);
+        loader.save(file.toString(), SWT.IMAGE_PNG);
     }
 
     static void settle(Display display) {
@@ -107,7 +113,7 @@ public final class ChartDemo {
         GC gc = new GC(view);
         gc.copyArea(image, 0, 0);
         gc.dispose();
-        ImageData data = image.getImageDataAtCurrentZoom();
+        ImageData data = image.getImageData();
         image.dispose();
         return data;
     }
@@ -117,9 +123,9 @@ public final class ChartDemo {
         ImageData grey = (ImageData) data.clone();
         for (int y = 0; y < data.height; y++) {
             for (int x = 0; x < data.width; x++) {
-                org.eclipse.swt.graphics.RGB rgb = data.palette.getRGB(data.getPixel(x, y));
+                RGB rgb = data.palette.getRGB(data.getPixel(x, y));
                 int luma = (int) Math.round(0.299 * rgb.red + 0.587 * rgb.green + 0.114 * rgb.blue);
-                grey.setPixel(x, y, grey.palette.getPixel(new org.eclipse.swt.graphics.RGB(luma, luma, luma)));
+                grey.setPixel(x, y, grey.palette.getPixel(new RGB(luma, luma, luma)));
             }
         }
         return grey;

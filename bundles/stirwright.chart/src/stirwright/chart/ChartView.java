@@ -3,7 +3,7 @@ package stirwright.chart;
 import java.util.Set;
 import java.util.function.Consumer;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.graphics.ImageData;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import stirwright.chart.internal.Board;
@@ -89,11 +89,14 @@ public final class ChartView extends Composite {
     /**
      * The picture as it is in view, without cursor, in a size and in colours of its own, for instance for a report.
      *
-     * @return an image that the caller disposes
+     * @param width in pixels of a screen of 100 %, which say how large text and lines are
+     * @param height likewise
+     * @param dots so many dots of the image for one such pixel: 1 for a screen of 100 %, 2 for one of 200 %, 3 for print
+     * @param palette its colours
      */
-    public Image image(int width, int height, Palette palette) {
+    public ImageData image(int width, int height, double dots, Palette palette) {
         checkWidget();
-        return board.image(width, height, palette);
+        return board.image(width, height, dots, palette);
     }
 
     @Override

@@ -6,6 +6,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.graphics.ImageData;
 import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.graphics.Transform;
@@ -225,16 +226,21 @@ public final class Board {
         shift.dispose();
     }
 
-    /** Paints the picture as it is shown, without cursor and focus, in another size. */
-    public Image image(int width, int height, Palette colours) {
-        Image image = new Image(chart.getDisplay(), width, height);
+    /** Paints the picture as it is shown, without cursor and focus, in another size, with so many dots for a pixel. */
+    public ImageData image(int width, int height, double dots, Palette colours) {
+        Image image = new Image(chart.getDisplay(), (int) Math.round(width * dots), (int) Math.round(height * dots));
         GC gc = new GC(image);
+        Transform larger = new Transform(gc.getDevice(), (float) dots, 0, 0, (float) dots, 0, 0);
+        gc.setTransform(larger);
         Scene other = new Scene(gc, type, new Point(width, height), picture, hidden, spanX, spanY);
         ScenePainter.frame(gc, other, colours, highlighted);
         gc.setClipping(other.plot());
         ScenePainter.plot(gc, other, colours, highlighted, null);
         other.dispose();
+        larger.dispose();
         gc.dispose();
-        return image;
+        ImageData data = image.getImageData();
+        image.dispose();
+        return data;
     }
 }

@@ -13,7 +13,9 @@ import stirwright.chart.Reading;
 final class CursorPainter {
     private static final int PAD = 8;
     private static final int SWATCH = 28;
+    private static final int AWAY = 16;
     private static final int WIDEST_NAME = 200;
+    private static final int NARROWEST_NAME = 40;
     private static final String DOUBT = "outside";
 
     private final Scene scene;
@@ -62,12 +64,12 @@ final class CursorPainter {
             back = Math.max(back, Lettering.width(gc, number.substring(front(number).length())));
             doubt |= !values.get(i).inside();
         }
-        name = Math.min(name, WIDEST_NAME);
+        int beside = SWATCH + 5 * PAD + front + back + (doubt ? PAD + Lettering.width(gc, DOUBT) : 0);
+        name = Math.min(name, Math.clamp(scene.plot.width / 2 - AWAY - beside, NARROWEST_NAME, WIDEST_NAME));
         String head = Cursor.head(scene, cursor.reading());
         boolean part = end - first < values.size();
         String rest = values.isEmpty() ? "no curve here" : part ? "and " + (values.size() - end + first) + " more" : "";
-        int width = SWATCH + PAD + name + 2 * PAD + front + back + (doubt ? PAD + Lettering.width(gc, DOUBT) : 0);
-        width = 2 * PAD + Math.max(values.isEmpty() ? 0 : width, Math.max(Lettering.width(gc, head), Lettering.width(gc, rest)));
+        int width = Math.max(values.isEmpty() ? 0 : beside + name, 2 * PAD + Math.max(Lettering.width(gc, head), Lettering.width(gc, rest)));
         int height = 2 * PAD + (1 + end - first + (rest.isEmpty() ? 0 : 1)) * row;
         Rectangle box = place(x, width, height);
         box(gc, box);
@@ -105,13 +107,14 @@ final class CursorPainter {
         return mark < 0 ? number : number.substring(0, mark);
     }
 
-    /** Beside the line, on the side with room, at the height of the pointer. */
+    /** Beside the line, on the side with room, at the height of the pointer and within the plot. */
     private Rectangle place(int x, int width, int height) {
         Rectangle plot = scene.plot;
-        boolean right = x + 16 + width <= scene.size.x - 4;
-        int left = right ? x + 16 : Math.max(4, x - 16 - width);
-        int top = Math.clamp(Math.round(cursor.y()) - height / 2, plot.y, Math.max(plot.y, plot.y + plot.height - height));
-        return new Rectangle(left, top, width, height);
+        int right = plot.x + plot.width - 2 - width;
+        int left = x + AWAY <= right ? x + AWAY : x - AWAY - width;
+        int top = (int) Math.round(cursor.y()) - height / 2;
+        return new Rectangle(Math.max(plot.x + 1, Math.min(right, left)), Math.max(plot.y + 1,
+                Math.min(plot.y + plot.height - 2 - height, top)), width, height);
     }
 
     private void box(GC gc, Rectangle box) {

@@ -42,7 +42,7 @@ public final class Scene {
         List<Curve> visible = visible(picture, hidden);
         empty = !Fit.anything(picture.curves(), spanX, spanY);
         int top = EDGE + type.height() + GAP;
-        int bottom = Math.max(top + 1, size.y - EDGE - 2 * type.height() - 2 * GAP);
+        int bottom = Math.max(top + 1, size.y - EDGE - 2 * type.height() - GAP - GAP / 2);
         y = new Scale(spanY, bottom, top);
         yTicks = Ticks.of(y, TICK_GAP_Y);
         int left = EDGE + Math.ceilDiv(widest(gc, yTicks), GAP) * GAP + GAP;

@@ -1,0 +1,2 @@
+/** What the chart view computes before it paints. */
+package stirwright.chart.internal;
