@@ -18,14 +18,15 @@ class DropInsTest extends Dropping {
 
     @Test
     void anApprovedFamilyArrivesAndLeaves() throws Exception {
-        Path jar = dropApproved("wanderer.jar", TinyBundle.named("dropped.wanderer").component(Wanderer.class));
+        byte[] content = TinyBundle.named("dropped.wanderer").component(Wanderer.class).jar();
+        Path jar = dropApproved("wanderer.jar", content);
         assertTrue(Framework.becomes(() -> Framework.catalogue().family("wanderer").isPresent()), "it has not arrived");
         assertEquals(State.RUNNING, awaited(jar, State.RUNNING).state());
         Files.delete(jar);
         assertTrue(Framework.becomes(() -> Framework.catalogue().family("wanderer").isEmpty()), "it has not left");
         assertEquals(List.of(), dropIns().list());
         assertTrue(Framework.bundle("dropped.wanderer").isEmpty());
-        drop("again.jar", TinyBundle.named("dropped.wanderer").component(Wanderer.class));
+        drop("again.jar", content);
         assertTrue(Framework.becomes(() -> Framework.catalogue().family("wanderer").isPresent()), "it is asked for twice");
     }
 
@@ -55,16 +56,17 @@ class DropInsTest extends Dropping {
 
     @Test
     void anApprovedFileThatIsOverwrittenStopsAndAsks() throws Exception {
-        Path jar = dropApproved("a.jar", Tattler.bundle(NAME, "1.0.0"));
+        byte[] content = Tattler.bundle(NAME, "1.0.0").jar();
+        Path jar = dropApproved("a.jar", content);
         awaited(jar, State.RUNNING);
         assertEquals("1.0.0", Tattler.ran(NAME));
-        drop("a.jar", Tattler.bundle(NAME, "2.0.0"));
+        drop("a.jar", Tattler.bundle(NAME, "2.0.0").jar());
         assertEquals("2.0.0", awaited(jar, State.ASKS).version());
         assertTrue(Framework.bundle(NAME).isEmpty(), "the old content still runs");
         Thread.sleep(1000);
         assertEquals("1.0.0", Tattler.ran(NAME));
         Tattler.forget(NAME);
-        drop("a.jar", Tattler.bundle(NAME, "1.0.0"));
+        drop("a.jar", content);
         awaited(jar, State.RUNNING);
         assertEquals("1.0.0", Tattler.ran(NAME), "the content that was approved runs again");
     }
@@ -91,9 +93,10 @@ class DropInsTest extends Dropping {
 
     @Test
     void ofTwoOfOneNameTheSecondWaitsForTheFirstToLeave() throws Exception {
-        Path first = dropApproved("a.jar", Tattler.bundle(NAME, "1.0.0"));
+        byte[] content = Tattler.bundle(NAME, "1.0.0").jar();
+        Path first = dropApproved("a.jar", content);
         awaited(first, State.RUNNING);
-        Path second = drop("b.jar", Tattler.bundle(NAME, "1.0.0"));
+        Path second = drop("b.jar", content);
         assertTrue(awaited(second, State.UNUSABLE).message().endsWith("from a.jar"), () -> found(second).toString());
         Files.delete(first);
         awaited(second, State.RUNNING);

@@ -8,6 +8,7 @@ import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.util.HexFormat;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.io.TempDir;
@@ -39,8 +40,10 @@ abstract class Dropping {
 
     @AfterEach
     void leave() throws Exception {
-        for (Path file : Files.list(families).toList()) {
-            Files.delete(file);
+        try (Stream<Path> files = Files.list(families)) {
+            for (Path file : files.toList()) {
+                Files.delete(file);
+            }
         }
         restart();
         watcher().stop();
@@ -97,7 +100,11 @@ abstract class Dropping {
 
     /** Drops a bundle and approves it as soon as it asks. */
     Path dropApproved(String file, TinyBundle bundle) throws Exception {
-        Path jar = drop(file, bundle);
+        return dropApproved(file, bundle.jar());
+    }
+
+    Path dropApproved(String file, byte[] content) throws Exception {
+        Path jar = drop(file, content);
         awaited(jar, State.ASKS);
         dropIns().approve(sha256(jar));
         return jar;
