@@ -5,12 +5,20 @@ import java.math.MathContext;
 import javax.measure.Dimension;
 import javax.measure.IncommensurableException;
 import javax.measure.Unit;
+import tech.units.indriya.function.Calculus;
+import tech.units.indriya.function.DefaultNumberSystem;
 import tech.units.indriya.function.RationalNumber;
 
 /** From a typed unit to the unit of a column. */
 final class UnitConversion {
     /** Far beyond a double's 17 digits, so that rounding to it is the one rounding that counts. */
     private static final MathContext FORTY = new MathContext(40);
+
+    static {
+        // Left alone, the library looks for this default of its own with the thread's class loader, which in a
+        // framework of bundles does not find it.
+        Calculus.setCurrentNumberSystem(new DefaultNumberSystem());
+    }
 
     private UnitConversion() {}
 
