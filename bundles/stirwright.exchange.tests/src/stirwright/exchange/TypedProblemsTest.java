@@ -65,7 +65,8 @@ class TypedProblemsTest {
         "5 W | is a power", "5 m3/s | is a flow", "5 cSt | is a kinematic viscosity", "5 rpm | is a speed of rotation",
         "5 1/s | is a shear rate", "5 Pa | is a stress", "5 cP | is a viscosity", "5 mPa s^n | is a consistency",
         "5 h | is a time", "5 ft/min | is a velocity", "5 g/L | is a density", "5 W/L | is a power per volume",
-        "5 1/rev | is a number per turn", "5 m/m | is a number without unit", "5 - | is a number without unit", "5 kg m | measures something else"})
+        "5 1/rev | is a number per turn", "5 m/m | is a number without unit", "5 - | is a number without unit",
+        "5 kg m | measures something else"})
     void anotherKind(String typed, String what) {
         says(what + "; " + LENGTHS, typed, "impeller_diameter_m");
     }

@@ -55,7 +55,10 @@ final class UnitSymbols {
     /** 4.54609 L (United Kingdom, Units of Measurement Regulations 1995). */
     private static final Unit<?> IMPERIAL_GALLON = LITRE.multiply(454_609).divide(100_000);
 
-    /** CGS units: dyne 1e-5 N, poise 0.1 Pa s, stokes 1e-4 m2/s; bar 1e5 Pa, tonne 1000 kg (SI Brochure, 8th edition, tables 6, 8 and 9). */
+    /**
+     * Dyne 1e-5 N, poise 0.1 Pa s, stokes 1e-4 m2/s, bar 1e5 Pa, tonne 1000 kg (SI Brochure, 8th edition, tables 6, 8
+     * and 9).
+     */
     private static final Unit<?> DYNE = NEWTON.divide(100_000);
     private static final Unit<?> POISE = PASCAL.multiply(SECOND).divide(10);
     private static final Unit<?> STOKES = METRE.pow(2).divide(SECOND).divide(10_000);
