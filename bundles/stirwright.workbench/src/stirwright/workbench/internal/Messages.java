@@ -47,6 +47,8 @@ public final class Messages extends NLS {
     public static String Case_given;
     public static String Case_heading;
     public static String Case_impeller;
+    public static String Case_measuredFrom;
+    public static String Case_measuredTo;
     public static String Case_model;
     public static String Case_name;
     public static String Case_none;
@@ -62,14 +64,17 @@ public final class Messages extends NLS {
     public static String Column_candidate;
     public static String Column_curve;
     public static String Column_deviation;
-    public static String Column_fails;
+    public static String Column_deviationTip;
     public static String Column_family;
     public static String Column_grade;
     public static String Column_power;
-    public static String Column_role;
     public static String Column_source;
     public static String Column_torque;
     public static String Column_verdict;
+    public static String Digits_checked;
+    public static String Digits_recalled;
+    public static String Digits_recalledChecked;
+    public static String Digits_unsure;
     public static String Documents_back;
     public static String Documents_drop;
     public static String Documents_filter;
@@ -126,6 +131,8 @@ public final class Messages extends NLS {
     public static String Strip_caution;
     public static String Strip_circulation;
     public static String Strip_discharge;
+    public static String Strip_flag;
+    public static String Strip_flags;
     public static String Strip_perRevolution;
     public static String Strip_power;
     public static String Strip_powerPerVolume;

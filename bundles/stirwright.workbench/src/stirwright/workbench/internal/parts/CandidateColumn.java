@@ -17,14 +17,15 @@ enum CandidateColumn {
     CANDIDATE(30, Row::title),
     FAMILY(18, Row::familyTitle),
     VALUE(11, Row::value, v -> Figures.show(v)),
-    POWER(11, Row::power, v -> Figures.show(v)),
-    TORQUE(11, Row::torque, v -> Figures.show(v)),
-    DEVIATION(10, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
-    VERDICT(12, r -> verdict(r.verdict()), Comparator.comparing(Row::verdict)),
-    ROLE(14, r -> role(r), Comparator.comparing(Row::role)),
-    FAILS(26, r -> String.join("; ", r.failedBounds())),
-    SOURCE(22, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
-    GRADE(20, r -> r.correlation().map(CandidateColumn::grade).orElse(""));
+    POWER(12, Row::power, v -> Figures.show(v)),
+    TORQUE(12, Row::torque, v -> Figures.show(v)),
+    DEVIATION(11, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
+    VERDICT(42, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
+    SOURCE(26, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
+    GRADE(22, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
+
+    /** Where the table is narrower, the source stands in the card alone. In points. */
+    private static final int ROOM_FOR_SOURCE = 720;
 
     private final int share;
     private final Function<Row, String> text;
@@ -67,29 +68,41 @@ enum CandidateColumn {
     }
 
     /** Whether a view has it. */
-    boolean shownIn(View view, boolean severalFamilies) {
+    boolean shownIn(View view, boolean severalFamilies, int width) {
         return switch (this) {
             case FAMILY -> severalFamilies;
-            case POWER -> view == View.POWER_NUMBER || view == View.POWER;
+            case POWER -> view == View.POWER;
             case TORQUE -> view == View.TORQUE;
+            case SOURCE -> width >= ROOM_FOR_SOURCE;
             default -> true;
         };
     }
 
+    /** What its head means; null where the words say it. */
+    String tip() {
+        return this == DEVIATION ? Messages.Column_deviationTip : null;
+    }
+
     String title(View view) {
         return switch (this) {
-            case CANDIDATE -> Messages.bind(Messages.Column_candidate, view.quantity().title());
+            case CANDIDATE -> Messages.bind(Messages.Column_candidate, CaseForm.capital(view.quantity().title()));
             case FAMILY -> Messages.Column_family;
             case VALUE -> view.quantity().symbol();
             case POWER -> Messages.Column_power;
             case TORQUE -> Messages.Column_torque;
             case DEVIATION -> Messages.Column_deviation;
             case VERDICT -> Messages.Column_verdict;
-            case ROLE -> Messages.Column_role;
-            case FAILS -> Messages.Column_fails;
             case SOURCE -> Messages.Column_source;
             case GRADE -> Messages.Column_grade;
         };
+    }
+
+    /** The bounds that fail; else what the candidate is to the case, with the verdict. */
+    private static String verdict(Row row) {
+        String word = verdict(row.verdict());
+        boolean set = row.role() == Role.CHOSEN || row.pick();
+        String bounds = row.failedBounds().isEmpty() ? word : word + ": " + String.join("; ", row.failedBounds());
+        return row.failedBounds().isEmpty() || set ? role(row) + ", " + bounds : bounds;
     }
 
     static String verdict(Verdict verdict) {
@@ -117,5 +130,16 @@ enum CandidateColumn {
     static String grade(Correlation correlation) {
         return (correlation.citation().hasSource() ? correlation.standing().words() : Messages.Grade_ruleOfTrade) + ", "
                 + correlation.transcription().words();
+    }
+
+    /** The same in as few words as a column takes. */
+    private static String shortGrade(Correlation correlation) {
+        String digits = switch (correlation.transcription()) {
+            case CHECKED_AGAINST_SOURCE -> Messages.Digits_checked;
+            case CHECKED_NUMERICALLY -> Messages.Digits_recalledChecked;
+            case FROM_MEMORY -> Messages.Digits_recalled;
+            case UNSURE -> Messages.Digits_unsure;
+        };
+        return (correlation.citation().hasSource() ? correlation.standing().words() : Messages.Grade_ruleOfTrade) + ", " + digits;
     }
 }

@@ -5,6 +5,10 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Color;
+import org.eclipse.swt.graphics.Font;
+import org.eclipse.swt.graphics.GC;
+import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
@@ -21,6 +25,7 @@ import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Aligned;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
+import stirwright.workbench.internal.widgets.Shortened;
 
 /**
  * The candidates, a row each: the check mark switches the curve, its swatch is the chart's legend, a click on a column's
@@ -30,10 +35,14 @@ final class CandidateTable extends Composite {
     /** For the check mark and the swatch. */
     private static final int SWATCH_WIDTH = 68;
     private static final int SWATCH_INSET = 26;
+    /** What a cell keeps free on both sides of its text. */
+    private static final int CELL_MARGIN = 12;
 
     private final Looks looks;
     private final Session session;
     private final Table table;
+    private final Font strong;
+    private final Shortened shortened = new Shortened();
     private final List<CandidateColumn> columns = new ArrayList<>();
     private CandidateColumn sortedBy;
     private boolean descending;
@@ -49,7 +58,14 @@ final class CandidateTable extends Composite {
         table.setForeground(looks.palette().text());
         table.addListener(SWT.Selection, this::selected);
         table.addListener(SWT.PaintItem, this::paintSwatch);
-        table.addListener(SWT.Resize, e -> fit());
+        table.addListener(SWT.EraseItem, this::paintSelection);
+        table.addListener(SWT.MouseHover, this::tip);
+        table.addListener(SWT.Resize, e -> {
+            fit();
+            session.outcome().ifPresent(o -> show());
+        });
+        table.setFont(looks.small());
+        strong = looks.smallStrong();
         session.onOutcome(this::show);
         session.onSelection(this::showSelection);
         session.outcome().ifPresent(o -> show());
@@ -73,7 +89,7 @@ final class CandidateTable extends Composite {
             TableItem item = table.getItem(r);
             Row row = rows.get(r);
             item.setData(row);
-            item.setFont(row.pick() ? looks.strong() : null);
+            item.setFont(row.pick() ? strong : null);
             item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, colour(row.verdict()));
         }
         table.setRedraw(true);
@@ -82,7 +98,7 @@ final class CandidateTable extends Composite {
 
     private void fill(int c, List<Row> rows) {
         List<String> texts = rows.stream().map(columns.get(c)::text).toList();
-        List<String> shown = columns.get(c).number() ? Aligned.atDecimalSign(texts) : texts;
+        List<String> shown = columns.get(c).number() ? Aligned.atDecimalSign(texts) : fitted(texts, table.getColumn(c + 1));
         for (int r = 0; r < shown.size(); r++) {
             TableItem item = table.getItem(r);
             if (!item.getText(c + 1).equals(shown.get(r))) {
@@ -91,7 +107,29 @@ final class CandidateTable extends Composite {
         }
     }
 
-    private org.eclipse.swt.graphics.Color colour(Verdict verdict) {
+    private List<String> fitted(List<String> texts, TableColumn column) {
+        GC gc = new GC(table);
+        // The pick's row is bold, so every text is fitted as if it were.
+        gc.setFont(strong);
+        List<String> shown = texts.stream().map(t -> shortened.fit(gc, t, column.getWidth() - CELL_MARGIN)).toList();
+        gc.dispose();
+        return shown;
+    }
+
+    /** The whole text of a cell that could not show it. */
+    private void tip(Event event) {
+        TableItem item = table.getItem(new Point(event.x, event.y));
+        String words = null;
+        for (int c = 0; item != null && c < columns.size(); c++) {
+            if (item.getBounds(c + 1).contains(event.x, event.y)) {
+                String whole = columns.get(c).text((Row) item.getData());
+                words = columns.get(c).number() || whole.equals(item.getText(c + 1)) ? null : whole;
+            }
+        }
+        table.setToolTipText(words);
+    }
+
+    private Color colour(Verdict verdict) {
         return switch (verdict) {
             case INSIDE -> looks.palette().inside();
             case NOT_STATED -> looks.palette().notStated();
@@ -110,7 +148,7 @@ final class CandidateTable extends Composite {
 
     private void makeColumns(Outcome outcome) {
         List<CandidateColumn> wanted = Arrays.stream(CandidateColumn.values())
-                .filter(c -> c.shownIn(outcome.view(), outcome.sheets().size() > 1)).toList();
+                .filter(c -> c.shownIn(outcome.view(), outcome.sheets().size() > 1, table.getClientArea().width)).toList();
         if (!wanted.equals(columns)) {
             for (TableColumn old : table.getColumns()) {
                 old.dispose();
@@ -128,6 +166,7 @@ final class CandidateTable extends Composite {
         }
         for (int c = 0; c < columns.size(); c++) {
             table.getColumn(c + 1).setText(columns.get(c).title(outcome.view()));
+            table.getColumn(c + 1).setToolTipText(columns.get(c).tip());
         }
     }
 
@@ -173,6 +212,16 @@ final class CandidateTable extends Composite {
             if (row.key().equals(key) && (table.getSelectionCount() == 0 || table.getSelection()[0] != item)) {
                 table.setSelection(item);
             }
+        }
+    }
+
+    /** The selection in the window's own quiet colour, so that the words keep theirs. */
+    private void paintSelection(Event event) {
+        if ((event.detail & SWT.SELECTED) != 0) {
+            event.gc.setBackground(looks.selection());
+            event.gc.fillRectangle(0, event.y, table.getClientArea().width, event.height);
+            event.detail &= ~(SWT.SELECTED | SWT.HOT);
+            event.gc.setForeground(looks.palette().text());
         }
     }
 

@@ -12,7 +12,7 @@ import stirwright.workbench.internal.widgets.Looks;
 
 /** The candidates for the quantity on the chart, and the card of the selected one beside them. */
 public final class CandidatesPart {
-    private static final int[] SHARES = {62, 38};
+    private static final int[] SHARES = {68, 32};
 
     @Inject
     private Session session;

@@ -47,13 +47,13 @@ final class CardView extends Composite {
         card.addListener(SWT.Traverse, e -> e.doit |= e.detail == SWT.TRAVERSE_TAB_NEXT || e.detail == SWT.TRAVERSE_TAB_PREVIOUS);
         foot = looks.area(this);
         foot.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false));
-        GridLayout footLayout = new GridLayout(3, false);
+        GridLayout footLayout = new GridLayout(2, false);
         footLayout.marginWidth = 0;
         footLayout.marginHeight = 0;
         foot.setLayout(footLayout);
         reason = Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName);
         reason.setMessage(Messages.Card_reason);
-        reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
         reason.addListener(SWT.Modify, e -> enable());
         reason.addListener(SWT.DefaultSelection, e -> pickThis());
         pick = looks.button(foot, Messages.Card_pick, this::pickThis);

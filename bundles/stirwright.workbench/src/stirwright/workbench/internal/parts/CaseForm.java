@@ -5,6 +5,10 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.function.Consumer;
+import java.util.function.DoubleConsumer;
+import java.util.function.DoubleSupplier;
+import java.util.function.Supplier;
 import org.eclipse.emf.common.util.EList;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
@@ -88,12 +92,16 @@ final class CaseForm extends Composite {
 
     /** A field for an amount. */
     void number(CaseField field, EList<Amount> owner) {
-        String title = capital(field.title());
+        number(capital(field.title()), field, owner);
+    }
+
+    /** The same under a title of the window's own. */
+    void number(String title, CaseField field, EList<Amount> owner) {
         number(title, field, () -> Amounts.get(owner, field.column()).orElse(Double.NaN),
                 value -> edits.amount(Messages.bind(Messages.Edit_amount, field.title()), owner, field.column(), value));
     }
 
-    void number(String title, CaseField field, java.util.function.DoubleSupplier stored, java.util.function.DoubleConsumer store) {
+    void number(String title, CaseField field, DoubleSupplier stored, DoubleConsumer store) {
         NumberField[] made = new NumberField[1];
         made[0] = new NumberField(form, title, field, stored, store, () -> session.editor().endMerge(), () -> note(made[0]));
         fields.add(made[0]);
@@ -101,7 +109,7 @@ final class CaseForm extends Composite {
     }
 
     /** A line of text that follows the study. */
-    void text(String title, java.util.function.Supplier<String> stored, java.util.function.Consumer<String> store) {
+    void text(String title, Supplier<String> stored, Consumer<String> store) {
         Text text = form.text(title, Objects.requireNonNullElse(stored.get(), ""));
         text.addListener(SWT.FocusOut, e -> session.editor().endMerge());
         text.addListener(SWT.Modify, e -> store.accept(text.getText()));

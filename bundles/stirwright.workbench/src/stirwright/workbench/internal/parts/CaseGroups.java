@@ -71,7 +71,8 @@ final class CaseGroups {
                 kind.map(kinds::indexOf).orElse(-1), i -> edits.model(fluid, kinds.get(i).id()));
         kind.ifPresent(k -> CaseFields.model(k).forEach(f -> fields.number(f, fluid.getAmounts())));
         fields.number(CaseFields.DENSITY, fluid.getAmounts());
-        CaseFields.MEASURED_WINDOW.forEach(f -> fields.number(f, fluid.getAmounts()));
+        fields.number(Messages.Case_measuredFrom, CaseFields.SHEAR_RATE_MIN, fluid.getAmounts());
+        fields.number(Messages.Case_measuredTo, CaseFields.SHEAR_RATE_MAX, fluid.getAmounts());
     }
 
     void vessel(Case c) {

@@ -6,7 +6,6 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Label;
 import stirwright.core.CandidateResult;
 import stirwright.core.FluidState;
 import stirwright.correlation.Figures;
@@ -14,14 +13,16 @@ import stirwright.correlation.FlowKind;
 import stirwright.correlation.Regime;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Sheet;
+import stirwright.workbench.internal.widgets.FittedLabel;
 import stirwright.workbench.internal.widgets.Looks;
 
-/** What the pick gives, in one line of figures, with the caution that belongs to power and torque. */
+/** What the pick gives, in one line of figures, with the caution that belongs to power and torque, and why it is flagged. */
 final class ResultStrip extends Composite {
     private static final double MINUTE = 60;
 
-    private final List<Label> values = new ArrayList<>();
-    private final List<Label> remarks = new ArrayList<>();
+    private final List<FittedLabel> values = new ArrayList<>();
+    private final List<FittedLabel> remarks = new ArrayList<>();
+    private final FittedLabel flag;
     private final Looks looks;
 
     /** A figure and, in small words, what stands behind it. */
@@ -41,33 +42,35 @@ final class ResultStrip extends Composite {
         layout.marginWidth = 0;
         layout.marginHeight = 0;
         layout.verticalSpacing = 0;
-        layout.horizontalSpacing = 2 * Looks.STEP;
+        layout.horizontalSpacing = Looks.STEP;
         setLayout(layout);
-        captions.forEach(c -> cell(caption(c)));
-        captions.forEach(c -> values.add(cell(figure())));
-        captions.forEach(c -> remarks.add(cell(caption(""))));
-        Label caution = caption(Messages.Strip_caution);
-        caution.setForeground(looks.palette().near());
-        caution.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false, captions.size(), 1));
-        caution.setToolTipText(Messages.Standing_line);
+        captions.forEach(c -> small(1).setText(c));
+        captions.forEach(c -> values.add(figure()));
+        captions.forEach(c -> remarks.add(small(1)));
+        FittedLabel caution = small(captions.size());
+        caution.label().setForeground(looks.palette().near());
+        caution.setText(Messages.Strip_caution);
+        flag = small(captions.size());
+        flag.label().setForeground(looks.palette().near());
     }
 
-    private Label caption(String text) {
-        Label label = looks.quiet(this, SWT.NONE, text);
-        label.setFont(looks.small());
-        return label;
+    private FittedLabel small(int columns) {
+        FittedLabel label = new FittedLabel(this, looks);
+        label.label().setFont(looks.small());
+        label.label().setForeground(looks.palette().quiet());
+        return cell(label, columns);
     }
 
-    private Label figure() {
-        Label label = looks.label(this, SWT.NONE, " ");
-        label.setFont(looks.figure());
-        return label;
+    private FittedLabel figure() {
+        FittedLabel label = new FittedLabel(this, looks);
+        label.label().setFont(looks.strong());
+        return cell(label, 1);
     }
 
-    private static Label cell(Label label) {
-        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false);
+    private static FittedLabel cell(FittedLabel label, int columns) {
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, columns, 1);
         data.widthHint = 16 * Looks.STEP;
-        label.setLayoutData(data);
+        label.label().setLayoutData(data);
         return label;
     }
 
@@ -75,15 +78,17 @@ final class ResultStrip extends Composite {
         List<Item> items = sheet.result().pick().filter(p -> p.state().isPresent()).map(ResultStrip::items).orElse(List.of());
         for (int i = 0; i < values.size(); i++) {
             Item item = i < items.size() ? items.get(i) : Item.NONE;
-            set(values.get(i), item.value());
-            set(remarks.get(i), item.remark());
-            remarks.get(i).setToolTipText(item.remark());
+            values.get(i).setText(item.value());
+            remarks.get(i).setText(item.remark());
         }
-    }
-
-    private static void set(Label label, String text) {
-        if (!label.getText().equals(text)) {
-            label.setText(text);
+        List<String> flags = sheet.result().flags();
+        flag.setText(flags.isEmpty() ? "" : Messages.bind(flags.size() == 1 ? Messages.Strip_flag : Messages.Strip_flags,
+                String.join("; ", flags), flags.size()));
+        GridData data = (GridData) flag.label().getLayoutData();
+        if (data.exclude != flags.isEmpty()) {
+            data.exclude = flags.isEmpty();
+            flag.label().setVisible(!data.exclude);
+            flag.label().requestLayout();
         }
     }
 
@@ -92,7 +97,7 @@ final class ResultStrip extends Composite {
         return List.of(
                 new Item(shown(pick.power(), "W"), "Np " + Figures.show(pick.powerNumber())),
                 new Item(shown(pick.torque(), "N m"), ""),
-                new Item(shown(pick.powerPerVolume(), "W/m3"), ""),
+                new Item(shown(pick.powerPerVolume(), "W/m³"), ""),
                 new Item(shown(MINUTE * state.speed(), "rev/min"),
                         Messages.bind(Messages.Strip_tipSpeed, Figures.show(state.tipSpeed()))),
                 new Item(Figures.show(state.reynolds()), pick.regime().map(ResultStrip::regime).orElse("")),
@@ -100,7 +105,7 @@ final class ResultStrip extends Composite {
                         Messages.bind(Messages.Strip_perRevolution, Figures.show(state.shearRateConstant()))),
                 new Item(shown(state.viscosity(), "Pa s"), Messages.Strip_atShearRate),
                 Double.isNaN(pick.pumping()) ? Item.NONE
-                        : new Item(shown(pick.pumping(), "m3/s"), pick.flowKind().map(ResultStrip::kind).orElse("")));
+                        : new Item(shown(pick.pumping(), "m³/s"), pick.flowKind().map(ResultStrip::kind).orElse("")));
     }
 
     private static String shown(double value, String unit) {

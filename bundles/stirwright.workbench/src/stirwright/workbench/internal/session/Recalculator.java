@@ -1,6 +1,5 @@
 package stirwright.workbench.internal.session;
 
-import java.util.concurrent.CancellationException;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
@@ -18,7 +17,9 @@ final class Recalculator implements AutoCloseable {
     private final AtomicLong newest = new AtomicLong();
     private final Executor ui;
     private final Consumer<Outcome> receiver;
-    private volatile CompletableFuture<Void> work = CompletableFuture.completedFuture(null);
+    /** The request whose outcome was delivered last, or given up by hand. */
+    private volatile long settled;
+    private volatile Throwable defect;
 
     /**
      * @param ui runs what touches widgets
@@ -31,31 +32,34 @@ final class Recalculator implements AutoCloseable {
 
     void request(Request request) {
         long mine = newest.incrementAndGet();
-        work = CompletableFuture.supplyAsync(() -> Calculation.of(request, () -> mine != newest.get()), worker)
-                .thenAcceptAsync(outcome -> {
-                    if (mine == newest.get()) {
-                        receiver.accept(outcome);
-                    }
-                }, ui);
+        CompletableFuture.supplyAsync(() -> Calculation.of(request, () -> mine != newest.get()), worker)
+                .whenCompleteAsync((outcome, failure) -> settle(mine, outcome, failure), ui);
     }
 
-    /** Whether the newest request is still being worked on. */
+    private void settle(long mine, Outcome outcome, Throwable failure) {
+        if (mine != newest.get()) {
+            return;
+        }
+        settled = mine;
+        defect = failure;
+        if (failure == null) {
+            receiver.accept(outcome);
+        }
+    }
+
+    /** Whether an outcome is still to come. */
     boolean busy() {
-        return !work.isDone();
+        return settled != newest.get();
     }
 
     /** Gives up what is being worked on; the last outcome stays. */
     void stop() {
-        newest.incrementAndGet();
+        settled = newest.incrementAndGet();
     }
 
-    /** What the newest request ended with that was not meant to happen; null when there is nothing of that kind. */
+    /** What ended the newest request instead of an outcome; null when nothing did. */
     Throwable defect() {
-        if (!work.isCompletedExceptionally()) {
-            return null;
-        }
-        Throwable cause = work.exceptionNow();
-        return cause instanceof CancellationException || cause.getCause() instanceof CancellationException ? null : cause;
+        return defect;
     }
 
     @Override

@@ -1,6 +1,7 @@
 package stirwright.workbench.internal.widgets;
 
 import java.util.List;
+import java.util.function.Consumer;
 import java.util.function.IntConsumer;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.layout.GridData;
@@ -14,8 +15,8 @@ import org.eclipse.swt.widgets.Text;
 /** A column of labelled fields: labels flush right, fields, units in grey. */
 public final class Form extends Composite {
     private static final int COLUMNS = 3;
-    private static final int LABEL_WIDTH = 28 * Looks.STEP;
-    private static final int UNIT_WIDTH = 12 * Looks.STEP;
+    private static final int LABEL_WIDTH = 29 * Looks.STEP;
+    private static final int UNIT_WIDTH = 14 * Looks.STEP;
     private static final int FIELD_WIDTH = 20 * Looks.STEP;
 
     private final Looks looks;
@@ -28,7 +29,7 @@ public final class Form extends Composite {
         GridLayout layout = new GridLayout(COLUMNS, false);
         layout.marginWidth = 3 * Looks.STEP;
         layout.marginHeight = 2 * Looks.STEP;
-        layout.verticalSpacing = Looks.STEP;
+        layout.verticalSpacing = Looks.STEP / 2;
         layout.horizontalSpacing = 2 * Looks.STEP;
         setLayout(layout);
     }
@@ -109,7 +110,7 @@ public final class Form extends Composite {
     }
 
     /** Something to switch on and off. */
-    public Button check(String words, boolean on, java.util.function.Consumer<Boolean> switched) {
+    public Button check(String words, boolean on, Consumer<Boolean> switched) {
         new Label(this, SWT.NONE);
         Button button = looks.onPage(new Button(this, SWT.CHECK));
         button.setText(words);

@@ -1,0 +1,45 @@
+package stirwright.workbench.internal.widgets;
+
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.GC;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Label;
+
+/** A label that ends in an ellipsis where its text does not fit; the whole text is its tooltip then. */
+public final class FittedLabel {
+    private final Label label;
+    private final Shortened shortened = new Shortened();
+    private String text = "";
+
+    public FittedLabel(Composite parent, Looks looks) {
+        label = looks.label(parent, SWT.NONE, "");
+        label.addListener(SWT.Resize, e -> fit());
+    }
+
+    public Label label() {
+        return label;
+    }
+
+    public void setText(String words) {
+        if (!words.equals(text)) {
+            text = words;
+            fit();
+        }
+    }
+
+    /** The whole text, shown or not. */
+    public String text() {
+        return text;
+    }
+
+    private void fit() {
+        GC gc = new GC(label);
+        gc.setFont(label.getFont());
+        String shown = shortened.fit(gc, text, label.getSize().x);
+        gc.dispose();
+        if (!label.getText().equals(shown)) {
+            label.setText(shown);
+        }
+        label.setToolTipText(shown.equals(text) ? null : text);
+    }
+}
