@@ -74,15 +74,15 @@ class ChartPixelsTest {
     void thePickIsThickerAndTheOutsideLighter(boolean dark) {
         Palette palette = dark ? Palette.dark() : Palette.light();
         window.view.setPalette(palette);
-        window.show(picture(level("pick", 69, 3, true), level("other", 31, 0, false)));
+        window.show(picture(level("pick", 65, 3, true), level("other", 35, 0, false)));
         Pixels pixels = pixels(palette);
-        double[] pick = thickness(pixels, 22, 38, 69, palette.accent());
+        double[] pick = thickness(pixels, 22, 28, 65, palette.accent());
         assertEquals(2.5, median(pick), 0.2);
         assertEquals(2.5, pick[0], 0.2, "solid: no gap");
         Color blue = CurveStyle.colour(0, false, palette);
-        assertEquals(1.25, median(thickness(pixels, 22, 38, 31, blue)), 0.2);
+        assertEquals(1.25, median(thickness(pixels, 22, 28, 35, blue)), 0.2);
 
-        double[] outside = thickness(pixels, 62, 78, 69, palette.accent());
+        double[] outside = thickness(pixels, 62, 68, 65, palette.accent());
         assertTrue(outside[outside.length - 1] < 2.5 * 0.45, () -> "at most 35 %: " + Arrays.toString(outside));
         assertTrue(outside[outside.length - 1] > 2.5 * 0.25, () -> "visible: " + Arrays.toString(outside));
         assertTrue(outside[0] < 2.5 * 0.1, () -> "dashed: " + Arrays.toString(outside));
@@ -90,30 +90,30 @@ class ChartPixelsTest {
 
     @Test
     void aHighlightedCurveIsStrongerUntilItIsNoMore() {
-        window.show(picture(level("other", 31, 0, false)));
+        window.show(picture(level("other", 35, 0, false)));
         Color blue = CurveStyle.colour(0, false, Palette.light());
         window.view.highlight("other");
         ChartDemo.settle(window.display);
-        assertEquals(2.5, median(thickness(pixels(Palette.light()), 22, 38, 31, blue)), 0.2);
+        assertEquals(2.5, median(thickness(pixels(Palette.light()), 22, 28, 35, blue)), 0.2);
         window.view.highlight(null);
         ChartDemo.settle(window.display);
-        assertEquals(1.25, median(thickness(pixels(Palette.light()), 22, 38, 31, blue)), 0.2);
+        assertEquals(1.25, median(thickness(pixels(Palette.light()), 22, 28, 35, blue)), 0.2);
     }
 
     @Test
     void aHiddenCurveIsGone() {
-        window.show(picture(level("pick", 69, 3, true), level("other", 31, 0, false)));
+        window.show(picture(level("pick", 65, 3, true), level("other", 35, 0, false)));
         window.view.setHidden(Set.of("other"));
         ChartDemo.settle(window.display);
         Pixels pixels = pixels(Palette.light());
-        assertEquals(0, pixels.inked(column(22), row(31) - 4, column(38), row(31) + 4));
-        assertTrue(pixels.inked(column(22), row(69) - 4, column(38), row(69) + 4) > 0);
+        assertEquals(0, pixels.inked(column(22), row(35) - 4, column(28), row(35) + 4));
+        assertTrue(pixels.inked(column(22), row(65) - 4, column(28), row(65) + 4) > 0);
     }
 
     @Test
     void theOperatingPointIsAHollowRingWithHairlines() {
         Mark mark = new Mark(50.7, 49.3, "x 50.7", "y 49.3");
-        window.show(new Picture(AXIS, AXIS, List.of(level("pick", 69, 3, true)), List.of(), Optional.of(mark), ""));
+        window.show(new Picture(AXIS, AXIS, List.of(level("pick", 65, 3, true)), List.of(), Optional.of(mark), ""));
         Pixels pixels = pixels(Palette.light());
         int x = column(50.7);
         int y = row(49.3);
@@ -127,12 +127,12 @@ class ChartPixelsTest {
 
     @Test
     void bandsAreFaint() {
-        window.show(new Picture(AXIS, AXIS, List.of(level("pick", 69, 3, true)),
+        window.show(new Picture(AXIS, AXIS, List.of(level("pick", 65, 3, true)),
                 List.of(new Band("laminar", Double.NEGATIVE_INFINITY, 35)), Optional.empty(), ""));
         Pixels pixels = pixels(Palette.light());
-        assertEquals(0.15, pixels.covered(column(30), row(15), Palette.light().quiet()), 0.01);
-        assertEquals(0, pixels.covered(column(50), row(15), Palette.light().quiet()), 0.01);
-        assertTrue(pixels.inked(column(36), row(99), column(70), row(92)) == 0, "no words beside the band");
+        assertEquals(0.15, pixels.covered(column(25), row(15), Palette.light().quiet()), 0.01);
+        assertEquals(0, pixels.covered(column(55), row(15), Palette.light().quiet()), 0.01);
+        assertTrue(pixels.inked(column(41), row(99), column(49), row(92)) == 0, "no words beside the band");
     }
 
     @Test
@@ -154,7 +154,7 @@ class ChartPixelsTest {
 
     @Test
     void anImageForAReportHasItsOwnSizeAndColours() {
-        window.show(picture(level("pick", 69, 3, true)));
+        window.show(picture(level("pick", 65, 3, true)));
         var data = window.view.image(600, 400, 2, Palette.dark());
         assertEquals(1200, data.width);
         assertEquals(800, data.height);

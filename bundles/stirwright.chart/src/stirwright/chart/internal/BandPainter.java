@@ -6,7 +6,7 @@ import org.eclipse.swt.graphics.Rectangle;
 import stirwright.chart.Band;
 import stirwright.chart.Palette;
 
-/** Paints the vertical bands: every other one is tinted, so that neighbours differ, and each has its words at the top. */
+/** Paints the vertical bands: every other one is tinted, so that neighbours differ, and each has its words above the plot. */
 final class BandPainter {
     private static final int AIR = 4;
 
@@ -33,7 +33,7 @@ final class BandPainter {
             int room = right(scene, band) - left;
             String words = room < 2 * AIR ? "" : Lettering.fit(gc, band.words(), room - 2 * AIR);
             if (!words.isEmpty()) {
-                gc.drawText(words, left + (room - Lettering.width(gc, words)) / 2, scene.plot.y + AIR, SWT.DRAW_TRANSPARENT);
+                gc.drawText(words, left + (room - Lettering.width(gc, words)) / 2, scene.plot.y - AIR - scene.type.height(), SWT.DRAW_TRANSPARENT);
             }
         }
     }
@@ -43,7 +43,7 @@ final class BandPainter {
         int left = left(scene, band);
         int room = right(scene, band) - left;
         if (room > 0) {
-            scene.hint(new Rectangle(left, scene.plot.y, room, scene.type.height() + 2 * AIR), band.words(),
+            scene.hint(new Rectangle(left, scene.plot.y - AIR - scene.type.height(), room, scene.type.height()), band.words(),
                     Lettering.fit(gc, band.words(), room - 2 * AIR), "");
         }
     }

@@ -107,14 +107,25 @@ final class CursorPainter {
         return mark < 0 ? number : number.substring(0, mark);
     }
 
-    /** Beside the line, on the side with room, at the height of the pointer and within the plot. */
+    /** Within the plot beside the line, at the height of the pointer; where that would hide the operating point, elsewhere. */
     private Rectangle place(int x, int width, int height) {
         Rectangle plot = scene.plot;
         int right = plot.x + plot.width - 2 - width;
-        int left = x + AWAY <= right ? x + AWAY : x - AWAY - width;
-        int top = (int) Math.round(cursor.y()) - height / 2;
-        return new Rectangle(Math.max(plot.x + 1, Math.min(right, left)), Math.max(plot.y + 1,
-                Math.min(plot.y + plot.height - 2 - height, top)), width, height);
+        int bottom = plot.y + plot.height - 2 - height;
+        int middle = Math.max(plot.y + 1, Math.min(bottom, (int) Math.round(cursor.y()) - height / 2));
+        int beside = x + AWAY <= right ? x + AWAY : Math.max(plot.x + 1, x - AWAY - width);
+        int other = beside > x && x - AWAY - width > plot.x ? x - AWAY - width : beside;
+        Rectangle first = new Rectangle(beside, middle, width, height);
+        for (int left : new int[] {beside, other}) {
+            for (int top : new int[] {middle, plot.y + 1, bottom}) {
+                Rectangle tried = new Rectangle(left, Math.max(plot.y + 1, top), width, height);
+                if (scene.mark == null || !tried.intersects(scene.markWords)
+                        && !tried.intersects(scene.mark.x - AWAY / 2, scene.mark.y - AWAY / 2, AWAY, AWAY)) {
+                    return tried;
+                }
+            }
+        }
+        return first;
     }
 
     private void box(GC gc, Rectangle box) {

@@ -9,6 +9,8 @@ import stirwright.chart.Palette;
 /** Paints the curves: what is outside a curve's range is lighter and finely dashed. */
 final class CurvePainter {
     private static final int APART = 112;
+    private static final int APART_IN_A_CROWD = 168;
+    private static final int CROWD = 12;
     private static final int SHIFT = 37;
     private static final LineAttributes MARKER_LINE = new LineAttributes(Strokes.THIN);
 
@@ -51,7 +53,8 @@ final class CurvePainter {
     private static void markers(GC gc, Scene scene, Trace trace) {
         Curve curve = trace.curve();
         Marker marker = Strokes.marker(curve.style());
-        double next = scene.plot.x + 24 + curve.style() * SHIFT % APART;
+        int apart = scene.traces.size() > CROWD ? APART_IN_A_CROWD : APART;
+        double next = scene.plot.x + 24 + curve.style() * SHIFT % apart;
         for (int i = 0; i < trace.count(); i++) {
             if (!trace.stands(i)) {
                 continue;
@@ -62,7 +65,7 @@ final class CurvePainter {
                 marker.draw(gc, Math.round(x), Math.round(trace.py(i)));
             }
             if (x >= next) {
-                next += Math.ceil((x - next + 1) / APART) * APART;
+                next += Math.ceil((x - next + 1) / apart) * apart;
             }
         }
     }

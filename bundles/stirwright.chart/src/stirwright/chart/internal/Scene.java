@@ -33,6 +33,9 @@ public final class Scene {
     final boolean empty;
     final String xTitle;
     final String yTitle;
+    /** Where the operating point is and where its words stand; null when it is not in view. */
+    final Point mark;
+    final Rectangle markWords;
 
     public Scene(GC gc, Lettering type, Point size, Picture picture, Set<String> hidden, Span spanX, Span spanY) {
         this.picture = picture;
@@ -41,7 +44,7 @@ public final class Scene {
         gc.setFont(type.plain());
         List<Curve> visible = visible(picture, hidden);
         empty = !Fit.anything(picture.curves(), spanX, spanY);
-        int top = EDGE + type.height() + GAP;
+        int top = EDGE + type.height() + GAP + (picture.bands().isEmpty() ? 0 : type.height() + GAP / 2);
         int bottom = Math.max(top + 1, size.y - EDGE - 2 * type.height() - GAP - GAP / 2);
         y = new Scale(spanY, bottom, top);
         yTicks = Ticks.of(y, TICK_GAP_Y);
@@ -61,6 +64,8 @@ public final class Scene {
         for (int i = 0; i < picture.bands().size(); i++) {
             BandPainter.hint(gc, this, picture.bands().get(i));
         }
+        mark = picture.operatingPoint().map(point -> MarkPainter.at(this, point)).orElse(null);
+        markWords = mark == null ? null : MarkPainter.place(gc, this, picture.operatingPoint().orElseThrow());
     }
 
     private static List<Curve> visible(Picture picture, Set<String> hidden) {

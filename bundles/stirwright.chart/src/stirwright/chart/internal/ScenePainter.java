@@ -10,7 +10,7 @@ import stirwright.chart.Palette;
 public final class ScenePainter {
     private ScenePainter() { }
 
-    /** Axes, titles and names. */
+    /** Axes, titles, names of bands and curves. */
     public static void frame(GC gc, Scene scene, Palette palette, String highlighted) {
         ready(gc, scene);
         gc.setBackground(palette.page());
@@ -19,6 +19,7 @@ public final class ScenePainter {
             message(gc, scene, palette);
         } else {
             AxisPainter.axes(gc, scene, palette);
+            BandPainter.words(gc, scene, palette);
             scene.column.paint(gc, palette, highlighted);
         }
     }
@@ -37,9 +38,10 @@ public final class ScenePainter {
         if (cursor != null) {
             AxisPainter.minor(gc, scene, palette, cursor.reading().x(), scene.y.value(cursor.y()));
         }
-        BandPainter.words(gc, scene, palette);
         CurvePainter.paint(gc, scene, palette, highlighted);
-        scene.picture.operatingPoint().ifPresent(mark -> MarkPainter.paint(gc, scene, palette, mark));
+        if (scene.mark != null) {
+            MarkPainter.paint(gc, scene, palette);
+        }
         if (cursor != null) {
             new CursorPainter(scene, palette, cursor).paint(gc);
         }
