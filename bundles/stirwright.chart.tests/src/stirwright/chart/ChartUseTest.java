@@ -85,6 +85,7 @@ class ChartUseTest {
         key(SWT.CR, '\r', 0);
         assertEquals(List.of("fall"), selected);
         key(SWT.ESC, (char) 0, 0);
+        assertTrue(Double.isNaN(last().x()) && last().values().isEmpty(), "the cursor has left");
         assertTrue(window.view.spokenWords().contains("2 curves"), window.view.spokenWords());
     }
 

@@ -70,7 +70,7 @@ public final class ChartView extends Composite {
         return board.zoomed();
     }
 
-    /** Tells what the curves say wherever the cursor goes. */
+    /** Tells what the curves say wherever the cursor goes; when it leaves, x is not a number and there are no values. */
     public void onPointed(Consumer<Reading> listener) {
         board.onPointed(listener);
     }

@@ -5,7 +5,7 @@ import java.util.List;
 /**
  * What the curves say at one x.
  *
- * @param x in values of the x axis
+ * @param x in values of the x axis; not a number when there is no cursor
  * @param values the visible curves that have a value there, the highest first
  */
 public record Reading(double x, List<At> values) {

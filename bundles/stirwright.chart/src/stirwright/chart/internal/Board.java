@@ -1,5 +1,7 @@
 package stirwright.chart.internal;
 
+import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import java.util.function.Consumer;
 import org.eclipse.swt.SWT;
@@ -21,6 +23,7 @@ import stirwright.chart.Reading;
 
 /** The state of a chart view and what changes it. The scene is made anew when it must be, painting only paints. */
 public final class Board {
+    private static final Reading NOWHERE = new Reading(Double.NaN, List.of());
     private final Chart chart;
     private final Control plotArea;
     private final Lettering type;
@@ -134,7 +137,7 @@ public final class Board {
     }
 
     public void highlight(String curveId) {
-        if (!java.util.Objects.equals(highlighted, curveId)) {
+        if (!Objects.equals(highlighted, curveId)) {
             highlighted = curveId;
             chart.redraw();
         }
@@ -155,15 +158,13 @@ public final class Board {
 
     /** Sets the cursor and tells who listens; null clears it. */
     public void point(Cursor next) {
-        if (java.util.Objects.equals(cursor, next)) {
+        if (Objects.equals(cursor, next)) {
             return;
         }
         cursor = next;
         plotArea.redraw();
         spoken.run();
-        if (next != null) {
-            pointed.accept(next.reading());
-        }
+        pointed.accept(next == null ? NOWHERE : next.reading());
     }
 
     /** The rectangle that the user draws; null for none. */

@@ -15,7 +15,7 @@ final class CursorPainter {
     private static final int SWATCH = 28;
     private static final int AWAY = 16;
     private static final int WIDEST_NAME = 200;
-    private static final int NARROWEST_NAME = 40;
+    private static final int READABLE_NAME = 120;
     private static final String DOUBT = "outside";
 
     private final Scene scene;
@@ -65,7 +65,8 @@ final class CursorPainter {
             doubt |= !values.get(i).inside();
         }
         int beside = SWATCH + 5 * PAD + front + back + (doubt ? PAD + Lettering.width(gc, DOUBT) : 0);
-        name = Math.min(name, Math.clamp(scene.plot.width / 2 - AWAY - beside, NARROWEST_NAME, WIDEST_NAME));
+        int half = scene.plot.width / 2 - AWAY - beside;
+        name = Math.min(name, Math.clamp(Math.max(half, Math.min(READABLE_NAME, scene.plot.width - 4 - beside)), 1, WIDEST_NAME));
         String head = Cursor.head(scene, cursor.reading());
         boolean part = end - first < values.size();
         String rest = values.isEmpty() ? "no curve here" : part ? "and " + (values.size() - end + first) + " more" : "";

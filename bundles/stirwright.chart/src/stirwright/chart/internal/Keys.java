@@ -14,8 +14,8 @@ public final class Keys {
     public Keys(Board board) {
         this.board = board;
         board.plotArea().addListener(SWT.KeyDown, this::pressed);
-        board.plotArea().addListener(SWT.Traverse, event -> event.doit = event.detail != SWT.TRAVERSE_ARROW_NEXT
-                && event.detail != SWT.TRAVERSE_ARROW_PREVIOUS && event.detail != SWT.TRAVERSE_RETURN);
+        board.plotArea().addListener(SWT.Traverse, event -> event.doit = event.detail == SWT.TRAVERSE_TAB_NEXT
+                || event.detail == SWT.TRAVERSE_TAB_PREVIOUS);
     }
 
     private void pressed(Event event) {
