@@ -20,6 +20,7 @@ import stirwright.conformance.JarRefusedException;
 import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
 import stirwright.correlation.Quantity;
+import stirwright.exchange.Demo;
 import stirwright.family.discturbine.DiscTurbine;
 import stirwright.family.pitchedblade.PitchedBlade;
 import stirwright.general.GeneralRelations;
@@ -126,9 +127,30 @@ class CommandLineTest {
         assertTrue(out.toString().contains("Cases: 4 ok, 1 flagged, 0 refused."), out.toString());
         String kept = out.toString().lines().filter(l -> l.startsWith("Everything in this demo")).findFirst().orElseThrow();
         Path files = Path.of(kept.substring(kept.lastIndexOf(": ") + 2));
-        for (String name : List.of("glaze-slip.csv", "results.csv", "results.json", "candidates.csv")) {
+        for (String name : List.of("glaze-slip.csv", "glaze-slip.stir", "results.csv", "results.json", "candidates.csv")) {
             assertTrue(Files.size(files.resolve(name)) > 0, name);
         }
+    }
+
+    @Test
+    void aStudyIsCrossCheckedLikeATable() throws IOException {
+        Path study = Demo.copyTo(folder);
+        assertEquals(1, run("crosscheck", study.resolveSibling(Demo.TABLE).toString()), err::toString);
+        String ofTable = out.toString();
+        out.getBuffer().setLength(0);
+        assertEquals(1, run("crosscheck", study.toString()), err::toString);
+        assertEquals(ofTable, out.toString());
+    }
+
+    @Test
+    void aRefusedCaseOfAStudyIsNamed() throws IOException {
+        Path study = Demo.copyTo(folder);
+        Files.writeString(study, Files.readString(study).replace(" vessel=\"vessel-1\" impeller=\"impeller-2\"", ""));
+        assertEquals(2, run("crosscheck", study.toString()));
+        assertTrue(err.toString().contains("glaze-slip.stir case 4 (case 'hold-pitched'): vessel is missing"), err.toString());
+        Files.writeString(study, Files.readString(study).replace("</study:Study>", ""));
+        assertEquals(3, run("crosscheck", study.toString()));
+        assertTrue(err.toString().contains("glaze-slip.stir: line "), err.toString());
     }
 
     @Test
