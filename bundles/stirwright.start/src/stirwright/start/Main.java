@@ -4,10 +4,14 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Arrays;
+import java.util.Optional;
 import org.eclipse.core.runtime.adaptor.EclipseStarter;
+import org.osgi.framework.Bundle;
+import org.osgi.framework.BundleContext;
 
 /**
- * Starts the framework, runs the application that the configuration names and ends the process with its exit code.
+ * Starts the framework, runs the application that the arguments ask for and ends the process with its exit code.
  * The platform's own launcher is not used: it takes arguments such as {@code -debug} for itself and reports its
  * errors on standard output, where only results may stand.
  */
@@ -26,9 +30,21 @@ public final class Main {
     // EclipseStarter is marked as internal, yet it is what the platform's own launcher calls.
     @SuppressWarnings("restriction")
     private static int run(String[] arguments) {
+        Way way = Way.of(arguments);
+        Optional<String> obstacle = way.obstacle(System.getProperty("os.name"), System.getenv());
+        if (obstacle.isPresent()) {
+            System.err.println("stirwright: " + obstacle.get());
+            return UNUSABLE;
+        }
+        System.setProperty("eclipse.application", way.application());
+        way.product().ifPresent(product -> System.setProperty("eclipse.product", product));
         try {
-            EclipseStarter.startup(new String[0], null);
+            BundleContext bundles = EclipseStarter.startup(new String[0], null);
             try {
+                if (!usable(way.bundle(), bundles)) {
+                    System.err.println("stirwright: " + way.missing());
+                    return UNUSABLE;
+                }
                 return EclipseStarter.run(arguments) instanceof Integer code ? code : 0;
             } finally {
                 EclipseStarter.shutdown();
@@ -39,6 +55,11 @@ public final class Main {
             System.err.println("stirwright: could not be started: " + failure + kept(failure));
             return UNUSABLE;
         }
+    }
+
+    private static boolean usable(String name, BundleContext bundles) {
+        return Arrays.stream(bundles.getBundles())
+                .anyMatch(bundle -> name.equals(bundle.getSymbolicName()) && bundle.getState() >= Bundle.RESOLVED);
     }
 
     /** Keeps the details in a file, since they mean nothing to the user. */

@@ -15,10 +15,11 @@ import stirwright.exchange.UnusableFileException;
 /** All commands, and what happens when one cannot go on: one line, an exit code, no stack trace. */
 final class Commands {
 
-    /** The root: without a command it says what there is. */
+    /** The root: without a command it says what there is, where no window opened before it was asked. */
     @Command(name = "stirwright", usageHelpWidth = 100, descriptionHeading = "%n", commandListHeading = "%nCommands:%n",
             description = "From a flow curve and a vessel to a defended choice of correlation: shear rate, power,"
-                    + " torque and pumping by every correlation that is installed, side by side.",
+                    + " torque and pumping by every correlation that is installed, side by side. Alone it opens the"
+                    + " window; with a command it needs no display.",
             footerHeading = "%n",
             footer = {
                 "Exit code: 0 all ok, 1 something flagged, 2 something refused, 3 the command line or a file could not"
@@ -31,6 +32,7 @@ final class Commands {
 
     static int run(Desk desk, String... arguments) {
         CommandLine line = new CommandLine(new Root())
+                .addSubcommand(new OpenCommand(desk))
                 .addSubcommand(new CrosscheckCommand(desk))
                 .addSubcommand(new CandidatesCommand(desk))
                 .addSubcommand(new FitCommand(desk))

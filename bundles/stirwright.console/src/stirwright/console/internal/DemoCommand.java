@@ -4,11 +4,15 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
 import stirwright.exchange.Demo;
 
 @Command(name = "demo", description = "Cross-checks an invented scenario and keeps its files, to start from.")
 final class DemoCommand implements Callable<Integer> {
     private final Desk desk;
+
+    @Option(names = "--window", description = "opens the demo study in the window; takes nothing beside it")
+    private boolean window;
 
     DemoCommand(Desk desk) {
         this.desk = desk;
@@ -16,6 +20,9 @@ final class DemoCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        if (window) {
+            return OpenCommand.notHere(desk, "demo --window");
+        }
         Path folder = Path.of(System.getProperty("java.io.tmpdir"), "stirwright-demo-" + System.getProperty("user.name"));
         Demo.copyTo(folder);
         new CrosscheckRun(desk).run(folder.resolve(Demo.TABLE), List.of(folder.resolve("results.csv"), folder.resolve("results.json")),
