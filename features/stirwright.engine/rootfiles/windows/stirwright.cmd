@@ -5,7 +5,8 @@ setlocal EnableExtensions DisableDelayedExpansion
 
 set "home=%~dp0"
 set "home=%home:~0,-1%"
-set "arguments=%*"
+set "alone="
+if [%1]==[] set "alone=yes"
 
 call :find_java
 if not defined java (
@@ -38,12 +39,12 @@ mkdir "%run%" 2>nul || goto take
 
 rem Which starts open the window is decided by stirwright.start.Way; what stands here only sets the JVM up for it.
 set "kind=console"
-if "%~1"=="" set "kind=window"
+if defined alone set "kind=window"
 if "%~1"=="open" if "%~3"=="" set "kind=window"
 if "%~1"=="demo" if "%~2"=="--window" if "%~3"=="" set "kind=window"
 
 rem See the start script of the other platforms for the reasons of these.
-if %kind%==console set "flags=-XX:TieredStopAtLevel=1 -Xms128m -Xmn96m -Xmx320m"
+if %kind%==console set "flags=-Xms128m -Xmn96m -Xmx320m"
 if %kind%==window set "flags=-Xms96m -Xmx1g"
 if %kind%==window if %version% GEQ 24 set "flags=%flags% --enable-native-access=ALL-UNNAMED"
 
@@ -54,11 +55,11 @@ set "key=%key:~-60%-%version%-%kind%"
 
 rem Without arguments, as from the desktop, no console stays open behind the window.
 set "begin="
-if not defined arguments (
+if defined alone (
   set "begin=start "Stirwright" /b"
   set "java=%java:java.exe=javaw.exe%"
 )
-%begin% "%java%" -XX:+IgnoreUnrecognizedVMOptions -Xlog:disable -XX:+UseSerialGC %flags% ^
+%begin% "%java%" -XX:+IgnoreUnrecognizedVMOptions -Xlog:disable -XX:+UseSerialGC -XX:TieredStopAtLevel=1 %flags% ^
   -XX:+AutoCreateSharedArchive "-XX:SharedArchiveFile=%own%\%key%.jsa" ^
   "-Dosgi.install.area=%home%/" "-Dosgi.framework=%framework%" ^
   "-Dosgi.sharedConfiguration.area=%home%/configuration/" "-Dosgi.configuration.area=%run%/" ^
@@ -68,7 +69,7 @@ exit /b %ERRORLEVEL%
 
 :fail
 echo stirwright: %problem% 1>&2
-if not defined arguments pause
+if defined alone pause
 exit /b 3
 
 rem Sets java and version to the first Java that is new enough.
@@ -88,24 +89,23 @@ rem The release file is read because asking Java itself takes longer.
 :try
 if defined java exit /b
 if not exist "%~1\bin\java.exe" exit /b
-set "version="
-if exist "%~1\release" for /f "usebackq tokens=1,2 delims==." %%K in ("%~1\release") do (
-  if "%%K"=="JAVA_VERSION" set "version=%%~L"
+set "version=0"
+if exist "%~1\release" for /f "usebackq tokens=1,2 delims==.-" %%K in ("%~1\release") do (
+  if "%%K"=="JAVA_VERSION" set "version=%%L"
 )
-if defined version set "version=%version:"=%"
-if defined version if %version% GEQ 21 set "java=%~1\bin\java.exe"
+set "version=%version:"=%"
+if %version% GEQ 21 set "java=%~1\bin\java.exe"
 exit /b
 
-rem A java.exe on the path may stand alone, without a release file beside its folder.
+rem A java.exe on the path may stand alone, without a release file above its folder.
 :try_program
 if defined java exit /b
 for %%H in ("%~dp1..") do if exist "%%~fH\release" (
   call :try "%%~fH"
   exit /b
 )
-set "version="
-for /f "tokens=3" %%V in ('""%~1" -version 2>&1"') do if not defined version set "version=%%~V"
-if not defined version exit /b
-for /f "delims=." %%V in ("%version%") do set "version=%%V"
+set "version=0"
+for /f "tokens=2,3" %%K in ('call "%~1" -version 2^>^&1') do if "%%K"=="version" set "version=%%~L"
+for /f "delims=.-" %%V in ("%version%") do set "version=%%V"
 if %version% GEQ 21 set "java=%~1"
 exit /b

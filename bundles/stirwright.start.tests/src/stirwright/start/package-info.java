@@ -1,0 +1,2 @@
+/** Tests of the choice between the window and the command line. */
+package stirwright.start;
