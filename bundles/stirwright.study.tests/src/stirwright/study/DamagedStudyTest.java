@@ -72,14 +72,16 @@ class DamagedStudyTest {
     @Test
     void wrongValues() throws IOException {
         for (String value : new String[] {"much", "NaN", "Infinity", "1d", "0x1p3", "1,5", "1e999", ""}) {
-            refused(with("value=\"1035\"", "value=\"" + value + "\""), line("value=\"1035\""), "value '" + value + "'");
+            refused(with("value=\"1035\"", "value=\"" + value + "\""), line("value=\"1035\""), "'" + value + "' as value", "number");
         }
     }
 
     @Test
     void danglingReferences() throws IOException {
         refused(with("fluid=\"fluid-1\"", "fluid=\"fluid-7\""), "fluid-7", "not in the study", "line ");
-        refused(with("fluid=\"fluid-1\"", "fluid=\"vessel-1\""), "fluid");
+        refused(with("fluid=\"fluid-1\"", "fluid=\"vessel-1\""), "vessel 'kettle' as fluid", "a fluid belongs");
+        refused(with("impeller=\"impeller-1\"", "impeller=\"vessel-1\""), "an impeller belongs");
+        refused(with("<vessels ", "<fluids xmi:id=\"fluid-1\" name=\"twin\"/>\n  <vessels "), "fluid 'twin'", "'fluid-1'", "another");
     }
 
     @Test

@@ -10,15 +10,23 @@ import stirwright.study.Pick;
 /** What to call an element of a study in a message. */
 final class Places {
 
+    private static final int MOST_SHOWN = 40;
+
     private Places() {}
 
     static String of(EObject object) {
         return switch (object) {
-            case Part part -> object.eClass().getName().toLowerCase(Locale.ROOT) + " '" + part.getName() + "'";
-            case Case one -> "case '" + one.getName() + "'";
-            case Amount amount -> "amount '" + amount.getColumn() + "' of " + of(amount.eContainer());
-            case Pick pick -> "pick '" + pick.getQuantity() + "' of " + of(pick.eContainer());
+            case Part part -> object.eClass().getName().toLowerCase(Locale.ROOT) + " " + quote(part.getName());
+            case Case one -> "case " + quote(one.getName());
+            case Amount amount -> "amount " + quote(amount.getColumn()) + " of " + of(amount.eContainer());
+            case Pick pick -> "pick " + quote(pick.getQuantity()) + " of " + of(pick.eContainer());
             default -> "the study";
         };
+    }
+
+    /** In quotes, and not longer than a message can bear. */
+    static String quote(String text) {
+        String whole = text == null ? "" : text;
+        return "'" + (whole.length() <= MOST_SHOWN ? whole : whole.substring(0, MOST_SHOWN - 1) + "…") + "'";
     }
 }

@@ -2,6 +2,10 @@ package stirwright.study.internal;
 
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EReference;
+import org.eclipse.emf.ecore.EStructuralFeature;
 import org.eclipse.emf.ecore.resource.Resource.Diagnostic;
 import org.eclipse.emf.ecore.xmi.ClassNotFoundException;
 import org.eclipse.emf.ecore.xmi.FeatureNotFoundException;
@@ -9,6 +13,7 @@ import org.eclipse.emf.ecore.xmi.IllegalValueException;
 import org.eclipse.emf.ecore.xmi.PackageNotFoundException;
 import org.eclipse.emf.ecore.xmi.UnresolvedReferenceException;
 import org.xml.sax.SAXParseException;
+import stirwright.study.StudyPackage;
 
 /** The first thing that kept a file from being read, in words. */
 final class ReadProblems {
@@ -57,14 +62,24 @@ final class ReadProblems {
 
     private static String words(Diagnostic error) {
         return switch (error) {
-            case FeatureNotFoundException feature -> "has '" + feature.getName() + "'" + NEWER;
-            case ClassNotFoundException type -> "has '" + type.getName() + "'" + NEWER;
-            case PackageNotFoundException namespace -> "has something of '" + namespace.uri() + "'" + NEWER;
-            case UnresolvedReferenceException reference -> "refers to '" + reference.getReference()
-                    + "', which is not in the study; name one that is";
-            case IllegalValueException value -> "has the " + value.getFeature().getName() + " '" + value.getValue()
-                    + "', which does not do there; write another";
+            case FeatureNotFoundException feature -> "has " + Places.quote(feature.getName()) + NEWER;
+            case ClassNotFoundException type -> "has " + Places.quote(type.getName()) + NEWER;
+            case PackageNotFoundException namespace -> "has something of " + Places.quote(namespace.uri()) + NEWER;
+            case UnresolvedReferenceException reference -> "refers to " + Places.quote(reference.getReference())
+                    + ", which is not in the study; name one that is";
+            case IllegalValueException value -> value(value.getFeature(), value.getValue());
             default -> "cannot be read (" + error.getMessage() + "); mend the line or take a copy of the file";
         };
+    }
+
+    private static String value(EStructuralFeature feature, Object value) {
+        String allowed = feature instanceof EReference ? withArticle(feature.getEType().getName().toLowerCase(Locale.ROOT))
+                : "a plain number such as " + (feature.getEType() == StudyPackage.Literals.NUMBER ? "0.25" : "1");
+        String shown = value instanceof EObject object ? Places.of(object) : Places.quote(String.valueOf(value));
+        return "has " + shown + " as " + feature.getName() + ", where " + allowed + " belongs; write one";
+    }
+
+    private static String withArticle(String noun) {
+        return ("aeiou".indexOf(noun.charAt(0)) < 0 ? "a " : "an ") + noun;
     }
 }

@@ -2,10 +2,12 @@ package stirwright.study.internal;
 
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
+import java.util.HashSet;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.ecore.resource.Resource.Diagnostic;
@@ -47,6 +49,7 @@ public final class StudyReader {
                     + "\" into its first element if it is one of this version");
         }
         requireWhole(study.get());
+        requireOwnIds(resource, study.get());
         resource.getContents().clear();
         return study.get();
     }
@@ -65,6 +68,18 @@ public final class StudyReader {
                     throw new NoStudyException("the " + reference.getName() + " of " + Places.of(object)
                             + " is not in the study; name one that is");
                 }
+            }
+        }
+    }
+
+    /** Of two elements with one id, a case would get whichever comes last. */
+    private static void requireOwnIds(StudyResource resource, Study study) throws NoStudyException {
+        Set<String> taken = new HashSet<>();
+        for (EObject element : study.eContents()) {
+            String id = resource.getID(element);
+            if (id != null && !taken.add(id)) {
+                throw new NoStudyException(Places.of(element) + " has the id " + Places.quote(id)
+                        + " of another; give it one of its own, also where cases name it");
             }
         }
     }

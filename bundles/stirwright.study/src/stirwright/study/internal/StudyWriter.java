@@ -19,9 +19,9 @@ public final class StudyWriter {
     public static byte[] bytes(Study study, int format) throws NoStudyException {
         Texts.requireWritable(study);
         for (Case one : study.getCases()) {
-            requireHome(study, one, "fluid", one.getFluid());
-            requireHome(study, one, "vessel", one.getVessel());
-            requireHome(study, one, "impeller", one.getImpeller());
+            requireHome(study, one, one.getFluid());
+            requireHome(study, one, one.getVessel());
+            requireHome(study, one, one.getImpeller());
         }
         Study copy = EcoreUtil.copy(study);
         copy.eSet(StudyPackage.eINSTANCE.getStudy_Format(), format);
@@ -39,10 +39,10 @@ public final class StudyWriter {
         return out.toByteArray();
     }
 
-    private static void requireHome(Study study, Case user, String what, Part part) throws NoStudyException {
+    private static void requireHome(Study study, Case user, Part part) throws NoStudyException {
         if (part != null && part.eContainer() != study) {
-            throw new NoStudyException("case '" + user.getName() + "' uses " + what + " '" + part.getName()
-                    + "', which is not in the study; add it or pick another");
+            throw new NoStudyException(Places.of(user) + " uses " + Places.of(part)
+                    + ", which is not in the study; add it or pick another");
         }
     }
 
