@@ -197,6 +197,14 @@ class CommandLineTest {
         assertTrue(out.toString().contains("--candidates"), out.toString());
     }
 
+    @Test
+    void windowIsInTheHelpAndOpensWithNothingElseOnTheLine() {
+        assertEquals(0, run("help"));
+        assertTrue(out.toString().contains("Alone it opens the") && out.toString().contains("  open "), out::toString);
+        assertEquals(3, run("open", "--", "mud.study"));
+        assertTrue(err.toString().contains("'stirwright open mud.study' and nothing else"), err::toString);
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"crosschek", "crosscheck", "crosscheck a b", "crosscheck a --nonsense", "help nonsense",
             "candidates --out", "fit", "check", "check some.jar", "--nonsense"})
