@@ -16,7 +16,10 @@ if not defined java (
 set "framework="
 for %%F in ("%home%\plugins\org.eclipse.osgi_*.jar") do set "framework=%%~fF"
 set "starter="
-for %%F in ("%home%\plugins\stirwright.start_*.jar") do set "starter=%%~fF"
+for %%F in ("%home%\plugins\stirwright.start_*.jar") do (
+  set "starter=%%~fF"
+  set "build=%%~nF"
+)
 set "problem=the installation is not complete; unpack it again"
 if not defined framework goto fail
 if not defined starter goto fail
@@ -48,10 +51,10 @@ if %kind%==console set "flags=-Xms128m -Xmn96m -Xmx320m"
 if %kind%==window set "flags=-Xms96m -Xmx1g"
 if %kind%==window if %version% GEQ 24 set "flags=%flags% --enable-native-access=ALL-UNNAMED"
 
-rem The class archive fits one installation and one Java only.
+rem A class archive fits one Java and one build (the starter's name has its time) of one installation.
 set "key=%home:\=-%"
 set "key=%key::=%"
-set "key=%key:~-60%-%version%-%kind%"
+set "key=%key:~-40%-%build%-%version%-%kind%"
 
 rem Without arguments, as from the desktop, no console stays open behind the window.
 set "begin="
