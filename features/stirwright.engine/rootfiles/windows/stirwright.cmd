@@ -66,7 +66,7 @@ if defined alone (
   -XX:+AutoCreateSharedArchive "-XX:SharedArchiveFile=%own%\%key%.jsa" ^
   "-Dosgi.install.area=%home%/" "-Dosgi.framework=%framework%" ^
   "-Dosgi.sharedConfiguration.area=%home%/configuration/" "-Dosgi.configuration.area=%run%/" ^
-  "-Dosgi.logfile=%own%\stirwright.log" "-Dfelix.fileinstall.dir=%home%\families" ^
+  "-Dosgi.instance.area=@none" "-Dosgi.logfile=%own%\stirwright.log" ^
   -cp "%framework%;%starter%" stirwright.start.Main %* 9>"%run%.lock"
 exit /b %ERRORLEVEL%
 

@@ -22,9 +22,13 @@ class ChartNamesTest {
     private final Lettering type = new Lettering(display, display.getSystemFont());
 
     private Scene scene(Picture picture, int width, int height) {
+        return scene(picture, width, height, true);
+    }
+
+    private Scene scene(Picture picture, int width, int height, boolean legend) {
         GC gc = new GC(display);
         try {
-            return new Scene(gc, type, new Point(width, height), picture, Set.of(), new Span(true, 1, 1e6), new Span(true, 0.1, 100));
+            return new Scene(gc, type, new Point(width, height), picture, Set.of(), legend, new Span(true, 1, 1e6), new Span(true, 0.1, 100));
         } finally {
             gc.dispose();
         }
@@ -52,6 +56,19 @@ class ChartNamesTest {
         assertEquals("d", hint.curveId());
         assertNull(scene.hintAt(300, 200));
         scene.dispose();
+    }
+
+    @Test
+    void withoutALegendManyCurvesLeaveThePlotItsRoom() {
+        Scene with = scene(Invented.many(25), 900, 600);
+        Scene without = scene(Invented.many(25), 900, 600, false);
+        assertEquals(List.of(), without.labels());
+        assertTrue(without.plot().width > with.plot().width + 100, () -> with.plot() + " and " + without.plot());
+        Scene few = scene(Invented.few(), 900, 600, false);
+        assertEquals(5, few.labels().size(), "few curves keep the names at their ends");
+        with.dispose();
+        without.dispose();
+        few.dispose();
     }
 
     @Test

@@ -52,6 +52,15 @@ public final class ChartView extends Composite {
         board.hide(curveIds);
     }
 
+    /**
+     * Whether more curves than can be named at their ends get a legend beside the plot; they do until told otherwise. Without,
+     * the plot has its room, as where a table with {@link CurveStyle#paintSwatch swatches} stands beside the chart.
+     */
+    public void setLegend(boolean shown) {
+        checkWidget();
+        board.legend(shown);
+    }
+
     /** Changes the colours. */
     public void setPalette(Palette palette) {
         checkWidget();

@@ -30,6 +30,7 @@ public final class Board {
     private Palette palette;
     private Picture picture = Picture.empty("");
     private Set<String> hidden = Set.of();
+    private boolean legend = true;
     private String highlighted;
     private Span spanX = new Span(false, 0, 1);
     private Span spanY = new Span(false, 0, 1);
@@ -71,7 +72,7 @@ public final class Board {
         if (scene == null) {
             Point size = chart.getSize();
             GC gc = new GC(chart);
-            scene = new Scene(gc, type, new Point(Math.max(1, size.x), Math.max(1, size.y)), picture, hidden, spanX, spanY);
+            scene = new Scene(gc, type, new Point(Math.max(1, size.x), Math.max(1, size.y)), picture, hidden, legend, spanX, spanY);
             gc.dispose();
         }
         return scene;
@@ -203,6 +204,14 @@ public final class Board {
         return plotArea;
     }
 
+    /** Whether curves that are too many for names at their ends get a legend. */
+    public void legend(boolean shown) {
+        if (legend != shown) {
+            legend = shown;
+            rebuild();
+        }
+    }
+
     private void paintPlot(GC gc) {
         if (scene().empty()) {
             return;
@@ -215,7 +224,7 @@ public final class Board {
         gc.setLineWidth(1);
         if (rubber != null) {
             gc.setBackground(palette.accent());
-            gc.setAlpha(Strokes.BAND_ALPHA);
+            gc.setAlpha(Strokes.RUBBER_ALPHA);
             gc.fillRectangle(rubber);
             gc.setAlpha(255);
             gc.drawRectangle(rubber);
@@ -233,7 +242,7 @@ public final class Board {
         GC gc = new GC(image);
         Transform larger = new Transform(gc.getDevice(), (float) dots, 0, 0, (float) dots, 0, 0);
         gc.setTransform(larger);
-        Scene other = new Scene(gc, type, new Point(width, height), picture, hidden, spanX, spanY);
+        Scene other = new Scene(gc, type, new Point(width, height), picture, hidden, legend, spanX, spanY);
         ScenePainter.frame(gc, other, colours, highlighted);
         gc.setClipping(other.plot());
         ScenePainter.plot(gc, other, colours, highlighted, null);

@@ -32,13 +32,18 @@ final class Column {
             width = Math.max(width, Lettering.width(gc, curve.label()));
         }
         gc.setFont(type.plain());
-        return curves.isEmpty() ? 0 : Math.min(most, width + (curves.size() <= FEW ? LEADER : GAP + SWATCH + GAP));
+        return curves.isEmpty() ? 0 : Math.min(most, width + (direct(curves.size()) ? LEADER : GAP + SWATCH + GAP));
     }
 
-    Column(GC gc, Scene scene, int width) {
+    /** Whether so many curves are named at their ends. */
+    static boolean direct(int curves) {
+        return curves <= FEW;
+    }
+
+    Column(GC gc, Scene scene, List<Trace> traces, int width) {
         this.scene = scene;
-        direct = scene.traces.size() <= FEW;
-        List<Trace> inView = scene.traces.stream().filter(trace -> !direct || !Double.isNaN(trace.endY()))
+        direct = direct(traces.size());
+        List<Trace> inView = traces.stream().filter(trace -> !direct || !Double.isNaN(trace.endY()))
                 .sorted(Comparator.comparingDouble(trace -> Double.isNaN(trace.endY()) ? Double.MAX_VALUE : trace.endY())).toList();
         int row = scene.type.height() + 2;
         int x = scene.plot.x + scene.plot.width + (direct ? LEADER : GAP + SWATCH + GAP);

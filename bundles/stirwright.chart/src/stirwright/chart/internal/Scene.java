@@ -37,7 +37,7 @@ public final class Scene {
     final Point mark;
     final Rectangle markWords;
 
-    public Scene(GC gc, Lettering type, Point size, Picture picture, Set<String> hidden, Span spanX, Span spanY) {
+    public Scene(GC gc, Lettering type, Point size, Picture picture, Set<String> hidden, boolean legend, Span spanX, Span spanY) {
         this.picture = picture;
         this.type = type;
         this.size = size;
@@ -49,7 +49,8 @@ public final class Scene {
         y = new Scale(spanY, bottom, top);
         yTicks = Ticks.of(y, TICK_GAP_Y);
         int left = EDGE + Math.ceilDiv(widest(gc, yTicks), GAP) * GAP + GAP;
-        int columnWidth = Column.width(gc, type, visible, size.x * 3 / 10);
+        boolean named = legend || Column.direct(visible.size());
+        int columnWidth = named ? Column.width(gc, type, visible, size.x * 3 / 10) : 0;
         int right = Math.max(left + 1, size.x - EDGE - columnWidth);
         plot = new Rectangle(left, top, right - left, bottom - top);
         x = new Scale(spanX, left, right);
@@ -58,7 +59,7 @@ public final class Scene {
         for (Curve curve : visible) {
             traces.add(new Trace(gc.getDevice(), curve, x, y, clip));
         }
-        column = new Column(gc, this, size.x - EDGE - right);
+        column = new Column(gc, this, named ? traces : List.of(), size.x - EDGE - right);
         yTitle = title(gc, picture.y().words(), EDGE, EDGE, size.x - 2 * EDGE);
         xTitle = title(gc, picture.x().words(), left, size.y - EDGE - type.height(), right - left);
         for (int i = 0; i < picture.bands().size(); i++) {

@@ -15,8 +15,10 @@ public final class Strokes {
     public static final float PICK = 2.5f;
     /** Opacity of 255 for the part outside a curve's range: 35 %. */
     public static final int OUTSIDE_ALPHA = 89;
-    /** Opacity of 255 for bands: 15 %. */
-    public static final int BAND_ALPHA = 38;
+    /** Opacity of 255 for the rectangle that a zoom is drawn with: 15 %. */
+    public static final int RUBBER_ALPHA = 38;
+    /** Opacity of 255 for bands behind the curves: 6 %, so that they stay behind them. */
+    public static final int BAND_ALPHA = 15;
 
     /** Finer than the dashes of any style. */
     private static final float[] OUTSIDE = {2, 2.5f};

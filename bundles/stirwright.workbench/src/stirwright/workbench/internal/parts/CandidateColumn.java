@@ -14,13 +14,13 @@ import stirwright.workbench.internal.session.View;
 
 /** The columns of the candidates, with how each is read and sorted. */
 enum CandidateColumn {
-    CANDIDATE(30, Row::title),
+    CANDIDATE(28, Row::title),
     FAMILY(18, Row::familyTitle),
-    VALUE(11, Row::value, v -> Figures.show(v)),
-    POWER(12, Row::power, v -> Figures.show(v)),
-    TORQUE(12, Row::torque, v -> Figures.show(v)),
+    VALUE(13, Row::value, v -> Figures.show(v)),
+    POWER(15, Row::power, v -> Figures.show(v)),
+    TORQUE(18, Row::torque, v -> Figures.show(v)),
     DEVIATION(11, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
-    VERDICT(42, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
+    VERDICT(40, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
     SOURCE(26, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
     GRADE(22, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
 

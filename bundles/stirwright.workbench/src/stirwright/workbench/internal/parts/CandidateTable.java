@@ -57,8 +57,8 @@ final class CandidateTable extends Composite {
         table.setBackground(looks.palette().surface());
         table.setForeground(looks.palette().text());
         table.addListener(SWT.Selection, this::selected);
-        table.addListener(SWT.PaintItem, this::paintSwatch);
-        table.addListener(SWT.EraseItem, this::paintSelection);
+        table.addListener(SWT.PaintItem, this::paintCell);
+        table.addListener(SWT.EraseItem, this::erase);
         table.addListener(SWT.MouseHover, this::tip);
         table.addListener(SWT.Resize, e -> {
             fit();
@@ -90,7 +90,6 @@ final class CandidateTable extends Composite {
             Row row = rows.get(r);
             item.setData(row);
             item.setFont(row.pick() ? strong : null);
-            item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, colour(row.verdict()));
         }
         table.setRedraw(true);
         showSelection();
@@ -150,6 +149,8 @@ final class CandidateTable extends Composite {
         List<CandidateColumn> wanted = Arrays.stream(CandidateColumn.values())
                 .filter(c -> c.shownIn(outcome.view(), outcome.sheets().size() > 1, table.getClientArea().width)).toList();
         if (!wanted.equals(columns)) {
+            // Items would carry the texts of the old columns over.
+            table.removeAll();
             for (TableColumn old : table.getColumns()) {
                 old.dispose();
             }
@@ -215,22 +216,36 @@ final class CandidateTable extends Composite {
         }
     }
 
-    /** The selection in the window's own quiet colour, so that the words keep theirs. */
-    private void paintSelection(Event event) {
+    /** The selection in the window's own quiet colour, so that the words keep theirs; the verdict is painted below. */
+    private void erase(Event event) {
         if ((event.detail & SWT.SELECTED) != 0) {
             event.gc.setBackground(looks.selection());
             event.gc.fillRectangle(0, event.y, table.getClientArea().width, event.height);
             event.detail &= ~(SWT.SELECTED | SWT.HOT);
             event.gc.setForeground(looks.palette().text());
         }
+        if (event.index == columns.indexOf(CandidateColumn.VERDICT) + 1) {
+            event.detail &= ~SWT.FOREGROUND;
+        }
     }
 
-    private void paintSwatch(Event event) {
-        if (event.index == 0 && event.item.getData() instanceof Row row) {
-            Rectangle cell = ((TableItem) event.item).getBounds(0);
+    /** What the system cannot show in a cell: the curve's swatch, and (with GTK) a colour for one cell's words. */
+    private void paintCell(Event event) {
+        if (!(event.item.getData() instanceof Row row)) {
+            return;
+        }
+        TableItem item = (TableItem) event.item;
+        if (event.index == 0) {
+            Rectangle cell = item.getBounds(0);
             CurveStyle.paintSwatch(event.gc,
                     new Rectangle(cell.x + 2, cell.y, SWATCH_WIDTH - SWATCH_INSET - Looks.STEP, cell.height), row.style(),
                     row.pick(), looks.palette());
+        } else if (event.index == columns.indexOf(CandidateColumn.VERDICT) + 1) {
+            Rectangle place = item.getTextBounds(event.index);
+            event.gc.setFont(row.pick() ? strong : looks.small());
+            event.gc.setForeground(colour(row.verdict()));
+            int height = event.gc.getFontMetrics().getHeight();
+            event.gc.drawText(item.getText(event.index), place.x, place.y + (place.height - height) / 2, true);
         }
     }
 

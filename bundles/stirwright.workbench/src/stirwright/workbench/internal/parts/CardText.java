@@ -29,13 +29,13 @@ final class CardText {
     static CardText of(Outcome outcome, Optional<Row> row) {
         CardText card = new CardText();
         CaseResult result = outcome.main().result();
-        result.refusal().ifPresent(r -> card.section(Messages.Card_refused, List.of(r.words())));
+        result.refusal().ifPresent(r -> card.section(Messages.Card_refused, List.of(outcome.words().of(r.words()))));
         row.ifPresent(r -> card.candidate(outcome, r));
         if (!result.flags().isEmpty()) {
-            card.section(Messages.Card_flags, result.flags());
+            card.section(Messages.Card_flags, outcome.words().of(result.flags()));
         }
         if (!result.notes().isEmpty()) {
-            card.section(Messages.Card_notes, result.notes());
+            card.section(Messages.Card_notes, outcome.words().of(result.notes()));
         }
         if (!outcome.catalogue().problems().isEmpty()) {
             card.section(Messages.Card_problems, outcome.catalogue().problems());

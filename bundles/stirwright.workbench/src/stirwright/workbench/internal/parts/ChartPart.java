@@ -51,6 +51,7 @@ public final class ChartPart {
         chart = new ChartView(area, looks.palette());
         chart.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         Names.name(chart, Messages.Chart_name);
+        chart.setLegend(false);
         chart.onSelected(session::select);
         session.onOutcome(this::showOutcome);
         session.onSelection(this::showSelection);
@@ -68,7 +69,7 @@ public final class ChartPart {
 
     private void showOutcome() {
         Outcome outcome = session.outcome().orElseThrow();
-        strip.show(outcome.main());
+        strip.show(outcome);
         views.setCurrent(outcome.view().ordinal());
         chart.show(outcome.picture());
         showSelection();

@@ -12,6 +12,7 @@ import stirwright.correlation.Figures;
 import stirwright.correlation.FlowKind;
 import stirwright.correlation.Regime;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.session.Outcome;
 import stirwright.workbench.internal.session.Sheet;
 import stirwright.workbench.internal.widgets.FittedLabel;
 import stirwright.workbench.internal.widgets.Looks;
@@ -74,14 +75,15 @@ final class ResultStrip extends Composite {
         return label;
     }
 
-    void show(Sheet sheet) {
+    void show(Outcome outcome) {
+        Sheet sheet = outcome.main();
         List<Item> items = sheet.result().pick().filter(p -> p.state().isPresent()).map(ResultStrip::items).orElse(List.of());
         for (int i = 0; i < values.size(); i++) {
             Item item = i < items.size() ? items.get(i) : Item.NONE;
             values.get(i).setText(item.value());
             remarks.get(i).setText(item.remark());
         }
-        List<String> flags = sheet.result().flags();
+        List<String> flags = outcome.words().of(sheet.result().flags());
         flag.setText(flags.isEmpty() ? "" : Messages.bind(flags.size() == 1 ? Messages.Strip_flag : Messages.Strip_flags,
                 String.join("; ", flags), flags.size()));
         GridData data = (GridData) flag.label().getLayoutData();

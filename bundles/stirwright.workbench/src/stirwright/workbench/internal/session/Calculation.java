@@ -38,8 +38,9 @@ final class Calculation {
             sheets.add(sheet(entry));
         }
         List<Row> rows = Rows.of(request.catalogue(), request.view().quantity(), sheets);
-        return new Outcome(request.catalogue(), request.view(), sheets, rows,
-                Pictures.of(request.catalogue(), request.view(), sheets, rows, stale));
+        Words words = new Words(request.catalogue());
+        return new Outcome(request.catalogue(), words, request.view(), sheets, rows,
+                Pictures.of(request.catalogue(), words, request.view(), sheets, rows, stale));
     }
 
     private Sheet sheet(Request.Entry entry) {

@@ -11,10 +11,11 @@ final class Pictures {
 
     private Pictures() {}
 
-    static Picture of(Catalogue catalogue, View view, List<Sheet> sheets, List<Row> rows, BooleanSupplier stale) {
+    static Picture of(
+            Catalogue catalogue, Words words, View view, List<Sheet> sheets, List<Row> rows, BooleanSupplier stale) {
         Sheet main = sheets.get(0);
         if (!main.computed()) {
-            return Picture.empty(main.result().refusal().map(r -> r.words()).orElse(""));
+            return Picture.empty(main.result().refusal().map(r -> words.of(r.words())).orElse(""));
         }
         if (rows.isEmpty()) {
             return Picture.empty(Messages.bind(Messages.Chart_noCandidates, view.title(), main.familyTitle()));
