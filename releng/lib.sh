@@ -109,7 +109,7 @@ hash_sources() {
 }
 
 # What the product is made of: the same whichever script builds it.
-hash_product() { hash_sources -not -path 'bundles/*.tests/*'; }
+hash_product() { hash_sources -not -path '*.tests/*'; }
 
 # built HASH: notes what the product was built from. The note is cleaned away with the product.
 built() { printf '%s\n' "$1" >"$top/releng/product/target/built-from"; }
