@@ -130,7 +130,7 @@ class ChartPixelsTest {
         window.show(new Picture(AXIS, AXIS, List.of(level("pick", 65, 3, true)),
                 List.of(new Band("laminar", Double.NEGATIVE_INFINITY, 35)), Optional.empty(), ""));
         Pixels pixels = pixels(Palette.light());
-        assertEquals(0.15, pixels.covered(column(25), row(15), Palette.light().quiet()), 0.01);
+        assertEquals(0.06, pixels.covered(column(25), row(15), Palette.light().quiet()), 0.01);
         assertEquals(0, pixels.covered(column(55), row(15), Palette.light().quiet()), 0.01);
         assertTrue(pixels.inked(column(41), row(99), column(49), row(92)) == 0, "no words beside the band");
     }
