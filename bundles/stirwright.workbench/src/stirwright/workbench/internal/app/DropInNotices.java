@@ -1,7 +1,6 @@
 package stirwright.workbench.internal.app;
 
 import jakarta.annotation.PostConstruct;
-import jakarta.annotation.PreDestroy;
 import jakarta.inject.Inject;
 import java.io.UncheckedIOException;
 import java.util.List;
@@ -26,21 +25,30 @@ public final class DropInNotices {
     @Optional
     private DropIns dropIns;
 
-    private AutoCloseable listening;
-
     @PostConstruct
     void watch() {
-        if (dropIns != null) {
-            Display display = Display.getCurrent();
-            listening = dropIns.listen(() -> display.asyncExec(this::show));
-            show();
+        if (dropIns == null) {
+            return;
+        }
+        Display display = Display.getCurrent();
+        AutoCloseable listening = dropIns.listen(() -> later(display));
+        display.disposeExec(() -> end(listening));
+        show();
+    }
+
+    private void later(Display display) {
+        // The bundles go on arriving while the window closes.
+        if (!display.isDisposed()) {
+            display.asyncExec(this::show);
         }
     }
 
-    @PreDestroy
-    void end() throws Exception {
-        if (listening != null) {
+    private static void end(AutoCloseable listening) {
+        try {
             listening.close();
+        } catch (Exception impossible) {
+            // Declared by AutoCloseable alone: ending a listening has nothing that could fail.
+            throw new IllegalStateException(impossible);
         }
     }
 

@@ -10,8 +10,8 @@ import java.util.List;
  */
 record Notice(String key, String words, List<Action> actions) {
 
-    /** @param run called on the user interface's thread; the notice goes */
-    record Action(String verb, Runnable run) {}
+    /** @param deed called on the user interface's thread; the notice goes */
+    record Action(String verb, Runnable deed) {}
 
     Notice {
         actions = List.copyOf(actions);

@@ -65,7 +65,7 @@ public final class NoticeBar {
         for (Notice.Action action : notice.actions()) {
             looks.button(buttons, action.verb(), () -> {
                 notices.remove(notice.key());
-                action.run();
+                action.deed().run();
             });
         }
         if (notice.actions().isEmpty()) {

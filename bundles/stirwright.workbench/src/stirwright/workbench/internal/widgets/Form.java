@@ -15,7 +15,7 @@ import org.eclipse.swt.widgets.Text;
 /** A column of labelled fields: labels flush right, fields, units in grey. */
 public final class Form extends Composite {
     private static final int COLUMNS = 3;
-    private static final int LABEL_WIDTH = 29 * Looks.STEP;
+    private static final int LABEL_WIDTH = 33 * Looks.STEP;
     private static final int UNIT_WIDTH = 14 * Looks.STEP;
     private static final int FIELD_WIDTH = 20 * Looks.STEP;
 
@@ -85,7 +85,7 @@ public final class Form extends Composite {
     /** A field for a number with the unit behind it. */
     Text number(String title, String unit) {
         caption(title);
-        String shownUnit = unit.equals("-") ? "" : unit;
+        String shownUnit = unit.equals("-") ? "" : unit.replace("revolution", "rev");
         Text text = Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), shownUnit.isEmpty() ? title : title + ", " + shownUnit);
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
         data.widthHint = FIELD_WIDTH;
@@ -111,12 +111,13 @@ public final class Form extends Composite {
 
     /** Something to switch on and off. */
     public Button check(String words, boolean on, Consumer<Boolean> switched) {
-        new Label(this, SWT.NONE);
         Button button = looks.onPage(new Button(this, SWT.CHECK));
         button.setText(words);
         button.setSelection(on);
         button.addListener(SWT.Selection, e -> switched.accept(button.getSelection()));
-        button.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, COLUMNS, 1);
+        data.horizontalIndent = 6 * Looks.STEP;
+        button.setLayoutData(data);
         return button;
     }
 
