@@ -185,11 +185,19 @@ class LooksTest {
         });
     }
 
+    /** Without a window manager the frame is guessed, so the size is set until the area within has it. */
     private static void size(OpenWindow window, Point size) throws Exception {
-        window.run(() -> window.shell().setBounds(0, 0, size.x, size.y));
+        Point[] asked = {size};
         OpenWindow.await("the size", () -> {
             boolean[] there = new boolean[1];
-            window.display().syncExec(() -> there[0] = window.shell().getSize().equals(size));
+            window.display().syncExec(() -> {
+                Rectangle inside = window.shell().getClientArea();
+                there[0] = inside.width == size.x && inside.height == size.y;
+                if (!there[0]) {
+                    asked[0] = new Point(asked[0].x + size.x - inside.width, asked[0].y + size.y - inside.height);
+                    window.shell().setBounds(0, 0, asked[0].x, asked[0].y);
+                }
+            });
             return there[0];
         });
         window.settle();
@@ -205,7 +213,7 @@ class LooksTest {
             Thread.sleep(20);
         }
         window.run(() -> {
-            Rectangle area = window.shell().getBounds();
+            Rectangle area = window.display().map(window.shell(), null, window.shell().getClientArea());
             GC screen = new GC(window.display());
             Image image = new Image(window.display(), area.width, area.height);
             screen.copyArea(image, area.x, area.y);

@@ -7,6 +7,8 @@ import java.util.function.ToDoubleFunction;
 import stirwright.core.Role;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Figures;
+import stirwright.correlation.Measure;
+import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Row;
@@ -16,13 +18,13 @@ import stirwright.workbench.internal.session.View;
 enum CandidateColumn {
     CANDIDATE(28, Row::title),
     FAMILY(18, Row::familyTitle),
-    VALUE(13, Row::value, v -> Figures.show(v)),
+    VALUE(14, Row::value, v -> Figures.show(v)),
     POWER(15, Row::power, v -> Figures.show(v)),
     TORQUE(18, Row::torque, v -> Figures.show(v)),
     DEVIATION(11, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
-    VERDICT(40, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
+    VERDICT(38, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
     SOURCE(26, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
-    GRADE(22, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
+    GRADE(27, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
 
     /** Where the table is narrower, the source stands in the card alone. In points. */
     private static final int ROOM_FOR_SOURCE = 720;
@@ -101,8 +103,14 @@ enum CandidateColumn {
     private static String verdict(Row row) {
         String word = verdict(row.verdict());
         boolean set = row.role() == Role.CHOSEN || row.pick();
-        String bounds = row.failedBounds().isEmpty() ? word : word + ": " + String.join("; ", row.failedBounds());
+        String bounds = row.failedBounds().isEmpty() ? word : word + ": " + String.join("; ", row.failedBounds().stream().map(CandidateColumn::brief).toList());
         return row.failedBounds().isEmpty() || set ? role(row) + ", " + bounds : bounds;
+    }
+
+    /** "Re 827 (at least 10000)" for "Reynolds number 827 is outside (at least 10000)": the verdict stands before it. */
+    private static String brief(String bound) {
+        return bound.replace(Measure.REYNOLDS.title() + " ", Variable.REYNOLDS.symbol() + " ")
+                .replaceFirst(" is (" + Verdict.OUTSIDE.id() + "|" + Verdict.NEAR.id() + ") \\(", " (");
     }
 
     static String verdict(Verdict verdict) {

@@ -70,10 +70,10 @@ final class CardView extends Composite {
         CardText text = outcome == null ? CardText.NOTHING : CardText.of(outcome, row);
         if (!card.getText().equals(text.words())) {
             boolean same = row.map(Row::key).equals(Optional.ofNullable(card.getData()));
-            int top = card.getTopIndex();
+            int top = card.getTopPixel();
             card.setText(text.words());
             card.setStyleRanges(text.styles());
-            card.setTopIndex(same ? top : 0);
+            card.setTopPixel(same ? top : 0);
         }
         row.map(Row::key).ifPresentOrElse(card::setData, () -> card.setData(null));
         enable();

@@ -13,7 +13,7 @@ import stirwright.correlation.Verdict;
  * @param correlationId or "given"
  * @param title short name; for a given value the words for that
  * @param style of its curve and its swatch
- * @param pick whether the numbers of its family rest on it
+ * @param pick whether the case's numbers rest on it; the first row, so always one of the case's own family
  * @param value of the quantity, in its unit
  * @param speed rev/s; of a power number alone
  * @param power W; of a power number alone

@@ -46,26 +46,26 @@ final class Rows {
     private void add(Sheet sheet) {
         if (quantity.equals(Quantity.POWER_NUMBER)) {
             List<CandidateResult> results = sheet.result().candidates();
-            results.forEach(r -> addPower(sheet, r, r == results.get(0)));
+            results.forEach(r -> addPower(sheet, r));
         } else {
             List<QuantityResult> results = sheet.result().quantities().stream()
                     .filter(q -> q.quantity().equals(quantity)).toList();
-            results.forEach(r -> addOther(sheet, r, r == results.get(0)));
+            results.forEach(r -> addOther(sheet, r));
         }
     }
 
-    private void addPower(Sheet sheet, CandidateResult r, boolean pick) {
+    private void addPower(Sheet sheet, CandidateResult r) {
         double reference = rows.isEmpty() ? r.power() : rows.get(0).power();
         rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.correlation(), title(r.correlation()),
-                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), pick, r.role(),
+                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), rows.isEmpty(), r.role(),
                 r.powerNumber(), r.state().map(FluidState::speed).orElse(Double.NaN), r.power(), r.torque(),
                 r.power() / reference - 1, r.verdict(), r.failedBounds(), r.why()));
     }
 
-    private void addOther(Sheet sheet, QuantityResult r, boolean pick) {
+    private void addOther(Sheet sheet, QuantityResult r) {
         double reference = rows.isEmpty() ? r.value() : rows.get(0).value();
         rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.id(), title(r.id()), r.correlation(), style(sheet, r.id()),
-                pick, r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
+                rows.isEmpty(), r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
                 r.failedBounds(), r.why()));
     }
 
