@@ -9,14 +9,12 @@ import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.Font;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Point;
-import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
-import stirwright.chart.CurveStyle;
 import stirwright.correlation.Verdict;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Outcome;
@@ -26,6 +24,7 @@ import stirwright.workbench.internal.widgets.Aligned;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
 import stirwright.workbench.internal.widgets.Shortened;
+import stirwright.workbench.internal.widgets.Swatches;
 
 /**
  * The candidates, a row each: the check mark switches the curve, its swatch is the chart's legend, a click on a column's
@@ -33,8 +32,7 @@ import stirwright.workbench.internal.widgets.Shortened;
  */
 final class CandidateTable extends Composite {
     /** For the check mark and the swatch. */
-    private static final int SWATCH_WIDTH = 68;
-    private static final int SWATCH_INSET = 26;
+    private static final int SWATCH_WIDTH = 72;
     /** What a cell keeps free on both sides of its text. */
     private static final int CELL_MARGIN = 12;
 
@@ -43,6 +41,7 @@ final class CandidateTable extends Composite {
     private final Table table;
     private final Font strong;
     private final Shortened shortened = new Shortened();
+    private final Swatches swatches;
     private final List<CandidateColumn> columns = new ArrayList<>();
     private CandidateColumn sortedBy;
     private boolean descending;
@@ -57,14 +56,13 @@ final class CandidateTable extends Composite {
         table.setBackground(looks.palette().surface());
         table.setForeground(looks.palette().text());
         table.addListener(SWT.Selection, this::selected);
-        table.addListener(SWT.PaintItem, this::paintCell);
-        table.addListener(SWT.EraseItem, this::erase);
         table.addListener(SWT.MouseHover, this::tip);
         table.addListener(SWT.Resize, e -> {
             fit();
             session.outcome().ifPresent(o -> show());
         });
         table.setFont(looks.small());
+        swatches = new Swatches(table, looks.palette());
         strong = looks.smallStrong();
         session.onOutcome(this::show);
         session.onSelection(this::showSelection);
@@ -90,6 +88,7 @@ final class CandidateTable extends Composite {
             Row row = rows.get(r);
             item.setData(row);
             item.setFont(row.pick() ? strong : null);
+            item.setImage(0, swatches.of(row.style(), row.pick()));
         }
         table.setRedraw(true);
         showSelection();
@@ -209,43 +208,13 @@ final class CandidateTable extends Composite {
         String key = session.selected().map(Row::key).orElse("");
         for (TableItem item : table.getItems()) {
             Row row = (Row) item.getData();
+            boolean selected = row.key().equals(key);
             item.setChecked(!session.hidden().contains(row.key()));
-            if (row.key().equals(key) && (table.getSelectionCount() == 0 || table.getSelection()[0] != item)) {
+            // On the selection the system's own colour is the one that can be read.
+            item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, selected ? null : colour(row.verdict()));
+            if (selected && (table.getSelectionCount() == 0 || table.getSelection()[0] != item)) {
                 table.setSelection(item);
             }
-        }
-    }
-
-    /** The selection in the window's own quiet colour, so that the words keep theirs; the verdict is painted below. */
-    private void erase(Event event) {
-        if ((event.detail & SWT.SELECTED) != 0) {
-            event.gc.setBackground(looks.selection());
-            event.gc.fillRectangle(0, event.y, table.getClientArea().width, event.height);
-            event.detail &= ~(SWT.SELECTED | SWT.HOT);
-            event.gc.setForeground(looks.palette().text());
-        }
-        if (event.index == columns.indexOf(CandidateColumn.VERDICT) + 1) {
-            event.detail &= ~SWT.FOREGROUND;
-        }
-    }
-
-    /** What the system cannot show in a cell: the curve's swatch, and (with GTK) a colour for one cell's words. */
-    private void paintCell(Event event) {
-        if (!(event.item.getData() instanceof Row row)) {
-            return;
-        }
-        TableItem item = (TableItem) event.item;
-        if (event.index == 0) {
-            Rectangle cell = item.getBounds(0);
-            CurveStyle.paintSwatch(event.gc,
-                    new Rectangle(cell.x + 2, cell.y, SWATCH_WIDTH - SWATCH_INSET - Looks.STEP, cell.height), row.style(),
-                    row.pick(), looks.palette());
-        } else if (event.index == columns.indexOf(CandidateColumn.VERDICT) + 1) {
-            Rectangle place = item.getTextBounds(event.index);
-            event.gc.setFont(row.pick() ? strong : looks.small());
-            event.gc.setForeground(colour(row.verdict()));
-            int height = event.gc.getFontMetrics().getHeight();
-            event.gc.drawText(item.getText(event.index), place.x, place.y + (place.height - height) / 2, true);
         }
     }
 

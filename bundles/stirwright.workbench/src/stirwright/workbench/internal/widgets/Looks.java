@@ -2,7 +2,6 @@ package stirwright.workbench.internal.widgets;
 
 import org.eclipse.jface.resource.FontDescriptor;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.Font;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
@@ -21,7 +20,6 @@ public final class Looks {
     private final Font strong;
     private final Font small;
     private final Font smallStrong;
-    private final Color selection;
 
     public Looks(Display display) {
         palette = Palette.of(display);
@@ -29,7 +27,6 @@ public final class Looks {
         strong = system.setStyle(SWT.BOLD).createFont(display);
         small = system.increaseHeight(-1).createFont(display);
         smallStrong = system.increaseHeight(-1).setStyle(SWT.BOLD).createFont(display);
-        selection = mixed(palette.accent(), palette.surface());
         display.disposeExec(() -> {
             strong.dispose();
             small.dispose();
@@ -54,20 +51,6 @@ public final class Looks {
     /** For what matters among captions. */
     public Font smallStrong() {
         return smallStrong;
-    }
-
-    /** Behind a selected row: a breath of the accent. */
-    public Color selection() {
-        return selection;
-    }
-
-    private static Color mixed(Color little, Color much) {
-        return new Color(mixed(little.getRed(), much.getRed()), mixed(little.getGreen(), much.getGreen()),
-                mixed(little.getBlue(), much.getBlue()));
-    }
-
-    private static int mixed(int little, int much) {
-        return (little + 5 * much) / 6;
     }
 
     /** Puts a control on the page. */
