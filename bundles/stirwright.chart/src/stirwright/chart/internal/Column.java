@@ -59,7 +59,7 @@ final class Column {
             add(gc, inView.get(i), inView.get(i).curve(), x, (int) Math.round(placed[i]), room);
         }
         if (shown < inView.size()) {
-            String more = Lettering.fit(gc, "and " + (inView.size() - shown) + " more", room);
+            String more = Lettering.fit(gc, Wording.of("more", inView.size() - shown), room);
             int y = scene.plot.y + shown * row + row / 2;
             labels.add(new Label(null, more, x, y));
             scene.hints.add(new Hint(new Rectangle(x, y - row / 2, room, row), inView.stream().skip(shown)

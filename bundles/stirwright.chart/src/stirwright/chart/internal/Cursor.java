@@ -1,5 +1,6 @@
 package stirwright.chart.internal;
 
+import java.util.ArrayList;
 import java.util.List;
 import stirwright.chart.Reading;
 
@@ -58,15 +59,16 @@ public record Cursor(double x, double y, Reading reading, int nearest) {
 
     /** The whole reading as one sentence for screen readers. */
     public String words(Scene scene) {
-        StringBuilder words = new StringBuilder("At ").append(head(scene, reading)).append(": ");
+        String head = head(scene, reading);
         if (reading.values().isEmpty()) {
-            return words.append("no curve has a value.").toString();
+            return Wording.of("reading.none", head);
         }
+        List<String> parts = new ArrayList<>();
         for (int i = 0; i < reading.values().size(); i++) {
             Reading.At at = reading.values().get(i);
-            words.append(i == 0 ? "" : "; ").append(at.label()).append(' ').append(Numbers.reading(at.value()))
-                    .append(at.inside() ? "" : " (outside)").append(i == nearest ? ", nearest" : "");
+            parts.add(at.label() + ' ' + Numbers.reading(at.value()) + (at.inside() ? "" : Wording.of("reading.outside"))
+                    + (i == nearest ? Wording.of("reading.nearest") : ""));
         }
-        return words.append('.').toString();
+        return Wording.of("reading", head, String.join("; ", parts));
     }
 }

@@ -16,7 +16,7 @@ final class CursorPainter {
     private static final int AWAY = 16;
     private static final int WIDEST_NAME = 200;
     private static final int READABLE_NAME = 120;
-    private static final String DOUBT = "outside";
+    private static final String DOUBT = Wording.of("doubt");
 
     private final Scene scene;
     private final Palette palette;
@@ -69,7 +69,7 @@ final class CursorPainter {
         name = Math.min(name, Math.clamp(Math.max(half, Math.min(READABLE_NAME, scene.plot.width - 4 - beside)), 1, WIDEST_NAME));
         String head = Cursor.head(scene, cursor.reading());
         boolean part = end - first < values.size();
-        String rest = values.isEmpty() ? "no curve here" : part ? "and " + (values.size() - end + first) + " more" : "";
+        String rest = values.isEmpty() ? Wording.of("nothing.here") : part ? Wording.of("more", values.size() - end + first) : "";
         int width = Math.max(values.isEmpty() ? 0 : beside + name, 2 * PAD + Math.max(Lettering.width(gc, head), Lettering.width(gc, rest)));
         int height = 2 * PAD + (1 + end - first + (rest.isEmpty() ? 0 : 1)) * row;
         Rectangle box = place(x, width, height);

@@ -43,7 +43,8 @@ public final class Voice {
     /** What the chart shows. */
     public String name() {
         Picture picture = board.picture();
-        return board.scene().empty() ? "Chart" : "Chart: " + picture.y().words() + " over " + picture.x().words();
+        return board.scene().empty() ? Wording.of("chart")
+                : Wording.of("chart.of", picture.y().words(), picture.x().words());
     }
 
     /** The reading at the cursor; without one, what there is to read and how. */
@@ -54,7 +55,6 @@ public final class Voice {
         if (board.cursor() != null) {
             return board.cursor().words(board.scene());
         }
-        int count = board.scene().traces().size();
-        return (count == 1 ? "1 curve." : count + " curves.") + " Arrow keys read the values, + and - zoom, 0 shows everything.";
+        return Wording.of("curves", board.scene().traces().size());
     }
 }

@@ -99,6 +99,8 @@ public final class Messages extends NLS {
     public static String Edit_unpick;
     public static String Edit_vessel;
     public static String Grade_ruleOfTrade;
+    public static String Menu_redo;
+    public static String Menu_undo;
     public static String Model_bingham;
     public static String Model_carreau;
     public static String Model_casson;

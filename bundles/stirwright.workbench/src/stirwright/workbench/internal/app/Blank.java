@@ -16,7 +16,8 @@ final class Blank {
 
     private Blank() {}
 
-    static Study study() {
+    /** @param family id of the impeller's family; may be empty */
+    static Study study(String family) {
         StudyFactory make = StudyFactory.eINSTANCE;
         Fluid fluid = make.createFluid();
         fluid.setName(Messages.Blank_fluid);
@@ -25,7 +26,7 @@ final class Blank {
         vessel.setName(Messages.Blank_vessel);
         Impeller impeller = make.createImpeller();
         impeller.setName(Messages.Blank_impeller);
-        impeller.setFamily("");
+        impeller.setFamily(family);
         Amount demand = make.createAmount();
         demand.setColumn(CaseFields.SPEED_RPM.column());
         Case first = make.createCase();

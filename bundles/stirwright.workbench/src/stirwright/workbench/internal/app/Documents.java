@@ -2,12 +2,14 @@ package stirwright.workbench.internal.app;
 
 import jakarta.inject.Inject;
 import java.nio.file.Path;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.FileDialog;
 import org.eclipse.swt.widgets.Shell;
+import stirwright.correlation.Family;
 import stirwright.study.Study;
 import stirwright.study.StudyFileException;
 import stirwright.study.StudyFiles;
@@ -29,7 +31,8 @@ public final class Documents {
     /** A new study with one blank case. */
     public void startNew(Shell shell) {
         if (mayDrop(shell)) {
-            session.open(Blank.study(), Optional.empty());
+            String family = session.catalogue().families().stream().map(Family::id).min(Comparator.naturalOrder()).orElse("");
+            session.open(Blank.study(family), Optional.empty());
         }
     }
 
@@ -73,7 +76,8 @@ public final class Documents {
         return saveTo(StudyFiles.isNamedAsStudy(file) ? file : file.resolveSibling(file.getFileName() + StudyFiles.ENDING));
     }
 
-    boolean saveTo(Path file) {
+    /** @return whether the study stands in the file now; else a notice says why not */
+    public boolean saveTo(Path file) {
         try {
             StudyFiles.write(session.editor().study(), file);
             session.savedTo(file);

@@ -40,7 +40,7 @@ record Opening(Study study, Optional<Path> file) {
             return new Opening(study, Optional.empty());
         } catch (IOException | UncheckedIOException unwritable) {
             notices.put(new Notice("opening", Messages.bind(Messages.Opening_noDemo, unwritable.getMessage()), List.of()));
-            return new Opening(Blank.study(), Optional.empty());
+            return new Opening(Blank.study(""), Optional.empty());
         }
     }
 }

@@ -1,13 +1,15 @@
 package stirwright.workbench.internal.app;
 
+import jakarta.annotation.PostConstruct;
 import jakarta.inject.Inject;
-import org.eclipse.e4.core.di.annotations.Optional;
-import org.eclipse.e4.ui.di.UIEventTopic;
+import java.util.Optional;
 import org.eclipse.e4.ui.model.application.MApplication;
 import org.eclipse.e4.ui.model.application.ui.basic.MWindow;
-import org.eclipse.e4.ui.workbench.UIEvents;
+import org.eclipse.e4.ui.model.application.ui.menu.MMenu;
+import org.eclipse.e4.ui.model.application.ui.menu.MMenuElement;
 import org.eclipse.e4.ui.workbench.modeling.EModelService;
 import org.eclipse.e4.ui.workbench.modeling.IWindowCloseHandler;
+import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Shell;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Session;
@@ -24,13 +26,16 @@ public final class WindowAddon {
     @Inject
     private Looks looks;
 
-    /** Called once the window stands. */
-    @Inject
-    @Optional
-    void started(@UIEventTopic(UIEvents.UILifeCycle.APP_STARTUP_COMPLETE) org.osgi.service.event.Event event,
-            MApplication application, EModelService models) {
-        MWindow window = application.getChildren().get(0);
-        Shell shell = (Shell) window.getWidget();
+    /** The window is made after its addons and before the first event; that is when the rest is done. */
+    @PostConstruct
+    void begin(MApplication application, EModelService models) {
+        Display.getCurrent().asyncExec(() -> started(application.getChildren().get(0), models));
+    }
+
+    private void started(MWindow window, EModelService models) {
+        if (!(window.getWidget() instanceof Shell shell) || shell.isDisposed()) {
+            return;
+        }
         looks.onPage(shell);
         window.getContext().set(IWindowCloseHandler.class, w -> mayClose(shell, models, window));
         session.onStudy(() -> name(window));
@@ -49,5 +54,18 @@ public final class WindowAddon {
     private void name(MWindow window) {
         String title = Documents.title(session.editor().study(), session.file());
         window.setLabel((session.editor().isDirty() ? "*" : "") + Messages.bind(Messages.Window_title, title));
+        label(window, "undo", Messages.Menu_undo, session.editor().undoLabel());
+        label(window, "redo", Messages.Menu_redo, session.editor().redoLabel());
+    }
+
+    /** Says in the menu what would be undone or done again. */
+    private static void label(MWindow window, String id, String verb, Optional<String> step) {
+        for (MMenuElement menu : window.getMainMenu().getChildren()) {
+            for (MMenuElement item : ((MMenu) menu).getChildren()) {
+                if (item.getElementId().equals("stirwright.workbench.item." + id)) {
+                    item.setLabel(step.map(s -> verb + " " + s).orElse(verb));
+                }
+            }
+        }
     }
 }
