@@ -38,8 +38,8 @@ public final class WindowAddon {
         }
         looks.onPage(shell);
         window.getContext().set(IWindowCloseHandler.class, w -> mayClose(shell, models, window));
-        session.onStudy(() -> name(window));
-        name(window);
+        session.onStudy(() -> name(shell, window));
+        name(shell, window);
     }
 
     private boolean mayClose(Shell shell, EModelService models, MWindow window) {
@@ -51,9 +51,9 @@ public final class WindowAddon {
         return true;
     }
 
-    private void name(MWindow window) {
+    private void name(Shell shell, MWindow window) {
         String title = Documents.title(session.editor().study(), session.file());
-        window.setLabel((session.editor().isDirty() ? "*" : "") + Messages.bind(Messages.Window_title, title));
+        shell.setText((session.editor().isDirty() ? "*" : "") + Messages.bind(Messages.Window_title, title));
         label(window, "undo", Messages.Menu_undo, session.editor().undoLabel());
         label(window, "redo", Messages.Menu_redo, session.editor().redoLabel());
     }
