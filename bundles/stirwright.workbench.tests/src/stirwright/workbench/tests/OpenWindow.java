@@ -178,6 +178,27 @@ final class OpenWindow {
         settle();
     }
 
+    /** Types letter by letter in place of what stands there; where the letters go is where the focus is after each. */
+    void typeLetters(String field, String words) throws Exception {
+        run(() -> {
+            Text text = find(Text.class, field);
+            if (!text.forceFocus()) {
+                throw new AssertionError(field + " does not take the focus, enabled: " + text.isEnabled() + ", visible: "
+                        + text.isVisible() + ", at " + text.getBounds());
+            }
+            text.selectAll();
+        });
+        for (char letter : words.toCharArray()) {
+            run(() -> {
+                if (!(display.getFocusControl() instanceof Text text)) {
+                    throw new AssertionError("the focus went to " + display.getFocusControl() + " at '" + letter + "'");
+                }
+                text.insert(String.valueOf(letter));
+            });
+            settle();
+        }
+    }
+
     /** Chooses in a list, as by hand. */
     void choose(String list, String words) throws Exception {
         run(() -> {

@@ -1,10 +1,12 @@
 package stirwright.workbench.tests;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Text;
@@ -79,6 +81,9 @@ class SlowTest {
                         .notifyListeners(SWT.Selection, new Event()));
                 window.settle();
                 assertEquals(before, window.outcome().rows().get(0).power(), 0.0, "the numbers before stay");
+                assertTrue(window.on(() -> window.all(Link.class, l -> l.getText().contains("numbers are those before")).size() == 1),
+                        "old numbers pass as new ones");
+                assertFalse(window.on(() -> window.all(Button.class, b -> b.getText().equals("Pick this")).get(0).isEnabled()));
                 nap = 0;
                 window.type("Speed, rev/min", "251");
                 assertTrue(window.outcome().rows().get(0).power() > before);

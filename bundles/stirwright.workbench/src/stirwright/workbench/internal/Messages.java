@@ -51,6 +51,10 @@ public final class Messages extends NLS {
     public static String Case_measuredTo;
     public static String Case_model;
     public static String Case_name;
+    public static String Case_nameOfCase;
+    public static String Case_nameOfFluid;
+    public static String Case_nameOfImpeller;
+    public static String Case_nameOfVessel;
     public static String Case_none;
     public static String Case_remove;
     public static String Case_speed;
@@ -120,6 +124,7 @@ public final class Messages extends NLS {
     public static String Role_nearest;
     public static String Role_recommended;
     public static String Row_given;
+    public static String Standing_again;
     public static String Standing_busy;
     public static String Standing_defect;
     public static String Standing_flagged;
@@ -129,6 +134,7 @@ public final class Messages extends NLS {
     public static String Standing_problems;
     public static String Standing_refused;
     public static String Standing_stop;
+    public static String Standing_stopped;
     public static String Strip_atShearRate;
     public static String Strip_caution;
     public static String Strip_circulation;
@@ -146,6 +152,7 @@ public final class Messages extends NLS {
     public static String Strip_torque;
     public static String Strip_viscosity;
     public static String Table_name;
+    public static String Table_sortBy;
     public static String Unit_perRevolution;
     public static String Verdict_inside;
     public static String Verdict_near;

@@ -86,7 +86,8 @@ public final class DropInNotices {
         try {
             word.run();
         } catch (UncheckedIOException unwritable) {
-            notices.put(new Notice(PREFIX + "list", unwritable.getMessage(), List.of()));
+            notices.put(new Notice("approval", unwritable.getMessage(), List.of()));
+            show();
         }
     }
 

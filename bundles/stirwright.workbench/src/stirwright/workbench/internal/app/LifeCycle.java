@@ -22,7 +22,7 @@ public final class LifeCycle {
         Display display = Display.getDefault();
         Notices notices = new Notices();
         Opening opening = Opening.of(arguments(application), notices);
-        Session session = new Session(context.get(Library.class), display::asyncExec, opening.study(), opening.file());
+        Session session = new Session(context.get(Library.class), task -> later(display, task), opening.study(), opening.file());
         context.set(Looks.class, new Looks(display));
         context.set(Notices.class, notices);
         context.set(Problems.class, new Problems());
@@ -30,6 +30,13 @@ public final class LifeCycle {
         context.set(Documents.class, ContextInjectionFactory.make(Documents.class, context));
         context.set(DropInNotices.class, ContextInjectionFactory.make(DropInNotices.class, context));
         display.disposeExec(session::close);
+    }
+
+    /** Families go on arriving while the window closes. */
+    private static void later(Display display, Runnable task) {
+        if (!display.isDisposed()) {
+            display.asyncExec(task);
+        }
     }
 
     @ProcessAdditions

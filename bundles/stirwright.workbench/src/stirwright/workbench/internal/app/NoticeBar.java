@@ -54,7 +54,7 @@ public final class NoticeBar {
 
     private void add(Notice notice) {
         Label words = new Label(bar, SWT.WRAP);
-        words.setText(notice.words());
+        words.setText(Looks.literal(notice.words()));
         words.setForeground(looks.palette().text());
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
         data.widthHint = 100;

@@ -30,6 +30,8 @@ public final class StandingLine {
     private Looks looks;
 
     private Link state;
+    /** Whether the work at hand has taken long. */
+    private boolean slow;
 
     @PostConstruct
     void create(Composite parent) {
@@ -48,30 +50,33 @@ public final class StandingLine {
         state.setLinkForeground(looks.palette().accent());
         state.addListener(SWT.Selection, e -> act());
         problems.listen(this::show);
-        session.onStudy(() -> {
+        session.onRequest(() -> watch(line.getDisplay()));
+        session.onOutcome(() -> {
+            slow = false;
             show();
-            watch(line.getDisplay());
         });
-        session.onOutcome(this::show);
         show();
     }
 
     /** Once work takes long, it is told, with the way to stop it. */
     private void watch(Display display) {
+        slow &= session.busy();
+        show();
         display.timerExec(LONG_MILLIS, () -> {
             if (!state.isDisposed() && session.busy()) {
+                slow = true;
                 show();
-                watch(display);
             }
         });
     }
 
     private void act() {
-        if (problems.count() > 0) {
-            problems.jump();
-        } else if (session.busy()) {
+        if (slow) {
             session.stop();
-            show();
+        } else if (session.stopped()) {
+            session.recalculate();
+        } else {
+            problems.jump();
         }
     }
 
@@ -87,24 +92,33 @@ public final class StandingLine {
     }
 
     private String words() {
+        if (slow) {
+            return Messages.Standing_busy + " <a>" + Messages.Standing_stop + "</a>";
+        }
+        if (session.stopped()) {
+            return Messages.Standing_stopped + " <a>" + Messages.Standing_again + "</a>";
+        }
         if (problems.count() > 0) {
             return "<a>" + Messages.bind(Messages.Standing_problems, problems.count()) + "</a>";
         }
         if (session.defect() != null) {
-            return Messages.bind(Messages.Standing_defect, String.valueOf(session.defect()));
-        }
-        if (session.busy() && session.outcome().isPresent()) {
-            return Messages.Standing_busy + " <a>" + Messages.Standing_stop + "</a>";
+            return plain(Messages.bind(Messages.Standing_defect, String.valueOf(session.defect())));
         }
         return session.outcome().map(o -> status(o.main().result())).orElse("");
     }
 
+    /** A link's text without its marks. */
+    private static String plain(String words) {
+        return words.replace("&", "&&").replace('<', '(').replace('>', ')');
+    }
+
     private static String status(CaseResult result) {
-        return switch (result.status()) {
-            case OK -> Messages.bind(Messages.Standing_ok, result.name());
+        String name = plain(result.name());
+        return name.isEmpty() ? "" : switch (result.status()) {
+            case OK -> Messages.bind(Messages.Standing_ok, name);
             case FLAGGED -> Messages.bind(result.flags().size() == 1 ? Messages.Standing_flaggedOnce : Messages.Standing_flagged,
-                    result.name(), result.flags().size());
-            case REFUSED -> Messages.bind(Messages.Standing_refused, result.name());
+                    name, result.flags().size());
+            case REFUSED -> Messages.bind(Messages.Standing_refused, name);
         };
     }
 }

@@ -17,6 +17,10 @@ import stirwright.workbench.internal.widgets.Looks;
 
 /** Names the window after its study, asks before it closes, and remembers its sizes. */
 public final class WindowAddon {
+    /** What the zones need to show every digit. In points. */
+    private static final int LEAST_WIDTH = 1180;
+    private static final int LEAST_HEIGHT = 640;
+
     @Inject
     private Session session;
 
@@ -37,6 +41,7 @@ public final class WindowAddon {
             return;
         }
         looks.onPage(shell);
+        shell.setMinimumSize(LEAST_WIDTH, LEAST_HEIGHT);
         window.getContext().set(IWindowCloseHandler.class, w -> mayClose(shell, models, window));
         session.onStudy(() -> name(shell, window));
         name(shell, window);

@@ -13,6 +13,6 @@ public final class RedoHandler {
 
     @Execute
     void run(Session session) {
-        session.editor().redo();
+        session.redo();
     }
 }

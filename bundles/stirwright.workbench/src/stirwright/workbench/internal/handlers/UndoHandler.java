@@ -13,6 +13,6 @@ public final class UndoHandler {
 
     @Execute
     void run(Session session) {
-        session.editor().undo();
+        session.undo();
     }
 }

@@ -18,10 +18,10 @@ import stirwright.workbench.internal.session.View;
 enum CandidateColumn {
     CANDIDATE(28, Row::title),
     FAMILY(18, Row::familyTitle),
-    VALUE(14, Row::value, v -> Figures.show(v)),
-    POWER(15, Row::power, v -> Figures.show(v)),
-    TORQUE(18, Row::torque, v -> Figures.show(v)),
-    DEVIATION(11, Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
+    VALUE(Row::value, v -> Figures.show(v)),
+    POWER(Row::power, v -> Figures.show(v)),
+    TORQUE(Row::torque, v -> Figures.show(v)),
+    DEVIATION(Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
     VERDICT(38, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
     SOURCE(26, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
     GRADE(27, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
@@ -45,14 +45,14 @@ enum CandidateColumn {
         this.number = false;
     }
 
-    CandidateColumn(int share, ToDoubleFunction<Row> value, Function<Double, String> format) {
-        this.share = share;
+    CandidateColumn(ToDoubleFunction<Row> value, Function<Double, String> format) {
+        this.share = 0;
         this.text = r -> Double.isFinite(value.applyAsDouble(r)) ? format.apply(value.applyAsDouble(r)) : "";
         this.order = Comparator.comparingDouble(value);
         this.number = true;
     }
 
-    /** Its share of the table's width, beside those of the other columns. */
+    /** Its share of the width that numbers leave to words. */
     int share() {
         return share;
     }

@@ -12,6 +12,8 @@ import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Event;
+import org.eclipse.swt.widgets.Menu;
+import org.eclipse.swt.widgets.MenuItem;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
@@ -35,6 +37,8 @@ final class CandidateTable extends Composite {
     private static final int SWATCH_WIDTH = 72;
     /** What a cell keeps free on both sides of its text. */
     private static final int CELL_MARGIN = 12;
+    /** The same for a head, which has room for the sign of its order. */
+    private static final int HEAD_MARGIN = 24;
 
     private final Looks looks;
     private final Session session;
@@ -57,10 +61,8 @@ final class CandidateTable extends Composite {
         table.setForeground(looks.palette().text());
         table.addListener(SWT.Selection, this::selected);
         table.addListener(SWT.MouseHover, this::tip);
-        table.addListener(SWT.Resize, e -> {
-            fit();
-            session.outcome().ifPresent(o -> show());
-        });
+        table.addListener(SWT.Resize, e -> session.outcome().ifPresent(o -> show()));
+        table.setMenu(sortMenu());
         table.setFont(looks.small());
         swatches = new Swatches(table, looks.palette());
         strong = looks.smallStrong();
@@ -72,6 +74,7 @@ final class CandidateTable extends Composite {
     private void show() {
         Outcome outcome = session.outcome().orElseThrow();
         makeColumns(outcome);
+        fit(outcome.rows());
         List<Row> rows = sorted(outcome.rows());
         table.setRedraw(false);
         while (table.getItemCount() > rows.size()) {
@@ -162,12 +165,30 @@ final class CandidateTable extends Composite {
             if (!columns.contains(sortedBy)) {
                 sortedBy = null;
             }
-            fit();
+            if (sortedBy != null) {
+                table.setSortColumn(table.getColumn(columns.indexOf(sortedBy) + 1));
+            }
         }
         for (int c = 0; c < columns.size(); c++) {
             table.getColumn(c + 1).setText(columns.get(c).title(outcome.view()));
             table.getColumn(c + 1).setToolTipText(columns.get(c).tip());
         }
+    }
+
+    /** The same as a click on a head, by the keyboard. */
+    private Menu sortMenu() {
+        Menu menu = new Menu(table);
+        menu.addListener(SWT.Show, e -> {
+            for (MenuItem old : menu.getItems()) {
+                old.dispose();
+            }
+            for (CandidateColumn column : columns) {
+                MenuItem item = new MenuItem(menu, SWT.PUSH);
+                item.setText(Messages.bind(Messages.Table_sortBy, column.title(session.view())));
+                item.addListener(SWT.Selection, s -> sortBy(table.getColumn(columns.indexOf(column) + 1), column));
+            }
+        });
+        return menu;
     }
 
     private void makeColumn(CandidateColumn column) {
@@ -183,16 +204,39 @@ final class CandidateTable extends Composite {
         session.outcome().ifPresent(o -> show());
     }
 
-    /** Shares the width out, so that nothing has to be scrolled sideways. */
-    private void fit() {
-        int width = table.getClientArea().width - SWATCH_WIDTH;
-        int shares = columns.stream().mapToInt(CandidateColumn::share).sum();
-        if (width <= 0 || shares == 0 || table.getColumnCount() == 0) {
+    /** Numbers get what they need, words share the rest, so that no digit is cut and nothing is scrolled sideways. */
+    private void fit(List<Row> rows) {
+        if (table.getColumnCount() == 0 || table.getClientArea().width <= 0) {
             return;
         }
-        for (int c = 0; c < columns.size(); c++) {
-            table.getColumn(c + 1).setWidth(width * columns.get(c).share() / shares);
+        int[] widths = new int[columns.size()];
+        int left = table.getClientArea().width - SWATCH_WIDTH;
+        int shares = 0;
+        GC gc = new GC(table);
+        gc.setFont(strong);
+        for (int c = 0; c < widths.length; c++) {
+            if (columns.get(c).number()) {
+                widths[c] = numberWidth(gc, columns.get(c), rows);
+                left -= widths[c];
+            } else {
+                shares += columns.get(c).share();
+            }
         }
+        gc.dispose();
+        for (int c = 0; c < widths.length; c++) {
+            int width = columns.get(c).number() ? widths[c] : Math.max(0, left * columns.get(c).share() / Math.max(1, shares));
+            if (table.getColumn(c + 1).getWidth() != width) {
+                table.getColumn(c + 1).setWidth(width);
+            }
+        }
+    }
+
+    private int numberWidth(GC gc, CandidateColumn column, List<Row> rows) {
+        int width = gc.textExtent(column.title(session.view())).x + HEAD_MARGIN;
+        for (String number : Aligned.atDecimalSign(rows.stream().map(column::text).toList())) {
+            width = Math.max(width, gc.textExtent(number).x + CELL_MARGIN);
+        }
+        return width;
     }
 
     private void selected(Event event) {

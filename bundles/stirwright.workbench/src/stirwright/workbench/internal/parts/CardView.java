@@ -8,9 +8,12 @@ import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Text;
+import stirwright.core.Choices;
 import stirwright.core.Role;
 import stirwright.correlation.Quantity;
+import stirwright.study.Amounts;
 import stirwright.study.Case;
+import stirwright.study.Picks;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.CaseEdits;
 import stirwright.workbench.internal.session.Outcome;
@@ -61,6 +64,7 @@ final class CardView extends Composite {
         unpick.setToolTipText(Messages.Card_unpickTip);
         session.onOutcome(this::show);
         session.onSelection(this::show);
+        session.onRequest(this::enable);
         show();
     }
 
@@ -75,6 +79,10 @@ final class CardView extends Composite {
             card.setStyleRanges(text.styles());
             card.setTopPixel(same ? top : 0);
         }
+        if (!row.map(Row::key).equals(Optional.ofNullable(card.getData()))) {
+            // A reason speaks of the candidate that it was typed for.
+            reason.setText("");
+        }
         row.map(Row::key).ifPresentOrElse(card::setData, () -> card.setData(null));
         enable();
     }
@@ -83,9 +91,9 @@ final class CardView extends Composite {
     private void enable() {
         Optional<Row> row = session.selected();
         boolean own = row.isPresent() && row.get().familyId().equals(session.familyId());
-        boolean pickable = own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
-        boolean chosen = session.outcome().map(o -> o.rows().stream()
-                .anyMatch(r -> r.role() == Role.CHOSEN && r.familyId().equals(session.familyId()))).orElse(false);
+        boolean pickable = session.fresh() && own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
+        boolean chosen = session.current().map(c -> Picks.get(c, session.view().quantity().id()).isPresent()
+                || Amounts.get(c.getAmounts(), Choices.givenField(session.view().quantity())).isPresent()).orElse(false);
         reason.setEnabled(pickable);
         pick.setEnabled(pickable && !reason.getText().isBlank());
         unpick.setEnabled(chosen);
@@ -109,6 +117,6 @@ final class CardView extends Composite {
     }
 
     private Quantity quantity() {
-        return session.outcome().orElseThrow().view().quantity();
+        return session.view().quantity();
     }
 }

@@ -1,6 +1,7 @@
 package stirwright.workbench.internal.parts;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Objects;
@@ -8,25 +9,28 @@ import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.function.DoubleConsumer;
 import java.util.function.DoubleSupplier;
+import java.util.function.Function;
 import java.util.function.Supplier;
 import org.eclipse.emf.common.util.EList;
-import org.eclipse.swt.layout.FillLayout;
-import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Text;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.widgets.Combo;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Text;
 import stirwright.core.VesselGeometry;
 import stirwright.correlation.Family;
 import stirwright.exchange.CaseField;
 import stirwright.study.Amount;
 import stirwright.study.Amounts;
 import stirwright.study.Case;
-import stirwright.study.Part;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.CaseEdits;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Form;
 import stirwright.workbench.internal.widgets.Looks;
+import stirwright.workbench.internal.widgets.Names;
 import stirwright.workbench.internal.widgets.NumberField;
 
 /** The fields of the case at hand, as long as its family, its model and the parts to choose from stay what they are. */
@@ -47,7 +51,7 @@ final class CaseForm extends Composite {
         this.shape = shape();
         setLayout(new FillLayout());
         form = new Form(this, looks);
-        session.current().ifPresentOrElse(this::build, () -> form.heading(Messages.Case_none));
+        session.current().ifPresentOrElse(this::build, () -> form.sentence(Messages.Case_none));
     }
 
     /** What decides which fields there are. */
@@ -62,17 +66,13 @@ final class CaseForm extends Composite {
             all.add(session.familyId());
             all.add(List.copyOf(c.getCompared()));
             all.add(c.getDemand() == null ? "" : c.getDemand().getColumn());
-            all.add(names(session.editor().study().getFluids()));
-            all.add(names(session.editor().study().getVessels()));
-            all.add(names(session.editor().study().getImpellers()));
-            all.add(session.editor().study().getCases().stream().map(o -> String.valueOf(o.getName())).toList());
+            all.add(List.copyOf(session.editor().study().getCases()));
+            all.add(List.copyOf(session.editor().study().getFluids()));
+            all.add(List.copyOf(session.editor().study().getVessels()));
+            all.add(List.copyOf(session.editor().study().getImpellers()));
         });
         all.add(families().stream().map(Family::id).toList());
         return all;
-    }
-
-    private static List<String> names(List<? extends Part> parts) {
-        return parts.stream().map(p -> String.valueOf(p.getName())).toList();
     }
 
     private List<Family> families() {
@@ -108,9 +108,26 @@ final class CaseForm extends Composite {
         refreshers.add(made[0]::refresh);
     }
 
-    /** A line of text that follows the study. */
-    void text(String title, Supplier<String> stored, Consumer<String> store) {
-        Text text = form.text(title, Objects.requireNonNullElse(stored.get(), ""));
+    /** A choice among things of the study, whose names may change while it stands. */
+    <T> void choice(String title, List<T> all, T current, Function<T, String> name, Consumer<T> use) {
+        Combo combo = form.choice(title, names(all, name), all.indexOf(current), i -> use.accept(all.get(i)));
+        refreshers.add(() -> {
+            List<String> now = names(all, name);
+            if (!List.of(combo.getItems()).equals(now)) {
+                int selected = combo.getSelectionIndex();
+                combo.setItems(now.toArray(String[]::new));
+                combo.select(selected);
+            }
+        });
+    }
+
+    private static <T> List<String> names(List<T> all, Function<T, String> name) {
+        return all.stream().map(name).map(String::valueOf).toList();
+    }
+
+    /** The name of a thing of the study. */
+    void text(String name, Supplier<String> stored, Consumer<String> store) {
+        Text text = form.text(Messages.Case_name, name, Objects.requireNonNullElse(stored.get(), ""));
         text.addListener(SWT.FocusOut, e -> session.editor().endMerge());
         text.addListener(SWT.Modify, e -> store.accept(text.getText()));
         refreshers.add(() -> {
@@ -157,12 +174,21 @@ final class CaseForm extends Composite {
         });
     }
 
-    /** The column of the field that has the focus; empty for none. */
-    String focusedColumn() {
-        return fields.stream().filter(f -> f.control().isFocusControl()).map(NumberField::column).findFirst().orElse("");
+    /** What has the focus, by its name; empty for nothing in here. */
+    String focused() {
+        Control focus = getDisplay().getFocusControl();
+        for (Control parent = focus; parent != null; parent = parent.getParent()) {
+            if (parent == this) {
+                return Objects.requireNonNullElse(Names.of(focus), "");
+            }
+        }
+        return "";
     }
 
-    void focus(String column) {
-        fields.stream().filter(f -> f.column().equals(column)).findFirst().ifPresent(f -> f.control().setFocus());
+    /** Gives the focus to the control of that name, where there is one. */
+    void focus(String name) {
+        if (!name.isEmpty()) {
+            Arrays.stream(form.getChildren()).filter(c -> name.equals(Names.of(c))).findFirst().ifPresent(Control::setFocus);
+        }
     }
 }

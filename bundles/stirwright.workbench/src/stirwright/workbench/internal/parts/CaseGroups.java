@@ -40,10 +40,8 @@ final class CaseGroups {
         if (session.editor().study().getCases().size() > 1) {
             form.looks().link(head, Messages.Case_remove, () -> edits.removeCase(c));
         }
-        List<Case> all = session.editor().study().getCases();
-        form.choice(Messages.Case_case, all.stream().map(Case::getName).map(String::valueOf).toList(), all.indexOf(c),
-                i -> session.turnTo(all.get(i)));
-        fields.text(Messages.Case_name, c::getName, name -> edits.rename(c, name));
+        fields.choice(Messages.Case_case, session.editor().study().getCases(), c, Case::getName, session::turnTo);
+        fields.text(Messages.Case_nameOfCase, c::getName, name -> edits.rename(c, name));
     }
 
     void speed(Case c) {
@@ -51,7 +49,7 @@ final class CaseGroups {
         List<CaseField> kinds = CaseFields.SPEEDS;
         CaseField now = Demands.field(c);
         form.choice(Messages.Case_demand, kinds.stream().map(Demands::title).toList(), kinds.indexOf(now),
-                i -> edits.demand(c, kinds.get(i).column(), Demands.equivalent(session.outcome(), kinds.get(i))));
+                i -> edits.demand(c, kinds.get(i).column(), Demands.equivalent(session, c, kinds.get(i))));
         fields.number(CaseForm.capital(now.title()), now,
                 () -> Demands.value(c), value -> edits.demand(c, now.column(), value));
     }
@@ -64,7 +62,7 @@ final class CaseGroups {
             return;
         }
         form.looks().link(head, Messages.Case_copy, () -> edits.copyFluid(c));
-        fields.text(Messages.Case_name, fluid::getName, name -> edits.rename(Messages.Edit_name, fluid, name));
+        fields.text(Messages.Case_nameOfFluid, fluid::getName, name -> edits.rename(Messages.Edit_name, fluid, name));
         List<ModelKind> kinds = Arrays.asList(ModelKind.values());
         Optional<ModelKind> kind = Optional.ofNullable(fluid.getModel()).flatMap(ModelKind::byId);
         form.choice(Messages.Case_model, kinds.stream().map(CaseGroups::title).toList(),
@@ -81,7 +79,7 @@ final class CaseGroups {
         part(Messages.Case_vessel, session.editor().study().getVessels(), vessel, v -> edits.use(c, v));
         if (vessel != null) {
             form.looks().link(head, Messages.Case_copy, () -> edits.copyVessel(c));
-            fields.text(Messages.Case_name, vessel::getName, name -> edits.rename(Messages.Edit_name, vessel, name));
+            fields.text(Messages.Case_nameOfVessel, vessel::getName, name -> edits.rename(Messages.Edit_name, vessel, name));
             family().ifPresent(f -> CaseFields.vessel(f).forEach(d -> fields.number(d, vessel.getAmounts())));
         }
     }
@@ -94,7 +92,7 @@ final class CaseGroups {
             return;
         }
         form.looks().link(head, Messages.Case_copy, () -> edits.copyImpeller(c));
-        fields.text(Messages.Case_name, impeller::getName, name -> edits.rename(Messages.Edit_name, impeller, name));
+        fields.text(Messages.Case_nameOfImpeller, impeller::getName, name -> edits.rename(Messages.Edit_name, impeller, name));
         List<String> ids = families.stream().map(Family::id).toList();
         form.choice(Messages.Case_family, families.stream().map(Family::title).toList(), ids.indexOf(session.familyId()),
                 i -> edits.family(c, impeller, ids.get(i)));
@@ -116,8 +114,7 @@ final class CaseGroups {
     }
 
     private <P extends Part> void part(String title, List<P> all, P current, Consumer<P> use) {
-        form.choice(title, all.stream().map(Part::getName).map(String::valueOf).toList(), all.indexOf(current),
-                i -> use.accept(all.get(i)));
+        fields.choice(title, all, current, Part::getName, use);
     }
 
     private Optional<Family> family() {

@@ -5,6 +5,7 @@ import jakarta.inject.Inject;
 import org.eclipse.e4.ui.di.Focus;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.ScrolledComposite;
+import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
@@ -45,8 +46,10 @@ public final class CasePart {
         if (form.fits()) {
             form.refresh();
         } else {
-            String focus = form.focusedColumn();
+            String focus = form.focused();
+            Point origin = scroller.getOrigin();
             rebuild();
+            scroller.setOrigin(origin);
             form.focus(focus);
         }
     }

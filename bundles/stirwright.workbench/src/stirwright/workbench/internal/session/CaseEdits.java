@@ -48,7 +48,9 @@ public final class CaseEdits {
         if (now != null && now.getColumn().equals(column) && Double.compare(Demands.value(one), value) == 0) {
             return;
         }
-        session.editor().edit(Messages.Edit_speed, List.of(System.identityHashCode(one), "demand"), () -> {
+        // Turning to another kind is a step of its own; typing its value is another.
+        boolean sameKind = now != null && now.getColumn().equals(column);
+        session.editor().edit(Messages.Edit_speed, sameKind ? List.of(System.identityHashCode(one), "demand") : null, () -> {
             Amount demand = StudyFactory.eINSTANCE.createAmount();
             demand.setColumn(column);
             if (!Double.isNaN(value)) {
@@ -129,7 +131,14 @@ public final class CaseEdits {
 
     public void use(Case one, Impeller impeller) {
         if (one.getImpeller() != impeller) {
-            session.editor().edit(Messages.Edit_impeller, () -> one.setImpeller(impeller));
+            String before = session.familyId();
+            session.editor().edit(Messages.Edit_impeller, () -> {
+                one.setImpeller(impeller);
+                // Picks made for another family mean nothing for this one.
+                if (!before.equals(impeller.getFamily())) {
+                    one.getPicks().clear();
+                }
+            });
         }
     }
 

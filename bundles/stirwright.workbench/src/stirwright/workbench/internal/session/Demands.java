@@ -1,6 +1,5 @@
 package stirwright.workbench.internal.session;
 
-import java.util.Optional;
 import stirwright.core.CandidateResult;
 import stirwright.core.FluidState;
 import stirwright.exchange.CaseField;
@@ -32,9 +31,19 @@ public final class Demands {
         return c.getDemand() != null && c.getDemand().isSetValue() ? c.getDemand().getValue() : Double.NaN;
     }
 
-    /** The demand of another kind that the last result met, so that turning from one to the other changes no number much. */
-    public static double equivalent(Optional<Outcome> outcome, CaseField kind) {
-        return outcome.flatMap(o -> o.main().result().pick()).filter(p -> p.state().isPresent())
+    /**
+     * What a case has now in another kind, so that turning from one to the other changes no number much; NaN where that is
+     * not known.
+     */
+    public static double equivalent(Session session, Case c, CaseField kind) {
+        double now = value(c);
+        if (field(c).equals(CaseFields.SPEED_RPM) && kind.equals(CaseFields.SPEED_REV_S)) {
+            return now / MINUTE;
+        }
+        if (field(c).equals(CaseFields.SPEED_REV_S) && kind.equals(CaseFields.SPEED_RPM)) {
+            return now * MINUTE;
+        }
+        return !session.fresh() ? Double.NaN : session.outcome().flatMap(o -> o.main().result().pick()).filter(p -> p.state().isPresent())
                 .map(p -> value(p, p.state().get(), kind)).orElse(Double.NaN);
     }
 

@@ -1,8 +1,12 @@
 package stirwright.workbench.internal.session;
 
 import java.util.List;
+import java.util.Optional;
 import stirwright.chart.Picture;
+import stirwright.core.CaseResult;
 import stirwright.core.Catalogue;
+import stirwright.core.Refusal;
+import stirwright.workbench.internal.Messages;
 
 /**
  * All that the window shows for one state of the study. Immutable.
@@ -15,6 +19,13 @@ public record Outcome(Catalogue catalogue, Words words, View view, List<Sheet> s
     public Outcome {
         sheets = List.copyOf(sheets);
         rows = List.copyOf(rows);
+    }
+
+    /** What is shown of a study without a case: nothing but the way on. */
+    static Outcome withoutCase(Catalogue catalogue, View view) {
+        CaseResult none = CaseResult.refused("", "", new Refusal(Messages.Case_none, "", ""));
+        return new Outcome(catalogue, new Words(catalogue), view,
+                List.of(new Sheet("", "", none, Optional.empty(), Optional.empty())), List.of(), Picture.empty(Messages.Case_none));
     }
 
     /** The case with its own family. */

@@ -17,23 +17,29 @@ final class Recalculator implements AutoCloseable {
     private final AtomicLong newest = new AtomicLong();
     private final Executor ui;
     private final Consumer<Outcome> receiver;
+    private final Runnable failed;
     /** The request whose outcome was delivered last, or given up by hand. */
     private volatile long settled;
     private volatile Throwable defect;
+    private volatile boolean stopped;
 
     /**
      * @param ui runs what touches widgets
      * @param receiver of each outcome that is still wanted, called by {@code ui}
+     * @param failed called by {@code ui} when a request ends in a defect or is stopped by hand
      */
-    Recalculator(Executor ui, Consumer<Outcome> receiver) {
+    Recalculator(Executor ui, Consumer<Outcome> receiver, Runnable failed) {
         this.ui = ui;
         this.receiver = receiver;
+        this.failed = failed;
     }
 
     void request(Request request) {
         long mine = newest.incrementAndGet();
+        stopped = false;
         CompletableFuture.supplyAsync(() -> Calculation.of(request, () -> mine != newest.get()), worker)
-                .whenCompleteAsync((outcome, failure) -> settle(mine, outcome, failure), ui);
+                // Handed over and not chained: what a listener throws must reach the event loop and not end in a future.
+                .whenComplete((outcome, failure) -> ui.execute(() -> settle(mine, outcome, failure)));
     }
 
     private void settle(long mine, Outcome outcome, Throwable failure) {
@@ -44,6 +50,8 @@ final class Recalculator implements AutoCloseable {
         defect = failure;
         if (failure == null) {
             receiver.accept(outcome);
+        } else {
+            failed.run();
         }
     }
 
@@ -52,9 +60,16 @@ final class Recalculator implements AutoCloseable {
         return settled != newest.get();
     }
 
-    /** Gives up what is being worked on; the last outcome stays. */
+    /** Gives up what is being worked on; the last outcome stays, and is known to be of an earlier input. */
     void stop() {
+        stopped |= busy();
         settled = newest.incrementAndGet();
+        failed.run();
+    }
+
+    /** Whether the last outcome is not that of the newest request, because that was stopped by hand. */
+    boolean stopped() {
+        return stopped;
     }
 
     /** What ended the newest request instead of an outcome; null when nothing did. */
@@ -64,7 +79,7 @@ final class Recalculator implements AutoCloseable {
 
     @Override
     public void close() {
-        stop();
+        newest.incrementAndGet();
         worker.shutdownNow();
     }
 }

@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.ToDoubleFunction;
 import stirwright.core.CandidateResult;
 import stirwright.core.Catalogue;
 import stirwright.core.Entry;
@@ -20,6 +21,7 @@ final class Rows {
     private final Quantity quantity;
     private final Map<String, Integer> styles = new HashMap<>();
     private final List<Row> rows = new ArrayList<>();
+    private Sheet main;
 
     private Rows(Catalogue catalogue, Quantity quantity) {
         this.catalogue = catalogue;
@@ -29,6 +31,7 @@ final class Rows {
     static List<Row> of(Catalogue catalogue, Quantity quantity, List<Sheet> sheets) {
         Rows rows = new Rows(catalogue, quantity);
         sheets.forEach(rows::styleAll);
+        rows.main = sheets.get(0);
         sheets.stream().filter(Sheet::computed).forEach(rows::add);
         return List.copyOf(rows.rows);
     }
@@ -55,18 +58,30 @@ final class Rows {
     }
 
     private void addPower(Sheet sheet, CandidateResult r) {
-        double reference = rows.isEmpty() ? r.power() : rows.get(0).power();
+        boolean pick = isPick(sheet);
+        double reference = pick ? r.power() : reference(Row::power);
         rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.correlation(), title(r.correlation()),
-                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), rows.isEmpty(), r.role(),
+                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), pick, r.role(),
                 r.powerNumber(), r.state().map(FluidState::speed).orElse(Double.NaN), r.power(), r.torque(),
                 r.power() / reference - 1, r.verdict(), r.failedBounds(), r.why()));
     }
 
     private void addOther(Sheet sheet, QuantityResult r) {
-        double reference = rows.isEmpty() ? r.value() : rows.get(0).value();
+        boolean pick = isPick(sheet);
+        double reference = pick ? r.value() : reference(Row::value);
         rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.id(), title(r.id()), r.correlation(), style(sheet, r.id()),
-                rows.isEmpty(), r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
+                pick, r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
                 r.failedBounds(), r.why()));
+    }
+
+    /** The first candidate of the case's own family; results have their pick first. */
+    private boolean isPick(Sheet sheet) {
+        return sheet == main && rows.isEmpty();
+    }
+
+    /** What deviations are taken from; unknown where the case's own family has no number. */
+    private double reference(ToDoubleFunction<Row> number) {
+        return rows.isEmpty() || !rows.get(0).pick() ? Double.NaN : number.applyAsDouble(rows.get(0));
     }
 
     private String title(String id) {

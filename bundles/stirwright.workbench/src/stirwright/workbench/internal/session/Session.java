@@ -26,6 +26,7 @@ public final class Session implements AutoCloseable {
     private final List<Runnable> onStudy = new CopyOnWriteArrayList<>();
     private final List<Runnable> onOutcome = new CopyOnWriteArrayList<>();
     private final List<Runnable> onSelection = new CopyOnWriteArrayList<>();
+    private final List<Runnable> onRequest = new CopyOnWriteArrayList<>();
     private final Set<String> hidden = new HashSet<>();
 
     private StudyEditor editor;
@@ -38,7 +39,7 @@ public final class Session implements AutoCloseable {
     /** @param ui runs what touches widgets, later and in order */
     public Session(Library library, Executor ui, Study study, Optional<Path> file) {
         this.library = library;
-        this.recalculator = new Recalculator(ui, this::take);
+        this.recalculator = new Recalculator(ui, this::take, () -> onRequest.forEach(Runnable::run));
         this.arrivals = library.listen(() -> ui.execute(this::recalculate));
         open(study, file);
     }
@@ -67,11 +68,14 @@ public final class Session implements AutoCloseable {
         recalculate();
     }
 
-    private void recalculate() {
+    /** Computes the case at hand anew. */
+    public void recalculate() {
+        Catalogue catalogue = library.catalogue();
         if (current == null) {
+            recalculator.stop();
+            take(Outcome.withoutCase(catalogue, view));
             return;
         }
-        Catalogue catalogue = library.catalogue();
         List<Request.Entry> entries = new ArrayList<>();
         entries.add(new Request.Entry(familyId(), StudyCases.entry(current, catalogue)));
         for (String other : current.getCompared()) {
@@ -80,6 +84,23 @@ public final class Session implements AutoCloseable {
             }
         }
         recalculator.request(new Request(catalogue, entries, view));
+        onRequest.forEach(Runnable::run);
+    }
+
+    /** Takes the last step back, and turns to a case that it changed when that is not the one at hand. */
+    public void undo() {
+        walk(editor::undo);
+    }
+
+    /** Does again what was undone last, and turns to a case that it changes. */
+    public void redo() {
+        walk(editor::redo);
+    }
+
+    private void walk(Runnable step) {
+        CaseChanges changes = new CaseChanges(editor.study());
+        step.run();
+        changes.toShow(current).ifPresent(this::turnTo);
     }
 
     private void take(Outcome fresh) {
@@ -172,6 +193,16 @@ public final class Session implements AutoCloseable {
         recalculator.stop();
     }
 
+    /** Whether what is shown was computed from what stands in the study now. */
+    public boolean fresh() {
+        return outcome != null && !recalculator.busy() && !recalculator.stopped() && recalculator.defect() == null;
+    }
+
+    /** Whether the newest numbers were given up by hand. */
+    public boolean stopped() {
+        return recalculator.stopped();
+    }
+
     /** A defect in the last calculation; null when there is none. */
     public Throwable defect() {
         return recalculator.defect();
@@ -185,6 +216,11 @@ public final class Session implements AutoCloseable {
     /** Called when new numbers are there. */
     public void onOutcome(Runnable listener) {
         onOutcome.add(listener);
+    }
+
+    /** Called when new numbers are asked for, and when they are given up or fail. */
+    public void onRequest(Runnable listener) {
+        onRequest.add(listener);
     }
 
     /** Called when another candidate is selected or a curve is switched on or off. */

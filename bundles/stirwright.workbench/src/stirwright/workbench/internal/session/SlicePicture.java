@@ -98,7 +98,7 @@ final class SlicePicture {
     }
 
     private static Optional<Mark> mark(Row pick, double x, String xSymbol, String ySymbol) {
-        return Double.isFinite(pick.value()) && Double.isFinite(x)
+        return pick.pick() && Double.isFinite(pick.value()) && Double.isFinite(x)
                 ? Optional.of(new Mark(x, pick.value(), xSymbol + " " + Figures.show(x),
                         ySymbol + " " + Figures.show(pick.value())))
                 : Optional.empty();

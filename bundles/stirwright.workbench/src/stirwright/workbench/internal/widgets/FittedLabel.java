@@ -37,8 +37,9 @@ public final class FittedLabel {
         gc.setFont(label.getFont());
         String shown = shortened.fit(gc, text, label.getSize().x);
         gc.dispose();
-        if (!label.getText().equals(shown)) {
-            label.setText(shown);
+        String literal = Looks.literal(shown);
+        if (!label.getText().equals(literal)) {
+            label.setText(literal);
         }
         label.setToolTipText(shown.equals(text) ? null : text);
     }

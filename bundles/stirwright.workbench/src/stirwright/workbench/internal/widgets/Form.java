@@ -54,6 +54,14 @@ public final class Form extends Composite {
         return line;
     }
 
+    /** A sentence in place of fields. */
+    public void sentence(String words) {
+        Label label = looks.label(this, SWT.WRAP, words);
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, COLUMNS, 1);
+        data.widthHint = LABEL_WIDTH + FIELD_WIDTH;
+        label.setLayoutData(data);
+    }
+
     /** A choice among words; the unit's column stays empty. */
     public Combo choice(String title, List<String> words, int current, IntConsumer chosen) {
         caption(title);
@@ -71,10 +79,14 @@ public final class Form extends Composite {
         return combo;
     }
 
-    /** A line of plain text. */
-    public Text text(String title, String value) {
+    /**
+     * A line of plain text.
+     *
+     * @param name for those who hear the window, where the title alone says too little
+     */
+    public Text text(String title, String name, String value) {
         caption(title);
-        Text text = Names.name(new Text(this, SWT.BORDER), title);
+        Text text = Names.name(new Text(this, SWT.BORDER), name);
         text.setText(value);
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
         data.widthHint = FIELD_WIDTH;
@@ -89,6 +101,7 @@ public final class Form extends Composite {
         Text text = Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), shownUnit.isEmpty() ? title : title + ", " + shownUnit);
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
         data.widthHint = FIELD_WIDTH;
+        data.minimumWidth = FIELD_WIDTH;
         text.setLayoutData(data);
         Label behind = looks.quiet(this, SWT.NONE, shownUnit);
         GridData unitData = new GridData(SWT.LEFT, SWT.CENTER, false, false);

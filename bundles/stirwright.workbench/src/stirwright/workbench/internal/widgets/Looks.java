@@ -73,6 +73,11 @@ public final class Looks {
         return label;
     }
 
+    /** Text of people's own for a label, which would take a single ampersand for the mark of a key. */
+    public static String literal(String words) {
+        return words.replace("&", "&&");
+    }
+
     /** Words that recede. */
     public Label quiet(Composite parent, int style, String text) {
         Label label = label(parent, style, text);

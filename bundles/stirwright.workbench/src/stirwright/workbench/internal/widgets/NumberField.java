@@ -11,7 +11,7 @@ import stirwright.exchange.TypedNumber;
 
 /**
  * A number of the case as people type it, with another unit if they like. What cannot be read stays in the field with the
- * reason below it, and the study keeps its last value until the text can be read.
+ * reason below it, and the study goes back to what it had before the typing began, until the text can be read.
  */
 public final class NumberField {
     private final CaseField field;
@@ -23,6 +23,8 @@ public final class NumberField {
     private final Looks looks;
     private String problem = "";
     private boolean refreshing;
+    /** What the study had when this field's text and the study agreed last and nobody was typing. */
+    private double before;
 
     /**
      * @param stored what the study has, in the column's unit; NaN for nothing
@@ -40,7 +42,15 @@ public final class NumberField {
         this.looks = form.looks();
         this.text = form.number(title, field.unit());
         this.remark = form.remark();
-        text.setText(TypedNumber.show(stored.getAsDouble()));
+        before = stored.getAsDouble();
+        text.setText(TypedNumber.show(before));
+        // With the keyboard one goes from field to field to type anew; a click sets the caret afterwards.
+        text.addListener(SWT.FocusIn, e -> {
+            text.selectAll();
+            if (problem.isEmpty()) {
+                before = stored.getAsDouble();
+            }
+        });
         text.addListener(SWT.Modify, e -> typed());
         text.addListener(SWT.FocusOut, e -> {
             settle();
@@ -75,7 +85,10 @@ public final class NumberField {
                 setProblem("");
                 store.accept(Double.NaN);
             }
-            case TypedNumber.Problem unreadable -> setProblem(unreadable.words());
+            case TypedNumber.Problem unreadable -> {
+                setProblem(unreadable.words());
+                store.accept(before);
+            }
         }
     }
 
@@ -91,7 +104,8 @@ public final class NumberField {
     /** Once it is left, the field shows the number in its own unit. */
     private void settle() {
         if (problem.isEmpty()) {
-            put(TypedNumber.show(stored.getAsDouble()));
+            before = stored.getAsDouble();
+            put(TypedNumber.show(before));
         }
     }
 
@@ -100,9 +114,11 @@ public final class NumberField {
         boolean same = switch (TypedNumber.read(text.getText(), field)) {
             case TypedNumber.Value value -> Double.compare(value.value(), stored.getAsDouble()) == 0;
             case TypedNumber.Blank blank -> Double.isNaN(stored.getAsDouble());
-            case TypedNumber.Problem unreadable -> text.isFocusControl();
+            // The study is still where it was, so nothing speaks against the text.
+            case TypedNumber.Problem unreadable -> Double.compare(before, stored.getAsDouble()) == 0;
         };
         if (!same) {
+            before = stored.getAsDouble();
             put(TypedNumber.show(stored.getAsDouble()));
             setProblem("");
         }
@@ -132,10 +148,11 @@ public final class NumberField {
     }
 
     private void showRemark(String words) {
-        if (remark.getText().equals(words)) {
+        String literal = Looks.literal(words);
+        if (remark.getText().equals(literal)) {
             return;
         }
-        remark.setText(words);
+        remark.setText(literal);
         remark.setForeground(looks.palette().outside());
         remark.setVisible(!words.isEmpty());
         ((GridData) remark.getLayoutData()).exclude = words.isEmpty();
