@@ -55,6 +55,7 @@ public final class Messages extends NLS {
     public static String Case_nameOfFluid;
     public static String Case_nameOfImpeller;
     public static String Case_nameOfVessel;
+    public static String Case_noDemand;
     public static String Case_none;
     public static String Case_remove;
     public static String Case_speed;

@@ -29,7 +29,7 @@ final class CardText {
     static CardText of(Outcome outcome, Optional<Row> row) {
         CardText card = new CardText();
         CaseResult result = outcome.main().result();
-        result.refusal().ifPresent(r -> card.section(Messages.Card_refused, List.of(outcome.words().of(r.words()))));
+        result.refusal().ifPresent(r -> card.section(Messages.Card_refused, List.of(outcome.words().of(r))));
         row.ifPresent(r -> card.candidate(outcome, r));
         if (!result.flags().isEmpty()) {
             card.section(Messages.Card_flags, outcome.words().of(result.flags()));

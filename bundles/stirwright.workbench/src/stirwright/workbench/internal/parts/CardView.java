@@ -54,7 +54,7 @@ final class CardView extends Composite {
         footLayout.marginWidth = 0;
         footLayout.marginHeight = 0;
         foot.setLayout(footLayout);
-        reason = Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName);
+        reason = looks.field(Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName));
         reason.setMessage(Messages.Card_reason);
         reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
         reason.addListener(SWT.Modify, e -> enable());

@@ -169,7 +169,7 @@ final class CaseForm extends Composite {
                         .filter(p -> p.column().equals(field.column()) && v.defaulted().contains(p)).findFirst()
                         .map(v::defaultValueInWords))).orElse(""));
                 field.showRefusal(outcome.main().result().refusal().filter(r -> r.field().equals(field.column()))
-                        .map(r -> outcome.words().of(r.words())).orElse(""));
+                        .map(r -> outcome.words().of(r)).orElse(""));
             }
         });
     }

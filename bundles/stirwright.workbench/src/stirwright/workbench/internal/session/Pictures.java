@@ -15,7 +15,7 @@ final class Pictures {
             Catalogue catalogue, Words words, View view, List<Sheet> sheets, List<Row> rows, BooleanSupplier stale) {
         Sheet main = sheets.get(0);
         if (!main.computed()) {
-            return Picture.empty(main.result().refusal().map(r -> words.of(r.words())).orElse(""));
+            return Picture.empty(main.result().refusal().map(words::of).orElse(""));
         }
         if (rows.isEmpty()) {
             return Picture.empty(Messages.bind(Messages.Chart_noCandidates, view.title(), main.familyTitle()));

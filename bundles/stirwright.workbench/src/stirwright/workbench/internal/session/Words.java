@@ -9,10 +9,12 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import stirwright.core.Catalogue;
+import stirwright.core.Refusal;
 import stirwright.correlation.Family;
 import stirwright.exchange.CaseField;
 import stirwright.exchange.CaseFields;
 import stirwright.rheology.ModelKind;
+import stirwright.workbench.internal.Messages;
 
 /** Sentences of the core as the window says them: with the titles of its fields in place of the case table's columns. */
 public final class Words {
@@ -36,6 +38,12 @@ public final class Words {
 
     public String of(String sentence) {
         return columns.matcher(sentence).replaceAll(m -> Matcher.quoteReplacement(titles.get(m.group(1))));
+    }
+
+    /** Why a case cannot be computed; of a blank field that which is to be done. */
+    public String of(Refusal refusal) {
+        boolean noDemand = refusal.value().isEmpty() && CaseFields.SPEEDS.stream().anyMatch(f -> f.column().equals(refusal.field()));
+        return noDemand ? Messages.Case_noDemand : of(refusal.words());
     }
 
     public List<String> of(List<String> sentences) {

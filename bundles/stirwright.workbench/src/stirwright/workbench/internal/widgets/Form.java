@@ -86,7 +86,7 @@ public final class Form extends Composite {
      */
     public Text text(String title, String name, String value) {
         caption(title);
-        Text text = Names.name(new Text(this, SWT.BORDER), name);
+        Text text = looks.field(Names.name(new Text(this, SWT.BORDER), name));
         text.setText(value);
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
         data.widthHint = FIELD_WIDTH;
@@ -98,7 +98,8 @@ public final class Form extends Composite {
     Text number(String title, String unit) {
         caption(title);
         String shownUnit = unit.equals("-") ? "" : unit.replace("revolution", "rev");
-        Text text = Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), shownUnit.isEmpty() ? title : title + ", " + shownUnit);
+        Text text = looks.field(Names.name(new Text(this, SWT.BORDER | SWT.RIGHT),
+                shownUnit.isEmpty() ? title : title + ", " + shownUnit));
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
         data.widthHint = FIELD_WIDTH;
         data.minimumWidth = FIELD_WIDTH;

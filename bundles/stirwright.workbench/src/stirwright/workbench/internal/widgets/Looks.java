@@ -9,6 +9,7 @@ import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
+import org.eclipse.swt.widgets.Text;
 import stirwright.chart.Palette;
 
 /** Colours, fonts and distances of the whole window. Lives as long as the display. */
@@ -58,6 +59,13 @@ public final class Looks {
         control.setBackground(palette.page());
         control.setForeground(palette.text());
         return control;
+    }
+
+    /** Raises a field above the page, which it would else take its colour from. */
+    public Text field(Text text) {
+        text.setBackground(palette.surface());
+        text.setForeground(palette.text());
+        return text;
     }
 
     /** An empty area of the page. */
