@@ -4,10 +4,16 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.ByteArrayOutputStream;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipOutputStream;
 import org.junit.jupiter.api.Test;
 import org.osgi.framework.Bundle;
+import org.osgi.framework.BundleActivator;
+import org.osgi.framework.BundleContext;
 import stirwright.trust.DropIn;
 import stirwright.trust.DropIn.State;
 
@@ -76,6 +82,61 @@ class DropInTroublesTest extends Dropping {
         drop("a.jar", Tattler.bundle(NAME, "2.0.0"));
         awaited(jar, State.ASKS);
         assertNull(Tattler.ran(NAME));
+    }
+
+    /** Who reads entry by entry sees one manifest, who looks it up by its name the other. */
+    @Test
+    void aSecondManifestMakesNoFragment() throws Exception {
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+        try (ZipOutputStream out = new ZipOutputStream(bytes)) {
+            for (String[] file : new String[][] {{"meta-inf/manifest.mf", ""}, {"META-INF/MANIFEST.MF", "Fragment-Host: stirwright.core\n"}}) {
+                out.putNextEntry(new ZipEntry(file[0]));
+                out.write(("Manifest-Version: 1.0\nBundle-ManifestVersion: 2\nBundle-SymbolicName: " + NAME
+                        + "\nBundle-Version: 1.0.0\n" + file[1]).getBytes(StandardCharsets.UTF_8));
+            }
+        }
+        Path jar = dropApproved("a.jar", bytes.toByteArray());
+        String message = awaited(jar, State.UNUSABLE).message();
+        assertTrue(message.contains("fragment by one of its manifests"), message);
+        assertTrue(Framework.bundle(NAME).isEmpty());
+    }
+
+    @Test
+    void aStartThatHangsKeepsNobodyWaiting() throws Exception {
+        watcher().stop();
+        Path jar = drop("a.jar", TinyBundle.named(NAME).holding(Sleeper.class)
+                .header("Bundle-Activator", Sleeper.class.getName()));
+        Files.createDirectories(settings);
+        Files.writeString(settings.resolve("approved.txt"), sha256(jar) + " " + NAME + " 2030-01-31\n");
+        try {
+            watcher().start();
+            String message = awaited(jar, State.UNUSABLE).message();
+            assertTrue(message.contains("end of its start within 5 s"), message);
+            Path other = dropApproved("b.jar", Tattler.bundle(NAME, "2.0.0"));
+            awaited(other, State.RUNNING);
+        } finally {
+            Sleeper.wake();
+        }
+        awaited(jar, State.RUNNING);
+    }
+
+    /** Starts only when it is woken. */
+    public static final class Sleeper implements BundleActivator {
+        @Override
+        public void start(BundleContext context) throws InterruptedException {
+            while (System.getProperty("dropped.sleeper") == null) {
+                Thread.sleep(20);
+            }
+        }
+
+        static void wake() {
+            System.setProperty("dropped.sleeper", "awake");
+        }
+
+        @Override
+        public void stop(BundleContext context) {
+            // Holds nothing.
+        }
     }
 
     @Test

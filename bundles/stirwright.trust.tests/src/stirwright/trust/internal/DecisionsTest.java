@@ -99,11 +99,28 @@ class DecisionsTest {
         assertTrue(decisions.problems().get(0).contains("approved.txt: cannot be read"), decisions.problems().toString());
     }
 
+    /** A link to itself looks like no file, and cannot be read. */
+    @Test
+    void whatCouldNotBeReadIsTriedAgainAtTheNextLook() throws IOException {
+        Files.createDirectories(folder);
+        Path list = Files.createSymbolicLink(folder.resolve("approved.txt"), folder.resolve("approved.txt"));
+        decisions = new Decisions(folder);
+        assertTrue(decisions.refresh());
+        assertEquals(1, decisions.problems().size());
+        assertFalse(decisions.refresh(), "nothing new");
+        Files.delete(list);
+        assertTrue(decisions.refresh());
+        assertEquals(List.of(), decisions.problems());
+    }
+
     @Test
     void aFolderThatCannotBeWrittenIsTold() throws IOException {
-        Files.writeString(temporary.resolve("deep"), "a file where the folder should be");
+        folder = temporary.resolve("deep");
+        decisions = new Decisions(folder);
+        Files.writeString(folder, "a file where the folder should be");
         UncheckedIOException failure = assertThrows(UncheckedIOException.class, () -> decisions.approve(HASH, "a"));
         assertTrue(failure.getMessage().contains("approved.txt cannot be written"), failure.getMessage());
+        assertTrue(failure.getMessage().endsWith("deep is a file where a folder belongs"), failure.getMessage());
     }
 
     @Test

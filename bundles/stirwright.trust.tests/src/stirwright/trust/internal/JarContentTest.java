@@ -72,10 +72,34 @@ class JarContentTest {
         refused("has no META-INF/MANIFEST.MF", Jars.zip("x", "y"));
         refused("no Bundle-SymbolicName", Jars.bundle("Bundle-Version: 1.0.0"));
         refused("no Bundle-SymbolicName", Jars.bundle("Bundle-SymbolicName: ;singleton:=true"));
+        for (String nameless : new String[] {";", ";;", " ; "}) {
+            refused("no Bundle-SymbolicName", Jars.bundle("Bundle-SymbolicName: " + nameless));
+        }
+        refused("other characters", Jars.bundle("Bundle-SymbolicName: a\u001b[31mb"));
+        refused("other characters", Jars.bundle("Bundle-SymbolicName: a b"));
         refused("fragment of a.host", Jars.bundle("Bundle-SymbolicName: a", "Fragment-Host: a.host"));
         refused("Bundle-Version 'one'", Jars.bundle("Bundle-SymbolicName: a", "Bundle-Version: one"));
         refused("not a readable jar", Jars.bundle("Bundle-SymbolicName: a", "no header"));
         refused("manifest of more than 1 MiB", Jars.zip("META-INF/MANIFEST.MF", "x".repeat((1 << 20) + 1)));
+    }
+
+    @Test
+    void whatStandsBeforeTheManifestIsUnpackedToALimit() throws IOException {
+        String manifest = "Manifest-Version: 1.0\nBundle-SymbolicName: a\n";
+        String zeros = "0".repeat(40 << 20);
+        assertEquals("a", read(Jars.zip("x", zeros, "META-INF/MANIFEST.MF", manifest)).name());
+        refused("more than 64 MiB, unpacked, before", Jars.zip("x", zeros, "y", zeros, "META-INF/MANIFEST.MF", manifest));
+        assertEquals("a", read(Jars.zip("META-INF/MANIFEST.MF", manifest, "x", zeros, "y", zeros)).name());
+    }
+
+    @Test
+    void messagesHoldNothingThatATerminalObeys() throws IOException {
+        for (String odd : new String[] {"\u001b]0;x\u0007", "\u009b31m", "\u202e", "\u007f"}) {
+            JarContent read = read(Jars.bundle("Bundle-SymbolicName: a", "Fragment-Host: b" + odd + "c"));
+            String told = Guest.view(folder.resolve("some.jar"), read, new Decisions(folder)).message();
+            assertTrue(told.contains("fragment of b") && told.codePoints().noneMatch(c -> Character.isISOControl(c)
+                    || Character.getType(c) == Character.FORMAT), told);
+        }
     }
 
     @Test

@@ -85,7 +85,7 @@ final class Doorkeeper {
         while (again) {
             again = false;
             for (Guest guest : guests.values()) {
-                if (guest.mayRun(decisions) && !guest.runs()) {
+                if (guest.mayRun(decisions) && !guest.runs() && !guest.hangs()) {
                     again |= tryToStart(guest);
                 }
             }

@@ -3,7 +3,6 @@ package stirwright.trust.internal;
 import java.util.List;
 import java.util.Objects;
 import java.util.stream.Stream;
-import org.osgi.framework.BundleException;
 
 /** Why a bundle does not start, in words. */
 final class Failures {
@@ -12,7 +11,7 @@ final class Failures {
     private Failures() {}
 
     /** What is missing when that is why, else the first cause. */
-    static String words(BundleException failure) {
+    static String words(Throwable failure) {
         // The framework tells what is missing in its message alone.
         List<String> missing = String.valueOf(failure.getMessage()).lines().map(String::strip)
                 .filter(line -> line.startsWith(UNRESOLVED))

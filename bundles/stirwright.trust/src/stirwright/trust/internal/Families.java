@@ -38,7 +38,7 @@ public final class Families implements DropIns {
         host = new Host(context);
         doorkeeper = new Doorkeeper(new FolderWatch(folder), decisions, host);
         host.open();
-        publish(doorkeeper.look(true));
+        look(true);
         watcher = new Thread(this::watch, "stirwright-families");
         watcher.setDaemon(true);
         watcher.start();
@@ -57,13 +57,19 @@ public final class Families implements DropIns {
 
     private void watch() {
         while (!pausedUntilTheEnd()) {
-            try {
-                publish(doorkeeper.look(false));
-            } catch (RuntimeException defect) {
-                // Whatever went wrong at this look, the folder must be watched on: an unwatched one would keep running
-                // what the user takes out.
-                logger().log(Level.WARNING, "a look into " + folder + " failed", defect);
-            }
+            look(false);
+        }
+    }
+
+    private void look(boolean atOnce) {
+        try {
+            publish(doorkeeper.look(atOnce));
+        } catch (RuntimeException defect) {
+            // Whatever went wrong at this look, commands must run and the folder must be watched on: an unwatched one would
+            // keep running what the user takes out.
+            logger().log(Level.WARNING, "a look into " + folder + " failed", defect);
+            publish(new Snapshot(snapshot.list(), List.of(folder + ": could not be looked through: " + defect
+                    + "; take out what was added last"), snapshot.approved()));
         }
     }
 

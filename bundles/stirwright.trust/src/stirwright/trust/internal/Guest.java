@@ -1,17 +1,23 @@
 package stirwright.trust.internal;
 
 import java.nio.file.Path;
+import java.util.concurrent.Future;
+import java.util.regex.Pattern;
 import org.osgi.framework.Bundle;
 import stirwright.trust.DropIn;
 import stirwright.trust.DropIn.State;
 
 /** A file in the folder with what is known of it, and its bundle when it was installed. Used by one thread at a time. */
 final class Guest {
+    /** What a terminal would obey instead of showing it; messages quote what the jar says. */
+    private static final Pattern UNSEEN = Pattern.compile("[\\p{Cc}\\p{Cf}\\p{Zl}\\p{Zp}]+");
+
     private final Path file;
     private final Stamp stamp;
     private final JarContent facts;
     private Bundle bundle;
     private String trouble = "";
+    private Future<?> start;
 
     /** @param facts without their bytes */
     Guest(Path file, Stamp stamp, JarContent facts) {
@@ -39,6 +45,16 @@ final class Guest {
 
     void became(Bundle installed) {
         bundle = installed;
+        start = null;
+    }
+
+    void starts(Future<?> begun) {
+        start = begun;
+    }
+
+    /** Whether a start was begun that has not come to an end. */
+    boolean hangs() {
+        return start != null && !start.isDone();
     }
 
     /** @param words why it does not run, as the rest of a sentence about the file; empty when it does */
@@ -52,7 +68,7 @@ final class Guest {
 
     /** A bundle that is activated when it is first used counts as running. */
     boolean runs() {
-        return bundle != null && (bundle.getState() == Bundle.ACTIVE || bundle.getState() == Bundle.STARTING);
+        return bundle != null && (bundle.getState() == Bundle.ACTIVE || bundle.getState() == Bundle.STARTING && !hangs());
     }
 
     DropIn seenBy(Decisions decisions) {
@@ -71,6 +87,6 @@ final class Guest {
     }
 
     private static DropIn dropIn(Path file, JarContent facts, State state, String message) {
-        return new DropIn(file, facts.name(), facts.version(), facts.sha256(), state, message);
+        return new DropIn(file, facts.name(), facts.version(), facts.sha256(), state, UNSEEN.matcher(message).replaceAll(" "));
     }
 }

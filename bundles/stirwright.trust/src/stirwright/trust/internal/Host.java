@@ -5,7 +5,10 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 import java.util.concurrent.TimeUnit;
+import java.util.concurrent.TimeoutException;
 import java.util.concurrent.atomic.AtomicBoolean;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
@@ -13,6 +16,7 @@ import org.osgi.framework.BundleEvent;
 import org.osgi.framework.BundleException;
 import org.osgi.framework.BundleListener;
 import org.osgi.framework.Constants;
+import org.osgi.framework.wiring.BundleRevision;
 import org.osgi.framework.wiring.FrameworkWiring;
 
 /** The framework that approved bundles are installed into. A bundle is never updated: it is removed and installed anew. */
@@ -21,6 +25,9 @@ final class Host {
     private static final String LOCATION = "stirwright-family:";
 
     private static final long PATIENCE_S = 10;
+
+    /** Common practice, no source: a family that offers correlations starts within a fraction of a second. */
+    private static final long START_S = 5;
 
     private final BundleContext context;
     private final AtomicBoolean changedElsewhere = new AtomicBoolean();
@@ -73,22 +80,45 @@ final class Host {
                 remove(guest);
                 guest.troubled("has more than one manifest: by one it is " + content.name() + " " + content.version()
                         + ", by another " + bundle.getSymbolicName() + " " + bundle.getVersion());
+            } else if ((bundle.adapt(BundleRevision.class).getTypes() & BundleRevision.TYPE_FRAGMENT) != 0) {
+                remove(guest);
+                guest.troubled("is a fragment by one of its manifests; only bundles of their own are taken");
             }
-        } catch (BundleException refused) {
+        } catch (BundleException | RuntimeException refused) {
+            // RuntimeException: what the framework makes of one jar must not keep the others out.
             guest.troubled("cannot be installed: " + refused.getMessage());
         }
     }
 
-    /** Transient, so that no framework starts it by itself at a later run. @return whether it runs now */
+    /**
+     * Transient, so that no framework starts it by itself at a later run. On a thread of its own: an activator that never
+     * returns must not keep the user from declining it.
+     *
+     * @return whether it runs now
+     */
     boolean start(Guest guest) {
+        Bundle bundle = guest.bundle();
+        FutureTask<Boolean> start = new FutureTask<>(() -> {
+            bundle.start(Bundle.START_TRANSIENT | Bundle.START_ACTIVATION_POLICY);
+            return true;
+        });
+        Thread starter = new Thread(start, "stirwright-start " + bundle.getSymbolicName());
+        starter.setDaemon(true);
+        guest.starts(start);
+        starter.start();
         try {
-            guest.bundle().start(Bundle.START_TRANSIENT | Bundle.START_ACTIVATION_POLICY);
+            start.get(START_S, TimeUnit.SECONDS);
             guest.troubled("");
             return true;
-        } catch (BundleException failure) {
-            guest.troubled(Failures.words(failure));
-            return false;
+        } catch (ExecutionException failure) {
+            guest.troubled(Failures.words(failure.getCause()));
+        } catch (TimeoutException hanging) {
+            guest.troubled("has not come to the end of its start within " + START_S + " s and is waited for no longer;"
+                    + " decline it, or take it out of the folder");
+        } catch (InterruptedException ending) {
+            Thread.currentThread().interrupt();
         }
+        return false;
     }
 
     void stop(Guest guest) {

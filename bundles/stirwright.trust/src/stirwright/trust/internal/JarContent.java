@@ -38,6 +38,9 @@ record JarContent(byte[] bytes, String sha256, String name, String version, Stri
             return new JarContent(bytes, sha256, manifest.name(), manifest.version(), "");
         } catch (NotUsableException refused) {
             return new JarContent(bytes, sha256, "", "", refused.getMessage());
+        } catch (RuntimeException defect) {
+            // Whatever a jar made by nobody knows whom runs into, it must not keep the others from being looked at.
+            return new JarContent(bytes, sha256, "", "", "cannot be read as a jar: " + defect);
         }
     }
 

@@ -7,6 +7,7 @@ import java.nio.channels.FileChannel;
 import java.nio.channels.FileLock;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
@@ -35,12 +36,14 @@ final class ListFile {
         return text;
     }
 
-    /** Reads it when its stamp has changed. @return whether it was read */
+    /** Reads it when its stamp has changed, or it could not be read. @return whether there is something new */
     synchronized boolean refresh() {
         Stamp now = Stamp.of(file);
         if (now.equals(stamp)) {
             return false;
         }
+        ListText known = text;
+        String told = unreadable;
         stamp = now;
         try {
             text = ListText.parse(Files.readAllBytes(file));
@@ -49,11 +52,12 @@ final class ListFile {
             text = ListText.EMPTY;
             unreadable = "";
         } catch (IOException failed) {
-            // What cannot be read approves nothing, also not what it said before.
+            // What cannot be read approves nothing, also not what it said before. It is tried again at the next look.
+            stamp = null;
             text = ListText.EMPTY;
             unreadable = file + ": cannot be read, so it counts as empty: " + words(failed);
         }
-        return true;
+        return !text.equals(known) || !unreadable.equals(told);
     }
 
     List<String> problems() {
@@ -87,6 +91,9 @@ final class ListFile {
     }
 
     private static String words(IOException failed) {
+        if (failed instanceof FileAlreadyExistsException other) {
+            return other.getFile() + " is a file where a folder belongs";
+        }
         return failed instanceof AccessDeniedException denied ? "access to " + denied.getFile() + " is denied"
                 : failed.getMessage();
     }
