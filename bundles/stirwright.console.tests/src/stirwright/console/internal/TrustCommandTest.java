@@ -3,8 +3,10 @@ package stirwright.console.internal;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
+import java.io.Writer;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -84,6 +86,51 @@ class TrustCommandTest {
         assertTrue(lines.get(1).endsWith("stirwright trust 'families/a b.jar'"), lines.get(1));
         assertEquals("families/c.jar: is not a jar", lines.get(2));
         assertEquals("Stirwright 0", out.toString().strip(), "results alone go to standard output");
+    }
+
+    @Test
+    void aFileToNameIsOneWordOfEachShell() {
+        assertEquals("a.jar", Door.quoted("a.jar", false));
+        assertEquals("'it'\\''s.jar'", Door.quoted("it's.jar", false));
+        assertEquals("\"C:\\My jars\\it's.jar\"", Door.quoted("C:\\My jars\\it's.jar", true));
+    }
+
+    @Test
+    void nothingOfAJarReachesTheTerminalRaw() {
+        String odd = "families/a\u001b[2J\u009b.jar";
+        door.list.add(FakeDoor.dropIn(odd, State.UNUSABLE, "is \u001b[31m no jar"));
+        door.list.add(FakeDoor.dropIn(odd, State.ASKS, ""));
+        run("--version");
+        run("trust", "--list");
+        run("trust", "notes\u001b.txt");
+        for (String text : List.of(out.toString(), err.toString())) {
+            assertTrue(text.contains("\uFFFD") && text.codePoints().noneMatch(c -> c != '\n' && Character.isISOControl(c)), text);
+        }
+    }
+
+    @Test
+    void resultsThatCannotBeWrittenAreTold() {
+        PrintWriter full = new PrintWriter(new Writer() {
+            @Override
+            public void write(char[] text, int from, int length) throws IOException {
+                throw new IOException("no space left");
+            }
+
+            @Override
+            public void flush() {
+                // Nothing was taken.
+            }
+
+            @Override
+            public void close() {
+                // Holds nothing.
+            }
+        });
+        Desk desk = new Desk(() -> CommandLineTest.CATALOGUE, jar -> null, door, full, new PrintWriter(err, true), "0");
+        for (String line : List.of("trust --list", "--version", "--help")) {
+            assertEquals(3, Commands.run(desk, line.split(" ")), line);
+            assertTrue(err.toString().contains("standard output"), err.toString());
+        }
     }
 
     @ParameterizedTest

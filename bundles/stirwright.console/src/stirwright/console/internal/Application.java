@@ -25,19 +25,29 @@ public final class Application implements IApplication {
         Object given = context.getArguments().get(IApplicationContext.APPLICATION_ARGS);
         String[] arguments = given instanceof String[] strings ? strings : NO_ARGUMENTS;
         BundleContext bundles = FrameworkUtil.getBundle(Application.class).getBundleContext();
-        try (PrintWriter out = writer(FileDescriptor.out, "stdout.encoding");
-                PrintWriter err = writer(FileDescriptor.err, "stderr.encoding")) {
-            ServiceReference<Library> reference = bundles.getServiceReference(Library.class);
-            ServiceReference<DropIns> door = bundles.getServiceReference(DropIns.class);
-            if (reference == null || door == null) {
+        PrintWriter out = writer(FileDescriptor.out, "stdout.encoding");
+        PrintWriter err = writer(FileDescriptor.err, "stderr.encoding");
+        try {
+            Library library = service(bundles, Library.class);
+            DropIns door = service(bundles, DropIns.class);
+            if (library == null || door == null) {
                 err.println("Stirwright's core did not start: the installation is incomplete; unpack it again.");
                 return ExitCode.UNUSABLE;
             }
-            Library library = bundles.getService(reference);
-            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), bundles.getService(door), out,
-                    err, release(bundles.getBundle().getVersion()));
+            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), door, out, err,
+                    release(bundles.getBundle().getVersion()));
             return Commands.run(desk, arguments);
+        } finally {
+            // Not closed: whatever goes wrong later is told on the same descriptor.
+            out.flush();
+            err.flush();
         }
+    }
+
+    /** Null when there is none, also when it is registered but does not come up. */
+    private static <S> S service(BundleContext bundles, Class<S> type) {
+        ServiceReference<S> reference = bundles.getServiceReference(type);
+        return reference == null ? null : bundles.getService(reference);
     }
 
     private static PrintWriter writer(FileDescriptor stream, String encodingProperty) {

@@ -43,12 +43,21 @@ final class Commands {
         // Who decides on a jar need not be told that it asks.
         Door door = new Door(desk.dropIns());
         (arguments.length > 0 && arguments[0].equals(TrustCommand.NAME) ? door.problems() : door.news())
-                .forEach(desk.err()::println);
+                .forEach(news -> desk.err().println(Plain.line(news)));
         line.setOut(desk.out()).setErr(desk.err())
                 .setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF))
                 .setExpandAtFiles(false)
                 .setParameterExceptionHandler(wrongUse(desk))
                 .setExecutionExceptionHandler(stopped(desk));
+        int code = execute(line, desk, arguments);
+        if (desk.out().checkError()) {
+            desk.err().println("standard output cannot be written, so results are missing there; is the disk full?");
+            return ExitCode.UNUSABLE;
+        }
+        return code;
+    }
+
+    private static int execute(CommandLine line, Desk desk, String... arguments) {
         if (arguments.length == 1 && arguments[0].equals("--version")) {
             desk.out().println("Stirwright " + desk.version());
             return ExitCode.OK;

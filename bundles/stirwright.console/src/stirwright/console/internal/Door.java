@@ -1,5 +1,6 @@
 package stirwright.console.internal;
 
+import java.io.File;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -26,9 +27,15 @@ record Door(DropIns dropIns) {
         return lines;
     }
 
-    /** As a shell takes it for one word. */
     private static String quoted(Path file) {
-        String path = file.toString();
-        return path.matches("[\\w./:\\\\@%+=,-]+") ? path : "'" + path.replace("'", "'\\''") + "'";
+        return quoted(file.toString(), File.separatorChar == '\\');
+    }
+
+    /** As the system's shell takes it for one word; no name of a file on Windows has a quote in it. */
+    static String quoted(String path, boolean windows) {
+        if (path.matches("[\\w./:\\\\@%+=,-]+")) {
+            return path;
+        }
+        return windows ? '"' + path + '"' : "'" + path.replace("'", "'\\''") + "'";
     }
 }

@@ -58,8 +58,7 @@ final class TrustCommand implements Callable<Integer> {
             return wish.file != null ? approve(dropIns)
                     : wish.decline != null ? decline(dropIns, wish.decline) : forget(dropIns, wish.forget);
         } catch (UncheckedIOException unwritable) {
-            desk.err().println(unwritable.getMessage());
-            return ExitCode.UNUSABLE;
+            return refuse(unwritable.getMessage());
         }
     }
 
@@ -111,7 +110,7 @@ final class TrustCommand implements Callable<Integer> {
     }
 
     private int refuse(String message) {
-        desk.err().println(message);
+        desk.err().println(Plain.line(message));
         return ExitCode.UNUSABLE;
     }
 
@@ -120,7 +119,7 @@ final class TrustCommand implements Callable<Integer> {
         for (String line : lines) {
             Columns.appendWrapped(text, "", line, CaseView.WIDTH);
         }
-        desk.out().print(text);
+        desk.out().print(Plain.text(text));
         desk.out().flush();
     }
 }

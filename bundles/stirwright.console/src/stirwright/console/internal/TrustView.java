@@ -30,7 +30,7 @@ record TrustView(PrintWriter out) {
             }
         }
         finish(text, present, dropIns.list().isEmpty());
-        out.print(text);
+        out.print(Plain.text(text));
         out.flush();
     }
 
