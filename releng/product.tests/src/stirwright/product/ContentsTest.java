@@ -29,7 +29,7 @@ class ContentsTest {
         for (String name : List.of("LICENSE", "third-party.txt", "sdk/template/pom.xml", "sdk/stirwright.correlation.jar")) {
             assertTrue(Files.size(home.resolve(name)) > 100, name);
         }
-        assertTrue(Files.isDirectory(home.resolve("families")));
+        assertTrue(Files.readString(home.resolve("families/README.txt")).contains("stirwright trust"));
         try (Stream<Path> entries = Files.list(home)) {
             Set<String> starts = entries.map(file -> file.getFileName().toString())
                     .filter(name -> name.startsWith("stirwright")).collect(Collectors.toSet());

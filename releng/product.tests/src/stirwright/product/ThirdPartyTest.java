@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.TreeMap;
@@ -13,6 +14,7 @@ import java.util.TreeSet;
 import java.util.function.Function;
 import java.util.jar.Attributes;
 import java.util.jar.JarFile;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
@@ -27,6 +29,11 @@ class ThirdPartyTest {
     private static final Map<String, Pattern> OWN_WORDS = Map.of(
             "Apache-2.0", Pattern.compile("(?i).*apache.*2\\.0.*"), "EPL-2.0", Pattern.compile("(?i).*epl[- ]v?2\\.0.*"),
             "MIT", Pattern.compile("MIT.*"), "BSD", Pattern.compile("BSD.*"));
+
+    /** Where jars have the text. */
+    private static final Pattern TEXT = Pattern.compile("((META-INF|license)/)?LICENSE(\\.txt|\\.md)?");
+    /** What either kind of licence says of passing the work on. */
+    private static final Pattern LICENCE = Pattern.compile("Redistributions in binary form|4\\. Redistribution");
 
     private record Line(String artifact, String version, String licence) {}
 
@@ -70,6 +77,34 @@ class ThirdPartyTest {
             assertTrue(OWN_WORDS.entrySet().stream()
                     .anyMatch(entry -> line.licence().contains(entry.getKey()) && entry.getValue().matcher(own).matches()),
                     () -> name + ": the notice says " + line.licence() + ", the jar " + own);
+        }
+    }
+
+    /** Licences other than that of Stirwright itself want their text and notice to travel with the bundle. */
+    @Test
+    void everyOtherLicenceHasItsTextInTheJarOrBesideTheNotice() throws Exception {
+        for (Platform platform : Platform.values()) {
+            Path home = platform.unpack(folder.resolve(platform.name()));
+            for (Matcher line : Files.readString(home.resolve("third-party.txt")).lines().map(LINE::matcher).toList()) {
+                if (line.matches() && !line.group(4).contains("EPL-2.0")) {
+                    for (Path jar : jars(home, line.group(1))) {
+                        Path text = home.resolve("licences").resolve(line.group(1) + ".txt");
+                        assertTrue(hasText(jar) || Files.exists(text) && LICENCE.matcher(Files.readString(text)).find(),
+                                () -> jar + " has no licence text in it, nor at " + text);
+                    }
+                }
+            }
+        }
+    }
+
+    private static List<Path> jars(Path home, String bundle) throws IOException {
+        return ContentsTest.bundles(home).stream().map(home::resolve)
+                .filter(jar -> jar.getFileName().toString().startsWith(bundle + "_")).toList();
+    }
+
+    private static boolean hasText(Path jar) throws IOException {
+        try (JarFile file = new JarFile(jar.toFile())) {
+            return file.stream().anyMatch(entry -> entry.getSize() > 500 && TEXT.matcher(entry.getName()).matches());
         }
     }
 
