@@ -71,7 +71,7 @@ class DamagedStudyTest {
 
     @Test
     void wrongValues() throws IOException {
-        for (String value : new String[] {"much", "NaN", "Infinity", "1d", "0x1p3", "1,5", "1e999", ""}) {
+        for (String value : new String[] {"much", "NaN", "Infinity", "1d", "0x1p3", "1,5", "1e999", "1e-400", "-0.1e-400", ""}) {
             refused(with("value=\"1035\"", "value=\"" + value + "\""), line("value=\"1035\""), "'" + value + "' as value", "number");
         }
     }
@@ -82,6 +82,27 @@ class DamagedStudyTest {
         refused(with("fluid=\"fluid-1\"", "fluid=\"vessel-1\""), "vessel 'kettle' as fluid", "a fluid belongs");
         refused(with("impeller=\"impeller-1\"", "impeller=\"vessel-1\""), "an impeller belongs");
         refused(with("<vessels ", "<fluids xmi:id=\"fluid-1\" name=\"twin\"/>\n  <vessels "), "fluid 'twin'", "'fluid-1'", "another");
+    }
+
+    @Test
+    void nothingIsDroppedWithoutAWord() throws IOException {
+        refused(with("<demand", "<demand column=\"speed_rev_s\" value=\"2\"/>\n    <demand"), "second value for demand", "delete");
+        refused(with("<notes>", "<notes>one</notes>\n  <notes>"), "second value for notes");
+        refused(with("<notes>", "<name>twice</name>\n  <notes>"), "second value for name");
+        refused(with("fluid=\"fluid-1\"", "fluid=\"fluid-1 fluid-1\""), line("fluid=\"fluid-1\""), "as fluid", "name one");
+        refused(with("<cases ", "<xmi:Extension extender=\"x\"><a/></xmi:Extension>\n  <cases "), line("<cases "), "Extension", "lost");
+        refused(with("<cases ", "hear, hear\n  <cases "), "'hear, hear'", "lost");
+        refused(with("<demand", "two rev/s<demand"), "'two rev/s' in 'cases'");
+    }
+
+    @Test
+    void commentsAndOtherFormsOfTheSameAreRead() throws IOException {
+        String text = with("<notes>", "<!-- mine --><notes>").replaceFirst(" name=\"[^\"]*\"(?=[^>]*>\\s*<!-- mine)", "")
+                .replace("<!-- mine -->", "<!-- mine --><name>as an element</name>");
+        Study read = StudyFiles.read(text.getBytes(StandardCharsets.UTF_8), "a study");
+        assertEquals("as an element", read.getName());
+        assertEquals("a study: is not a study; name one, a file that Stirwright saved",
+                assertThrows(StudyFileException.class, () -> StudyFiles.read(new byte[0], "a study")).getMessage());
     }
 
     @Test

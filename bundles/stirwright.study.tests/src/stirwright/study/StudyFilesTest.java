@@ -10,6 +10,7 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.List;
 import java.util.Random;
 import java.util.stream.Stream;
@@ -131,6 +132,28 @@ class StudyFilesTest {
             assertTrue(said.getMessage().contains(part), () -> part + " is not in: " + said.getMessage());
         }
         assertEquals(file + ": " + said.problem(), said.getMessage());
+    }
+
+    @Test
+    void whoMayReadTheOldFileMayReadTheNewOne() throws IOException {
+        Path file = folder.resolve("mine.stir");
+        StudyFiles.write(Invented.study(), file);
+        for (String rights : List.of("rw-------", "rw-rw-rw-")) {
+            Files.setPosixFilePermissions(file, PosixFilePermissions.fromString(rights));
+            StudyFiles.write(Invented.study(), file);
+            assertEquals(rights, PosixFilePermissions.toString(Files.getPosixFilePermissions(file)));
+        }
+    }
+
+    @Test
+    void aLinkToWhatIsNotThereYetStaysALink() throws IOException {
+        Files.createDirectory(folder.resolve("far"));
+        Path link = Files.createSymbolicLink(folder.resolve("link.stir"), Path.of("far", "new.stir"));
+        StudyFiles.write(Invented.study(), link);
+        assertTrue(Files.isSymbolicLink(link));
+        assertEquals(Invented.study().getName(), StudyFiles.read(folder.resolve("far/new.stir")).getName());
+        Path circle = Files.createSymbolicLink(folder.resolve("circle.stir"), Path.of("circle.stir"));
+        refused(Invented.study(), circle, "links lead nowhere");
     }
 
     @Test

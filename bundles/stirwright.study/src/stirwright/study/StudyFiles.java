@@ -37,11 +37,20 @@ public final class StudyFiles {
 
     /** @throws StudyFileException when it cannot be read, is no study, or not one of this version */
     public static Study read(Path file) {
-        byte[] bytes = load(file);
+        return read(load(file), file.toString());
+    }
+
+    /**
+     * Of bytes that need stand in no file.
+     *
+     * @param name what messages call them
+     * @throws StudyFileException when they are no study, or not one of this version
+     */
+    public static Study read(byte[] bytes, String name) {
         try {
             return StudyReader.read(bytes, FORMAT);
         } catch (NoStudyException problem) {
-            throw new StudyFileException(file, problem.getMessage(), problem.getCause());
+            throw new StudyFileException(name, problem.getMessage(), problem.getCause());
         }
     }
 

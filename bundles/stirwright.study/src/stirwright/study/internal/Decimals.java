@@ -26,7 +26,9 @@ public final class Decimals {
     /** @throws NumberFormatException when it is not a plain decimal number or not within double precision */
     public static double parse(String text) {
         double value = FORM.matcher(text).matches() ? Double.parseDouble(text) : Double.NaN;
-        if (!Double.isFinite(value)) {
+        // A number that a double cannot tell from nothing is not zero.
+        boolean lost = value == 0 && text.split("[eE]")[0].matches(".*[1-9].*");
+        if (!Double.isFinite(value) || lost) {
             throw new NumberFormatException("'" + text + "' is not a plain decimal number");
         }
         return value;

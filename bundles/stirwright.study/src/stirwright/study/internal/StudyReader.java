@@ -48,6 +48,7 @@ public final class StudyReader {
             throw new NoStudyException("the study names no format; write format=\"" + format
                     + "\" into its first element if it is one of this version");
         }
+        OneOfEach.require(bytes);
         requireWhole(study.get());
         requireOwnIds(resource, study.get());
         resource.getContents().clear();
