@@ -53,6 +53,11 @@ class DemoTest {
     }
 
     @Test
+    void theStudyWithoutAFileIsTheOneInTheFile() throws IOException {
+        assertEquals(Files.readString(Demo.copyTo(folder)), new String(StudyFiles.bytes(Demo.study()), "UTF-8"));
+    }
+
+    @Test
     void theStudySaysThatItIsInvented() {
         Study study = StudyFiles.read(Demo.copyTo(folder));
         assertTrue(study.getNotes().contains("every number invented"), study.getNotes());

@@ -2,10 +2,13 @@ package stirwright.exchange;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.Arrays;
+import stirwright.study.Study;
+import stirwright.study.StudyFiles;
 
 /** The invented scenario to start from, as a case table and as a study with the same cases. */
 public final class Demo {
@@ -32,10 +35,23 @@ public final class Demo {
         return copy(STUDY, folder);
     }
 
+    /** The study, which stands in no file. */
+    public static Study study() {
+        return StudyFiles.read(bytes(STUDY), STUDY);
+    }
+
+    private static byte[] bytes(String name) {
+        try (InputStream in = Demo.class.getResourceAsStream("/demo/" + name)) {
+            return in.readAllBytes();
+        } catch (IOException damaged) {
+            throw new UncheckedIOException("the installation is damaged: " + damaged.getMessage(), damaged);
+        }
+    }
+
     private static Path copy(String name, Path folder) {
         Path file = folder.resolve(name);
-        try (InputStream in = Demo.class.getResourceAsStream("/demo/" + name)) {
-            byte[] bytes = in.readAllBytes();
+        byte[] bytes = bytes(name);
+        try {
             Files.createDirectories(folder);
             if (!Files.exists(file)) {
                 Files.write(file, bytes);

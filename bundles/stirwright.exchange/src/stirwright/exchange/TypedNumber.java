@@ -7,8 +7,9 @@ import stirwright.exchange.internal.units.TypedText;
 /**
  * A number as somebody typed it into a field, with or without a unit: "0.9", "900 mm", "0,9 m".
  *
- * <p>Converted exactly and rounded once; a factor of pi (rad) carries 34 digits before that. What can be read in two
- * ways is a problem in words, never a guess. Whether the value is plausible is for others to say.
+ * <p>Converted exactly and rounded once; a factor of pi (rad) carries 34 digits before that. A single point
+ * or comma is always the decimal sign, so {@code 1.350} is 1.35 and never a thousand and more; what can still be read in
+ * two ways is a problem in words. Whether the value is plausible is for others to say.
  */
 public sealed interface TypedNumber {
 

@@ -1,11 +1,13 @@
 package stirwright.console.internal;
 
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import stirwright.exchange.Demo;
+import stirwright.exchange.UnusableFileException;
 
 @Command(name = "demo", description = "Cross-checks an invented scenario and keeps its files, to start from.")
 final class DemoCommand implements Callable<Integer> {
@@ -23,7 +25,13 @@ final class DemoCommand implements Callable<Integer> {
         if (window) {
             return OpenCommand.notHere(desk, "demo --window");
         }
-        Path folder = Path.of(System.getProperty("java.io.tmpdir"), "stirwright-demo-" + System.getProperty("user.name"));
+        Path temporary = Path.of(System.getProperty("java.io.tmpdir"));
+        Path folder;
+        try {
+            folder = new DemoFolder(temporary, System.getProperty("user.name")).make();
+        } catch (IOException unwritable) {
+            throw new UnusableFileException(temporary, "cannot be written: " + unwritable.getMessage(), unwritable);
+        }
         Demo.copyTo(folder);
         new CrosscheckRun(desk).run(folder.resolve(Demo.TABLE), List.of(folder.resolve("results.csv"), folder.resolve("results.json")),
                 List.of(folder.resolve("candidates.csv")));

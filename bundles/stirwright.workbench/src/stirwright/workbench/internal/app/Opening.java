@@ -1,6 +1,5 @@
 package stirwright.workbench.internal.app;
 
-import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -35,11 +34,9 @@ record Opening(Study study, Optional<Path> file) {
     /** A fresh copy of the invented study, which belongs to no file until it is saved. */
     static Opening demo(Notices notices) {
         try {
-            Path folder = Files.createTempDirectory("stirwright-demo-");
-            Study study = StudyFiles.read(Demo.copyTo(folder));
-            return new Opening(study, Optional.empty());
-        } catch (IOException | UncheckedIOException unwritable) {
-            notices.put(new Notice("opening", Messages.bind(Messages.Opening_noDemo, unwritable.getMessage()), List.of()));
+            return new Opening(Demo.study(), Optional.empty());
+        } catch (StudyFileException | UncheckedIOException damaged) {
+            notices.put(new Notice("opening", Messages.bind(Messages.Opening_noDemo, damaged.getMessage()), List.of()));
             return new Opening(Blank.study(""), Optional.empty());
         }
     }
