@@ -36,7 +36,10 @@ for %%L in ("%own%\run\*.lock") do (
   del "%%~fL" 2>nul
   if not exist "%%~fL" rd /s /q "%%~dpnL" 2>nul
 )
+set "tries=0"
 :take
+set /a tries+=1
+if %tries% GTR 50 goto fail
 set "run=%own%\run\%RANDOM%%RANDOM%"
 mkdir "%run%" 2>nul || goto take
 
@@ -51,10 +54,12 @@ if %kind%==console set "flags=-Xms128m -Xmn96m -Xmx320m"
 if %kind%==window set "flags=-Xms96m -Xmx1g"
 if %kind%==window if %version% GEQ 24 set "flags=%flags% --enable-native-access=ALL-UNNAMED"
 
-rem A class archive fits one Java and one build (the starter's name has its time) of one installation.
+rem A class archive fits one Java and one build (the starter's name has its time) of one installation; old ones go.
 set "key=%home:\=-%"
 set "key=%key::=%"
-set "key=%key:~-40%-%build%-%version%-%kind%"
+set "key=%key:~-40%"
+set "archive=%own%\%key%-%build%-%version%-%kind%.jsa"
+if not exist "%archive%" del "%own%\%key%-*-%kind%.jsa" 2>nul
 
 rem Without arguments, as from the desktop, no console stays open behind the window.
 set "begin="
@@ -63,7 +68,7 @@ if defined alone (
   set "java=%java:java.exe=javaw.exe%"
 )
 %begin% "%java%" -XX:+IgnoreUnrecognizedVMOptions -Xlog:disable -XX:+UseSerialGC -XX:TieredStopAtLevel=1 %flags% ^
-  -XX:+AutoCreateSharedArchive "-XX:SharedArchiveFile=%own%\%key%.jsa" ^
+  -XX:+AutoCreateSharedArchive "-XX:SharedArchiveFile=%archive%" ^
   "-Dosgi.install.area=%home%/" "-Dosgi.framework=%framework%" ^
   "-Dosgi.sharedConfiguration.area=%home%/configuration/" "-Dosgi.configuration.area=%run%/" ^
   "-Dosgi.instance.area=@none" "-Dosgi.logfile=%own%\stirwright.log" ^

@@ -8,6 +8,7 @@ import com.sun.jna.platform.unix.X11.Window;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -95,6 +96,38 @@ class StartTest {
             assertEquals("", run.out());
             assertEquals(1, run.err().lines().count(), run::err);
             assertTrue(run.err().contains("DISPLAY") && run.err().contains("stirwright help"), run::err);
+        }
+    }
+
+    @Test
+    void aPathThatCannotBeUsedIsToldInWords() throws Exception {
+        for (String name : List.of("a:b", "a#b", "a?b", "a%41b")) {
+            Path script = Files.copy(home.resolve("stirwright"), Files.createDirectory(folder.resolve(name)).resolve("stirwright"));
+            Run run = Run.of(folder, environment, script.toString(), "--version");
+            assertEquals(3, run.exitCode(), run::err);
+            assertEquals(1, run.err().lines().count(), run::err);
+            assertTrue(run.err().contains(script.getParent().toString()) && run.err().contains("move it"), run::err);
+        }
+    }
+
+    @Test
+    void whoHasNoHomeGetsOneFolderOfTheirOwn() throws Exception {
+        Path temporary = Files.createDirectory(folder.resolve("temporary"));
+        environment.putAll(Map.of("HOME", "", "XDG_CACHE_HOME", "", "TMPDIR", temporary.toString()));
+        for (int i = 0; i < 2; i++) {
+            assertEquals(0, stirwright("--version").exitCode());
+        }
+        try (Stream<Path> files = Files.list(temporary)) {
+            List<Path> made = files.toList();
+            assertEquals(1, made.size(), made::toString);
+            assertEquals("rwx------", PosixFilePermissions.toString(Files.getPosixFilePermissions(made.get(0))));
+            Files.move(made.get(0), folder.resolve("moved"));
+            Files.createSymbolicLink(made.get(0), folder.resolve("moved"));
+        }
+        Run run = stirwright("--version");
+        assertEquals(0, run.exitCode(), run::err);
+        try (Stream<Path> files = Files.list(temporary)) {
+            assertEquals(2, files.count(), "a link in the place of the folder was followed");
         }
     }
 
