@@ -53,6 +53,9 @@ class KeysTest {
             assertArrayEquals(before, bytes(window), "the study has a speed that nobody finished typing");
             assertEquals(power, window.outcome().rows().get(0).power(), 0.0);
             assertTrue(window.on(() -> !window.all(Link.class, l -> l.getText().contains("cannot be read: 1")).isEmpty()));
+            window.press("pitched-blade turbine");
+            assertEquals("12x", window.on(() -> window.find(Text.class, SPEED).getText()), "lost where fields were made anew");
+            assertTrue(window.on(() -> !window.all(Link.class, l -> l.getText().contains("cannot be read: 1")).isEmpty()));
             window.typeLetters(SPEED, "90");
             assertEquals(1.5, window.outcome().rows().get(0).speed(), 1e-15);
         });

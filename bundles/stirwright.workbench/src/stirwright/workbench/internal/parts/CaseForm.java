@@ -3,7 +3,9 @@ package stirwright.workbench.internal.parts;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Consumer;
@@ -172,6 +174,23 @@ final class CaseForm extends Composite {
                         .map(r -> outcome.words().of(r)).orElse(""));
             }
         });
+    }
+
+    /** The texts that cannot be read, by their columns. */
+    Map<String, String> unreadable() {
+        Map<String, String> texts = new LinkedHashMap<>();
+        fields.stream().filter(f -> !f.problem().isEmpty()).forEach(f -> texts.put(f.column(), f.control().getText()));
+        return texts;
+    }
+
+    /** Puts such texts back into fields that were made anew for the same case. */
+    void retype(Map<String, String> texts) {
+        fields.stream().filter(f -> texts.containsKey(f.column())).forEach(f -> f.retype(texts.get(f.column())));
+    }
+
+    /** Whether these are the fields of the case at hand. */
+    boolean ofTheCaseAtHand() {
+        return shape.get(0).equals(session.current());
     }
 
     /** What has the focus, by its name; empty for nothing in here. */

@@ -2,6 +2,7 @@ package stirwright.workbench.internal.parts;
 
 import jakarta.annotation.PostConstruct;
 import jakarta.inject.Inject;
+import java.util.Map;
 import org.eclipse.e4.ui.di.Focus;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.ScrolledComposite;
@@ -48,7 +49,9 @@ public final class CasePart {
         } else {
             String focus = form.focused();
             Point origin = scroller.getOrigin();
+            Map<String, String> unreadable = form.ofTheCaseAtHand() ? form.unreadable() : Map.of();
             rebuild();
+            form.retype(unreadable);
             scroller.setOrigin(origin);
             form.focus(focus);
         }

@@ -67,6 +67,13 @@ final class Recalculator implements AutoCloseable {
         failed.run();
     }
 
+    /** Gives up what is being worked on, since another outcome takes its place. */
+    void drop() {
+        stopped = false;
+        defect = null;
+        settled = newest.incrementAndGet();
+    }
+
     /** Whether the last outcome is not that of the newest request, because that was stopped by hand. */
     boolean stopped() {
         return stopped;

@@ -72,7 +72,7 @@ public final class Session implements AutoCloseable {
     public void recalculate() {
         Catalogue catalogue = library.catalogue();
         if (current == null) {
-            recalculator.stop();
+            recalculator.drop();
             take(Outcome.withoutCase(catalogue, view));
             return;
         }

@@ -68,6 +68,11 @@ public final class NumberField {
         return problem;
     }
 
+    /** Takes over a text that could not be read where it was typed. */
+    public void retype(String words) {
+        text.setText(words);
+    }
+
     public Text control() {
         return text;
     }
