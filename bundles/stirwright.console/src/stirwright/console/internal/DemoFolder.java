@@ -32,7 +32,7 @@ record DemoFolder(Path temporary, String user) {
         try {
             PosixFileAttributes seen = Files.readAttributes(folder, PosixFileAttributes.class, LinkOption.NOFOLLOW_LINKS);
             return seen.isDirectory() && seen.owner().equals(Files.getOwner(probe))
-                    && PosixFilePermissions.toString(seen.permissions()).matches(".....-..-.");
+                    && PosixFilePermissions.toString(seen.permissions()).matches("....-..-.");
         } finally {
             Files.delete(probe);
         }
