@@ -6,6 +6,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.Optional;
+import java.util.concurrent.FutureTask;
+import java.util.concurrent.TimeUnit;
+import java.util.concurrent.TimeoutException;
 import org.eclipse.core.runtime.adaptor.EclipseStarter;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
@@ -18,6 +21,9 @@ import org.osgi.framework.BundleContext;
 public final class Main {
     /** What the command line says when it or a file could not be used; see the product's help. */
     private static final int UNUSABLE = 3;
+
+    /** Common practice, no source: the framework ends within a fraction of a second. */
+    private static final long END_S = 3;
 
     private Main() {
     }
@@ -47,13 +53,30 @@ public final class Main {
                 }
                 return EclipseStarter.run(arguments) instanceof Integer code ? code : 0;
             } finally {
-                EclipseStarter.shutdown();
+                shutDown();
             }
         } catch (Throwable failure) {
             // Everything is caught: what got here must end in words and an exit code, since threads of the framework
             // would keep the process alive after the main thread died.
             System.err.println("stirwright: could not be started: " + failure + kept(failure));
             return UNUSABLE;
+        }
+    }
+
+    /** A bundle whose start or stop hangs would keep the framework for a minute; the command is done by then. */
+    @SuppressWarnings("restriction")
+    private static void shutDown() throws Exception {
+        FutureTask<Void> end = new FutureTask<>(() -> {
+            EclipseStarter.shutdown();
+            return null;
+        });
+        Thread ending = new Thread(end, "stirwright-end");
+        ending.setDaemon(true);
+        ending.start();
+        try {
+            end.get(END_S, TimeUnit.SECONDS);
+        } catch (TimeoutException hanging) {
+            // What hangs ends with the process.
         }
     }
 
