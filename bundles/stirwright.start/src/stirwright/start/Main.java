@@ -45,27 +45,38 @@ public final class Main {
         System.setProperty("eclipse.application", way.application());
         way.product().ifPresent(product -> System.setProperty("eclipse.product", product));
         try {
-            BundleContext bundles = EclipseStarter.startup(new String[0], null);
-            try {
-                if (!usable(way.bundle(), bundles)) {
-                    System.err.println("stirwright: " + way.missing());
-                    return UNUSABLE;
-                }
-                return EclipseStarter.run(arguments) instanceof Integer code ? code : 0;
-            } finally {
-                shutDown();
-            }
+            int code = application(way, EclipseStarter.startup(new String[0], null), arguments);
+            shutDown(code);
+            return code;
         } catch (Throwable failure) {
             // Everything is caught: what got here must end in words and an exit code, since threads of the framework
             // would keep the process alive after the main thread died.
-            System.err.println("stirwright: could not be started: " + failure + kept(failure));
+            return told(failure);
+        }
+    }
+
+    @SuppressWarnings("restriction")
+    private static int application(Way way, BundleContext bundles, String[] arguments) {
+        if (!usable(way.bundle(), bundles)) {
+            System.err.println("stirwright: " + way.missing());
             return UNUSABLE;
         }
+        try {
+            return EclipseStarter.run(arguments) instanceof Integer code ? code : 0;
+        } catch (Throwable failure) {
+            // As above; told before the framework ends, since that may hang.
+            return told(failure);
+        }
+    }
+
+    private static int told(Throwable failure) {
+        System.err.println("stirwright: could not be started: " + failure + kept(failure));
+        return UNUSABLE;
     }
 
     /** A bundle whose start or stop hangs would keep the framework for a minute; the command is done by then. */
     @SuppressWarnings("restriction")
-    private static void shutDown() throws Exception {
+    private static void shutDown(int code) throws Exception {
         FutureTask<Void> end = new FutureTask<>(() -> {
             EclipseStarter.shutdown();
             return null;
@@ -76,7 +87,10 @@ public final class Main {
         try {
             end.get(END_S, TimeUnit.SECONDS);
         } catch (TimeoutException hanging) {
-            // What hangs ends with the process.
+            // An orderly exit would wait for the same.
+            System.out.flush();
+            System.err.flush();
+            Runtime.getRuntime().halt(code);
         }
     }
 
