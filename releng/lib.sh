@@ -65,13 +65,14 @@ find_maven() {
   rm -rf "$fetched"
 }
 
-# start_display: a screen in memory for the tests of the window, on a free number; ends with the shell.
+# start_display: a screen in memory for the tests of the window, on a free number; ends with the shell. It holds a window of
+# 1280x800 at 200 %, and does not reset itself when a test closes its window, which would turn away the next one.
 start_display() {
   local number=$tools/display.$$ waited=0
   command -v Xvfb >/dev/null || install xvfb || die "the window's tests need Xvfb (on Debian the package xvfb)."
   has_library libgtk-3.so.0 || install libgtk-3-0t64 libgtk-3-0 || die "the window's tests need GTK 3 (on Debian libgtk-3-0)."
   has_font || install fonts-dejavu-core || die "the window's tests need a font (on Debian fonts-dejavu-core)."
-  Xvfb -displayfd 7 -screen 0 1600x1200x24 -nolisten tcp 7>"$number" 8>&- 9>&- 2>"$tools/display.log" >&2 &
+  Xvfb -displayfd 7 -noreset -screen 0 2800x1800x24 -nolisten tcp 7>"$number" 8>&- 9>&- 2>"$tools/display.log" >&2 &
   display=$!
   trap stop_display EXIT
   while [ ! -s "$number" ]; do

@@ -35,7 +35,7 @@ final class Screen implements AutoCloseable {
     static Optional<Screen> open() throws IOException {
         Process server;
         try {
-            server = new ProcessBuilder("Xvfb", "-displayfd", "1", "-screen", "0", "1280x800x24")
+            server = new ProcessBuilder("Xvfb", "-displayfd", "1", "-noreset", "-screen", "0", "1280x800x24")
                     .redirectError(ProcessBuilder.Redirect.DISCARD).start();
         } catch (IOException notInstalled) {
             return Optional.empty();
