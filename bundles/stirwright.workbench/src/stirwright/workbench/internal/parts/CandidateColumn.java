@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.Locale;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import stirwright.core.Role;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Figures;
@@ -78,6 +79,17 @@ enum CandidateColumn {
             case SOURCE -> width >= ROOM_FOR_SOURCE;
             default -> true;
         };
+    }
+
+    /**
+     * What a cell does not show of a row: of a candidate its source and grade, else the text that was cut; null where it
+     * shows all.
+     */
+    String tip(Row row, String shown) {
+        if (this == CANDIDATE) {
+            return String.join("\n", Stream.of(row.title(), SOURCE.text(row), GRADE.text(row)).filter(t -> !t.isEmpty()).toList());
+        }
+        return number() || text(row).equals(shown) ? null : text(row);
     }
 
     /** What its head means; null where the words say it. */

@@ -117,14 +117,13 @@ final class CandidateTable extends Composite {
         return shown;
     }
 
-    /** The whole text of a cell that could not show it. */
+    /** What a cell could not show. */
     private void tip(Event event) {
         TableItem item = table.getItem(new Point(event.x, event.y));
         String words = null;
         for (int c = 0; item != null && c < columns.size(); c++) {
             if (item.getBounds(c + 1).contains(event.x, event.y)) {
-                String whole = columns.get(c).text((Row) item.getData());
-                words = columns.get(c).number() || whole.equals(item.getText(c + 1)) ? null : whole;
+                words = columns.get(c).tip((Row) item.getData(), item.getText(c + 1));
             }
         }
         table.setToolTipText(words);
