@@ -47,6 +47,11 @@ public final class Subject {
         return workpiece.references().recalled();
     }
 
+    /** What holds each correlation up, in the order of {@link #correlations}. */
+    public List<Proof> proofs() {
+        return workpiece.correlations().stream().map(workpiece.references()::proof).toList();
+    }
+
     Workpiece workpiece() {
         return workpiece;
     }

@@ -3,7 +3,7 @@
  * bundle, a contributor runs them over a jar. Start at {@link
  * stirwright.conformance.ConformanceSuite}; for a jar at {@link stirwright.conformance.JarCheck}.
  */
-@Version("1.0.0")
+@Version("1.1.0")
 package stirwright.conformance;
 
 import org.osgi.annotation.versioning.Version;

@@ -75,6 +75,25 @@ public final class Dimensions {
     public static final GeometryParameter BLADE_LENGTH = GeometryParameter.of(
             "blade_length", "blade length", Kind.LENGTH, "L", "radial length of one blade");
 
+    public static final GeometryParameter PITCH_RATIO = GeometryParameter.of("pitch_ratio", "pitch ratio", Kind.RATIO, "p/D",
+            "axial advance of the blade in one turn over the impeller diameter");
+
+    public static final GeometryParameter IMPELLER_HEIGHT = GeometryParameter.of(
+            "impeller_height", "impeller height", Kind.LENGTH, "h", "lower to upper edge of the impeller");
+
+    public static final GeometryParameter RIBBON_WIDTH = GeometryParameter.of(
+            "ribbon_width", "ribbon width", Kind.LENGTH, "w", "radial width of one ribbon");
+
+    public static final GeometryParameter RIBBON_COUNT = GeometryParameter.of(
+                    "ribbon_count", "ribbon count", Kind.COUNT, "nr", "ribbons, or starts of the helix")
+            .withLimits(1, 6);
+
+    public static final GeometryParameter SHAFT_DIAMETER = GeometryParameter.of(
+            "shaft_diameter", "shaft diameter", Kind.LENGTH, "ds", "diameter of the shaft along the impeller");
+
+    public static final GeometryParameter DRAFT_TUBE_DIAMETER = GeometryParameter.of(
+            "draft_tube_diameter", "draft-tube diameter", Kind.LENGTH, "Dt", "inner diameter of the draft tube");
+
     /** What every vessel has, in the order in which blanks are filled. */
     public static final List<GeometryParameter> VESSEL = List.of(
             IMPELLER_DIAMETER, VESSEL_DIAMETER, LIQUID_HEIGHT, LIQUID_VOLUME, CLEARANCE, WALL_GAP,

@@ -9,6 +9,7 @@ import static stirwright.correlation.Dimensions.BLADE_WIDTH;
 import static stirwright.correlation.Dimensions.CLEARANCE;
 import static stirwright.correlation.Dimensions.IMPELLER_COUNT;
 import static stirwright.correlation.Dimensions.IMPELLER_DIAMETER;
+import static stirwright.correlation.Dimensions.IMPELLER_HEIGHT;
 import static stirwright.correlation.Dimensions.IMPELLER_SPACING;
 import static stirwright.correlation.Dimensions.LIQUID_HEIGHT;
 import static stirwright.correlation.Dimensions.LIQUID_VOLUME;
@@ -24,6 +25,9 @@ final class VesselRules {
     private static final double LEAST_FILL = 0.2;
     private static final double MOST_FILL = 1.1;
 
+    /** Common practice, no source: an anchor or a ribbon may rise somewhat above the liquid, not by more. */
+    private static final double HIGHEST = 1.3;
+
     private VesselRules() {}
 
     static void addTo(Family.Builder family) {
@@ -35,6 +39,7 @@ final class VesselRules {
                 .below(BLADE_THICKNESS, IMPELLER_DIAMETER, THICKEST)
                 .rule(BAFFLE_WIDTH, "above 0 while baffle_count is",
                         g -> !(g.get(BAFFLE_COUNT) > 0 && g.get(BAFFLE_WIDTH) <= 0))
+                .below(IMPELLER_HEIGHT, LIQUID_HEIGHT, HIGHEST)
                 .rule(IMPELLER_COUNT, "few enough for the liquid: the uppermost impeller stands clearance_m + (count - 1) impeller_spacing_m"
                         + " above the bottom", g -> !(top(g) >= g.get(LIQUID_HEIGHT)))
                 .rule(CLEARANCE, "above half the height of the blades", g -> !(g.get(CLEARANCE) <= halfBlade(g)))
@@ -46,8 +51,11 @@ final class VesselRules {
         return g.get(CLEARANCE) + (g.get(IMPELLER_COUNT) - 1) * g.get(IMPELLER_SPACING);
     }
 
-    /** NaN for a family without blades of a width. */
+    /** NaN for a family without blades of a width, and for one whose clearance is that of its lower edge. */
     private static double halfBlade(Geometry g) {
+        if (!Double.isNaN(g.get(IMPELLER_HEIGHT))) {
+            return Double.NaN;
+        }
         double angle = g.get(BLADE_ANGLE);
         return g.get(BLADE_WIDTH) / 2 * (Double.isNaN(angle) ? 1 : Math.sin(angle));
     }

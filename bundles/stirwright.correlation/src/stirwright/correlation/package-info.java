@@ -12,7 +12,7 @@
  * a contributor implements as a consumer type; a jar compiled against one minor version of this
  * package runs with every later minor version.
  */
-@Version("1.0.0")
+@Version("1.1.0")
 package stirwright.correlation;
 
 import org.osgi.annotation.versioning.Version;

@@ -30,9 +30,11 @@ record Columns(
     static final String SOURCE = "source";
     static final String FLUID = "fluid";
     static final String OUTSIDE = "outside";
+    /** Relative band of a row that compares with a second author or an independent relation. */
+    static final String WITHIN = "within";
 
     private static final List<String> NEEDED = List.of(CORRELATION, FAMILY, KIND, EXPECTED, SOURCE);
-    private static final List<String> OPTIONAL = List.of(FLUID, OUTSIDE);
+    private static final List<String> OPTIONAL = List.of(FLUID, OUTSIDE, WITHIN);
 
     private static final List<Variable> VARIABLES = List.of(
             Variable.REYNOLDS, Variable.FROUDE, Variable.FLOW_INDEX, Variable.YIELD_NUMBER, Variable.SPEED,

@@ -46,6 +46,6 @@ public final class ConstantsUsed {
     }
 
     private static boolean notices(List<ReferenceRow> rows, DoubleFunction<Correlation> other, int sign) {
-        return rows.stream().anyMatch(row -> row.missedBy(other.apply(sign * row.kind().noticed())));
+        return rows.stream().filter(row -> !row.kind().isBanded()).anyMatch(row -> row.missedBy(other.apply(sign * row.kind().noticed())));
     }
 }

@@ -15,6 +15,7 @@ final class ReferenceReader {
 
     private final Workpiece workpiece;
     private final List<ReferenceRow> rows = new ArrayList<>();
+    private final List<ReferenceRows.Lack> lacks = new ArrayList<>();
     private final List<ReferenceRows.Problem> problems = new ArrayList<>();
 
     private ReferenceReader(Workpiece workpiece) {
@@ -24,7 +25,7 @@ final class ReferenceReader {
     static ReferenceRows read(Workpiece workpiece, List<ReferenceFile> files) {
         ReferenceReader reader = new ReferenceReader(workpiece);
         files.forEach(reader::read);
-        return new ReferenceRows(List.copyOf(reader.rows), List.copyOf(reader.problems));
+        return new ReferenceRows(List.copyOf(reader.rows), List.copyOf(reader.lacks), List.copyOf(reader.problems));
     }
 
     private void read(ReferenceFile file) {
@@ -47,7 +48,8 @@ final class ReferenceReader {
         for (CsvRecord each : records.subList(1, records.size())) {
             String place = file.name() + " line " + each.getStartingLineNumber();
             try {
-                rows.add(new RowReader(workpiece, columns, each.getFields()).read(place));
+                RowReader row = new RowReader(workpiece, columns, each.getFields());
+                row.lack().ifPresentOrElse(lacks::add, () -> rows.add(row.read(place)));
             } catch (RowException unreadable) {
                 problem(place, unreadable.getMessage());
             }

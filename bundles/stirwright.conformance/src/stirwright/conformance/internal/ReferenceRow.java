@@ -8,11 +8,13 @@ import stirwright.correlation.Family;
  * A published number and the case for which it was published.
  *
  * @param place file and line
+ * @param source where the number comes from
+ * @param tolerance relative, within which it must be met
  * @param markedOutside whether it says itself that it lies outside the stated bounds
  */
 record ReferenceRow(
-        String place, Correlation correlation, Family family, RowKind kind, double expected, Situation situation,
-        boolean markedOutside) {
+        String place, Correlation correlation, Family family, RowKind kind, double expected, String source,
+        double tolerance, Situation situation, boolean markedOutside) {
 
     /** Why a correlation was not made for a case, in words; empty when no stated bound stands against it. */
     static Optional<String> obstacle(Correlation correlation, Situation situation) {
@@ -33,7 +35,7 @@ record ReferenceRow(
 
     /** Whether it would be missed if the correlation were another. */
     boolean missedBy(Correlation other) {
-        return !(Math.abs(deviation(other)) <= kind.tolerance());
+        return !(Math.abs(deviation(other)) <= tolerance);
     }
 
     /** Relative; NaN when there is no value. */

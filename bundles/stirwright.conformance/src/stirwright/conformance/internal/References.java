@@ -53,7 +53,7 @@ public final class References {
                 findings.add(row.place(), String.format(Locale.ROOT,
                         "%s gives %s where %s is expected: off by %.2f %%, allowed for a %s row is %.1f %%",
                         row.correlation().id(), Figures.show(outcome.value()), Figures.show(row.expected()),
-                        100 * row.deviation(row.correlation()), row.kind().id(), 100 * row.kind().tolerance()));
+                        100 * row.deviation(row.correlation()), row.kind().id(), 100 * row.tolerance()));
             }
         }
     }

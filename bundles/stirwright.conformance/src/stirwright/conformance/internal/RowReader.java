@@ -30,22 +30,58 @@ final class RowReader {
         this.cells = cells;
     }
 
+    /**
+     * Why a correlation has no number from outside, if that is what the row says.
+     *
+     * @throws RowException naming the column and the value that cannot be used
+     */
+    Optional<ReferenceRows.Lack> lack() {
+        return text(Columns.KIND).equals(ReferenceRows.Lack.KIND)
+                ? Optional.of(new ReferenceRows.Lack(correlation().id(), source())) : Optional.empty();
+    }
+
     /** @throws RowException naming the column and the value that cannot be used */
     ReferenceRow read(String place) {
-        Correlation correlation = workpiece.own(text(Columns.CORRELATION)).orElseThrow(() ->
-                unusable(Columns.CORRELATION, "is not a correlation of this bundle"));
+        Correlation correlation = correlation();
         Family family = family(correlation);
         RowKind kind = RowKind.of(text(Columns.KIND)).orElseThrow(() ->
                 unusable(Columns.KIND, "is none of " + Arrays.stream(RowKind.values()).map(RowKind::id).toList()));
         double expected = number(Columns.EXPECTED, text(Columns.EXPECTED));
-        if (text(Columns.SOURCE).isEmpty()) {
-            throw unusable(Columns.SOURCE, "is blank; every number has its source beside it");
-        }
         if (!List.of("", YES).contains(text(Columns.OUTSIDE))) {
             throw unusable(Columns.OUTSIDE, "is neither blank nor " + YES);
         }
         Situation situation = new Situation(dimensions(family), variables(correlation), fluid());
-        return new ReferenceRow(place, correlation, family, kind, expected, situation, text(Columns.OUTSIDE).equals(YES));
+        return new ReferenceRow(place, correlation, family, kind, expected, source(), tolerance(kind), situation,
+                text(Columns.OUTSIDE).equals(YES));
+    }
+
+    private Correlation correlation() {
+        return workpiece.own(text(Columns.CORRELATION)).orElseThrow(() ->
+                unusable(Columns.CORRELATION, "is not a correlation of this bundle"));
+    }
+
+    private String source() {
+        if (text(Columns.SOURCE).isEmpty()) {
+            throw unusable(Columns.SOURCE, "is blank; every number has its source beside it, and every lack its reason");
+        }
+        return text(Columns.SOURCE);
+    }
+
+    private double tolerance(RowKind kind) {
+        if (kind.isBanded() == text(Columns.WITHIN).isEmpty()) {
+            throw unusable(Columns.WITHIN, kind.isBanded()
+                    ? "is blank; a row of the kind " + kind.id() + " says how near the two are agreed to be, for instance 0.1"
+                    : "is for rows that compare with somebody else; one of the kind " + kind.id() + " is met within "
+                            + kind.tolerance());
+        }
+        if (!kind.isBanded()) {
+            return kind.tolerance();
+        }
+        double within = number(Columns.WITHIN, text(Columns.WITHIN));
+        if (!(within > 0 && within < 1)) {
+            throw unusable(Columns.WITHIN, "is not above 0 and below 1");
+        }
+        return within;
     }
 
     private Family family(Correlation correlation) {
