@@ -31,7 +31,7 @@ public final class JarCheck {
      *     requirement, does not start or publishes no contribution
      * @throws IOException when the file cannot be read
      */
-    public static JarReport check(BundleContext context, Path jar) throws JarRefusedException, IOException {
+    public static BundleReport check(BundleContext context, Path jar) throws JarRefusedException, IOException {
         byte[] content = Files.readAllBytes(jar);
         Bundle bundle = install(context, jar, content);
         try {
@@ -39,7 +39,7 @@ public final class JarCheck {
             if (!Arrivals.await(context, bundle, PATIENCE)) {
                 throw new JarRefusedException(BundleErrors.nothingPublished(bundle, PATIENCE));
             }
-            return JarReport.of(InstalledBundles.subject(context, bundle));
+            return BundleReport.of(InstalledBundles.subject(context, bundle));
         } finally {
             remove(bundle);
         }

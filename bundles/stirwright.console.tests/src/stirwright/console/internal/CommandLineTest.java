@@ -48,7 +48,7 @@ class CommandLineTest {
     private int run(String... arguments) {
         Desk desk = new Desk(() -> CATALOGUE, jar -> {
             throw new JarRefusedException(jar + " is refused by the test");
-        }, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "9.9.9");
+        }, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "9.9.9");
         return Commands.run(desk, arguments);
     }
 
@@ -207,7 +207,7 @@ class CommandLineTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"crosschek", "crosscheck", "crosscheck a b", "crosscheck a --nonsense", "help nonsense",
-            "candidates --out", "fit", "check", "check some.jar", "--nonsense"})
+            "candidates --out", "fit", "check some.jar", "--nonsense"})
     void wrongUseIsOneLineOnStandardErrorAndExitsWithThree(String line) {
         assertEquals(3, run(line.split(" ")));
         assertEquals("", out.toString());

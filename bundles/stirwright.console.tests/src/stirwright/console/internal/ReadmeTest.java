@@ -10,6 +10,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -28,7 +29,7 @@ class ReadmeTest {
         StringWriter err = new StringWriter();
         int code = Commands.run(new Desk(() -> CommandLineTest.CATALOGUE, jar -> {
             throw new AssertionError("no jar here");
-        }, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "0"), "crosscheck", table.toString());
+        }, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "0"), "crosscheck", table.toString());
         assertEquals(block(readme, "text").strip(), out.toString().strip());
         assertTrue(readme.contains("exit code " + code), "exit code " + code);
     }

@@ -11,6 +11,7 @@ import org.osgi.framework.BundleContext;
 import org.osgi.framework.FrameworkUtil;
 import org.osgi.framework.ServiceReference;
 import org.osgi.framework.Version;
+import stirwright.conformance.BundleReport;
 import stirwright.conformance.JarCheck;
 import stirwright.core.Library;
 import stirwright.trust.DropIns;
@@ -34,8 +35,8 @@ public final class Application implements IApplication {
                 err.println("Stirwright's core did not start: the installation is incomplete; unpack it again.");
                 return ExitCode.UNUSABLE;
             }
-            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar), door, out, err,
-                    release(bundles.getBundle().getVersion()));
+            Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar),
+                    () -> BundleReport.ofInstalled(bundles), door, out, err, release(bundles.getBundle().getVersion()));
             return Commands.run(desk, arguments);
         } finally {
             // Not closed: whatever goes wrong later is told on the same descriptor.

@@ -3,19 +3,22 @@ package stirwright.console.internal;
 import java.io.IOException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Parameters;
+import stirwright.conformance.BundleReport;
 import stirwright.conformance.JarRefusedException;
-import stirwright.conformance.JarReport;
 
 @Command(name = "check",
-        description = "Runs the conformance suite over a jar that contributes correlations. The jar's code runs with"
-                + " the rights of this program: check only what you trust.")
+        description = "Runs the conformance suite over a jar that contributes correlations, or over all that is installed,"
+                + " and prints for each correlation what its numbers were compared with. A jar's code runs with the"
+                + " rights of this program: check only what you trust.")
 final class CheckCommand implements Callable<Integer> {
     private final Desk desk;
 
-    @Parameters(paramLabel = "JAR", description = "an OSGi bundle with a Contribution service")
+    @Parameters(paramLabel = "JAR", arity = "0..1",
+            description = "an OSGi bundle with a Contribution service; without it everything installed")
     private Path jar;
 
     CheckCommand(Desk desk) {
@@ -24,9 +27,9 @@ final class CheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        JarReport report;
+        List<BundleReport> reports;
         try {
-            report = desk.jarCheck().check(jar);
+            reports = jar == null ? desk.installedCheck().get() : List.of(desk.jarCheck().check(jar));
         } catch (JarRefusedException refused) {
             desk.err().println(refused.getMessage());
             return ExitCode.UNUSABLE;
@@ -38,19 +41,9 @@ final class CheckCommand implements Callable<Integer> {
             return ExitCode.UNUSABLE;
         }
         StringBuilder text = new StringBuilder();
-        report.findings().forEach(f -> Columns.appendWrapped(text, "", f.toString(), CaseView.WIDTH));
-        Columns.appendWrapped(text, "", report.bundle() + ": " + count(report.families().size(), "family", "families") + ", "
-                + count(report.correlations().size(), "correlation", "correlations") + ", "
-                + count(report.rows(), "reference row", "reference rows") + " compared"
-                + (report.recalledRows() > 0 ? ", " + report.recalledRows() + " of them recalled; " : "; ")
-                + (report.passed() ? "it conforms." : count(report.findings().size(), "finding", "findings") + "."),
-                CaseView.WIDTH);
+        reports.forEach(report -> ProofView.append(text, report));
         desk.out().print(text);
         desk.out().flush();
-        return report.passed() ? ExitCode.OK : ExitCode.FLAGGED;
-    }
-
-    private static String count(int number, String one, String many) {
-        return number + " " + (number == 1 ? one : many);
+        return reports.stream().allMatch(BundleReport::passed) ? ExitCode.OK : ExitCode.FLAGGED;
     }
 }

@@ -25,6 +25,16 @@ class ConformanceTest {
         assertTrue(subjects.size() >= LEAST_BUNDLES, () -> "only these contribute: " + subjects);
     }
 
+    /** What holds no number from outside says so in its reference file. */
+    @Test
+    void everyNumberIsComparedWithOneFromOutsideOrSaysWhyNot() {
+        List<String> silent = InstalledBundles.subjects(Framework.context()).stream().flatMap(s -> s.proofs().stream())
+                .filter(proof -> proof.hasRowFromOutside() == proof.lack().isPresent())
+                .map(proof -> proof.correlation().id() + (proof.hasRowFromOutside()
+                        ? " has a number from outside, and a row that says it has none" : " has neither")).toList();
+        assertEquals(List.of(), silent);
+    }
+
     @TestFactory
     Stream<DynamicContainer> conforms() {
         return InstalledBundles.subjects(Framework.context()).stream().map(subject -> DynamicContainer.dynamicContainer(

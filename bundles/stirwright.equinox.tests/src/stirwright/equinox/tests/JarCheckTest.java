@@ -18,10 +18,10 @@ import org.junit.jupiter.api.io.TempDir;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleActivator;
 import org.osgi.framework.BundleContext;
+import stirwright.conformance.BundleReport;
 import stirwright.conformance.Finding;
 import stirwright.conformance.JarCheck;
 import stirwright.conformance.JarRefusedException;
-import stirwright.conformance.JarReport;
 import stirwright.correlation.Contribution;
 import stirwright.correlation.Correlation;
 
@@ -44,7 +44,7 @@ class JarCheckTest {
 
     @Test
     void aSoundJarPasses() throws Exception {
-        JarReport report = check(SampleJar.bytes());
+        BundleReport report = check(SampleJar.bytes());
         assertEquals(List.of(), report.findings());
         assertTrue(report.passed());
         assertEquals("invented.contract.sample 1.0.0", report.bundle());
@@ -57,7 +57,7 @@ class JarCheckTest {
 
     @Test
     void anUnsoundJarIsToldWhatToMend() throws Exception {
-        JarReport report = check(TinyBundle.named("wanderer.check").component(Wanderer.class).jar());
+        BundleReport report = check(TinyBundle.named("wanderer.check").component(Wanderer.class).jar());
         assertFalse(report.passed());
         assertEquals(List.of("wanderer.np.invented"), report.correlations());
         assertEquals(List.of("bounds", "bounds", "bounds", "bounds", "rows cover"),
@@ -66,13 +66,13 @@ class JarCheckTest {
 
     @Test
     void aContributionThatFailsIsAFinding() throws Exception {
-        JarReport report = check(TinyBundle.named("wanderer.refuser").component(Refuser.class).jar());
+        BundleReport report = check(TinyBundle.named("wanderer.refuser").component(Refuser.class).jar());
         assertTrue(report.findings().get(0).message().contains("not today"), () -> "found " + report.findings());
     }
 
     @Test
     void aComponentThatCannotBeCreatedIsAFinding() throws Exception {
-        JarReport report = check(TinyBundle.named("wanderer.hermit").component(Hermit.class).jar());
+        BundleReport report = check(TinyBundle.named("wanderer.hermit").component(Hermit.class).jar());
         assertTrue(report.findings().get(0).message().contains("constructor"), () -> "found " + report.findings());
     }
 
@@ -146,7 +146,7 @@ class JarCheckTest {
         }
     }
 
-    private JarReport check(byte[] jar) throws IOException, JarRefusedException {
+    private BundleReport check(byte[] jar) throws IOException, JarRefusedException {
         return JarCheck.check(Framework.context(), write(jar));
     }
 
