@@ -103,6 +103,14 @@ class SelectionTest {
     }
 
     @Test
+    void ruleOfTheTradeIsTheNearestOnlyWhereNothingIsPublished() {
+        Correlation rule = np("np.practice", 3, b -> b.cite(Citation.commonPractice()));
+        Correlation published = np("np.published", 5, b -> b.oneOf(Measure.BLADE_COUNT, 4));
+        assertEquals(List.of("np.published", "np.practice"), order(rule, published), "made for 4 blades, the case has 6");
+        assertEquals(List.of("np.practice"), order(rule));
+    }
+
+    @Test
     void nearIsFlaggedAndDoesNotQualify() {
         CaseResult result = check(Choices.NONE, np("np.near", 5, b -> b.range(Measure.D_OVER_T, 0.35, 0.5)));
         CandidateResult row = result.pick().orElseThrow();

@@ -9,21 +9,24 @@ import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Effect;
-import stirwright.correlation.Geometry;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 
-/** Average shear rates near the impeller, which are not found by matching the power as Metzner and Otto's are. */
+/**
+ * Average shear rates near the impeller. They are no shear-rate constants in Metzner and Otto's sense,
+ * since they are not found by matching the power, and so they are a quantity of their own.
+ */
 final class AverageShear {
 
-    static final String BOWEN_FORMULA = "{a} (D/T)^{b} (D/W)";
+    private static final Quantity NEAR_IMPELLER =
+            Quantity.of("impeller-shear-rate", "average shear rate near the impeller", "gimp", "1/s");
 
     private AverageShear() {}
 
     static Correlation kellyGigas() {
-        return Correlation.of("general.ks.kelly-gigas-2003", Quantity.SHEAR_RATE_CONSTANT, "Kelly and Gigas, near the impeller")
+        return Correlation.of("general.impeller-shear.kelly-gigas-2003", NEAR_IMPELLER, "Kelly and Gigas, axial impeller")
                 .families("hydrofoil")
                 .cite(Citation.withoutLocator("W. Kelly and B. Gigas, Chem. Eng. Sci. 58 (2003) 2141"))
                 .transcription(Transcription.FROM_MEMORY)
@@ -34,33 +37,28 @@ final class AverageShear {
                 .notStated(Classifier.FLUID, "made for power-law fluids; of which flow index is not recalled")
                 .reads(Variable.SPEED)
                 .constant("a", 33.1)
-                .constant("b", 0.4)
-                .formula("ks = {a} N^{b}, N in rev/s")
+                .constant("b", 1.4)
+                .formula("gimp = {a} N^{b}, N in rev/s")
                 .relation((vessel, k) -> {
                     double a = k.get("a");
                     double b = k.get("b");
                     return point -> a * Math.pow(point.get(Variable.SPEED), b);
                 })
-                .remark("The authors give the rate itself, 33.1 N^1.4 in 1/s. Their 33.1 has a dimension, so it belongs to "
-                        + "their vessel and must not be taken to another scale.")
-                .remark(notByPower("at 1 rev/s it is about three times the 10 found by matching the power"))
+                .remark("The constant has a dimension, so it belongs to the authors' vessel and must not be taken to another "
+                        + "scale.")
+                .remark(notByPower("at 1 rev/s it is about three times the 10 per second that match the power"))
                 .build();
     }
 
     static Correlation bowen() {
-        return declareBowen(Correlation.of("general.ks.bowen-1986", Quantity.SHEAR_RATE_CONSTANT,
-                        "Bowen, average near the impeller"), 4.2)
-                .formula("ks = " + BOWEN_FORMULA)
-                .relation((vessel, k) -> {
-                    double ks = k.get("a") * bowenGroup(vessel, k.get("b"));
-                    return point -> ks;
-                })
-                .remark(notByPower("at D/T 1/3 and W/D 1/5 it is 15.1, against 11.5 to 13 found by matching the power"))
+        return declareBowen(Correlation.of("general.impeller-shear.bowen-1986", NEAR_IMPELLER,
+                        "Bowen, radial turbine"), "gimp", 4.2)
+                .remark(notByPower("at D/T 1/3 and W/D 1/5 it is 15.1 N, against 11.5 N to 13 N that match the power"))
                 .build();
     }
 
-    /** What Bowen's average and largest rate have in common; they differ in the constant. */
-    static CorrelationBuilder declareBowen(CorrelationBuilder card, double a) {
+    /** Bowen's average and largest rate; they differ in the constant. */
+    static CorrelationBuilder declareBowen(CorrelationBuilder card, String symbol, double a) {
         return card.families("discturbine")
                 .cite(Citation.withoutLocator("R. L. Bowen, Chem. Eng. (1986)"))
                 .transcription(Transcription.FROM_MEMORY)
@@ -71,13 +69,15 @@ final class AverageShear {
                 .notStated(Measure.D_OVER_T, "recalled without a range, though the formula has it")
                 .notStated(Classifier.FLUID, "recalled without it")
                 .contains(Effect.DIAMETER_RATIO)
+                .reads(Variable.SPEED)
                 .constant("a", a)
-                .constant("b", 0.3);
-    }
-
-    /** (D/T)^b D/W */
-    static double bowenGroup(Geometry vessel, double b) {
-        return Math.pow(vessel.ratio(IMPELLER_DIAMETER, VESSEL_DIAMETER), b) * vessel.ratio(IMPELLER_DIAMETER, BLADE_WIDTH);
+                .constant("b", 0.3)
+                .formula(symbol + " = {a} N (D/T)^{b} (D/W)")
+                .relation((vessel, k) -> {
+                    double perTurn = k.get("a") * vessel.ratio(IMPELLER_DIAMETER, BLADE_WIDTH)
+                            * Math.pow(vessel.ratio(IMPELLER_DIAMETER, VESSEL_DIAMETER), k.get("b"));
+                    return point -> perTurn * point.get(Variable.SPEED);
+                });
     }
 
     private static String notByPower(String comparison) {

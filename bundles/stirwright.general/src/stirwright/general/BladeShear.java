@@ -61,13 +61,7 @@ final class BladeShear {
 
     static Correlation bowen() {
         return AverageShear.declareBowen(Correlation.of("general.blade-shear.bowen-1986", BLADE_SHEAR_RATE,
-                        "Bowen, largest near the impeller"), 9.7)
-                .reads(Variable.SPEED)
-                .formula("gmax = N " + AverageShear.BOWEN_FORMULA)
-                .relation((vessel, k) -> {
-                    double perTurn = k.get("a") * AverageShear.bowenGroup(vessel, k.get("b"));
-                    return point -> perTurn * point.get(Variable.SPEED);
-                })
+                        "Bowen, radial turbine"), "gmax", 9.7)
                 .remark("Conflict: it does not know the viscosity, on which the two boundary-layer forms rest.")
                 .build();
     }

@@ -47,9 +47,11 @@ public final class Ranking {
     /**
      * Among those that do not qualify, the nearest first; equal ones keep their order. One whose
      * digits, source or standing are in doubt counts as a factor of two beyond its bounds: better
-     * than a trusted one that is far outside of its range, worse than one that is a little outside.
+     * than a trusted one that is far outside of its range, worse than one that is a little outside. A
+     * rule of the trade without a source comes after all that is published.
      */
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
+            .thenComparing(t -> t.candidate().correlation().map(Ranking::isCommonPractice).orElse(false))
             .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
             .thenComparingDouble(t -> t.assessment().distance() + (t.trustworthy() ? 0 : Ranking.DOUBT))
             .thenComparingInt(t -> t.assessment().failureCount());
@@ -68,6 +70,10 @@ public final class Ranking {
     /** A pumping rate means discharge unless nothing else is there. */
     private static boolean countsCirculation(Correlation correlation) {
         return correlation.flowKind().filter(FlowKind.CIRCULATION::equals).isPresent();
+    }
+
+    private static boolean isCommonPractice(Correlation correlation) {
+        return !correlation.citation().hasSource();
     }
 
     private static long notStated(Correlation correlation) {
