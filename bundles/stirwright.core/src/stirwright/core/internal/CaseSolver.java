@@ -82,7 +82,7 @@ public final class CaseSolver {
         List<ResultAssembly.Row> rows = new ArrayList<>();
         for (Selection.Ranked ranked : selection.ranked()) {
             rows.add(new ResultAssembly.Row(ranked,
-                    ranked == pick ? states.all(ranked.trial().candidate()) : constantsOf(ranked, tried),
+                    everyQuantity && ranked == pick ? states.all(ranked.trial().candidate()) : constantsOf(ranked, tried),
                     ranked.trial().state().map(trials::flowsAt).orElse(Selection.NONE)));
         }
         return new ResultAssembly(spec, family, vessel, pick)

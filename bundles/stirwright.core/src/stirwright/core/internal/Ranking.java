@@ -51,7 +51,7 @@ public final class Ranking {
      * rule of the trade without a source comes after all that is published.
      */
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
-            .thenComparing(t -> t.candidate().correlation().map(Ranking::isCommonPractice).orElse(false))
+            .thenComparing(t -> isCommonPractice(t.candidate()))
             .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
             .thenComparingDouble(t -> t.assessment().distance() + (t.trustworthy() ? 0 : Ranking.DOUBT))
             .thenComparingInt(t -> t.assessment().failureCount());
@@ -72,8 +72,9 @@ public final class Ranking {
         return correlation.flowKind().filter(FlowKind.CIRCULATION::equals).isPresent();
     }
 
-    private static boolean isCommonPractice(Correlation correlation) {
-        return !correlation.citation().hasSource();
+    /** A rule of the trade. It is never recommended, and never the nearest beside anything published or given. */
+    static boolean isCommonPractice(Candidate candidate) {
+        return candidate.correlation().filter(c -> !c.citation().hasSource()).isPresent();
     }
 
     private static long notStated(Correlation correlation) {

@@ -1,6 +1,7 @@
 package stirwright.core.internal;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -34,11 +35,12 @@ final class StateSolver {
     private final double volume;
     /** Where the speed does not depend on the power: by the constant that a power correlation belongs with. */
     private final Map<Optional<String>, Selection> shared = new HashMap<>();
+    private final Map<Optional<String>, Selection> sharedAll = new HashMap<>();
 
     /** @throws CaseRefusedException when the speed or the tip speed is beyond its limits */
     StateSolver(CaseSpec spec, VesselGeometry vessel, List<Candidate> constants, Trials trials) {
         this.spec = spec;
-        this.constants = constants;
+        this.constants = constants.stream().sorted(Comparator.comparing(Ranking::isCommonPractice)).toList();
         this.trials = trials;
         this.diameter = vessel.get(Dimensions.IMPELLER_DIAMETER);
         this.volume = vessel.get(Dimensions.LIQUID_VOLUME);
@@ -69,22 +71,35 @@ final class StateSolver {
         boolean firstWillDo = belonging.isEmpty() && spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT).isEmpty();
         return spec.speed() instanceof SpeedDemand.ForPowerPerVolume demand
                 ? select(solveForPower(demand, power, firstWillDo), belonging)
-                : shared.computeIfAbsent(belonging, b -> select(solveForSpeed(), b));
+                : shared.computeIfAbsent(belonging, b -> select(solveForSpeed(firstWillDo), b));
     }
 
     /** All constants for a power candidate. */
     Selection all(Candidate power) {
+        Optional<String> belonging = power.correlation().flatMap(Correlation::belongsWith);
         return spec.speed() instanceof SpeedDemand.ForPowerPerVolume demand
-                ? select(solveForPower(demand, power, false), power.correlation().flatMap(Correlation::belongsWith))
-                : forPick(power);
+                ? select(solveForPower(demand, power, false), belonging)
+                : sharedAll.computeIfAbsent(belonging, b -> select(solveForSpeed(false), b));
     }
 
     private Selection select(List<Trial> solved, Optional<String> belonging) {
         return Selection.of(solved, spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT), belonging);
     }
 
-    private List<Trial> solveForSpeed() {
-        return constants.stream().map(c -> tried(c, atSpeed(c))).toList();
+    private List<Trial> solveForSpeed(boolean pickWillDo) {
+        List<Trial> solved = new ArrayList<>();
+        for (Candidate constant : constants) {
+            if (pickWillDo && isIdle(constant, solved)) {
+                break;
+            }
+            solved.add(tried(constant, atSpeed(constant)));
+        }
+        return solved;
+    }
+
+    /** A rule of the trade is not picked where anything else has a number; they come last. */
+    private static boolean isIdle(Candidate constant, List<Trial> solved) {
+        return Ranking.isCommonPractice(constant) && solved.stream().anyMatch(Trial::usable);
     }
 
     private Solution atSpeed(Candidate constant) {
@@ -102,6 +117,9 @@ final class StateSolver {
         double near = Math.cbrt(demand.value() * volume / (spec.fluid().density() * Math.pow(diameter, 5)));
         List<Trial> solved = new ArrayList<>();
         for (Candidate constant : constants) {
+            if (firstWillDo && isIdle(constant, solved)) {
+                break;
+            }
             Solution solution = guarded(demand, power, constant, near);
             near = solution.state().map(FluidState::speed).orElse(near);
             solved.add(tried(constant, solution));
