@@ -43,6 +43,8 @@ public final class Propeller implements Contribution {
                 TurbulentPower.earle(),
                 TurbulentPower.oneAndAHalf(),
                 TurbulentPower.two(),
+                RushtonTable.baffled(),
+                RushtonTable.unbaffled(),
                 FlowNumbers.square(),
                 FlowNumbers.oneAndAHalf(),
                 ShearRateConstants.square(),

@@ -27,7 +27,7 @@ final class TurbulentPower {
                 .notStated(Measure.D_OVER_T, "recalled without a range")
                 .newtonianData()
                 .value("KT", 0.32)
-                .remark("Conflict: Doran has 0.35. Rushton et al. (1950) print 0.26 at Re 1e5 with four baffles of T/12, "
+                .remark("Conflict: Doran has 0.35. Rushton et al. (1950) print 0.26 at Re 1e5 with baffles of T/12, "
                         + "though 0.32 is usually put down to them.")
                 .build();
     }
