@@ -33,6 +33,13 @@ public final class Variable extends Term {
     /** Shear-rate constant of the pick, per revolution. */
     public static final Variable SHEAR_RATE_CONSTANT = of(Quantity.SHEAR_RATE_CONSTANT);
 
+    /**
+     * Power number times Reynolds number in laminar flow, all impellers included: of the power
+     * correlation that would be picked there. A property of impeller and vessel, whatever the state.
+     */
+    public static final Variable LAMINAR_POWER =
+            of("laminar_power_constant", "laminar power constant", "Kp", "-");
+
     private final String symbol;
     private final String unit;
 

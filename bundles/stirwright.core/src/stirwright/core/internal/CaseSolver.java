@@ -15,6 +15,7 @@ import stirwright.core.FluidState;
 import stirwright.core.Role;
 import stirwright.core.Slice;
 import stirwright.core.VesselGeometry;
+import stirwright.correlation.Dimensions;
 import stirwright.correlation.Family;
 import stirwright.correlation.Figures;
 import stirwright.correlation.Quantity;
@@ -47,7 +48,8 @@ public final class CaseSolver {
         this.vessel = resolved();
         this.candidates = new Candidates(catalogue, family, vessel, spec);
         this.powers = needed(Quantity.POWER_NUMBER);
-        this.trials = new Trials(candidates.of(Quantity.FLOW_NUMBER), spec.choices());
+        this.trials = new Trials(candidates.of(Quantity.FLOW_NUMBER),
+                new LaminarPower(powers, spec, vessel.get(Dimensions.IMPELLER_DIAMETER)), spec.choices());
         this.states = new StateSolver(spec, vessel, needed(Quantity.SHEAR_RATE_CONSTANT), trials);
     }
 

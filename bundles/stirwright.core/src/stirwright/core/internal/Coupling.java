@@ -1,7 +1,6 @@
 package stirwright.core.internal;
 
 import java.util.Set;
-import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
@@ -34,18 +33,18 @@ final class Coupling {
 
     /** What is known of the product as soon as the shear rate is, whatever the speed. */
     private static final Set<Variable> BY_SHEAR_RATE_ALONE =
-            Set.of(Variable.FLOW_INDEX, Variable.VISCOSITY, Variable.DENSITY);
+            Set.of(Variable.FLOW_INDEX, Variable.VISCOSITY, Variable.DENSITY, Variable.LAMINAR_POWER);
 
     private final Fluid fluid;
     private final double diameter;
-    private final ToDoubleFunction<FluidState> flowNumber;
+    private final Trials trials;
     private final Point point = new Point();
 
-    /** @param flowNumber the flow number to use at a state, for constants that depend on it */
-    Coupling(Fluid fluid, double diameter, ToDoubleFunction<FluidState> flowNumber) {
+    /** @param trials what else is known at a state, for constants that depend on it */
+    Coupling(Fluid fluid, double diameter, Trials trials) {
         this.fluid = fluid;
         this.diameter = diameter;
-        this.flowNumber = flowNumber;
+        this.trials = trials;
     }
 
     /** The state at a speed in rev/s. */
@@ -109,11 +108,7 @@ final class Coupling {
     }
 
     private double evaluate(Candidate constant, FluidState state) {
-        point.at(state);
-        if (constant.reads().contains(Variable.FLOW_NUMBER)) {
-            point.set(Variable.FLOW_NUMBER, flowNumber.applyAsDouble(state));
-        }
-        return constant.value(point, state);
+        return constant.value(trials.setUp(point, state, constant), state);
     }
 
     private Solution finished(double speed, double constant, Candidate candidate) {

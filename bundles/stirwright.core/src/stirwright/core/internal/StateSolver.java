@@ -44,7 +44,7 @@ final class StateSolver {
         this.trials = trials;
         this.diameter = vessel.get(Dimensions.IMPELLER_DIAMETER);
         this.volume = vessel.get(Dimensions.LIQUID_VOLUME);
-        this.coupling = new Coupling(spec.fluid(), diameter, trials::flowNumber);
+        this.coupling = new Coupling(spec.fluid(), diameter, trials);
         checkSpeed(spec.speed());
     }
 

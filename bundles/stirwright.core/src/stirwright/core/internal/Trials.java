@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import stirwright.core.Choices;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
@@ -12,16 +13,18 @@ import stirwright.correlation.Quantity;
 import stirwright.correlation.Variable;
 
 /**
- * Evaluates and assesses candidates at states of the product. It knows the flow numbers of the case,
- * since other candidates may read the flow number. Not thread-safe.
+ * Evaluates and assesses candidates at states of the product. It knows the flow numbers and the laminar
+ * power constant of the case, since other candidates may read them. Not thread-safe.
  */
 final class Trials {
     private final List<Candidate> flows;
+    private final LaminarPower laminarPower;
     private final Choices choices;
     private final Map<FluidState, Selection> flowsByState = new IdentityHashMap<>();
 
-    Trials(List<Candidate> flows, Choices choices) {
+    Trials(List<Candidate> flows, LaminarPower laminarPower, Choices choices) {
         this.flows = flows;
+        this.laminarPower = laminarPower;
         this.choices = choices;
     }
 
@@ -61,16 +64,21 @@ final class Trials {
         return setUp(new Point(), state, candidate);
     }
 
-    /** Takes over a state, with the flow number where a candidate reads it and does not give it. */
+    /** Takes over a state, with what else a candidate reads and does not give. */
     Point setUp(Point point, FluidState state, Candidate candidate) {
         point.at(state);
-        boolean itself = candidate.quantity().equals(Quantity.FLOW_NUMBER);
-        return candidate.reads().contains(Variable.FLOW_NUMBER) && !itself
-                ? point.set(Variable.FLOW_NUMBER, flowNumber(state)) : point;
+        Set<Variable> reads = candidate.reads();
+        if (reads.contains(Variable.FLOW_NUMBER) && !candidate.quantity().equals(Quantity.FLOW_NUMBER)) {
+            point.set(Variable.FLOW_NUMBER, flowNumber(state));
+        }
+        if (reads.contains(Variable.LAMINAR_POWER) && !candidate.quantity().equals(Quantity.POWER_NUMBER)) {
+            point.set(Variable.LAMINAR_POWER, laminarPower.constant());
+        }
+        return point;
     }
 
     /** The pick's flow number at a state that may be one of many on the way to a solution. */
-    double flowNumber(FluidState state) {
+    private double flowNumber(FluidState state) {
         return selectFlow(state).pick().map(r -> r.trial().value()).orElse(Double.NaN);
     }
 
