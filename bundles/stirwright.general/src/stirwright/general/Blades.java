@@ -7,7 +7,19 @@ import stirwright.correlation.Geometry;
 enum Blades {
     UPRIGHT,
     /** At the family's blade angle. */
-    PITCHED;
+    PITCHED,
+    /** The upright arms of an anchor: blades as high as the impeller. */
+    ARMS;
+
+    /** Height of the blade along itself. */
+    double width(Geometry vessel) {
+        return vessel.get(this == ARMS ? Dimensions.IMPELLER_HEIGHT : Dimensions.BLADE_WIDTH);
+    }
+
+    /** {@link #width} in a formula. */
+    String widthSymbol() {
+        return (this == ARMS ? Dimensions.IMPELLER_HEIGHT : Dimensions.BLADE_WIDTH).symbol();
+    }
 
     /** Of the angle to the horizontal. */
     double sine(Geometry vessel) {

@@ -3,13 +3,17 @@ package stirwright.general;
 import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Dimensions;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 
-/** Calderbank and Moo-Young's shear-rate constant, which depends on the flow index. */
+/** Calderbank and Moo-Young's shear-rate constants, which depend on the flow index. */
 final class CalderbankMooYoung {
+
+    /** T/D 1.4, to three figures. */
+    private static final double LEAST_ANCHOR = 0.714;
 
     private CalderbankMooYoung() {}
 
@@ -39,6 +43,33 @@ final class CalderbankMooYoung {
                 .remark("For other than power-law fluids the local flow index at the average shear rate is used; that "
                         + "is an extension of ours.")
                 .remark("For shear-thickening fluids the authors have a form of their own with (D/T)^0.5.")
+                .build();
+    }
+
+    static Correlation anchor() {
+        return Correlation.of("general.ks.calderbank-moo-young-anchor", Quantity.SHEAR_RATE_CONSTANT,
+                        "Calderbank and Moo-Young, anchor, disputed")
+                .families("anchor")
+                .cite(Citation.withoutLocator(
+                        "P. H. Calderbank and M. B. Moo-Young, Trans. Instn Chem. Engrs 39 (1961) 337-347"))
+                .transcription(Transcription.UNSURE)
+                .notStated(Measure.REYNOLDS, "recalled without a range")
+                .notStated(Classifier.BAFFLING, "recalled without it")
+                .atLeast(Measure.D_OVER_T, LEAST_ANCHOR)
+                .notStated(Measure.FLOW_INDEX, "recalled without a range")
+                .notStated(Classifier.FLUID, "made for power-law fluids; of which flow index is not recalled")
+                .reads(Variable.FLOW_INDEX)
+                .constant("a", 9.5)
+                .constant("b", 9)
+                .formula("ks = ({a} + {b} (T/D)^2/((T/D)^2 - 1)) (4 n/(3 n + 1))^(n/(1 - n))")
+                .relation((vessel, k) -> {
+                    double dOverT = vessel.ratio(Dimensions.IMPELLER_DIAMETER, Dimensions.VESSEL_DIAMETER);
+                    double b = k.get("a") + k.get("b") / (1 - dOverT * dOverT);
+                    return point -> b * factor(point.get(Variable.FLOW_INDEX));
+                })
+                .remark("Recalled for T/D below 1.4.")
+                .remark("Conflict: Beckner and Smith's 37 - 120 c/T and the Couette analogy both give about half of it: 31 and "
+                        + "28 against 45 at D/T 0.9.")
                 .build();
     }
 

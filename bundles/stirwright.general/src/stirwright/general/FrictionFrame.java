@@ -1,7 +1,6 @@
 package stirwright.general;
 
 import static stirwright.correlation.Dimensions.BLADE_COUNT;
-import static stirwright.correlation.Dimensions.BLADE_WIDTH;
 import static stirwright.correlation.Dimensions.IMPELLER_DIAMETER;
 import static stirwright.correlation.Dimensions.LIQUID_HEIGHT;
 import static stirwright.correlation.Dimensions.VESSEL_DIAMETER;
@@ -16,8 +15,8 @@ import stirwright.correlation.Geometry;
  * <p>They treat the vessel like the gap between two cylinders: a friction factor f over a Reynolds
  * number ReG of the gap has a laminar branch CL/ReG and a turbulent branch that starts at Ct, bends
  * near ReG = sqrt(Ctr) and ends at the level finf. D impeller diameter, T vessel diameter, H liquid
- * height, W blade width, nB blades, angle of a blade to the horizontal; beta, gamma, eta and X are
- * pure numbers of the geometry.
+ * height, W blade width (for an anchor h, the height of its arms), nB blades, angle of a blade to the
+ * horizontal; beta, gamma, eta and X are pure numbers of the geometry.
  */
 final class FrictionFrame {
 
@@ -37,10 +36,10 @@ final class FrictionFrame {
         double dOverT = vessel.ratio(IMPELLER_DIAMETER, VESSEL_DIAMETER);
         powerPerFriction = powerPerFriction(vessel, beta, k);
         gapPerImpellerReynolds = Math.PI * eta * gap * beta / (4 * dOverT);
-        laminar = laminar(vessel, blades.sine(vessel), eta, k);
+        laminar = laminar(vessel, blades, eta, k);
         turbulent = capped(k.get("t1") * Math.pow(x, k.get("t2")), k.get("t3"), k.get("q"));
         sharpness = capped(k.get("m1") * Math.pow(x, k.get("m2")), k.get("m3"), k.get("q"));
-        transition = transition(vessel, blades.sine(vessel), x, k);
+        transition = transition(vessel, blades, x, k);
         double end = k.get("f1") * dOverT * Math.pow(turbulent, k.get("f2"));
         level = Math.pow(end / turbulent, 1 / sharpness);
     }
@@ -48,15 +47,16 @@ final class FrictionFrame {
     /** The equations, with a slot for each constant of {@link #declare}. */
     static String formula(Blades blades) {
         String sine = blades.onlyPitched(" sin(angle)");
+        String width = blades.widthSymbol();
         return "Np0 = {p} pi^4 beta^2/(8 D^3/(T^2 H)) f; "
                 + "f = CL/ReG + Ct ((Ctr/ReG + ReG)^-1 + (finf/Ct)^(1/m))^m; "
                 + "ReG = pi eta ln(T/D)/(4 D/(beta T)) Re; "
-                + "CL = {l1} eta nB (D/H)(1 - (D/T)^2) + {l2} (W" + sine + "/H)(nB/(2" + sine + "))^(1/3); "
+                + "CL = {l1} eta nB (D/H)(1 - (D/T)^2) + {l2} (" + width + sine + "/H)(nB/(2" + sine + "))^(1/3); "
                 + "Ct = (({t1} X^{t2})^-{q} + {t3}^-{q})^(-1/{q}); "
                 + "m = (({m1} X^{m2})^-{q} + {m3}^-{q})^(-1/{q}); "
-                + "Ctr = {r1} (D/T)^-{r2} (W" + sine + "/T)^-{r3} X^-{r4}; "
+                + "Ctr = {r1} (D/T)^-{r2} (" + width + sine + "/T)^-{r3} X^-{r4}; "
                 + "finf = {f1} (D/T) Ct^{f2}; "
-                + "X = gamma nB^{x1} W" + blades.onlyPitched(" sin(angle)^{x2}") + "/H; "
+                + "X = gamma nB^{x1} " + width + blades.onlyPitched(" sin(angle)^{x2}") + "/H; "
                 + "gamma = (eta ln(T/D)/(beta T/D)^{g})^(1/3); "
                 + "eta = {e1} ({e2} + (nB ln(T/D))^{e3})/(nB^{e4} (1 - (D/T)^2)); "
                 + "beta = 2 ln(T/D)/(T/D - D/T)";
@@ -101,7 +101,8 @@ final class FrictionFrame {
 
     /** X: the blades' share of the liquid height. */
     private static double bladeGroup(Geometry vessel, Blades blades, double gamma, Constants k) {
-        double upright = gamma * Math.pow(vessel.get(BLADE_COUNT), k.get("x1")) * vessel.ratio(BLADE_WIDTH, LIQUID_HEIGHT);
+        double upright = gamma * Math.pow(vessel.get(BLADE_COUNT), k.get("x1"))
+                * blades.width(vessel) / vessel.get(LIQUID_HEIGHT);
         return blades == Blades.PITCHED ? upright * Math.pow(blades.sine(vessel), k.get("x2")) : upright;
     }
 
@@ -111,16 +112,17 @@ final class FrictionFrame {
         return k.get("p") * Math.pow(Math.PI, 4) * beta * beta * t * t * vessel.get(LIQUID_HEIGHT) / (8 * d * d * d);
     }
 
-    private static double laminar(Geometry vessel, double sine, double eta, Constants k) {
-        double blades = vessel.get(BLADE_COUNT);
+    private static double laminar(Geometry vessel, Blades blades, double eta, Constants k) {
+        double count = vessel.get(BLADE_COUNT);
+        double sine = blades.sine(vessel);
         double dOverT = vessel.ratio(IMPELLER_DIAMETER, VESSEL_DIAMETER);
-        return k.get("l1") * eta * blades * vessel.ratio(IMPELLER_DIAMETER, LIQUID_HEIGHT) * (1 - dOverT * dOverT)
-                + k.get("l2") * vessel.ratio(BLADE_WIDTH, LIQUID_HEIGHT) * sine * Math.cbrt(blades / (2 * sine));
+        return k.get("l1") * eta * count * vessel.ratio(IMPELLER_DIAMETER, LIQUID_HEIGHT) * (1 - dOverT * dOverT)
+                + k.get("l2") * blades.width(vessel) / vessel.get(LIQUID_HEIGHT) * sine * Math.cbrt(count / (2 * sine));
     }
 
-    private static double transition(Geometry vessel, double sine, double x, Constants k) {
+    private static double transition(Geometry vessel, Blades blades, double x, Constants k) {
         double dOverT = vessel.ratio(IMPELLER_DIAMETER, VESSEL_DIAMETER);
-        double projected = vessel.ratio(BLADE_WIDTH, VESSEL_DIAMETER) * sine;
+        double projected = blades.width(vessel) / vessel.get(VESSEL_DIAMETER) * blades.sine(vessel);
         return k.get("r1") * Math.pow(dOverT, -k.get("r2")) * Math.pow(projected, -k.get("r3"))
                 * Math.pow(x, -k.get("r4"));
     }
