@@ -111,7 +111,7 @@ final class StateSolver {
         };
     }
 
-    /** @param firstWillDo whether to stop at the first that qualifies: they come in the order of trust */
+    /** @param firstWillDo whether to stop where no later one can become the pick: they come in the order of trust */
     private List<Trial> solveForPower(SpeedDemand.ForPowerPerVolume demand, Candidate power, boolean firstWillDo) {
         // Where a power number of 1 would meet it.
         double near = Math.cbrt(demand.value() * volume / (spec.fluid().density() * Math.pow(diameter, 5)));
@@ -123,11 +123,16 @@ final class StateSolver {
             Solution solution = guarded(demand, power, constant, near);
             near = solution.state().map(FluidState::speed).orElse(near);
             solved.add(tried(constant, solution));
-            if (firstWillDo && solved.getLast().qualifies()) {
+            if (firstWillDo && settled(solved.getLast(), constants.subList(solved.size(), constants.size()))) {
                 break;
             }
         }
         return solved;
+    }
+
+    /** A later one comes before this one only if it qualifies and this one does not, or if it is nearer. */
+    private static boolean settled(Trial trial, List<Candidate> later) {
+        return trial.qualifies() || trial.isNearest() && later.stream().noneMatch(c -> c.distrust().isEmpty());
     }
 
     /** Guards the power number's code once for all the steps to a solution, which are many. */

@@ -20,6 +20,11 @@ record Trial(Candidate candidate, Optional<FluidState> state, double value, Asse
         return candidate.correlation().isPresent() && usable() && assessment.qualifies();
     }
 
+    /** Whether none can be nearer: trusted and within every stated bound, though it may not qualify. */
+    boolean isNearest() {
+        return usable() && trustworthy() && assessment.failureCount() == 0 && assessment.distance() == 0;
+    }
+
     /** Whether its digits, its source and its standing would allow to recommend it elsewhere. */
     boolean trustworthy() {
         return candidate.correlation().map(Trust::in).orElse(true);
