@@ -103,7 +103,7 @@ class CloseClearanceCrossCheckTest {
      */
     @ParameterizedTest
     @CsvSource({
-        "discturbine,   0.3333, 4, discturbine.ks.metzner-1961,             0.18",
+        "discturbine,   0.3333, 4, discturbine.ks.metzner-1961,             0.15",
         "pitchedblade,  0.3333, 4, pitchedblade.ks.four-blades,             0.15",
         "anchor,        0.9,    0, anchor.ks.beckner-smith-1966,            0.30",
         "anchor,        0.9,    0, anchor.ks.design-practice,               0.30",
