@@ -30,6 +30,12 @@ public final class GeneralRelations implements Contribution {
                 SeveralImpellers.power(),
                 SeveralImpellers.powerOfDiscTurbines(),
                 SeveralImpellers.flow(),
+                CloseImpellers.discTurbines(),
+                CloseImpellers.pitchedBlades(),
+                Clearance.discTurbine(),
+                Clearance.pitchedBlade(),
+                LiquidDepth.pitchedBlade(),
+                PartialBaffling.pitchedBlade(),
                 BlendTime.turbulent(),
                 BlendTime.transitional());
     }

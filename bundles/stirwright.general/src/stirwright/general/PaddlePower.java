@@ -70,7 +70,7 @@ final class PaddlePower {
         return card(id, title, blades)
                 .cite(Sources.kameiUnbaffled())
                 .unbaffled()
-                .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES, Effect.FROUDE)
+                .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BLADE_COUNT, Effect.BAFFLES, Effect.FROUDE)
                 .formula("Np = Np0; " + FrictionFrame.formula(blades))
                 .relation((vessel, k) -> {
                     FrictionFrame frame = new FrictionFrame(vessel, blades, k);
@@ -86,7 +86,7 @@ final class PaddlePower {
                 .cite(Sources.kameiBaffled())
                 .baffled()
                 .notStated(Measure.B_OVER_T, "no range is recalled")
-                .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES)
+                .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BLADE_COUNT, Effect.BAFFLES)
                 .formula("Np = max(Np0, Npmax (1 + x^-{s})^(-1/{s})); x = {b} " + BafflePlateau.bafflingFormula(blades)
                         + " + Np0/Npmax; " + BafflePlateau.levelFormula(blades) + "; " + FrictionFrame.formula(blades))
                 .relation((vessel, k) -> {

@@ -6,12 +6,16 @@ import stirwright.correlation.Correlation;
 import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
+import stirwright.correlation.Geometry;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
 
 /** Equal impellers on one shaft, far enough apart that each works as if it were alone. */
 final class SeveralImpellers {
+
+    static final String BATES = "R. L. Bates, P. L. Fondy and R. R. Corpstein, Ind. Eng. Chem. Process Des. Dev. 2 (1963) "
+            + "310-314";
 
     private static final Measure SPACING_OVER_VESSEL =
             Measure.ratio(Dimensions.IMPELLER_SPACING, Dimensions.VESSEL_DIAMETER);
@@ -25,7 +29,7 @@ final class SeveralImpellers {
                 .transcription(Transcription.FROM_MEMORY)
                 .atLeast(Measure.S_OVER_D, 1)
                 .remark("The full sum is recalled for S/D from 1 to 1.5 on; conflict: for two pitched-blade turbines at "
-                        + "S/D 1 also 1.6 to 1.9 times one are reported.")
+                        + "S/D 1 less is reported, see general.np.two-pitched-blades.")
                 .build();
     }
 
@@ -35,9 +39,11 @@ final class SeveralImpellers {
                 .cite(bates())
                 .transcription(Transcription.FROM_MEMORY)
                 .atLeast(Measure.S_OVER_D, 1)
-                .atLeast(SPACING_OVER_VESSEL, 0.4)
-                .remark("Closer than about 0.4 T the flows of disc turbines merge and two take 1.5 to 1.7 times the power "
-                        + "of one.")
+                .atLeast(SPACING_OVER_VESSEL, CloseImpellers.MERGING_BELOW)
+                .appliesWhen("more than one impeller, and not two whose flows merge",
+                        vessel -> several(vessel) && !CloseImpellers.merge(vessel))
+                .remark("Closer than about 0.4 T the flows of disc turbines merge; for two there is a factor of its own, of "
+                        + "more nothing is known.")
                 .build();
     }
 
@@ -52,13 +58,12 @@ final class SeveralImpellers {
     }
 
     private static Citation bates() {
-        return Citation.withoutLocator("R. L. Bates, P. L. Fondy and R. R. Corpstein, Ind. Eng. Chem. Process Des. Dev. 2 "
-                + "(1963) 310-314");
+        return Citation.withoutLocator(BATES);
     }
 
     private static CorrelationBuilder times(String id, Quantity quantity, String title) {
         return Correlation.modifier(id, quantity, Effect.SEVERAL_IMPELLERS, title)
-                .appliesWhen("more than one impeller", vessel -> vessel.get(Dimensions.IMPELLER_COUNT) > 1)
+                .appliesWhen("more than one impeller", SeveralImpellers::several)
                 .notStated(Measure.REYNOLDS, "recalled without a range")
                 .notStated(Classifier.BAFFLING, "recalled without it")
                 .notStated(Measure.D_OVER_T, "recalled without a range")
@@ -68,5 +73,9 @@ final class SeveralImpellers {
                     double count = vessel.get(Dimensions.IMPELLER_COUNT);
                     return point -> count;
                 });
+    }
+
+    private static boolean several(Geometry vessel) {
+        return vessel.get(Dimensions.IMPELLER_COUNT) > 1;
     }
 }

@@ -78,18 +78,21 @@ final class Candidate {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
         ForeignCode foreign = new ForeignCode();
-        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, geometry), List.of());
+        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, vessel, geometry), List.of());
         return new Candidate(
                 correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead, foreign);
     }
 
-    private static List<Part> parts(Correlation correlation, List<Correlation> modifiers, Geometry geometry) {
+    /** Nothing rests on the defaults that a modifier asks for, unless it applies: the standard geometry has none. */
+    private static List<Part> parts(
+            Correlation correlation, List<Correlation> modifiers, Geometry vessel, Geometry geometry) {
         List<Part> parts = new ArrayList<>();
         parts.add(new Part(correlation, correlation.bind(geometry)));
         Set<Effect> done = new LinkedHashSet<>(correlation.contains());
         for (Correlation modifier : modifiers) {
             Effect effect = modifier.modifierFor().orElseThrow();
-            if (!done.contains(effect) && modifier.appliesTo(geometry)) {
+            if (!done.contains(effect) && modifier.appliesTo(vessel)) {
+                modifier.appliesTo(geometry);
                 parts.add(new Part(modifier, modifier.bind(geometry)));
                 done.add(effect);
                 done.addAll(modifier.contains());

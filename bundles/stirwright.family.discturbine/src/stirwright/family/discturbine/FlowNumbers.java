@@ -1,5 +1,6 @@
 package stirwright.family.discturbine;
 
+import stirwright.correlation.ChartCurve;
 import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
@@ -9,9 +10,13 @@ import stirwright.correlation.FlowKind;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
+import stirwright.correlation.Variable;
 
 /** Flow numbers of the turbulent regime. Discharge and circulation differ by a factor of two and more. */
 final class FlowNumbers {
+
+    /** Discharge in turbulent flow. */
+    private static final double TURBULENT = 0.72;
 
     private FlowNumbers() {}
 
@@ -28,8 +33,34 @@ final class FlowNumbers {
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.D_OVER_T, "recalled for about 1/3, without a range")
                 .newtonianData()
-                .value("Nq", 0.72)
-                .remark("Tables have 0.72 to 0.75, and 0.65 to 0.95 by where the flow is counted.")
+                .value("Nq", TURBULENT)
+                .remark("Tables have up to 0.75, and 0.65 to 0.95 by where the flow is counted.")
+                .build();
+    }
+
+    static Correlation transition() {
+        return Correlation.of("discturbine.nq.transition", Quantity.FLOW_NUMBER, "fall below turbulent flow, recalled")
+                .families(DiscTurbine.ID)
+                .cite(Citation.withoutLocator("chart after R. W. Hicks, J. R. Morton and J. G. Fenic, Chem. Eng., 26 April "
+                        + "1976; the level by Hemrajani and Tatterson (2004)"))
+                .transcription(Transcription.UNSURE)
+                .flow(FlowKind.DISCHARGE)
+                .range(Measure.REYNOLDS, 75, 1e5)
+                .notStated(Classifier.BAFFLING, "recalled without it")
+                .oneOf(Measure.BLADE_COUNT, 6)
+                .notStated(Measure.D_OVER_T, "recalled without a range")
+                .newtonianData()
+                .reads(Variable.REYNOLDS)
+                .constant("Nq", TURBULENT)
+                .curve("share", 75, 0.25, 250, 0.45, 1000, 0.65, 7000, 1, 1e5, 1)
+                .formula("Nq = {Nq} times a share over Re {share}")
+                .relation((vessel, k) -> {
+                    double turbulent = k.get("Nq");
+                    ChartCurve share = k.curve("share");
+                    return point -> turbulent * share.at(point.reynolds());
+                })
+                .remark("Shares are recalled as 0.2 to 0.3 at Re 50 to 100, 0.4 to 0.5 at 200 to 300, 0.6 to 0.7 at 1000 and 1 "
+                        + "from 5000 to 10 000 on, for pitched-blade and disc turbines alike; the middles are taken.")
                 .build();
     }
 

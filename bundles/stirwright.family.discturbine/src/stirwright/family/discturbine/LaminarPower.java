@@ -2,6 +2,7 @@ package stirwright.family.discturbine;
 
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Effect;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
@@ -44,6 +45,7 @@ final class LaminarPower {
                 .nominal(Measure.H_OVER_T, 1)
                 .nominal(Measure.C_OVER_D, 1)
                 .newtonianData()
+                .contains(Effect.BLADE_COUNT)
                 .overReynolds("KL", 71)
                 .remark("71 is the table's 14.2 at Re 5, the same for 4, 6 and 12 blades, with and without "
                         + "baffles; the same page has the slope -1 up to Re 10.")

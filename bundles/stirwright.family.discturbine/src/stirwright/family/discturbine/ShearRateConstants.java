@@ -3,6 +3,7 @@ package stirwright.family.discturbine;
 import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
 import stirwright.correlation.FluidClass;
@@ -40,24 +41,38 @@ final class ShearRateConstants {
     }
 
     static Correlation metzner() {
-        return Correlation.of("discturbine.ks.metzner-1961", Quantity.SHEAR_RATE_CONSTANT, "Metzner et al.")
+        return metzner("discturbine.ks.metzner-1961", "Metzner et al.")
+                .scatter(0.13)
+                .baffled()
+                .oneOf(Measure.BAFFLE_COUNT, 4)
+                .range(Measure.D_OVER_T, 0.182, 0.769)
+                .remark("Plus or minus 1.5, T/D 1.3 to 5.5, D 0.05 to 0.20 m.")
+                .remark("Conflict: Metzner and Otto (1957) have 13.")
+                .build();
+    }
+
+    static Correlation metznerTwo() {
+        return metzner("discturbine.ks.metzner-1961-two", "Metzner et al., two turbines")
+                .oneOf(Measure.IMPELLER_COUNT, 2)
+                .scatter(0.122)
+                .notStated(Classifier.BAFFLING, "recalled without it")
+                .nominal(Measure.D_OVER_T, 0.2857)
+                .remark("Plus or minus 1.4, T/D 3.5.")
+                .build();
+    }
+
+    /** The same constant for one turbine and for two. */
+    private static CorrelationBuilder metzner(String id, String title) {
+        return Correlation.of(id, Quantity.SHEAR_RATE_CONSTANT, title)
                 .families(DiscTurbine.ID)
                 .cite(Citation.withoutLocator("A. B. Metzner, R. H. Feehs, H. L. Ramos, R. E. Otto and J. D. Tuthill, "
                         + "AIChE J. 7 (1961) 3-9"))
                 .transcription(Transcription.FROM_MEMORY)
-                .scatter(0.13)
                 .atMost(Measure.REYNOLDS, RegimeLimits.IN_GENERAL.turbulentFrom())
-                .baffled()
-                .oneOf(Measure.BAFFLE_COUNT, 4)
                 .oneOf(Measure.BLADE_COUNT, 6)
-                .range(Measure.D_OVER_T, 0.182, 0.769)
                 .notStated(Classifier.FLUID, "recalled for non-Newtonian fluids, not of which kind")
                 .value("ks", 11.5)
-                .remark(TRANSITION_ENDS + " The constant is defined by their procedure.")
-                .remark("11.5 plus or minus 1.5, T/D 1.3 to 5.5, D 0.05 to 0.20 m; two such turbines gave 11.5 plus "
-                        + "or minus 1.4.")
-                .remark("Conflict: Metzner and Otto (1957) have 13.")
-                .build();
+                .remark(TRANSITION_ENDS + " The constant is defined by their procedure.");
     }
 
     static Correlation shearThickening() {

@@ -29,4 +29,9 @@ final class Sources {
         return rushton("p. 472 as printed in D. W. Hendricks, Fundamentals of Water Treatment Unit Processes, CRC Press, "
                 + "Table 10.3, p. 258, " + columns);
     }
+
+    static Citation bates() {
+        return Citation.withoutLocator("R. L. Bates, P. L. Fondy and R. R. Corpstein, Ind. Eng. Chem. Process Des. Dev. 2 "
+                + "(1963) 310-314");
+    }
 }

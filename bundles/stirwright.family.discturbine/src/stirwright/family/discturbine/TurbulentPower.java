@@ -2,6 +2,7 @@ package stirwright.family.discturbine;
 
 import stirwright.correlation.Citation;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Measure;
@@ -28,7 +29,7 @@ final class TurbulentPower {
                 .notStated(Measure.D_OVER_T, "no range; the worked example has 1/3")
                 .newtonianData()
                 .value("KT", 5.75)
-                .remark("Conflict: charts have 5, Rushton et al. 6 to 6.3, Laity and Treybal (1957) 5.7; "
+                .remark("Conflict: charts have 5, Rushton et al. 6 to 6.3, Harriott 6, Laity and Treybal 5.7; "
                         + "blade and disc thickness account for part of it, see Bujalski et al.")
                 .build();
     }
@@ -54,25 +55,38 @@ final class TurbulentPower {
                 .build();
     }
 
-    static Correlation rushtonTable() {
-        return Correlation.of("discturbine.np.rushton-1950-table", Quantity.POWER_NUMBER,
-                        "Rushton, Costich and Everett, turbulent, table of 1950")
+    static Correlation rushtonFourBlades() {
+        return rushtonTable("discturbine.np.rushton-1950-table-four", "four", 4).value("K", 4.3).build();
+    }
+
+    static Correlation rushtonSixBlades() {
+        return rushtonTable("discturbine.np.rushton-1950-table", "six", 6)
+                .value("K", 6.0)
+                .remark("Conflict: older tables have 6.3 for the same work.")
+                .build();
+    }
+
+    static Correlation rushtonTwelveBlades() {
+        return rushtonTable("discturbine.np.rushton-1950-table-twelve", "twelve", 12).value("K", 9.9).build();
+    }
+
+    private static CorrelationBuilder rushtonTable(String id, String blades, int count) {
+        return Correlation.of(id, Quantity.POWER_NUMBER,
+                        "Rushton, Costich and Everett, turbulent, table of 1950, " + blades + " blades")
                 .families(DiscTurbine.ID)
                 .cite(Sources.rushtonTable("column Re 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .atLeast(Measure.REYNOLDS, 1e5)
                 .baffled()
                 .nominal(Measure.B_OVER_T, 1.0 / 12)
-                .oneOf(Measure.BLADE_COUNT, 6)
+                .oneOf(Measure.BLADE_COUNT, count)
                 .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
                 .nominal(Measure.D_OVER_T, 1.0 / 3)
                 .nominal(Measure.H_OVER_T, 1)
                 .nominal(Measure.C_OVER_D, 1)
                 .newtonianData()
-                .value("K", 6.0)
-                .remark("The column stands for the level part of the curve; for 4 and 12 blades it has 4.3 and 9.9.")
-                .remark("Conflict: older tables have 6.3 for the same work.")
-                .build();
+                .contains(Effect.BLADE_COUNT)
+                .remark("The column stands for the level part of the curve.");
     }
 
     static Correlation bujalski() {
@@ -103,7 +117,8 @@ final class TurbulentPower {
                     double np = k.get("a") * Math.pow(thickness, -k.get("b")) * Math.pow(metres, k.get("c"));
                     return point -> np;
                 })
-                .remark("Within 6 % of Rutherford et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m.")
+                .remark("Within 6 % of Rutherford et al. for t/D 0.01 to 0.03 in a vessel of 0.3 m; Nienow and Miles (1971) "
+                        + "found the same direction.")
                 .build();
     }
 

@@ -49,7 +49,9 @@ final class PowerNumbers {
                 .nominal(Measure.W_OVER_D, 0.2)
                 .notStated(Measure.D_OVER_T, "no range; the worked example has 1/3")
                 .newtonianData()
+                .contains(Effect.LIQUID_DEPTH)
                 .value("KT", 1.27)
+                .remark("The example uses it at H/T 4/3 as it is.")
                 .remark("Conflict: Dickey has 1.37 for the same impeller.")
                 .build();
     }
