@@ -78,24 +78,33 @@ final class Candidate {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
         ForeignCode foreign = new ForeignCode();
-        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, vessel, geometry), List.of());
+        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, vessel, geometry, defaultsRead), List.of());
         return new Candidate(
                 correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead, foreign);
     }
 
-    /** Nothing rests on the defaults that a modifier asks for, unless it applies: the standard geometry has none. */
-    private static List<Part> parts(
-            Correlation correlation, List<Correlation> modifiers, Geometry vessel, Geometry geometry) {
+    private static List<Part> parts(Correlation correlation, List<Correlation> modifiers, VesselGeometry vessel,
+            Geometry geometry, Set<GeometryParameter> defaultsRead) {
         List<Part> parts = new ArrayList<>();
         parts.add(new Part(correlation, correlation.bind(geometry)));
         Set<Effect> done = new LinkedHashSet<>(correlation.contains());
+        Set<GeometryParameter> askedFor = new LinkedHashSet<>();
+        Geometry asked = vessel.recordingDefaults(askedFor);
         for (Correlation modifier : modifiers) {
             Effect effect = modifier.modifierFor().orElseThrow();
-            if (!done.contains(effect) && modifier.appliesTo(vessel)) {
-                modifier.appliesTo(geometry);
-                parts.add(new Part(modifier, modifier.bind(geometry)));
-                done.add(effect);
-                done.addAll(modifier.contains());
+            if (!done.contains(effect)) {
+                boolean applies = modifier.appliesTo(asked);
+                if (applies) {
+                    parts.add(new Part(modifier, modifier.bind(geometry)));
+                    done.add(effect);
+                    done.addAll(modifier.contains());
+                }
+                // The standard geometry is where no modifier applies, so that nothing rests on its having been assumed.
+                if (!applies) {
+                    askedFor.removeIf(p -> vessel.defaultKind(p) == GeometryParameter.Default.ASSUMED);
+                }
+                defaultsRead.addAll(askedFor);
+                askedFor.clear();
             }
         }
         return parts;

@@ -40,7 +40,7 @@ import stirwright.rheology.Newtonian;
 
 /** No factor is applied to what contains its effect already, over every installed family and many odd vessels. */
 class VesselEffectsTest {
-    private static final Pattern APPLIED = Pattern.compile(" times \\S+ by (\\S+)");
+    private static final Pattern APPLIED = Pattern.compile(": power number times \\S+ by (\\S+)");
 
     /** What a formula reads, it contains. */
     private static final Map<GeometryParameter, Effect> READ = Map.of(
