@@ -27,7 +27,8 @@ public record BundleReport(
 
     /** One for each bundle that publishes a contribution at this moment. */
     public static List<BundleReport> ofInstalled(BundleContext context) {
-        return InstalledBundles.subjects(context).stream().map(BundleReport::of).toList();
+        return InstalledBundles.bundles(context)
+                .map(bundle -> of(InstalledBundles.subject(context, bundle))).toList();
     }
 
     public boolean passed() {

@@ -11,6 +11,7 @@ import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
 import org.osgi.framework.InvalidSyntaxException;
@@ -32,8 +33,12 @@ public final class InstalledBundles {
 
     /** One for each bundle that publishes a contribution at this moment, the bundle installed first first. */
     public static List<Subject> subjects(BundleContext context) {
-        return references(context).stream().map(ServiceReference::getBundle).distinct()
-                .map(bundle -> subject(context, bundle)).toList();
+        return bundles(context).map(bundle -> subject(context, bundle)).toList();
+    }
+
+    /** The bundles that publish a contribution at this moment, the one installed first first. */
+    static Stream<Bundle> bundles(BundleContext context) {
+        return references(context).stream().map(ServiceReference::getBundle).distinct();
     }
 
     /** What one bundle publishes, amid what the others publish. */

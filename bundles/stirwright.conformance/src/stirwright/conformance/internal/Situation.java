@@ -1,7 +1,9 @@
 package stirwright.conformance.internal;
 
+import java.util.AbstractMap;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Set;
 import stirwright.correlation.Family;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Geometry;
@@ -46,8 +48,36 @@ record Situation(Map<GeometryParameter, Double> dimensions, Map<Variable, Double
     }
 
     private static <K> Map<K, Double> changed(Map<K, Double> values, K key, double value) {
-        Map<K, Double> copy = new LinkedHashMap<>(values);
-        copy.put(key, value);
-        return copy;
+        return new Changed<>(values, key, value);
+    }
+
+    /** All values but one as in another map, without a copy of it: a suite makes some 100,000 of these. */
+    private static final class Changed<K> extends AbstractMap<K, Double> {
+        private final Map<K, Double> others;
+        private final K key;
+        private final Double value;
+
+        Changed(Map<K, Double> others, K key, double value) {
+            this.others = others;
+            this.key = key;
+            this.value = value;
+        }
+
+        @Override
+        public Double get(Object wanted) {
+            return key.equals(wanted) ? value : others.get(wanted);
+        }
+
+        @Override
+        public Double getOrDefault(Object wanted, Double otherwise) {
+            return key.equals(wanted) ? value : others.getOrDefault(wanted, otherwise);
+        }
+
+        @Override
+        public Set<Entry<K, Double>> entrySet() {
+            Map<K, Double> copy = new LinkedHashMap<>(others);
+            copy.put(key, value);
+            return copy.entrySet();
+        }
     }
 }
