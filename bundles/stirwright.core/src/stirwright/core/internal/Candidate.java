@@ -38,6 +38,9 @@ final class Candidate {
     private final Optional<Correlation> correlation;
     private final List<Part> parts;
     private final Set<Variable> reads;
+    /** Asked for at every step of every loop. */
+    private final boolean readsFlowNumber;
+    private final boolean readsLaminarPower;
     private final Geometry geometry;
     private final Set<GeometryParameter> defaultsRead;
     private final ForeignCode foreign;
@@ -65,6 +68,8 @@ final class Candidate {
         this.geometry = geometry;
         this.defaultsRead = defaultsRead;
         this.reads = parts.size() == 1 ? parts.get(0).correlation().reads() : reads(parts);
+        this.readsFlowNumber = !quantity.equals(Quantity.FLOW_NUMBER) && reads.contains(Variable.FLOW_NUMBER);
+        this.readsLaminarPower = !quantity.equals(Quantity.POWER_NUMBER) && reads.contains(Variable.LAMINAR_POWER);
     }
 
     private static Set<Variable> reads(List<Part> parts) {
@@ -146,6 +151,16 @@ final class Candidate {
 
     Set<Variable> reads() {
         return reads;
+    }
+
+    /** Whether it reads the flow number and does not give it. */
+    boolean readsFlowNumber() {
+        return readsFlowNumber;
+    }
+
+    /** Whether it reads the laminar power constant and is none of the power numbers that settle it. */
+    boolean readsLaminarPower() {
+        return readsLaminarPower;
     }
 
     /** What keeps it from being recommended whatever the case; asked for at every state, found once. */

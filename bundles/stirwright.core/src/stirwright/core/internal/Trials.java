@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.Set;
 import stirwright.core.Choices;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
@@ -67,11 +66,10 @@ final class Trials {
     /** Takes over a state, with what else a candidate reads and does not give. */
     Point setUp(Point point, FluidState state, Candidate candidate) {
         point.at(state);
-        Set<Variable> reads = candidate.reads();
-        if (reads.contains(Variable.FLOW_NUMBER) && !candidate.quantity().equals(Quantity.FLOW_NUMBER)) {
+        if (candidate.readsFlowNumber()) {
             point.set(Variable.FLOW_NUMBER, flowNumber(state));
         }
-        if (reads.contains(Variable.LAMINAR_POWER) && !candidate.quantity().equals(Quantity.POWER_NUMBER)) {
+        if (candidate.readsLaminarPower()) {
             point.set(Variable.LAMINAR_POWER, laminarPower.constant());
         }
         return point;
