@@ -5,7 +5,10 @@ import stirwright.correlation.Geometry;
 
 /** How the blades stand; upright ones drop every term of the angle from the equations. */
 enum Blades {
+    /** On a disc: of the plateau with baffles its middle branch alone. */
     UPRIGHT,
+    /** Upright on a hub: with all branches of the plateau. */
+    PADDLE,
     /** At the family's blade angle. */
     PITCHED,
     /** The upright arms of an anchor: blades as high as the impeller. */

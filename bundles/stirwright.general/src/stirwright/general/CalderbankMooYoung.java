@@ -20,7 +20,7 @@ final class CalderbankMooYoung {
     static Correlation turbine() {
         return Correlation.of("general.ks.calderbank-moo-young-turbine", Quantity.SHEAR_RATE_CONSTANT,
                         "Calderbank and Moo-Young, turbines")
-                .families("discturbine", "pitchedblade", "propeller")
+                .families("discturbine", "pitchedblade", "flatblade", "propeller")
                 .cite(Citation.withoutLocator("P. H. Calderbank and M. B. Moo-Young, Trans. Instn Chem. Engrs 37 (1959) "
                         + "26-33 and 39 (1961) 337-347"))
                 .transcription(Transcription.FROM_MEMORY)

@@ -13,10 +13,17 @@ public final class GeneralRelations implements Contribution {
     public List<Correlation> correlations() {
         return List.of(
                 PaddlePower.unbaffledPitchedBlade(),
+                PaddlePower.unbaffledFlatBlade(),
                 PaddlePower.unbaffledDiscTurbine(),
                 PaddlePower.baffledPitchedBlade(),
+                PaddlePower.baffledFlatBlade(),
                 PaddlePower.baffledDiscTurbine(),
                 FullyBaffled.hiraoka(),
+                FullyBaffled.kameiFlatBlade(),
+                NagataPaddle.unbaffledFlatBlade(),
+                NagataPaddle.unbaffledPitchedBlade(),
+                NagataPaddle.baffledFlatBlade(),
+                NagataPaddle.baffledPitchedBlade(),
                 AnchorPower.paddleForm(),
                 CalderbankMooYoung.turbine(),
                 FlowNumberRule.sevenTimes(),

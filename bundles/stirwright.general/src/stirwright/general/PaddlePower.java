@@ -12,9 +12,6 @@ import stirwright.correlation.Variable;
 /** Kamei and Hiraoka's power number over the whole Reynolds range, without and with baffles. */
 final class PaddlePower {
 
-    /** Up to here the unbaffled equations were compared with Nagata's; the source says turbulent, no number. */
-    private static final double COMPARED_UP_TO = 1e5;
-
     /** nB^0.7 W/D; the plateau of an upright paddle bends off outside its range. */
     private static final Measure SOLIDITY = Measure.of("solidity", "nB^0.7 W/D",
             (vessel, point) -> Math.pow(vessel.get(Dimensions.BLADE_COUNT), 0.7)
@@ -31,8 +28,20 @@ final class PaddlePower {
                 .families("pitchedblade")
                 .transcription(Transcription.FROM_MEMORY)
                 .remark("Laminar, 4 blades at 45 degrees: Np Re 47.0 against 44.5 in McCabe's table.")
-                .remark("Upright paddles: 2 to 7 % from Nagata's equations at Re 1, 1 to 4 % at Re 10, from "
+                .remark("Upright paddles: 3 to 7 % from Nagata's equations at Re 1, within 3 % at Re 10, from "
                         + "6 % below to 43 % above them from Re 100 on.")
+                .build();
+    }
+
+    static Correlation unbaffledFlatBlade() {
+        return unbaffled("general.np.kamei-hiraoka-flatblade-unbaffled",
+                        "Kamei and Hiraoka, flat paddle, no baffles", Blades.PADDLE)
+                .families("flatblade")
+                .transcription(Transcription.CHECKED_NUMERICALLY)
+                .remark("Laminar, W/D 1/5: Np Re 35.9 for 2 blades at D/T 1/2 and 69.1 for 6 at 1/3, against 36.5 and 70 in "
+                        + "tables; two blades: 3 to 7 % above Nagata's equations at Re 1, within 3 % of them at Re 10.")
+                .remark("The coefficients of the turbulent branch are confirmed loosely: from Re 100 on they lie from 6 % "
+                        + "below to 43 % above Nagata's equations. " + Sources.XIE)
                 .build();
     }
 
@@ -52,6 +61,16 @@ final class PaddlePower {
                 .families("pitchedblade")
                 .transcription(Transcription.FROM_MEMORY)
                 .remark("For Re 100 to 1000 at D/T 1/3 the value without baffles exceeds the plateau; expect 30 % there.")
+                .build();
+    }
+
+    static Correlation baffledFlatBlade() {
+        return baffled("general.np.kamei-hiraoka-flatblade-baffled",
+                        "Kamei and Hiraoka, flat paddle, baffles", Blades.PADDLE)
+                .families("flatblade")
+                .transcription(Transcription.FROM_MEMORY)
+                .remark("Conflict: with four baffles of T/10 at D/T 1/3 and Re 1e5 it gives 2.1 and 3.8 for 2 and 4 blades of D/5 and "
+                        + "3.0 for 6 of D/8, where tables have 1.7, 3.0 to 3.2 and 2.6 to 3.0.")
                 .build();
     }
 
@@ -112,7 +131,7 @@ final class PaddlePower {
 
     private static CorrelationBuilder card(String id, String title, Blades blades) {
         CorrelationBuilder card = FrictionFrame.declare(Correlation.of(id, Quantity.POWER_NUMBER, title), blades)
-                .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, COMPARED_UP_TO,
+                .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Sources.COMPARED_UP_TO,
                         "laminar to turbulent in words; our comparison with Nagata's equations ended here")
                 .notStated(Measure.BLADE_COUNT, "recalled as 2 to 8, unsure")
                 .notStated(Measure.W_OVER_D, "recalled as 0.05 to 0.9, unsure")

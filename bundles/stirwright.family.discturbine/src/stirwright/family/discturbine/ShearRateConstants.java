@@ -23,7 +23,7 @@ final class ShearRateConstants {
 
     static Correlation metznerOtto() {
         return Correlation.of("discturbine.ks.metzner-otto-1957", Quantity.SHEAR_RATE_CONSTANT, "Metzner and Otto")
-                .families(DiscTurbine.ID)
+                .families(DiscTurbine.ID, "flatblade")
                 .cite(Citation.withoutLocator("A. B. Metzner and R. E. Otto, AIChE J. 3 (1957) 3-10; the value as "
                         + "quoted by J. Wu, L. J. Graham and N. Noui-Mehidi, AIChE J. 52 (2006) 2323-2332"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
@@ -42,6 +42,7 @@ final class ShearRateConstants {
 
     static Correlation metzner() {
         return metzner("discturbine.ks.metzner-1961", "Metzner et al.")
+                .families("flatblade")
                 .scatter(0.13)
                 .baffled()
                 .oneOf(Measure.BAFFLE_COUNT, 4)

@@ -35,8 +35,16 @@ public final class PitchedBlade implements Contribution {
                 PowerNumbers.dickeyHicks(),
                 PowerNumbers.medek(),
                 PowerNumbers.harriott(),
+                SixBlades.laminar(),
+                SixBlades.rushtonLaminar(),
+                SixBlades.mccabeTurbulent(),
+                SixBlades.narrowTurbulent(),
                 FlowNumbers.hemrajani(),
                 FlowNumbers.mccabe(),
+                FlowNumbers.sixBlades(),
+                FlowNumbers.overDiameterRatio(),
+                FlowNumbers.overReynolds(),
+                FlowNumbers.circulation(),
                 ShearRateConstants.fourBlades(),
                 ShearRateConstants.metzner());
     }

@@ -51,6 +51,8 @@ final class ShearRateConstants {
                 .value("ks", 13)
                 .remark(TRANSITION_ENDS)
                 .remark("13 plus or minus 2, T/D 1.3 to 3.")
+                .remark("Conflict: the flow between two cylinders of the same torque (Kp 70, blades of D/5) has 11.9 at D/T 1/3 "
+                        + "and 18.8 at D/T 1/2 for n 0.5.")
                 .build();
     }
 }
