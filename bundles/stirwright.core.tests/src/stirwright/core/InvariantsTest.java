@@ -58,7 +58,8 @@ class InvariantsTest {
         int compared = 0;
         for (CaseSpec spec : specs(kind)) {
             for (CandidateResult row : new CrossCheck(CATALOGUE).check(spec).candidates()) {
-                if (row.state().isEmpty()) {
+                // Far outside its bounds a correlation may give no number at all.
+                if (row.state().isEmpty() || Double.isNaN(row.powerNumber())) {
                     continue;
                 }
                 FluidState s = row.state().get();

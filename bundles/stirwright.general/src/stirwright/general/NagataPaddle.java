@@ -74,7 +74,7 @@ final class NagataPaddle {
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Sources.COMPARED_UP_TO,
                         "laminar to turbulent in words; our comparison with Kamei and Hiraoka's equations ended here")
                 .unbaffled()
-                .range(WIDTH_OVER_VESSEL, Double.NEGATIVE_INFINITY, WIDEST, "the usual safe range")
+                .range(WIDTH_OVER_VESSEL, Double.NEGATIVE_INFINITY, WIDEST, "the usual range")
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES, Effect.FROUDE)
                 .reads(Variable.REYNOLDS)
                 .laminarLimit()
@@ -96,9 +96,10 @@ final class NagataPaddle {
                 .baffled()
                 .notStated(Measure.B_OVER_T, "recalled as fully baffled, without a baffle width")
                 .range(WIDTH_OVER_VESSEL, CLEAR_OF_THE_POLE, WIDEST,
-                        "the usual safe range; below, the critical Reynolds number has a pole at 0.0436")
+                        "the usual range; below, the critical Reynolds number has a pole at 0.0436")
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES)
-                .formula("Np = " + NagataCurve.formula(blades, "Rc") + "; Rc = ({r1} (T/W)(D/T - {r2})^2 + (W/T)/({r3} W/T - {r4}))"
+                .formula("Np = " + NagataCurve.formula(blades, "Rc")
+                        + "; Rc = ({r1} (T/W)(D/T - {r2})^2 + (W/T)/({r3} W/T - {r4}))"
                         + blades.onlyPitched(" 10^({r5} (1 - sin(angle)))"))
                 .relation((vessel, k) -> {
                     double np = new NagataCurve(vessel, blades, k).powerNumber(criticalReynolds(vessel, blades, k));

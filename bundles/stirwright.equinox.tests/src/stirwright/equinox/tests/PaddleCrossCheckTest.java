@@ -32,8 +32,8 @@ class PaddleCrossCheckTest {
 
     /**
      * Two blades without baffles, H = T. Expected values: both sets of equations worked in a script that
-     * shares no code with the product. Bands: how near the two are in that table, rounded up; from Re 100
-     * on Kamei and Hiraoka (1995) are up to 43 % above and 6 % below Nagata (1975).
+     * shares no code with the product. Bands: how near the two are in that table: 3 to 7 % at Re 1, up
+     * to 3 % at Re 10; from Re 100 on Nagata (1975) is from 30 % below to 6 % above Kamei and Hiraoka (1995).
      */
     @ParameterizedTest
     @CsvSource({
@@ -41,8 +41,8 @@ class PaddleCrossCheckTest {
         "0.50, 0.20, 1, 54.7, 56.8, 0.07", "0.60, 0.10, 1, 33.4, 35.9, 0.07", "0.70, 0.20, 1, 53.7, 56.9, 0.07",
         "0.30, 0.06, 10, 4.38, 4.31, 0.03", "0.33, 0.10, 10, 5.64, 5.63, 0.03", "0.50, 0.10, 10, 4.53, 4.45, 0.03",
         "0.50, 0.20, 10, 7.54, 7.38, 0.03", "0.60, 0.10, 10, 4.18, 4.16, 0.03", "0.70, 0.20, 10, 6.60, 6.63, 0.03",
-        "0.30, 0.06, 1e3, 1.28, 1.79, 0.43", "0.50, 0.20, 1e3, 1.79, 1.84, 0.43", "0.33, 0.10, 1e4, 1.01, 1.35, 0.43",
-        "0.70, 0.20, 1e4, 0.622, 0.591, 0.43", "0.30, 0.06, 1e5, 0.582, 0.831, 0.43", "0.60, 0.10, 1e5, 0.301, 0.316, 0.43",
+        "0.30, 0.06, 1e3, 1.28, 1.79, 0.31", "0.50, 0.20, 1e3, 1.79, 1.84, 0.31", "0.33, 0.10, 1e4, 1.01, 1.35, 0.31",
+        "0.70, 0.20, 1e4, 0.622, 0.591, 0.31", "0.30, 0.06, 1e5, 0.582, 0.831, 0.31", "0.60, 0.10, 1e5, 0.301, 0.316, 0.31",
     })
     void nagataAndKameiAgreeWithinTheirBands(
             double dOverT, double wOverT, double re, double nagata, double kamei, double band) {
@@ -51,7 +51,7 @@ class PaddleCrossCheckTest {
         double second = value(KAMEI, "flatblade", vessel, re);
         within(ROUNDING, nagata, first, "Nagata");
         within(ROUNDING, kamei, second, "Kamei and Hiraoka");
-        within(band, first, second, "Kamei and Hiraoka against Nagata");
+        within(band, second, first, "Nagata against Kamei and Hiraoka");
     }
 
     /** Both fully baffled, D/T 1/3, C/D 1, H = T. Medek (1980), Hiraoka et al. (1997): 4 % apart as worked by hand. */
