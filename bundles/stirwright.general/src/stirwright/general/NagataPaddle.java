@@ -12,6 +12,7 @@ import stirwright.correlation.Effect;
 import stirwright.correlation.Geometry;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
+import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 
@@ -71,8 +72,8 @@ final class NagataPaddle {
 
     private static CorrelationBuilder unbaffled(String id, String title, Blades blades) {
         return card(id, title, blades)
-                .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Sources.COMPARED_UP_TO,
-                        "laminar to turbulent in words; our comparison with Kamei and Hiraoka's equations ended here")
+                .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, RegimeLimits.IN_GENERAL.laminarUpTo(),
+                        "laminar; the source goes on to turbulent flow, where later measurements left it")
                 .unbaffled()
                 .range(WIDTH_OVER_VESSEL, Double.NEGATIVE_INFINITY, WIDEST, "the usual range")
                 .contains(Effect.DIAMETER_RATIO, Effect.LIQUID_DEPTH, Effect.BAFFLES, Effect.FROUDE)

@@ -5,7 +5,7 @@ import stirwright.correlation.Citation;
 /** The works behind several of this bundle's numbers. */
 final class Sources {
 
-    /** Up to here Nagata's and Kamei and Hiraoka's equations were compared; both say turbulent, no number. */
+    /** Up to here Kamei and Hiraoka's equations were compared with Nagata's; the source says turbulent, no number. */
     static final double COMPARED_UP_TO = 1e5;
 
     /** The last part of a sentence in which the two stand against each other. */
