@@ -41,6 +41,11 @@ public final class InstalledBundles {
         return references(context).stream().map(ServiceReference::getBundle).distinct();
     }
 
+    /** What holds up the correlations that are published at this moment. */
+    public static List<Proof> proofs(BundleContext context) {
+        return subjects(context).stream().flatMap(subject -> subject.proofs().stream()).toList();
+    }
+
     /** What one bundle publishes, amid what the others publish. */
     public static Subject subject(BundleContext context, Bundle bundle) {
         List<Arrival> own = new ArrayList<>();

@@ -5,6 +5,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Family;
+import stirwright.correlation.Geometry;
+import stirwright.correlation.OperatingPoint;
 
 /**
  * What holds a correlation up: the numbers that it was compared with.
@@ -22,10 +25,13 @@ public record Proof(Correlation correlation, List<Row> rows, Optional<String> la
      * @param fromOutside whether the number comes from outside of what was typed in with the formula
      * @param tolerance relative
      * @param source where the expected number comes from
+     * @param family of the impeller that was compared
+     * @param geometry that impeller in its vessel
+     * @param point the state in which both were compared
      */
     public record Row(
             String place, String kind, String group, boolean fromOutside, double expected, double computed,
-            double tolerance, String source) {
+            double tolerance, String source, Family family, Geometry geometry, OperatingPoint point) {
 
         /** Relative; NaN when nothing was computed. */
         public double deviation() {

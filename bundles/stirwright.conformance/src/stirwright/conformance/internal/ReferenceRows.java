@@ -29,7 +29,8 @@ public record ReferenceRows(List<ReferenceRow> rows, List<Lack> lacks, List<Prob
         return new Proof(correlation,
                 of(correlation).stream().map(row -> new Proof.Row(row.place(), row.kind().id(), row.kind().group(),
                         row.kind().isFromOutside(), row.expected(),
-                        Outcome.of(correlation, row.situation()).value(), row.tolerance(), row.source())).toList(),
+                        Outcome.of(correlation, row.situation()).value(), row.tolerance(), row.source(),
+                        row.family(), row.situation(), row.situation())).toList(),
                 lacks.stream().filter(lack -> lack.correlation().equals(correlation.id())).map(Lack::reason).findFirst());
     }
 

@@ -48,7 +48,7 @@ class CommandLineTest {
     private int run(String... arguments) {
         Desk desk = new Desk(() -> CATALOGUE, jar -> {
             throw new JarRefusedException(jar + " is refused by the test");
-        }, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "9.9.9");
+        }, List::of, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "9.9.9");
         return Commands.run(desk, arguments);
     }
 

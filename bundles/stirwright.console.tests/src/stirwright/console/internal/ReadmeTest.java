@@ -29,7 +29,7 @@ class ReadmeTest {
         StringWriter err = new StringWriter();
         int code = Commands.run(new Desk(() -> CommandLineTest.CATALOGUE, jar -> {
             throw new AssertionError("no jar here");
-        }, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "0"), "crosscheck", table.toString());
+        }, List::of, List::of, new FakeDoor(), new PrintWriter(out), new PrintWriter(err), "0"), "crosscheck", table.toString());
         assertEquals(block(readme, "text").strip(), out.toString().strip());
         assertTrue(readme.contains("exit code " + code), "exit code " + code);
     }

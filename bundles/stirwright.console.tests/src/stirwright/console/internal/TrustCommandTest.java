@@ -23,7 +23,7 @@ class TrustCommandTest {
     private int run(String... arguments) {
         return Commands.run(new Desk(() -> CommandLineTest.CATALOGUE, jar -> {
             throw new AssertionError("nothing is checked");
-        }, List::of, door, new PrintWriter(out), new PrintWriter(err, true), "0"), arguments);
+        }, List::of, List::of, door, new PrintWriter(out), new PrintWriter(err, true), "0"), arguments);
     }
 
     @Test
@@ -126,7 +126,7 @@ class TrustCommandTest {
                 // Holds nothing.
             }
         });
-        Desk desk = new Desk(() -> CommandLineTest.CATALOGUE, jar -> null, List::of, door, full, new PrintWriter(err, true), "0");
+        Desk desk = new Desk(() -> CommandLineTest.CATALOGUE, jar -> null, List::of, List::of, door, full, new PrintWriter(err, true), "0");
         for (String line : List.of("trust --list", "--version", "--help")) {
             assertEquals(3, Commands.run(desk, line.split(" ")), line);
             assertTrue(err.toString().contains("standard output"), err.toString());

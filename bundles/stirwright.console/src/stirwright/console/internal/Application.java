@@ -12,6 +12,7 @@ import org.osgi.framework.FrameworkUtil;
 import org.osgi.framework.ServiceReference;
 import org.osgi.framework.Version;
 import stirwright.conformance.BundleReport;
+import stirwright.conformance.InstalledBundles;
 import stirwright.conformance.JarCheck;
 import stirwright.core.Library;
 import stirwright.trust.DropIns;
@@ -36,7 +37,8 @@ public final class Application implements IApplication {
                 return ExitCode.UNUSABLE;
             }
             Desk desk = new Desk(library::catalogue, jar -> JarCheck.check(bundles, jar),
-                    () -> BundleReport.ofInstalled(bundles), door, out, err, release(bundles.getBundle().getVersion()));
+                    () -> BundleReport.ofInstalled(bundles), () -> InstalledBundles.proofs(bundles), door, out, err,
+                    release(bundles.getBundle().getVersion()));
             return Commands.run(desk, arguments);
         } finally {
             // Not closed: whatever goes wrong later is told on the same descriptor.

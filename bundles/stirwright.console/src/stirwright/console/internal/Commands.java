@@ -35,6 +35,7 @@ final class Commands {
                 .addSubcommand(new OpenCommand(desk))
                 .addSubcommand(new CrosscheckCommand(desk))
                 .addSubcommand(new CandidatesCommand(desk))
+                .addSubcommand(new CardsCommand(desk))
                 .addSubcommand(new FitCommand(desk))
                 .addSubcommand(new DemoCommand(desk))
                 .addSubcommand(new CheckCommand(desk))

@@ -39,9 +39,11 @@ class DependencyRuleTest {
             Map.entry("sheet", Set.of("correlation")),
             Map.entry("core", Set.of("correlation", "rheology")),
             Map.entry("conformance", Set.of("correlation", "core")),
+            Map.entry("cards", Set.of("correlation", "core", "conformance")),
             Map.entry("exchange", Set.of("correlation", "rheology", "core", "study")),
-            Map.entry("console", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "trust")),
-            Map.entry("workbench", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "trust", "chart")));
+            Map.entry("console", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "cards", "trust")),
+            Map.entry("workbench", Set.of("correlation", "rheology", "core", "study", "exchange", "conformance", "cards", "trust",
+                    "chart")));
 
     private static final Set<String> EXPORT_NOTHING = Set.of("family", "general", "sheet", "start");
 
