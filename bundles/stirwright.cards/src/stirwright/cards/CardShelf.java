@@ -1,6 +1,7 @@
 package stirwright.cards;
 
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.function.Supplier;
@@ -43,5 +44,18 @@ public final class CardShelf {
             written = now;
         }
         return index;
+    }
+
+    /** Deletes the folder with what was written; for a temporary one. What cannot be deleted is left to the system. */
+    public synchronized void remove() {
+        written = null;
+        try (var files = Files.newDirectoryStream(folder)) {
+            for (Path file : files) {
+                Files.deleteIfExists(file);
+            }
+            Files.deleteIfExists(folder);
+        } catch (IOException left) {
+            // A temporary folder that stays for a while harms nobody.
+        }
     }
 }

@@ -18,7 +18,7 @@ final class CardList {
         for (Entry entry : entries) {
             Correlation correlation = entry.correlation();
             html.open("tr", "data-card", correlation.id());
-            html.open("td").leaf("a", correlation.title(), "href", Holdings.file(correlation));
+            html.open("td").leaf("a", Holdings.heading(correlation.title()), "href", Holdings.file(correlation));
             if (byQuantity && (correlation.modifierFor().isPresent() || correlation.flowKind().isPresent())) {
                 html.words(" ").leaf("span", Holdings.gives(correlation).substring(correlation.quantity().title().length() + 2),
                         "class", "quiet");

@@ -3,6 +3,7 @@ package stirwright.cards.internal;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 import stirwright.core.Entry;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
@@ -28,7 +29,7 @@ public final class CardPage {
 
     public static String of(Holdings holdings, Entry entry) {
         Correlation card = entry.correlation();
-        return Page.of(card.title() + ", " + card.quantity().title(), "card",
+        return Page.of(Holdings.heading(card.title()) + ", " + card.quantity().title(), "card",
                 html -> new CardPage(holdings, card, html).write(entry.origin()));
     }
 
@@ -40,14 +41,14 @@ public final class CardPage {
         SymbolTable.write(html, card, plot);
         range();
         source();
-        ProofTable.write(html, card, holdings.proof(card));
+        ProofTable.write(html, card, holdings.proof(card), plot.map(PlotData::read).orElse(Set.of()));
         remarks();
         regimes();
         Neighbours.write(html, holdings, card);
     }
 
     private void head(String origin) {
-        html.leaf("h1", card.title()).line();
+        html.leaf("h1", Holdings.heading(card.title())).line();
         html.open("p", "class", "lead").words(Holdings.gives(card) + ", for ");
         if (card.families().isEmpty()) {
             html.words("any family");
@@ -74,9 +75,9 @@ public final class CardPage {
         card.modifierFor().ifPresent(effect -> html.leaf("p", "A factor: it multiplies the " + card.quantity().title()
                 + " of a correlation that does not contain the effect of " + effect.title() + ". It applies when: "
                 + card.appliesWhen() + "."));
-        html.leaf("p", card.contains().isEmpty() ? "It contains no effect of the vessel, so each factor for one may be applied to it."
-                : "It already contains the effect of " + String.join(", ", card.contains().stream().map(Effect::title).toList())
-                        + "; no factor for that is applied to it.");
+        if (card.modifierFor().isEmpty()) {
+            contains();
+        }
         if (card.reads().contains(Variable.REYNOLDS)) {
             html.leaf("p", "Reynolds number: " + card.reynoldsDefinition().title() + ".");
         }
@@ -86,6 +87,12 @@ public final class CardPage {
             html.words(".").close();
         });
         html.line();
+    }
+
+    private void contains() {
+        html.leaf("p", card.contains().isEmpty() ? "It contains no effect of the vessel, so each factor for one may be applied to it."
+                : "It already contains the effect of " + String.join(", ", card.contains().stream().map(Effect::title).toList())
+                        + "; no factor for that is applied to it.");
     }
 
     private void source() {
@@ -98,7 +105,8 @@ public final class CardPage {
     }
 
     private void remarks() {
-        list("Conflicts", card.remarks().stream().filter(remark -> remark.startsWith(CONFLICT)).toList());
+        list("Conflicts", card.remarks().stream().filter(remark -> remark.startsWith(CONFLICT))
+                .map(remark -> Holdings.heading(remark.substring(CONFLICT.length()).strip())).toList());
         list("Remarks", card.remarks().stream().filter(remark -> !remark.startsWith(CONFLICT)).toList());
     }
 

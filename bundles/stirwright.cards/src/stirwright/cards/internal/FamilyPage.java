@@ -17,8 +17,8 @@ public final class FamilyPage {
     private FamilyPage() {}
 
     public static String of(Holdings holdings, Family family) {
-        return Page.of(family.title(), "family", html -> {
-            html.leaf("h1", family.title()).line();
+        return Page.of(Holdings.heading(family.title()), "family", html -> {
+            html.leaf("h1", Holdings.heading(family.title())).line();
             html.leaf("p", family.description(), "class", "lead");
             html.open("p").leaf("code", family.id()).words(" ")
                     .leaf("span", "brought by " + holdings.originOf(family), "class", "quiet").close().line();

@@ -3,6 +3,7 @@ package stirwright.cards.internal;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -84,6 +85,11 @@ public final class Holdings {
         return correlation.quantity().title()
                 + correlation.modifierFor().map(Effect::title).map(t -> ", factor for " + t).orElse("")
                 + correlation.flowKind().map(kind -> ", " + kind.id()).orElse("");
+    }
+
+    /** Titles are in lower case so that they stand in a sentence. */
+    static String heading(String title) {
+        return title.isEmpty() ? title : title.substring(0, 1).toUpperCase(Locale.ROOT) + title.substring(1);
     }
 
     static String standing(Correlation correlation) {

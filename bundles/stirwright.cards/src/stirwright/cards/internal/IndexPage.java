@@ -23,7 +23,7 @@ public final class IndexPage {
             html.leaf("h2", "By family", "id", "families").line();
             for (Family family : holdings.families()) {
                 html.open("section", "class", "list", "id", "family-" + family.id());
-                html.open("h3").leaf("a", family.title(), "href", Holdings.file(family)).close().line();
+                html.open("h3").leaf("a", Holdings.heading(family.title()), "href", Holdings.file(family)).close().line();
                 List<Entry> own = holdings.madeFor(family.id());
                 if (own.isEmpty()) {
                     html.leaf("p", "No correlation names this family; those for any family apply.");
@@ -40,7 +40,7 @@ public final class IndexPage {
             orphans(html, holdings);
             html.leaf("h2", "By quantity", "id", "quantities").line();
             for (Quantity quantity : holdings.quantities()) {
-                html.open("section", "class", "list", "id", "quantity-" + quantity.id()).leaf("h3", capital(quantity.title())).line();
+                html.open("section", "class", "list", "id", "quantity-" + quantity.id()).leaf("h3", Holdings.heading(quantity.title())).line();
                 CardList.write(html, holdings, holdings.entries().stream()
                         .filter(entry -> entry.correlation().quantity().equals(quantity)).toList(), true);
                 html.close().line();
@@ -84,10 +84,6 @@ public final class IndexPage {
         html.open("p", "id", "filter", "hidden", "hidden").leaf("label", "Show only cards with these words", "for", "words")
                 .words(" ").single("input", "id", "words", "type", "search", "autocomplete", "off")
                 .words(" ").leaf("span", "", "id", "shown", "role", "status").close().line();
-    }
-
-    private static String capital(String title) {
-        return title.substring(0, 1).toUpperCase(java.util.Locale.ROOT) + title.substring(1);
     }
 
     /** The families of a correlation, in words. */

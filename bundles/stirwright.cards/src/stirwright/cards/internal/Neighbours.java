@@ -21,7 +21,7 @@ final class Neighbours {
         html.open("ul");
         for (Entry entry : others) {
             Correlation other = entry.correlation();
-            html.open("li").leaf("a", other.title(), "href", Holdings.file(other)).words(" ")
+            html.open("li").leaf("a", Holdings.heading(other.title()), "href", Holdings.file(other)).words(" ")
                     .leaf("span", other.modifierFor().map(effect -> "factor for " + effect.title() + ", ").orElse("")
                             + IndexPage.families(holdings, other), "class", "quiet").close();
         }

@@ -1,11 +1,15 @@
 package stirwright.cards.internal;
 
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Figures;
+import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Measure;
+import stirwright.correlation.Variable;
 
 /** A small picture of a correlation, with words for those who do not see it. */
 final class Plot {
@@ -21,7 +25,7 @@ final class Plot {
         PlotData data = plot.get();
         String yTitle = card.modifierFor().isPresent() ? "factor on " + card.quantity().title()
                 : card.quantity().title() + ", " + card.quantity().symbol()
-                        + (card.quantity().unit().equals("-") ? "" : ", in " + card.quantity().unit());
+                        + unit(card.quantity().unit());
         html.open("figure").line().open("svg", "xmlns", SVG, "viewBox", "0 0 " + PlotFrame.WIDTH + " " + PlotFrame.HEIGHT,
                 "role", "img", "aria-labelledby", "plot-title plot-desc").line();
         html.leaf("title", card.title() + ": " + yTitle + " over " + data.sweep().title(), "id", "plot-title");
@@ -34,6 +38,10 @@ final class Plot {
         new PlotInk(html, frame).draw(data);
         html.close().line();
         html.leaf("figcaption", caption(card, data)).close().line();
+    }
+
+    private static String unit(String unit) {
+        return unit.equals("-") ? "" : unit.startsWith("per ") ? " " + unit : ", in " + unit;
     }
 
     private static String description(Correlation card, PlotData data) {
@@ -65,21 +73,12 @@ final class Plot {
         return String.join(" ", words.stream().filter(sentence -> !sentence.isEmpty()).toList());
     }
 
-    /** What else the formula reads, at its value. */
+    /** Everything that stays, at its value. */
     private static String others(Correlation card, PlotData data) {
-        StringBuilder words = new StringBuilder();
-        PlotCase base = data.base();
-        for (var parameter : data.read()) {
-            String unit = parameter.kind().columnUnit().equals("-") ? "" : " " + parameter.kind().columnUnit();
-            words.append(", ").append(parameter.symbol()).append(' ')
-                    .append(Figures.show(parameter.toColumn(base.get(parameter)))).append(unit);
-        }
-        for (var variable : card.reads()) {
-            boolean swept = data.sweep().title().startsWith(variable.title() + ",");
-            if (!swept) {
-                words.append(", ").append(variable.symbol()).append(' ').append(Figures.show(base.get(variable)));
-            }
-        }
-        return words.toString();
+        Set<Variable> still = new LinkedHashSet<>(card.reads());
+        still.remove(data.sweep().variable());
+        Set<GeometryParameter> dimensions = new LinkedHashSet<>(data.read());
+        dimensions.remove(data.sweep().dimension());
+        return CaseWords.dimensions(data.base(), dimensions) + CaseWords.variables(data.base(), still);
     }
 }

@@ -2,6 +2,7 @@ package stirwright.cards.internal;
 
 import java.util.List;
 import java.util.Locale;
+import stirwright.correlation.Figures;
 import stirwright.correlation.RegimeLimits;
 
 /** The two axes of a plot with their ticks, and the regimes behind it. Sizes in units of the picture. */
@@ -22,7 +23,7 @@ record PlotFrame(Scale x, Scale y) {
     private static final int WORD = 74;
 
     /** From this ratio of values on the axis is logarithmic. */
-    private static final double WIDE = 5;
+    private static final double WIDE = 12;
     private static final double ROOM = 1.15;
     /** So far beyond what is within the stated range an extrapolation is followed. */
     private static final double FOLLOWED = 10;
@@ -62,13 +63,13 @@ record PlotFrame(Scale x, Scale y) {
             String at = number(x.at(tick));
             line(html, "grid", at, number(TOP), at, number(BOTTOM));
             line(html, "tick", at, number(BOTTOM), at, number(BOTTOM + TICK));
-            html.leaf("text", x.label(tick), "x", at, "y", number(BOTTOM + LABEL), "text-anchor", "middle").line();
+            label(html, x, tick, at, number(BOTTOM + LABEL), "middle");
         }
         for (double tick : y.ticks()) {
             String at = number(y.at(tick));
             line(html, "grid", number(LEFT), at, number(RIGHT), at);
             line(html, "tick", number(LEFT - TICK), at, number(LEFT), at);
-            html.leaf("text", y.label(tick), "x", number(LEFT - 2 * TICK), "y", number(y.at(tick) + TEXT_DROP), "text-anchor", "end").line();
+            label(html, y, tick, number(LEFT - 2 * TICK), number(y.at(tick) + TEXT_DROP), "end");
         }
         html.single("path", "class", "frame", "d", "M" + LEFT + " " + TOP + "V" + BOTTOM + "H" + RIGHT);
         html.leaf("text", data.sweep().title(), "class", "title", "x", number((LEFT + RIGHT) / 2.0), "y", number(BOTTOM + TITLE),
@@ -76,6 +77,14 @@ record PlotFrame(Scale x, Scale y) {
         String middle = number((TOP + BOTTOM) / 2.0);
         html.leaf("text", yTitle, "class", "title", "x", number(TITLE_IN), "y", middle, "text-anchor", "middle", "transform",
                 "rotate(-90 " + TITLE_IN + " " + middle + ")");
+        html.close().line();
+    }
+
+    /** A raised exponent instead of the characters for it, which not every font has. */
+    private static void label(Html html, Scale scale, double tick, String x, String y, String anchor) {
+        html.open("text", "x", x, "y", y, "text-anchor", anchor);
+        scale.exponent(tick).ifPresentOrElse(exponent -> html.words("10").leaf("tspan", (exponent < 0 ? "\u2212" : "")
+                + Math.abs(exponent), "dy", "-5", "class", "raised"), () -> html.words(Figures.show(tick)));
         html.close().line();
     }
 

@@ -128,7 +128,11 @@ final class Plotting {
     private List<PlotData.Point> points(Sweep sweep, PlotCase base, double[] window) {
         List<PlotData.Point> points = new ArrayList<>();
         PlotData.Point last = null;
-        for (double x : values(sweep, window).toArray()) {
+        double own = sweep.read().applyAsDouble(base);
+        // The base itself is one of the points, so that a narrow range around it is not stepped over.
+        DoubleStream all = own >= window[0] && own <= window[1] ? DoubleStream.concat(values(sweep, window), DoubleStream.of(own))
+                : values(sweep, window);
+        for (double x : all.sorted().distinct().toArray()) {
             PlotData.Point point = point(sweep, base, x);
             if (last != null && last.inside() != point.inside() && !sweep.whole()) {
                 points.addAll(border(sweep, base, last, point));

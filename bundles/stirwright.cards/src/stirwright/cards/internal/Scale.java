@@ -2,17 +2,16 @@ package stirwright.cards.internal;
 
 import java.util.ArrayList;
 import java.util.List;
-import stirwright.correlation.Figures;
+import java.util.OptionalInt;
 
 /** From numbers to places along one axis, and the ticks on it. Immutable. */
 record Scale(double least, double most, boolean logarithmic, boolean whole, double from, double to) {
     private static final double[] STEPS = {1, 2, 5, 10};
     private static final int TICKS = 6;
     /** Below so many decades their twos and fives are marked too. */
-    private static final double FEW_DECADES = 2.2;
+    private static final double FEW_DECADES = 3;
     private static final int LEAST_PLAIN = -2;
-    private static final int MOST_PLAIN = 3;
-    private static final String RAISED = "\u2070\u00B9\u00B2\u00B3\u2074\u2075\u2076\u2077\u2078\u2079";
+    private static final int MOST_PLAIN = 2;
 
     double at(double value) {
         double share = logarithmic ? Math.log(value / least) / Math.log(most / least) : (value - least) / (most - least);
@@ -58,15 +57,10 @@ record Scale(double least, double most, boolean logarithmic, boolean whole, doub
         return ticks;
     }
 
-    /** As the axis shows it; decades far from one as powers of ten. */
-    String label(double tick) {
+    /** The exponent of ten by which a tick is written; empty where it is written in full. */
+    OptionalInt exponent(double tick) {
         int decade = (int) Math.round(Math.log10(Math.abs(tick)));
         boolean power = logarithmic && Math.abs(tick / Math.pow(10, decade) - 1) < 1e-9;
-        if (!power || decade >= LEAST_PLAIN && decade <= MOST_PLAIN - 1) {
-            return Figures.show(tick);
-        }
-        StringBuilder label = new StringBuilder(decade < 0 ? "10\u207B" : "10");
-        String.valueOf(Math.abs(decade)).chars().forEach(digit -> label.append(RAISED.charAt(digit - '0')));
-        return label.toString();
+        return power && (decade < LEAST_PLAIN || decade > MOST_PLAIN) ? OptionalInt.of(decade) : OptionalInt.empty();
     }
 }

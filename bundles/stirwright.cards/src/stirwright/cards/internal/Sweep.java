@@ -17,15 +17,16 @@ import stirwright.correlation.Variable;
 /**
  * What a plot runs over.
  *
+ * @param variable that is swept; null for a dimension
+ * @param dimension that is swept; null for a variable
  * @param title of the axis, with the unit
  * @param note what moves along with it; blank for nothing
- * @param reynolds whether it is the Reynolds number, so that regimes can be marked
  * @param least and {@code most}: as far as it is tried
  * @param move gives a case another value
  * @param read the value that a case has
  */
-record Sweep(String title, String note, boolean reynolds, boolean logarithmic, boolean whole, double least, double most,
-        BiFunction<PlotCase, Double, PlotCase> move, ToDoubleFunction<PlotCase> read) {
+record Sweep(Variable variable, GeometryParameter dimension, String title, String note, boolean logarithmic, boolean whole,
+        double least, double most, BiFunction<PlotCase, Double, PlotCase> move, ToDoubleFunction<PlotCase> read) {
 
     private static final double LEAST_REYNOLDS = 0.1;
     private static final double MOST_REYNOLDS = 1e6;
@@ -38,6 +39,11 @@ record Sweep(String title, String note, boolean reynolds, boolean logarithmic, b
     private static final double RIGHT_ANGLE = 90;
     private static final Set<GeometryParameter> BY_VESSEL =
             Set.of(Dimensions.LIQUID_HEIGHT, Dimensions.BAFFLE_WIDTH, Dimensions.CLEARANCE);
+
+    /** Whether regimes can be marked. */
+    boolean reynolds() {
+        return Variable.REYNOLDS.equals(variable);
+    }
 
     /** Over the Reynolds number, by a decade beyond what a source states. */
     static Sweep reynolds(Correlation card) {
@@ -65,8 +71,8 @@ record Sweep(String title, String note, boolean reynolds, boolean logarithmic, b
 
     private static Sweep over(Variable variable, boolean logarithmic, double least, double most) {
         String unit = variable.unit().equals("-") ? "" : ", in " + variable.unit();
-        return new Sweep(variable.title() + ", " + variable.symbol() + unit, "", variable.equals(Variable.REYNOLDS), logarithmic,
-                false, least, most, (c, x) -> c.with(variable, x), c -> c.get(variable));
+        return new Sweep(variable, null, variable.title() + ", " + variable.symbol() + unit, "", logarithmic, false,
+                least, most, (c, x) -> c.with(variable, x), c -> c.get(variable));
     }
 
     /** Over each dimension that a formula read, where it can be moved. */
@@ -84,13 +90,13 @@ record Sweep(String title, String note, boolean reynolds, boolean logarithmic, b
 
     private static Optional<Sweep> over(GeometryParameter parameter, PlotCase base) {
         if (parameter.equals(Dimensions.VESSEL_DIAMETER)) {
-            return Optional.of(new Sweep("impeller over vessel diameter, D/T", "H/T, C/T and B/T stay.", false, false, false,
+            return Optional.of(new Sweep(null, parameter, "impeller over vessel diameter, D/T", "H/T, C/T and B/T stay.", false, false,
                     LEAST_RATIO, MOST_RATIO, (c, x) -> c.inVessel(c.get(Dimensions.IMPELLER_DIAMETER) / x),
                     c -> c.ratio(Dimensions.IMPELLER_DIAMETER, Dimensions.VESSEL_DIAMETER)));
         }
         if (parameter.equals(Dimensions.WALL_GAP)) {
             double gap = base.ratio(Dimensions.WALL_GAP, Dimensions.IMPELLER_DIAMETER);
-            return Optional.of(new Sweep("wall gap over impeller diameter, c/D", "H/T, C/T and B/T stay.", false, false, false,
+            return Optional.of(new Sweep(null, parameter, "wall gap over impeller diameter, c/D", "H/T, C/T and B/T stay.", false, false,
                     gap / DIMENSION, gap * DIMENSION, (c, x) -> c.inVessel(c.get(Dimensions.IMPELLER_DIAMETER) * (1 + 2 * x)),
                     c -> c.ratio(Dimensions.WALL_GAP, Dimensions.IMPELLER_DIAMETER)));
         }
@@ -116,7 +122,7 @@ record Sweep(String title, String note, boolean reynolds, boolean logarithmic, b
     }
 
     private static Sweep alone(GeometryParameter parameter, String title, boolean whole, double least, double most, double unit) {
-        return new Sweep(title, "", false, false, whole, least, most, (c, x) -> c.with(parameter, x * unit),
+        return new Sweep(null, parameter, title, "", false, whole, least, most, (c, x) -> c.with(parameter, x * unit),
                 c -> c.get(parameter) / unit);
     }
 }

@@ -216,4 +216,22 @@ class CommandLineTest {
         assertEquals("", out.toString());
         assertEquals(1, err.toString().lines().count(), err.toString());
     }
+
+    @Test
+    void cardsAreWrittenWhereAskedFor() throws IOException {
+        Path cards = folder.resolve("cards");
+        assertEquals(0, run("cards", "--out", cards.toString()), err::toString);
+        assertTrue(out.toString().contains(cards.resolve("index.html").toString()), out::toString);
+        for (var entry : CATALOGUE.entries()) {
+            assertTrue(Files.exists(cards.resolve("card-" + entry.correlation().id() + ".html")), entry.correlation()::id);
+        }
+    }
+
+    @Test
+    void cardsLeaveAFolderOfSomebodyElseAlone() throws IOException {
+        Path index = Files.writeString(folder.resolve("index.html"), "mine");
+        assertEquals(3, run("cards", "--out", folder.toString()));
+        assertTrue(err.toString().contains(folder.toString()), err::toString);
+        assertEquals("mine", Files.readString(index));
+    }
 }

@@ -26,6 +26,8 @@ public final class Messages extends NLS {
     public static String Card_formula;
     public static String Card_name;
     public static String Card_notes;
+    public static String Card_open;
+    public static String Card_openName;
     public static String Card_pick;
     public static String Card_problems;
     public static String Card_range;
@@ -37,6 +39,13 @@ public final class Messages extends NLS {
     public static String Card_source;
     public static String Card_unpick;
     public static String Card_unpickTip;
+    public static String Cards_back;
+    public static String Cards_failed;
+    public static String Cards_name;
+    public static String Cards_noBrowserAtAll;
+    public static String Cards_outside;
+    public static String Cards_systemBrowser;
+    public static String Cards_title;
     public static String Case_case;
     public static String Case_compare;
     public static String Case_copy;

@@ -28,6 +28,7 @@ public final class LifeCycle {
         context.set(Problems.class, new Problems());
         context.set(Session.class, session);
         context.set(Documents.class, ContextInjectionFactory.make(Documents.class, context));
+        context.set(CardsWindow.class, ContextInjectionFactory.make(CardsWindow.class, context));
         context.set(DropInNotices.class, ContextInjectionFactory.make(DropInNotices.class, context));
         display.disposeExec(session::close);
     }

@@ -7,6 +7,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
+import stirwright.workbench.internal.app.CardsWindow;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 
@@ -20,6 +21,9 @@ public final class CandidatesPart {
     @Inject
     private Looks looks;
 
+    @Inject
+    private CardsWindow cards;
+
     private CandidateTable table;
 
     @PostConstruct
@@ -28,7 +32,7 @@ public final class CandidatesPart {
         SashForm halves = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
         halves.setSashWidth(Looks.STEP);
         table = new CandidateTable(halves, looks, session);
-        new CardView(halves, looks, session);
+        new CardView(halves, looks, session, cards);
         halves.setWeights(SHARES);
     }
 

@@ -7,6 +7,7 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Text;
 import stirwright.core.Choices;
 import stirwright.core.Role;
@@ -15,6 +16,7 @@ import stirwright.study.Amounts;
 import stirwright.study.Case;
 import stirwright.study.Picks;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.app.CardsWindow;
 import stirwright.workbench.internal.session.CaseEdits;
 import stirwright.workbench.internal.session.Outcome;
 import stirwright.workbench.internal.session.Row;
@@ -31,8 +33,9 @@ final class CardView extends Composite {
     private final Button pick;
     private final Button unpick;
     private final Composite foot;
+    private final Link open;
 
-    CardView(Composite parent, Looks looks, Session session) {
+    CardView(Composite parent, Looks looks, Session session, CardsWindow cards) {
         super(parent, SWT.NONE);
         this.session = session;
         this.edits = new CaseEdits(session);
@@ -54,6 +57,9 @@ final class CardView extends Composite {
         footLayout.marginWidth = 0;
         footLayout.marginHeight = 0;
         foot.setLayout(footLayout);
+        open = Names.name(looks.link(foot, Messages.Card_open, () -> session.selected().flatMap(Row::correlation)
+                .ifPresent(correlation -> cards.open(getShell(), correlation))), Messages.Card_openName);
+        open.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
         reason = looks.field(Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName));
         reason.setMessage(Messages.Card_reason);
         reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
@@ -94,6 +100,7 @@ final class CardView extends Composite {
         boolean pickable = session.fresh() && own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
         boolean chosen = session.current().map(c -> Picks.get(c, session.view().quantity().id()).isPresent()
                 || Amounts.get(c.getAmounts(), Choices.givenField(session.view().quantity())).isPresent()).orElse(false);
+        open.setEnabled(row.flatMap(Row::correlation).isPresent());
         reason.setEnabled(pickable);
         pick.setEnabled(pickable && !reason.getText().isBlank());
         unpick.setEnabled(chosen);
