@@ -84,6 +84,14 @@ start_display() {
   unset WAYLAND_DISPLAY GDK_SCALE
 }
 
+# find_browsers: what shows the cards, in the window and beside it. Their tests skip and say so where it cannot be had.
+find_browsers() {
+  has_library libwebkit2gtk-4.1.so.0 || has_library libwebkit2gtk-4.0.so.37 || install libwebkit2gtk-4.1-0 \
+    || say "without WebKitGTK (on Debian libwebkit2gtk-4.1-0) the tests of the cards in the window skip."
+  command -v chromium chromium-browser google-chrome >/dev/null || install chromium \
+    || say "without Chromium (on Debian chromium) the test of the cards in a browser skips."
+}
+
 stop_display() {
   kill "$display" 2>/dev/null || true
   rm -f "$tools/display.$$"

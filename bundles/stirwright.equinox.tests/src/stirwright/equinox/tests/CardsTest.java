@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.MatchResult;
@@ -27,11 +28,14 @@ import stirwright.cards.Cards;
 import stirwright.cards.FolderInUseException;
 import stirwright.conformance.InstalledBundles;
 import stirwright.conformance.Proof;
+import stirwright.core.Arrival;
 import stirwright.core.Catalogue;
 import stirwright.core.Entry;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 import stirwright.correlation.GeometryParameter;
+import stirwright.correlation.Quantity;
+import stirwright.correlation.Transcription;
 
 /** A card for everything that is installed, complete, and no link into the void. */
 class CardsTest {
@@ -175,10 +179,10 @@ class CardsTest {
 
     @Test
     void wordsOfABundleStayWords(@TempDir Path other) throws Exception {
-        Correlation hostile = Specimen.sound(Correlation.of("specimen.np.invented", stirwright.correlation.Quantity.POWER_NUMBER,
-                "<script>alert('a & \"b\"')</script>\u0007")).variant("specimen.np.hostile", Specimen.sound(Specimen.power()).constants());
-        Catalogue strange = Catalogue.of(List.of(new stirwright.core.Arrival("a <b> & c", List.of(Specimen.family("specimen").build()),
-                List.of(hostile), java.util.Optional.empty())));
+        Correlation hostile = Correlation.of("specimen.np.hostile", Quantity.POWER_NUMBER, "<script>alert('a & \"b\"')</script>\u0007")
+                .families("specimen").cite(Specimen.SOURCE).transcription(Transcription.FROM_MEMORY).value("A", 2).build();
+        Catalogue strange = Catalogue.of(List.of(new Arrival("a <b> & c", List.of(Specimen.family("specimen").build()),
+                List.of(hostile), Optional.empty())));
         Cards.write(strange, List.of(), other);
         CardPages pages = CardPages.of(other);
         Document card = pages.page(Cards.file(hostile));

@@ -20,14 +20,32 @@ import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.MenuItem;
 import org.eclipse.swt.widgets.Shell;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
+import org.osgi.framework.BundleContext;
+import org.osgi.framework.FrameworkUtil;
 import stirwright.correlation.Correlation;
+import stirwright.trust.DropIns;
 import stirwright.workbench.internal.session.Row;
+import stirwright.workbench.internal.session.Session;
 
 /** The cards in the window's help. */
 class CardsTest {
     private static final List<String> DEMO = List.of("demo", "--window");
     private static final String INDEX = "Correlation cards";
+
+    private final BundleContext bundles = FrameworkUtil.getBundle(Session.class).getBundleContext();
+    private final DropIns dropIns = bundles.getService(bundles.getServiceReference(DropIns.class));
+
+    @BeforeEach
+    @AfterEach
+    void nothingIsDropped() throws Exception {
+        for (var one : dropIns.list()) {
+            Files.deleteIfExists(one.file());
+        }
+        dropIns.forget(DroppedJar.sha256(DroppedJar.bytes()));
+    }
 
     @Test
     void theMenuOpensTheIndexAndTheCandidateItsCard() throws Exception {
