@@ -10,7 +10,7 @@ final class CardList {
 
     /** @param byQuantity under the heading of a quantity, so that the families are told instead of it */
     static void write(Html html, Holdings holdings, List<Entry> entries, boolean byQuantity) {
-        html.open("table").open("thead").open("tr");
+        html.open("table", "class", "cards").open("thead").open("tr");
         for (String head : List.of("Card", byQuantity ? "Family" : "Quantity", "Source", "Digits", "Standing")) {
             html.leaf("th", head, "scope", "col");
         }

@@ -36,7 +36,7 @@ public final class CardPage {
     private void write(String origin) {
         Optional<PlotData> plot = Plotting.of(holdings, card);
         head(origin);
-        html.leaf("h2", "Formula").leaf("pre", card.formula(), "class", "formula").line();
+        formula();
         Plot.write(html, card, plot);
         SymbolTable.write(html, card, plot);
         range();
@@ -65,6 +65,15 @@ public final class CardPage {
                 + card.transcription().words());
         if (!card.standing().recommendable() || !card.citation().hasSource() || card.transcription() == Transcription.UNSURE) {
             html.leaf("span", "never recommended", "class", "doubt");
+        }
+        html.close().line();
+    }
+
+    /** A long one has a line for each of its parts. */
+    private void formula() {
+        html.leaf("h2", "Formula").open("pre", "class", "formula");
+        for (String part : card.formula().split("(?<=; )")) {
+            html.leaf("span", part);
         }
         html.close().line();
     }
