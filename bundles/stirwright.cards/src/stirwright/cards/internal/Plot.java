@@ -49,7 +49,7 @@ final class Plot {
         List<PlotData.Point> told = inside.isEmpty() ? data.points() : inside;
         PlotData.Point first = told.get(0);
         PlotData.Point last = told.get(told.size() - 1);
-        return (inside.isEmpty() ? "Nowhere within the stated range. " : "Within the stated range: ")
+        return (inside.isEmpty() ? "Beyond the stated range: " : "Where no stated bound fails: ")
                 + card.quantity().symbol() + " " + Figures.show(first.y()) + " at " + Figures.show(first.x()) + ", "
                 + Figures.show(last.y()) + " at " + Figures.show(last.x()) + ".";
     }

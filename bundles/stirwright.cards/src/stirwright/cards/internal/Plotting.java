@@ -84,7 +84,7 @@ final class Plotting {
                 return List.of(sweep.get());
             }
         }
-        List<Sweep> over = Sweep.over(read, base);
+        List<Sweep> over = Sweep.over(card, read, base);
         return over.isEmpty() ? List.of(Sweep.reynolds(card)) : over;
     }
 

@@ -76,36 +76,36 @@ record Sweep(Variable variable, GeometryParameter dimension, String title, Strin
     }
 
     /** Over each dimension that a formula read, where it can be moved. */
-    static List<Sweep> over(Set<GeometryParameter> read, PlotCase base) {
+    static List<Sweep> over(Correlation card, Set<GeometryParameter> read, PlotCase base) {
         List<Sweep> sweeps = new ArrayList<>();
         for (GeometryParameter parameter : read) {
             // The gap and the vessel move together, and the gap is what is read of them.
             boolean told = parameter.equals(Dimensions.VESSEL_DIAMETER) && read.contains(Dimensions.WALL_GAP);
             if (base.get(parameter) > 0 && !told) {
-                over(parameter, base).ifPresent(sweeps::add);
+                over(card, parameter, base).ifPresent(sweeps::add);
             }
         }
         return sweeps;
     }
 
-    private static Optional<Sweep> over(GeometryParameter parameter, PlotCase base) {
+    private static Optional<Sweep> over(Correlation card, GeometryParameter parameter, PlotCase base) {
         if (parameter.equals(Dimensions.VESSEL_DIAMETER)) {
             return Optional.of(new Sweep(null, parameter, "impeller over vessel diameter, D/T", "H/T, C/T and B/T stay.", false, false,
                     LEAST_RATIO, MOST_RATIO, (c, x) -> c.inVessel(c.get(Dimensions.IMPELLER_DIAMETER) / x),
                     c -> c.ratio(Dimensions.IMPELLER_DIAMETER, Dimensions.VESSEL_DIAMETER)));
         }
         if (parameter.equals(Dimensions.WALL_GAP)) {
-            double gap = base.ratio(Dimensions.WALL_GAP, Dimensions.IMPELLER_DIAMETER);
+            double[] reach = reach(card, Measure.ratio(parameter, Dimensions.IMPELLER_DIAMETER), base);
             return Optional.of(new Sweep(null, parameter, "wall gap over impeller diameter, c/D", "H/T, C/T and B/T stay.", false, false,
-                    gap / DIMENSION, gap * DIMENSION, (c, x) -> c.inVessel(c.get(Dimensions.IMPELLER_DIAMETER) * (1 + 2 * x)),
+                    reach[0], reach[1], (c, x) -> c.inVessel(c.get(Dimensions.IMPELLER_DIAMETER) * (1 + 2 * x)),
                     c -> c.ratio(Dimensions.WALL_GAP, Dimensions.IMPELLER_DIAMETER)));
         }
         Kind kind = parameter.kind();
         if (kind == Kind.LENGTH && !parameter.equals(Dimensions.IMPELLER_DIAMETER)) {
             GeometryParameter by = BY_VESSEL.contains(parameter) ? Dimensions.VESSEL_DIAMETER : Dimensions.IMPELLER_DIAMETER;
-            double ratio = base.ratio(parameter, by);
+            double[] reach = reach(card, Measure.ratio(parameter, by), base);
             return Optional.of(alone(parameter, parameter.title() + " over " + by.title() + ", " + parameter.symbol() + "/" + by.symbol(),
-                    false, ratio / DIMENSION, ratio * DIMENSION, base.get(by)));
+                    false, reach[0], reach[1], base.get(by)));
         }
         if (kind == Kind.ANGLE) {
             return Optional.of(alone(parameter, parameter.title() + ", in degrees", false, LEAST_ANGLE, RIGHT_ANGLE,
@@ -115,10 +115,23 @@ record Sweep(Variable variable, GeometryParameter dimension, String title, Strin
         return switch (kind) {
             case COUNT -> Optional.of(alone(parameter, parameter.title() + ", " + parameter.symbol(), true,
                     Math.max(1, parameter.min()), Math.min(Math.max(MOST_COUNT, value), parameter.max()), 1));
-            case RATIO -> Optional.of(alone(parameter, parameter.title() + ", " + parameter.symbol(), false, value / DIMENSION,
-                    value * DIMENSION, 1));
+            case RATIO -> {
+                double[] reach = reach(card, Measure.of(parameter), base);
+                yield Optional.of(alone(parameter, parameter.title() + ", " + parameter.symbol(), false, reach[0], reach[1], 1));
+            }
             default -> Optional.empty();
         };
+    }
+
+    /** Around the base and as far as the source states, with room beyond. */
+    private static double[] reach(Correlation card, Measure measure, PlotCase base) {
+        double value = measure.value(base, base);
+        double[] reach = {value / DIMENSION, value * DIMENSION};
+        if (card.bound(measure).orElse(null) instanceof Bound.Range range) {
+            reach[0] = range.least() > 0 ? Math.min(reach[0], range.least() / 2) : reach[0];
+            reach[1] = range.most() < Double.POSITIVE_INFINITY ? Math.max(reach[1], range.most() * 2) : reach[1];
+        }
+        return reach;
     }
 
     private static Sweep alone(GeometryParameter parameter, String title, boolean whole, double least, double most, double unit) {
