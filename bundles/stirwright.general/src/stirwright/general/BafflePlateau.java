@@ -40,7 +40,7 @@ final class BafflePlateau {
     /** The level, with a slot for each constant of {@link #declareLevel}. */
     static String levelFormula(Blades blades) {
         return switch (blades) {
-            case UPRIGHT -> "Npmax = {b1} nB^{b2} W/D";
+            case UPRIGHT, ARMS -> "Npmax = {b1} nB^{b2} W/D";
             case PITCHED -> "Npmax = {b1} (2 angle/pi)^{b3} nB^{b2} W sin(angle)^{b4}/D";
             case PADDLE -> "Npmax = {b5} S^{b6} up to S = {b7}, {b1} S up to S = {b8}, {b9} S^{b10} beyond; S = nB^{b2} W/D";
         };
@@ -48,7 +48,7 @@ final class BafflePlateau {
 
     static CorrelationBuilder declareLevel(CorrelationBuilder card, Blades blades) {
         List<String> names = switch (blades) {
-            case UPRIGHT -> List.of("b1", "b2");
+            case UPRIGHT, ARMS -> List.of("b1", "b2");
             case PITCHED -> List.of("b1", "b2", "b3", "b4");
             case PADDLE -> List.of("b1", "b2", "b5", "b6", "b7", "b8", "b9", "b10");
         };
@@ -65,7 +65,7 @@ final class BafflePlateau {
         double solidity = Math.pow(vessel.get(BLADE_COUNT), b.applyAsDouble("b2")) * vessel.ratio(BLADE_WIDTH, IMPELLER_DIAMETER);
         double shared = b.applyAsDouble("b1") * solidity;
         return switch (blades) {
-            case UPRIGHT -> shared;
+            case UPRIGHT, ARMS -> shared;
             case PITCHED -> shared * Math.pow(blades.uprightness(vessel), b.applyAsDouble("b3"))
                     * Math.pow(blades.sine(vessel), b.applyAsDouble("b4"));
             case PADDLE -> solidity <= b.applyAsDouble("b7") ? b.applyAsDouble("b5") * Math.pow(solidity, b.applyAsDouble("b6"))

@@ -52,6 +52,6 @@ final class PartialBaffling {
     }
 
     private static boolean lessThanFull(Geometry vessel) {
-        return vessel.get(Dimensions.BAFFLE_COUNT) > 0 && BafflePlateau.overFull(vessel) < 1;
+        return vessel.get(Dimensions.BAFFLE_COUNT) > 0 && BafflePlateau.overFull(vessel, Blades.PITCHED) < 1;
     }
 }
