@@ -15,7 +15,10 @@ import stirwright.correlation.Standing;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 
-/** An impeller and a correlation, both invented, to be replaced by your own. */
+/**
+ * An impeller and a correlation, both invented, to be replaced by your own. As long as there is no
+ * shear-rate constant among them, a case gives one in its column.
+ */
 @Component
 public final class InHouse implements Contribution {
 
