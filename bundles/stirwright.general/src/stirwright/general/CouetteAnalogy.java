@@ -32,7 +32,7 @@ final class CouetteAnalogy {
     static Correlation constant() {
         return Correlation.of("general.ks.couette-analogy", Quantity.SHEAR_RATE_CONSTANT,
                         "Couette analogy, from the laminar power")
-                .families("discturbine", "pitchedblade", "anchor", "helicalribbon")
+                .families("discturbine", "pitchedblade", "flatblade", "anchor", "helicalribbon")
                 .cite(Citation.withoutLocator("exact flow of a power-law liquid between a turning and a resting cylinder, "
                         + "worked here; the definition of the constant by F. Rieger and V. Novak, Trans. Instn Chem. "
                         + "Engrs 51 (1973) 105 and 52 (1974) 285"))
