@@ -9,9 +9,12 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.SortedSet;
+import java.util.TreeSet;
 import java.util.concurrent.ConcurrentHashMap;
 import stirwright.core.internal.Ranking;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Effect;
 import stirwright.correlation.Family;
 import stirwright.correlation.Quantity;
 
@@ -39,6 +42,18 @@ public final class Catalogue {
         Catalogue catalogue = new Catalogue();
         arrivals.forEach(catalogue::take);
         return catalogue;
+    }
+
+    /** The same with further correlations, of which none has the id of one that is here. */
+    public Catalogue with(List<Entry> further) {
+        Catalogue wider = new Catalogue();
+        wider.families.putAll(families);
+        wider.familyOrigins.putAll(familyOrigins);
+        wider.units.putAll(units);
+        wider.problems.addAll(problems);
+        wider.entries.putAll(entries);
+        further.forEach(entry -> wider.entries.put(entry.correlation().id(), entry));
+        return wider;
     }
 
     private void take(Arrival arrival) {
@@ -125,6 +140,16 @@ public final class Catalogue {
                         && c.modifierFor().isPresent() == w.modifiers())
                 .sorted(w.modifiers() ? Ranking.MODIFIERS : Ranking.BY_TRUST)
                 .toList());
+    }
+
+    /** The ids of the effects that any correlation speaks of, as a factor's or as contained. */
+    public SortedSet<String> effects() {
+        SortedSet<String> ids = new TreeSet<>();
+        for (Entry entry : entries.values()) {
+            entry.correlation().modifierFor().map(Effect::id).ifPresent(ids::add);
+            entry.correlation().contains().forEach(effect -> ids.add(effect.id()));
+        }
+        return ids;
     }
 
     /** What is wrong with the installed contributions, a sentence each. */

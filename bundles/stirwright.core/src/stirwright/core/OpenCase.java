@@ -49,6 +49,20 @@ public final class OpenCase {
         return computed().bounds(quantity, correlationId);
     }
 
+    /**
+     * The factors on a candidate, and those that the case leaves out, the other quantities at their pick.
+     *
+     * @throws CaseRefusedException when the case was refused or has no such candidate
+     */
+    public List<FactorFinding> factors(Quantity quantity, String correlationId) {
+        return computed().factors(quantity, correlationId);
+    }
+
+    /** What the case was computed with: all that is installed, and what it changed of it; empty when it was refused. */
+    public Optional<Catalogue> catalogue() {
+        return solver.map(CaseSolver::catalogue);
+    }
+
     private CaseSolver computed() {
         return solver.filter(s -> result.refusal().isEmpty()).orElseThrow(() -> {
             Refusal refusal = result.refusal().orElseThrow();

@@ -17,6 +17,7 @@ public final class Citations {
     public static void examine(Workpiece workpiece, Findings findings) {
         for (Family family : workpiece.ownFamilies()) {
             examine(family.id(), family.regimes().citation(), findings);
+            family.regimes().shearThinning().ifPresent(thinning -> examine(family.id(), thinning.citation(), findings));
         }
         for (Correlation correlation : workpiece.correlations()) {
             examine(correlation.id(), correlation.citation(), findings);

@@ -51,6 +51,10 @@ final class CaseView {
         Columns.appendWrapped(text, "  ", "power " + Figures.show(pick.power()) + " W, torque " + Figures.show(pick.torque())
                 + " N m, " + Figures.show(pick.powerPerVolume()) + " W/m3, power number " + Figures.show(pick.powerNumber())
                 + " by " + pick.correlation(), WIDTH);
+        if (!Double.isNaN(pick.powerBasedShearRate())) {
+            Columns.appendWrapped(text, "  ", "power-based average shear rate, over the whole vessel: "
+                    + Figures.show(pick.powerBasedShearRate()) + " 1/s", WIDTH);
+        }
         if (!pick.flowCorrelation().isEmpty()) {
             Columns.appendWrapped(text, "  ", "pumping " + Figures.show(pick.pumping()) + " m3/s (flow number "
                     + Figures.show(pick.flowNumber()) + pick.flowKind().map(FlowKind::id).map(k -> ", " + k).orElse("")

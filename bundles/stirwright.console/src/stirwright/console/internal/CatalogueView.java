@@ -12,6 +12,7 @@ import stirwright.correlation.Effect;
 import stirwright.correlation.Family;
 import stirwright.correlation.Figures;
 import stirwright.correlation.FlowKind;
+import stirwright.correlation.RegimeLimits;
 
 /** The installed families and correlations laid out for reading, at most 120 columns wide. */
 final class CatalogueView {
@@ -31,9 +32,9 @@ final class CatalogueView {
         for (Family family : families) {
             line(text, 0, family.id() + ": " + family.title() + " (" + catalogue.originOf(family) + ")");
             line(text, 2, family.description());
-            line(text, 2, "laminar up to Reynolds number " + Figures.show(family.regimes().laminarUpTo())
-                    + ", turbulent from " + Figures.show(family.regimes().turbulentFrom()) + "; "
-                    + family.regimes().citation());
+            line(text, 2, regimes(family.regimes()));
+            family.regimes().shearThinning().ifPresent(
+                    thinning -> line(text, 2, "shear-thinning fluids: " + regimes(thinning)));
             text.append('\n');
             entries.stream().filter(e -> e.correlation().families().contains(family.id()))
                     .forEach(e -> card(text, e));
@@ -49,12 +50,22 @@ final class CatalogueView {
         out.flush();
     }
 
+    private static String regimes(RegimeLimits limits) {
+        return "laminar up to Reynolds number " + Figures.show(limits.laminarUpTo()) + ", turbulent from "
+                + Figures.show(limits.turbulentFrom()) + "; " + limits.citation()
+                + (limits.remark().isEmpty() ? "" : ". " + limits.remark());
+    }
+
     private static void card(StringBuilder text, Entry entry) {
         Correlation c = entry.correlation();
         line(text, 2, c.id() + ": " + c.quantity().title()
-                + c.modifierFor().map(Effect::title).map(t -> ", factor for " + t).orElse("")
+                + c.modifierFor().map(e -> ", factor for " + e.title() + " (" + e.id() + ")").orElse("")
                 + c.flowKind().map(FlowKind::id).map(k -> ", " + k).orElse(""));
         line(text, 6, c.formula());
+        if (!c.constants().names().isEmpty()) {
+            line(text, 6, "constants: " + String.join(", ", c.constants().names().stream()
+                    .map(name -> name + " = " + Figures.show(c.constants().get(name))).toList()));
+        }
         line(text, 6, "range: " + String.join("; ", c.validity().stream().map(Bound::words).toList()));
         line(text, 6, "source: " + c.citation());
         line(text, 6, (c.citation().hasSource() ? c.standing().words() : "rule of the trade") + "; digits " + c.transcription().words()

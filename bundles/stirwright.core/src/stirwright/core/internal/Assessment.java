@@ -5,6 +5,7 @@ import java.util.List;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.correlation.Bound;
+import stirwright.correlation.Term;
 import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 
@@ -116,6 +117,12 @@ final class Assessment {
     /** The worst over all bounds, those of the applied modifiers included. */
     Verdict verdict() {
         return verdict;
+    }
+
+    /** Whether a stated bound of the correlation itself on this measure or classifier fails. */
+    boolean fails(Term subject) {
+        return failures.stream().anyMatch(f -> f.bound().subject().equals(subject)
+                && f.part() == f.candidate().parts().get(0));
     }
 
     /** How far beyond its bounds the case lies: the sum over those that fail. */

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import stirwright.core.BoundFinding;
+import stirwright.core.FactorFinding;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.VesselGeometry;
@@ -13,8 +14,6 @@ import stirwright.correlation.Bound;
 import stirwright.correlation.BoundCorrelation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
-import stirwright.correlation.Effect;
-import stirwright.correlation.Figures;
 import stirwright.correlation.Geometry;
 import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Quantity;
@@ -37,6 +36,7 @@ final class Candidate {
     private final Quantity quantity;
     private final Optional<Correlation> correlation;
     private final List<Part> parts;
+    private final List<Part> leftOut;
     private final Set<Variable> reads;
     /** Asked for at every step of every loop. */
     private final boolean readsFlowNumber;
@@ -59,12 +59,13 @@ final class Candidate {
     }
 
     private Candidate(
-            Quantity quantity, Optional<Correlation> correlation, List<Part> parts, Geometry geometry,
+            Quantity quantity, Optional<Correlation> correlation, Factors factors, Geometry geometry,
             Set<GeometryParameter> defaultsRead, ForeignCode foreign) {
         this.foreign = foreign;
         this.quantity = quantity;
         this.correlation = correlation;
-        this.parts = parts;
+        this.parts = factors.applied();
+        this.leftOut = factors.leftOut();
         this.geometry = geometry;
         this.defaultsRead = defaultsRead;
         this.reads = parts.size() == 1 ? parts.get(0).correlation().reads() : reads(parts);
@@ -78,47 +79,26 @@ final class Candidate {
         return all;
     }
 
-    /** Applies a correlation with, for each effect that it lacks, the first of the modifiers. */
-    static Candidate of(Correlation correlation, List<Correlation> modifiers, VesselGeometry vessel) {
+    /**
+     * Applies a correlation with, for each effect that it lacks, the first of the modifiers.
+     *
+     * @param effectsLeftOut the ids of effects for which none is applied
+     */
+    static Candidate of(
+            Correlation correlation, List<Correlation> modifiers, Set<String> effectsLeftOut, VesselGeometry vessel) {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
         ForeignCode foreign = new ForeignCode();
-        List<Part> parts = foreign.call(() -> parts(correlation, modifiers, vessel, geometry, defaultsRead), List.of());
+        Factors factors = foreign.call(
+                () -> Factors.of(correlation, modifiers, effectsLeftOut, vessel, defaultsRead), Factors.NONE);
         return new Candidate(
-                correlation.quantity(), Optional.of(correlation), parts, geometry, defaultsRead, foreign);
-    }
-
-    private static List<Part> parts(Correlation correlation, List<Correlation> modifiers, VesselGeometry vessel,
-            Geometry geometry, Set<GeometryParameter> defaultsRead) {
-        List<Part> parts = new ArrayList<>();
-        parts.add(new Part(correlation, correlation.bind(geometry)));
-        Set<Effect> done = new LinkedHashSet<>(correlation.contains());
-        Set<GeometryParameter> askedFor = new LinkedHashSet<>();
-        Geometry asked = vessel.recordingDefaults(askedFor);
-        for (Correlation modifier : modifiers) {
-            Effect effect = modifier.modifierFor().orElseThrow();
-            if (!done.contains(effect)) {
-                boolean applies = modifier.appliesTo(asked);
-                if (applies) {
-                    parts.add(new Part(modifier, modifier.bind(geometry)));
-                    done.add(effect);
-                    done.addAll(modifier.contains());
-                }
-                // The standard geometry is where no modifier applies, so that nothing rests on its having been assumed.
-                if (!applies) {
-                    askedFor.removeIf(p -> vessel.defaultKind(p) == GeometryParameter.Default.ASSUMED);
-                }
-                defaultsRead.addAll(askedFor);
-                askedFor.clear();
-            }
-        }
-        return parts;
+                correlation.quantity(), Optional.of(correlation), factors, geometry, defaultsRead, foreign);
     }
 
     /** A value that the user gave: a total, so no modifier touches it. */
     static Candidate given(Quantity quantity, double value, VesselGeometry vessel) {
         Candidate candidate = new Candidate(
-                quantity, Optional.empty(), List.of(), vessel, Set.of(), new ForeignCode());
+                quantity, Optional.empty(), Factors.NONE, vessel, Set.of(), new ForeignCode());
         candidate.givenValue = value;
         return candidate;
     }
@@ -229,18 +209,26 @@ final class Candidate {
         return all;
     }
 
-    /** The modifiers in words with the factor that each contributes. */
-    List<String> modifiersInWords(Point point, FluidState state) {
-        return parts.size() < 2 ? List.of()
-                : foreign.call(() -> parts.stream().skip(1).map(part -> inWords(part, point, state)).toList(), List.of());
+    /** The modifiers applied, then those left out, each with its factor at a state. */
+    List<FactorFinding> factors(Point point, FluidState state) {
+        if (parts.size() < 2 && leftOut.isEmpty()) {
+            return List.of();
+        }
+        List<FactorFinding> all = new ArrayList<>();
+        parts.stream().skip(1).forEach(part -> all.add(new FactorFinding(
+                part.correlation(), foreign.call(() -> factor(part, point, state), Double.NaN), false)));
+        leftOut.forEach(part -> all.add(new FactorFinding(
+                part.correlation(), new ForeignCode().call(() -> factor(part, point, state), Double.NaN), true)));
+        return all;
     }
 
-    private String inWords(Part part, Point point, FluidState state) {
-        Correlation c = part.correlation();
-        double factor = part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds())));
-        return c.modifierFor().orElseThrow().title() + ": " + quantity.title() + " times "
-                + Figures.show(factor) + " by " + c.id()
-                + (c.citation().hasSource() ? "" : " (" + c.citation() + ")");
+    private static double factor(Part part, Point point, FluidState state) {
+        return part.bound().at(point.set(Variable.REYNOLDS, part.reynolds(state, state.reynolds())));
+    }
+
+    /** Whether the case leaves out an effect that would have a factor here. */
+    boolean leavesOut(String effectId) {
+        return leftOut.stream().anyMatch(p -> p.correlation().modifierFor().orElseThrow().id().equals(effectId));
     }
 
     /**

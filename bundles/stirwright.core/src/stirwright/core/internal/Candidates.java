@@ -51,7 +51,7 @@ final class Candidates {
         List<Correlation> modifiers = catalogue.modifiers(quantity, family.id());
         List<Candidate> candidates = new ArrayList<>();
         choices.given(quantity).ifPresent(value -> candidates.add(Candidate.given(quantity, value, vessel)));
-        correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, vessel)));
+        correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, choices.effectsLeftOut(), vessel)));
         return candidates;
     }
 }

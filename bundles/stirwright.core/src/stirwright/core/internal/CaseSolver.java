@@ -11,7 +11,9 @@ import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
 import stirwright.core.Catalogue;
 import stirwright.core.Choices;
+import stirwright.core.FactorFinding;
 import stirwright.core.FluidState;
+import stirwright.core.Point;
 import stirwright.core.Role;
 import stirwright.core.Slice;
 import stirwright.core.VesselGeometry;
@@ -27,6 +29,7 @@ import stirwright.correlation.Variable;
  */
 public final class CaseSolver {
     private final CaseSpec spec;
+    private final Catalogue catalogue;
     private final Family family;
     private final VesselGeometry vessel;
     private final Candidates candidates;
@@ -40,8 +43,9 @@ public final class CaseSolver {
     private final Map<Quantity, List<Candidate>> drawn = new HashMap<>();
 
     /** @throws CaseRefusedException naming the field and the value that stand in the way */
-    public CaseSolver(Catalogue catalogue, CaseSpec spec) {
+    public CaseSolver(Catalogue installed, CaseSpec spec) {
         this.spec = spec;
+        this.catalogue = Settled.catalogue(installed, spec.choices());
         this.family = catalogue.family(spec.familyId()).orElseThrow(() -> new CaseRefusedException(
                 "family", spec.familyId(), "is not installed; there are "
                         + String.join(", ", catalogue.families().stream().map(Family::id).sorted().toList())));
@@ -87,7 +91,7 @@ public final class CaseSolver {
                     everyQuantity && ranked == pick ? states.all(ranked.trial().candidate()) : constantsOf(ranked, tried),
                     ranked.trial().state().map(trials::flowsAt).orElse(Selection.NONE)));
         }
-        return new ResultAssembly(spec, family, vessel, pick)
+        return new ResultAssembly(spec, catalogue, family, vessel, pick)
                 .assemble(rows, everyQuantity ? quantities(selection, rows.get(0), pick) : List.of());
     }
 
@@ -100,6 +104,11 @@ public final class CaseSolver {
     /** The vessel with every blank filled. */
     public VesselGeometry vessel() {
         return vessel;
+    }
+
+    /** What is installed, and what the case changed of it. */
+    public Catalogue catalogue() {
+        return catalogue;
     }
 
     /**
@@ -120,7 +129,22 @@ public final class CaseSolver {
     public List<BoundFinding> bounds(Quantity quantity, String correlationId) {
         Candidate candidate = candidate(quantity, correlationId);
         FluidState state = ownState(candidate);
-        return candidate.findings(trials.setUp(trials.point(pick, candidate), state, candidate), state);
+        return candidate.findings(ownPoint(candidate, state), state);
+    }
+
+    /**
+     * Only after {@link #solve}.
+     *
+     * @throws CaseRefusedException when the case has no such candidate
+     */
+    public List<FactorFinding> factors(Quantity quantity, String correlationId) {
+        Candidate candidate = candidate(quantity, correlationId);
+        FluidState state = ownState(candidate);
+        return candidate.factors(ownPoint(candidate, state), state);
+    }
+
+    private Point ownPoint(Candidate candidate, FluidState state) {
+        return trials.setUp(trials.point(pick, candidate), state, candidate);
     }
 
     /** A power candidate may have a speed of its own; everything else is seen at the pick's state. */

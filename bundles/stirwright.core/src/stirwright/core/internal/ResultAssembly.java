@@ -6,6 +6,7 @@ import java.util.Optional;
 import stirwright.core.CandidateResult;
 import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
+import stirwright.core.Catalogue;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
 import stirwright.core.QuantityResult;
@@ -18,16 +19,29 @@ import stirwright.correlation.Family;
 /** Turns ranked trials into the result of a case. */
 final class ResultAssembly {
     private final CaseSpec spec;
+    private final Catalogue catalogue;
     private final Family family;
     private final VesselGeometry vessel;
     private final Selection.Ranked pick;
     private final double volume;
 
     /** A power candidate with the shear-rate constants and flow numbers at its own state. */
-    record Row(Selection.Ranked power, Selection constants, Selection flows) {}
+    record Row(Selection.Ranked power, Selection constants, Selection flows) {
 
-    ResultAssembly(CaseSpec spec, Family family, VesselGeometry vessel, Selection.Ranked pick) {
+        /** The power number itself, the shear-rate constant and the flow number that are used with it. */
+        List<Candidate> picks() {
+            List<Candidate> picks = new ArrayList<>(3);
+            picks.add(power.trial().candidate());
+            constants.pick().ifPresent(r -> picks.add(r.trial().candidate()));
+            flows.pick().ifPresent(r -> picks.add(r.trial().candidate()));
+            return picks;
+        }
+    }
+
+    ResultAssembly(
+            CaseSpec spec, Catalogue catalogue, Family family, VesselGeometry vessel, Selection.Ranked pick) {
         this.spec = spec;
+        this.catalogue = catalogue;
         this.family = family;
         this.vessel = vessel;
         this.pick = pick;
@@ -44,11 +58,14 @@ final class ResultAssembly {
         List<CandidateResult> results = rows.stream().map(r -> result(r, pickPower)).toList();
         boolean anyQualifies = rows.stream().anyMatch(r -> r.power().trial().qualifies());
         Doubts doubts = new Doubts(spec, vessel, first, anyQualifies);
+        List<String> notes = new ArrayList<>(doubts.notes());
+        notes.addAll(new ByHand(spec, catalogue, first).notes());
+        new ShearRateUse(first, results.get(0)).note().ifPresent(notes::add);
         List<QuantityResult> quantities = listed.stream()
                 .flatMap(s -> s.ranked().stream()).map(ResultAssembly::quantity).toList();
         List<String> flags = doubts.flags();
         return new CaseResult(spec.name(), spec.familyId(), flags.isEmpty() ? Status.OK : Status.FLAGGED,
-                spread(rows), results, quantities, flags, doubts.notes(), Optional.empty());
+                spread(rows), results, quantities, flags, List.copyOf(notes), Optional.empty());
     }
 
     private CandidateResult result(Row row, double pickPower) {
@@ -60,19 +77,21 @@ final class ResultAssembly {
         Optional<Selection.Ranked> flow = row.flows().pick();
         double flowNumber = flow.map(f -> f.trial().value()).orElse(Double.NaN);
         return new CandidateResult(row.power().id(), row.power().role(), assessment.verdict(), assessment.failed(),
-                row.power().why(), state.map(s -> family.regimes().at(s.reynolds())), state,
+                row.power().why(), state.map(s -> family.regimes().at(s.reynolds(), s.fluid())), state,
                 row.constants().pick().map(Selection.Ranked::id).orElse(""),
                 trial.value(), power, power / (2 * Math.PI * speed), power / volume,
+                state.map(s -> PowerBasedShear.average(spec.fluid().model(), power / volume, s.shearRate())).orElse(Double.NaN),
                 flow.map(Selection.Ranked::id).orElse(""),
                 flow.flatMap(f -> f.trial().candidate().correlation()).flatMap(Correlation::flowKind),
                 flowNumber, state.map(s -> s.pumping(flowNumber)).orElse(Double.NaN), power / pickPower - 1,
-                state.map(s -> effects(trial, flow, s)).orElse(List.of()));
+                state.map(s -> effects(row, s)).orElse(List.of()));
     }
 
-    /** The factors in the power number and in the flow number of a row. */
-    private static List<String> effects(Trial power, Optional<Selection.Ranked> flow, FluidState state) {
-        List<String> words = new ArrayList<>(power.candidate().modifiersInWords(new Point().at(state), state));
-        flow.ifPresent(f -> words.addAll(f.trial().candidate().modifiersInWords(new Point().at(state), state)));
+    /** The factors in the power number, the shear-rate constant and the flow number of a row. */
+    private static List<String> effects(Row row, FluidState state) {
+        List<String> words = new ArrayList<>();
+        row.picks().forEach(candidate -> candidate.factors(new Point().at(state), state)
+                .forEach(factor -> words.add(factor.words())));
         return List.copyOf(words);
     }
 

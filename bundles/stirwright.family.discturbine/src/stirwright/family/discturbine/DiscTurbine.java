@@ -32,8 +32,10 @@ public final class DiscTurbine implements Contribution {
                 .parameter(Dimensions.BLADE_THICKNESS.assumedAs(
                         "D/50, our choice: no standard value is published",
                         vessel -> vessel.get(Dimensions.IMPELLER_DIAMETER) / 50))
-                .regimes(RegimeLimits.IN_GENERAL)
-                .build();
+                .regimes(RegimeLimits.IN_GENERAL.withShearThinning(40, 1e4, Sources.metznerOtto(),
+                        "The literature gives 40 to 100 for the end of the laminar regime (recalled, from Nienow too), of "
+                                + "which the lower end is taken; the end of the transition is the general one."))
+                .build());
     }
 
     @Override

@@ -24,6 +24,10 @@ final class Sources {
                 + "395-404 and 467-476", locator);
     }
 
+    static Citation metznerOtto() {
+        return Citation.withoutLocator("A. B. Metzner and R. E. Otto, AIChE J. 3 (1957) 3-10");
+    }
+
     /** The table of 1950 as far as it is public. */
     static Citation rushtonTable(String columns) {
         return rushton("p. 472 as printed in D. W. Hendricks, Fundamentals of Water Treatment Unit Processes, CRC Press, "

@@ -4,6 +4,7 @@ import java.util.Locale;
 import org.eclipse.emf.ecore.EObject;
 import stirwright.study.Amount;
 import stirwright.study.Case;
+import stirwright.study.Constant;
 import stirwright.study.Part;
 import stirwright.study.Pick;
 
@@ -20,6 +21,7 @@ final class Places {
             case Case one -> "case " + quote(one.getName());
             case Amount amount -> "amount " + quote(amount.getColumn()) + " of " + of(amount.eContainer());
             case Pick pick -> "pick " + quote(pick.getQuantity()) + " of " + of(pick.eContainer());
+            case Constant constant -> "constant " + quote(constant.getName()) + " of " + of(constant.eContainer());
             default -> "the study";
         };
     }

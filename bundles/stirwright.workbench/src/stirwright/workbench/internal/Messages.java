@@ -28,6 +28,8 @@ public final class Messages extends NLS {
     public static String Card_notes;
     public static String Card_open;
     public static String Card_openName;
+    public static String Card_page;
+    public static String Card_pages;
     public static String Card_pick;
     public static String Card_problems;
     public static String Card_range;
@@ -85,6 +87,13 @@ public final class Messages extends NLS {
     public static String Column_source;
     public static String Column_torque;
     public static String Column_verdict;
+    public static String Constants_forget;
+    public static String Constants_name;
+    public static String Constants_nameOf;
+    public static String Constants_none;
+    public static String Constants_page;
+    public static String Constants_published;
+    public static String Constants_words;
     public static String Digits_checked;
     public static String Digits_recalled;
     public static String Digits_recalledChecked;
@@ -100,11 +109,14 @@ public final class Messages extends NLS {
     public static String DropIn_decline;
     public static String DropIn_unusable;
     public static String Edit_amount;
+    public static String Edit_applyEffect;
     public static String Edit_compare;
+    public static String Edit_constant;
     public static String Edit_duplicateCase;
     public static String Edit_family;
     public static String Edit_fluid;
     public static String Edit_impeller;
+    public static String Edit_leaveOutEffect;
     public static String Edit_model;
     public static String Edit_name;
     public static String Edit_pick;
@@ -112,6 +124,12 @@ public final class Messages extends NLS {
     public static String Edit_speed;
     public static String Edit_unpick;
     public static String Edit_vessel;
+    public static String Factors_check;
+    public static String Factors_none;
+    public static String Factors_notHere;
+    public static String Factors_page;
+    public static String Factors_source;
+    public static String Factors_words;
     public static String Grade_ruleOfTrade;
     public static String Menu_redo;
     public static String Menu_undo;
@@ -133,6 +151,7 @@ public final class Messages extends NLS {
     public static String Role_excluded;
     public static String Role_nearest;
     public static String Role_recommended;
+    public static String Row_changed;
     public static String Row_given;
     public static String Standing_again;
     public static String Standing_busy;

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.stream.Stream;
 import stirwright.core.Catalogue;
+import stirwright.core.Choices;
 import stirwright.correlation.GeometryParameter;
 import stirwright.exchange.CaseField;
 import stirwright.exchange.CaseFields;
@@ -33,8 +34,11 @@ public final class CaseColumns {
     public static final String SHEAR_RATE_MIN = "shear_rate_min_1_s";
     public static final String SHEAR_RATE_MAX = "shear_rate_max_1_s";
 
-    private static final List<String> TEXTS =
-            List.of(CASE, FAMILY, CORRELATION, SHEAR_RATE_CORRELATION, FLOW_NUMBER_CORRELATION, MODEL);
+    public static final String EFFECTS_LEFT_OUT = Choices.EFFECTS_LEFT_OUT;
+    public static final String CONSTANTS = Choices.CONSTANTS;
+
+    private static final List<String> TEXTS = List.of(CASE, FAMILY, CORRELATION, SHEAR_RATE_CORRELATION,
+            FLOW_NUMBER_CORRELATION, MODEL, EFFECTS_LEFT_OUT, CONSTANTS);
 
     /** Known whichever families are installed, so that no row changes its meaning when one leaves. */
     private static final List<String> DIMENSIONS = List.of(

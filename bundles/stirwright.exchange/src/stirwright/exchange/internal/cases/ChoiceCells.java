@@ -1,15 +1,17 @@
 package stirwright.exchange.internal.cases;
 
 import java.util.HashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.Choices;
 import stirwright.correlation.Quantity;
 
-/** What a row settles by hand: a correlation or a value for a quantity. */
+/** What a row settles by hand: a correlation or a value for a quantity, effects left out, constants of its own. */
 final class ChoiceCells {
 
     private record Choice(Quantity quantity, String correlation, String value) {}
@@ -34,7 +36,7 @@ final class ChoiceCells {
         return ALL.stream().filter(c -> c.quantity().equals(quantity)).map(Choice::value).findFirst();
     }
 
-    /** @throws CaseRefusedException when a value is not above 0, or stands beside a correlation */
+    /** @throws CaseRefusedException when a value is not above 0 or stands beside a correlation, or constants are no such */
     static Choices read(Cells cells) {
         Map<Quantity, String> correlations = new HashMap<>();
         Map<Quantity, Double> givens = new HashMap<>();
@@ -50,6 +52,15 @@ final class ChoiceCells {
                 correlations.put(choice.quantity(), cells.text(choice.correlation()));
             }
         }
-        return correlations.isEmpty() && givens.isEmpty() ? Choices.NONE : new Choices(correlations, givens);
+        Set<String> effectsLeftOut = effectsLeftOut(cells);
+        Map<String, Map<String, Double>> constants =
+                cells.given(CaseColumns.CONSTANTS) ? ConstantsText.read(cells) : Map.of();
+        boolean nothing = correlations.isEmpty() && givens.isEmpty() && effectsLeftOut.isEmpty() && constants.isEmpty();
+        return nothing ? Choices.NONE : new Choices(correlations, givens, effectsLeftOut, constants);
+    }
+
+    private static Set<String> effectsLeftOut(Cells cells) {
+        return cells.given(CaseColumns.EFFECTS_LEFT_OUT)
+                ? new LinkedHashSet<>(List.of(cells.text(CaseColumns.EFFECTS_LEFT_OUT).split("\\s+"))) : Set.of();
     }
 }

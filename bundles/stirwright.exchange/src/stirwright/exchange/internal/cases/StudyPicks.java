@@ -80,7 +80,7 @@ final class StudyPicks {
         }
         correlations.putAll(ofColumns.correlations());
         givens.putAll(ofColumns.givens());
-        return new Choices(correlations, givens);
+        return new Choices(correlations, givens, ofColumns.effectsLeftOut(), ofColumns.constants());
     }
 
     private Optional<Quantity> quantity(String id) {

@@ -15,6 +15,7 @@ import stirwright.exchange.internal.table.Row;
 import stirwright.exchange.internal.table.Texts;
 import stirwright.study.Amount;
 import stirwright.study.Case;
+import stirwright.study.Constant;
 import stirwright.study.Fluid;
 import stirwright.study.Impeller;
 import stirwright.study.Part;
@@ -41,6 +42,18 @@ public final class StudyRow {
         part("vessel", one.getVessel());
         part("impeller", one.getImpeller());
         demand(one.getDemand());
+        // These speak of the vessel and of correlations, so they hold whichever family is looked at.
+        put(CaseColumns.EFFECTS_LEFT_OUT, String.join(" ", one.getLeftOut()), "the case");
+        put(CaseColumns.CONSTANTS, String.join("; ", one.getConstants().stream().map(this::inWords).toList()), "the case");
+    }
+
+    private String inWords(Constant constant) {
+        if (constant.getCorrelation() == null || constant.getName() == null || !constant.isSetValue()) {
+            obstruct(new CaseRefusedException(CaseColumns.CONSTANTS, "", "has an entry that lacks its correlation, its"
+                    + " name or its value; complete or delete it"));
+            return "";
+        }
+        return constant.getCorrelation() + " " + constant.getName() + "=" + Figures.exact(constant.getValue());
     }
 
     public static StudyRow of(Case one, Catalogue catalogue) {

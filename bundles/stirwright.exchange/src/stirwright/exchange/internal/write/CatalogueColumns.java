@@ -14,6 +14,7 @@ import stirwright.correlation.Bound;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Family;
+import stirwright.correlation.Figures;
 import stirwright.correlation.Term;
 
 /** The columns of the list of everything installed. */
@@ -38,12 +39,17 @@ public final class CatalogueColumns {
             number("scatter", r -> r.correlation().map(c -> c.scatter().orElse(Double.NaN)).orElse(Double.NaN)),
             words("contains", r -> r.correlation().map(c -> c.contains().stream().map(Term::id).toList()).orElse(List.of())),
             text("bundle", Row::bundle),
-            of("modifier_for", c -> c.modifierFor().map(Effect::id).orElse("")));
+            of("modifier_for", c -> c.modifierFor().map(Effect::id).orElse("")),
+            words("constants", r -> r.correlation().map(CatalogueColumns::constants).orElse(List.of())));
 
     private CatalogueColumns() {}
 
     private static Column<Row> of(String name, Function<Correlation, String> words) {
         return text(name, r -> r.correlation().map(words).orElse(""));
+    }
+
+    private static List<String> constants(Correlation c) {
+        return c.constants().names().stream().map(name -> name + "=" + Figures.exact(c.constants().get(name))).toList();
     }
 
     /** Family by family in the order of their ids, then what holds for any. */

@@ -68,6 +68,7 @@ public final class ResultColumns {
                 c.number("flow_number", CandidateResult::flowNumber),
                 c.number("pumping_m3_s", CandidateResult::pumping),
                 c.state("tip_speed_m_s", FluidState::tipSpeed),
+                c.number("power_based_shear_rate_1_s", CandidateResult::powerBasedShearRate),
                 c.number("deviation_from_pick", CandidateResult::deviation));
     }
 

@@ -8,6 +8,7 @@ import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import stirwright.workbench.internal.app.CardsWindow;
+import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 
@@ -24,6 +25,9 @@ public final class CandidatesPart {
     @Inject
     private CardsWindow cards;
 
+    @Inject
+    private Problems problems;
+
     private CandidateTable table;
 
     @PostConstruct
@@ -32,7 +36,7 @@ public final class CandidatesPart {
         SashForm halves = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
         halves.setSashWidth(Looks.STEP);
         table = new CandidateTable(halves, looks, session);
-        new CardView(halves, looks, session, cards);
+        new CardView(halves, looks, session, cards, problems);
         halves.setWeights(SHARES);
     }
 

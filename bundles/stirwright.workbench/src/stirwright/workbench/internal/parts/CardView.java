@@ -1,7 +1,9 @@
 package stirwright.workbench.internal.parts;
 
+import java.util.List;
 import java.util.Optional;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.StackLayout;
 import org.eclipse.swt.custom.StyledText;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
@@ -19,15 +21,23 @@ import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.app.CardsWindow;
 import stirwright.workbench.internal.session.CaseEdits;
 import stirwright.workbench.internal.session.Outcome;
+import stirwright.workbench.internal.session.Problems;
+import stirwright.workbench.internal.session.Published;
 import stirwright.workbench.internal.session.Row;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
+import stirwright.workbench.internal.widgets.WordBar;
 
-/** The card of the selected candidate: why or why not, formula, range, source; and the pick with its reason. */
+/**
+ * The card of the selected candidate: why or why not, formula, range, source; on pages beside it its constants and its
+ * factors; and the pick with its reason.
+ */
 final class CardView extends Composite {
     private final Session session;
     private final CaseEdits edits;
+    private final Composite pages;
+    private final StackLayout onTop = new StackLayout();
     private final StyledText card;
     private final Text reason;
     private final Button pick;
@@ -35,7 +45,7 @@ final class CardView extends Composite {
     private final Composite foot;
     private final Link open;
 
-    CardView(Composite parent, Looks looks, Session session, CardsWindow cards) {
+    CardView(Composite parent, Looks looks, Session session, CardsWindow cards, Problems problems) {
         super(parent, SWT.NONE);
         this.session = session;
         this.edits = new CaseEdits(session);
@@ -44,11 +54,19 @@ final class CardView extends Composite {
         layout.marginHeight = Looks.STEP;
         layout.verticalSpacing = Looks.STEP;
         setLayout(layout);
-        card = Names.name(new StyledText(this, SWT.READ_ONLY | SWT.WRAP | SWT.V_SCROLL), Messages.Card_name);
+        WordBar turn = new WordBar(this, looks, Messages.Card_pages,
+                List.of(Messages.Card_page, Messages.Constants_page, Messages.Factors_page), this::turnTo);
+        turn.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+        pages = looks.area(this);
+        pages.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
+        pages.setLayout(onTop);
+        card = Names.name(new StyledText(pages, SWT.READ_ONLY | SWT.WRAP | SWT.V_SCROLL), Messages.Card_name);
         looks.onPage(card);
         card.setAlwaysShowScrollBars(false);
         card.setMargins(Looks.STEP, Looks.STEP, Looks.STEP, Looks.STEP);
-        card.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
+        new ConstantsPage(pages, looks, session, problems);
+        new FactorsPage(pages, looks, session);
+        onTop.topControl = card;
         // Tab leaves the card as it leaves every other control.
         card.addListener(SWT.Traverse, e -> e.doit |= e.detail == SWT.TRAVERSE_TAB_NEXT || e.detail == SWT.TRAVERSE_TAB_PREVIOUS);
         foot = looks.area(this);
@@ -57,7 +75,7 @@ final class CardView extends Composite {
         footLayout.marginWidth = 0;
         footLayout.marginHeight = 0;
         foot.setLayout(footLayout);
-        open = Names.name(looks.link(foot, Messages.Card_open, () -> session.selected().flatMap(Row::correlation)
+        open = Names.name(looks.link(foot, Messages.Card_open, () -> Published.ofSelected(session)
                 .ifPresent(correlation -> cards.open(getShell(), correlation))), Messages.Card_openName);
         open.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
         reason = looks.field(Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName));
@@ -70,8 +88,21 @@ final class CardView extends Composite {
         unpick.setToolTipText(Messages.Card_unpickTip);
         session.onOutcome(this::show);
         session.onSelection(this::show);
+        session.onStudy(this::showPage);
         session.onRequest(this::enable);
         show();
+    }
+
+    private void turnTo(int page) {
+        onTop.topControl = pages.getChildren()[page];
+        showPage();
+        pages.layout();
+    }
+
+    private void showPage() {
+        if (onTop.topControl instanceof CardPage page) {
+            page.show();
+        }
     }
 
     private void show() {
@@ -90,6 +121,7 @@ final class CardView extends Composite {
             reason.setText("");
         }
         row.map(Row::key).ifPresentOrElse(card::setData, () -> card.setData(null));
+        showPage();
         enable();
     }
 
@@ -100,7 +132,7 @@ final class CardView extends Composite {
         boolean pickable = session.fresh() && own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
         boolean chosen = session.current().map(c -> Picks.get(c, session.view().quantity().id()).isPresent()
                 || Amounts.get(c.getAmounts(), Choices.givenField(session.view().quantity())).isPresent()).orElse(false);
-        open.setEnabled(row.flatMap(Row::correlation).isPresent());
+        open.setEnabled(Published.ofSelected(session).isPresent());
         reason.setEnabled(pickable);
         pick.setEnabled(pickable && !reason.getText().isBlank());
         unpick.setEnabled(chosen);

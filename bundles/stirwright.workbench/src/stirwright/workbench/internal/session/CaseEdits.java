@@ -71,10 +71,16 @@ public final class CaseEdits {
         if (!familyId.equals(impeller.getFamily())) {
             session.editor().edit(Messages.Edit_family, () -> {
                 impeller.setFamily(familyId);
-                Parts.users(impeller).forEach(c -> c.getPicks().clear());
+                Parts.users(impeller).forEach(CaseEdits::settleAnew);
                 one.getCompared().remove(familyId);
             });
         }
+    }
+
+    /** Neither picks nor constants of another family's correlations mean anything. */
+    private static void settleAnew(Case one) {
+        one.getPicks().clear();
+        one.getConstants().clear();
     }
 
     public void compare(Case one, String familyId, boolean shown) {
@@ -136,7 +142,7 @@ public final class CaseEdits {
                 one.setImpeller(impeller);
                 // Picks made for another family mean nothing for this one.
                 if (!before.equals(impeller.getFamily())) {
-                    one.getPicks().clear();
+                    settleAnew(one);
                 }
             });
         }

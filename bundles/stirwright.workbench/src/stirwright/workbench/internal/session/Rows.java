@@ -30,15 +30,17 @@ final class Rows {
 
     static List<Row> of(Catalogue catalogue, Quantity quantity, List<Sheet> sheets) {
         Rows rows = new Rows(catalogue, quantity);
-        sheets.forEach(rows::styleAll);
+        sheets.forEach(sheet -> rows.styleAll(sheet, catalogue));
+        // Those that the case made last, so that no other curve changes its colour when they come.
+        sheets.forEach(sheet -> rows.styleAll(sheet, sheet.catalogue(catalogue)));
         rows.main = sheets.get(0);
         sheets.stream().filter(Sheet::computed).forEach(rows::add);
         return List.copyOf(rows.rows);
     }
 
     /** By the order of the ids and not by that of the results, so that a curve keeps its colour while numbers change. */
-    private void styleAll(Sheet sheet) {
-        catalogue.correlations(quantity, sheet.familyId()).stream().map(Correlation::id).sorted()
+    private void styleAll(Sheet sheet, Catalogue from) {
+        from.correlations(quantity, sheet.familyId()).stream().map(Correlation::id).sorted()
                 .forEach(id -> style(sheet, id));
     }
 
@@ -60,8 +62,8 @@ final class Rows {
     private void addPower(Sheet sheet, CandidateResult r) {
         boolean pick = isPick(sheet);
         double reference = pick ? r.power() : reference(Row::power);
-        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.correlation(), title(r.correlation()),
-                catalogue.entry(r.correlation()).map(Entry::correlation), style(sheet, r.correlation()), pick, r.role(),
+        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.correlation(), title(sheet, r.correlation()),
+                correlation(sheet, r.correlation()), style(sheet, r.correlation()), pick, r.role(),
                 r.powerNumber(), r.state().map(FluidState::speed).orElse(Double.NaN), r.power(), r.torque(),
                 r.power() / reference - 1, r.verdict(), r.failedBounds(), r.why()));
     }
@@ -69,7 +71,7 @@ final class Rows {
     private void addOther(Sheet sheet, QuantityResult r) {
         boolean pick = isPick(sheet);
         double reference = pick ? r.value() : reference(Row::value);
-        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.id(), title(r.id()), r.correlation(), style(sheet, r.id()),
+        rows.add(new Row(sheet.familyId(), sheet.familyTitle(), r.id(), title(sheet, r.id()), r.correlation(), style(sheet, r.id()),
                 pick, r.role(), r.value(), Double.NaN, Double.NaN, Double.NaN, r.value() / reference - 1, r.verdict(),
                 r.failedBounds(), r.why()));
     }
@@ -84,8 +86,13 @@ final class Rows {
         return rows.isEmpty() || !rows.get(0).pick() ? Double.NaN : number.applyAsDouble(rows.get(0));
     }
 
-    private String title(String id) {
-        Optional<Correlation> correlation = catalogue.entry(id).map(Entry::correlation);
-        return correlation.map(Correlation::title).orElse(Messages.Row_given);
+    private Optional<Correlation> correlation(Sheet sheet, String id) {
+        return sheet.catalogue(catalogue).entry(id).map(Entry::correlation);
+    }
+
+    private String title(Sheet sheet, String id) {
+        String title = correlation(sheet, id).map(Correlation::title).orElse(Messages.Row_given);
+        boolean changed = correlation(sheet, id).isPresent() && catalogue.entry(id).isEmpty();
+        return changed ? Messages.bind(Messages.Row_changed, title) : title;
     }
 }

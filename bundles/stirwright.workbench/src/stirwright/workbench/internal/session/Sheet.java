@@ -3,6 +3,7 @@ package stirwright.workbench.internal.session;
 import java.util.Optional;
 import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
+import stirwright.core.Catalogue;
 import stirwright.core.OpenCase;
 
 /**
@@ -13,6 +14,11 @@ import stirwright.core.OpenCase;
  * @param open the same with its curves; empty when the input is refused
  */
 public record Sheet(String familyId, String familyTitle, CaseResult result, Optional<CaseSpec> spec, Optional<OpenCase> open) {
+
+    /** What the case was computed with: what is installed and what it changed of that. */
+    public Catalogue catalogue(Catalogue installed) {
+        return open.flatMap(OpenCase::catalogue).orElse(installed);
+    }
 
     /** Whether there is something to draw. */
     public boolean computed() {

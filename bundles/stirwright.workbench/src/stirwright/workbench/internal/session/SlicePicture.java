@@ -105,7 +105,8 @@ final class SlicePicture {
     }
 
     private static List<Band> bands(Catalogue catalogue, Sheet main, double least, double most) {
-        RegimeLimits limits = catalogue.family(main.familyId()).orElseThrow().regimes();
+        RegimeLimits ofFamily = catalogue.family(main.familyId()).orElseThrow().regimes();
+        RegimeLimits limits = state(main).map(s -> ofFamily.forFluid(s.fluid())).orElse(ofFamily);
         return List.of(new Band(Messages.Regime_laminar, least, limits.laminarUpTo()),
                 new Band(Messages.Regime_transitional, limits.laminarUpTo(), limits.turbulentFrom()),
                 new Band(Messages.Regime_turbulent, limits.turbulentFrom(), most));

@@ -20,10 +20,17 @@ public final class Form extends Composite {
     private static final int FIELD_WIDTH = 20 * Looks.STEP;
 
     private final Looks looks;
+    private final int labelWidth;
 
     public Form(Composite parent, Looks looks) {
+        this(parent, looks, LABEL_WIDTH);
+    }
+
+    /** @param labelWidth in points */
+    public Form(Composite parent, Looks looks, int labelWidth) {
         super(parent, SWT.NONE);
         this.looks = looks;
+        this.labelWidth = labelWidth;
         looks.onPage(this);
         setBackgroundMode(SWT.INHERIT_FORCE);
         GridLayout layout = new GridLayout(COLUMNS, false);
@@ -54,12 +61,18 @@ public final class Form extends Composite {
         return line;
     }
 
+    /** For a control of the caller's own that has a line for itself. */
+    public static GridData wholeLine() {
+        return new GridData(SWT.FILL, SWT.CENTER, true, false, COLUMNS, 1);
+    }
+
     /** A sentence in place of fields. */
-    public void sentence(String words) {
+    public Label sentence(String words) {
         Label label = looks.label(this, SWT.WRAP, words);
         GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, COLUMNS, 1);
-        data.widthHint = LABEL_WIDTH + FIELD_WIDTH;
+        data.widthHint = labelWidth + FIELD_WIDTH;
         label.setLayoutData(data);
+        return label;
     }
 
     /** A choice among words; the unit's column stays empty. */
@@ -96,18 +109,29 @@ public final class Form extends Composite {
 
     /** A field for a number with the unit behind it. */
     Text number(String title, String unit) {
-        caption(title);
         String shownUnit = unit.equals("-") ? "" : unit.replace("revolution", "rev");
-        Text text = looks.field(Names.name(new Text(this, SWT.BORDER | SWT.RIGHT),
-                shownUnit.isEmpty() ? title : title + ", " + shownUnit));
-        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
-        data.widthHint = FIELD_WIDTH;
-        data.minimumWidth = FIELD_WIDTH;
-        text.setLayoutData(data);
+        Text text = field(title, shownUnit.isEmpty() ? title : title + ", " + shownUnit);
         Label behind = looks.quiet(this, SWT.NONE, shownUnit);
         GridData unitData = new GridData(SWT.LEFT, SWT.CENTER, false, false);
         unitData.widthHint = UNIT_WIDTH;
         behind.setLayoutData(unitData);
+        return text;
+    }
+
+    /** A field for a number with words behind it that act on it. */
+    Text number(String title, String name, String act, Runnable action) {
+        Text text = field(title, name);
+        looks.link(this, act, action).setLayoutData(new GridData(SWT.LEFT, SWT.CENTER, false, false));
+        return text;
+    }
+
+    private Text field(String title, String name) {
+        caption(title);
+        Text text = looks.field(Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), name));
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
+        data.widthHint = FIELD_WIDTH;
+        data.minimumWidth = FIELD_WIDTH;
+        text.setLayoutData(data);
         return text;
     }
 
@@ -117,7 +141,7 @@ public final class Form extends Composite {
         label.setFont(looks.small());
         GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, COLUMNS, 1);
         data.exclude = true;
-        data.widthHint = LABEL_WIDTH + FIELD_WIDTH;
+        data.widthHint = labelWidth + FIELD_WIDTH;
         label.setLayoutData(data);
         label.setVisible(false);
         return label;
@@ -138,7 +162,7 @@ public final class Form extends Composite {
     private void caption(String title) {
         Label label = looks.label(this, SWT.RIGHT, title);
         GridData data = new GridData(SWT.RIGHT, SWT.CENTER, false, false);
-        data.widthHint = LABEL_WIDTH;
+        data.widthHint = labelWidth;
         label.setLayoutData(data);
         label.setToolTipText(title);
     }

@@ -35,12 +35,18 @@ public final class NumberField {
     public NumberField(
             Form form, String title, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
             Runnable problemChanged) {
+        this(form, form.number(title, field.unit()), field, stored, store, left, problemChanged);
+    }
+
+    private NumberField(
+            Form form, Text text, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
+            Runnable problemChanged) {
         this.field = field;
         this.stored = stored;
         this.store = store;
         this.problemChanged = problemChanged;
         this.looks = form.looks();
-        this.text = form.number(title, field.unit());
+        this.text = text;
         this.remark = form.remark();
         before = stored.getAsDouble();
         text.setText(TypedNumber.show(before));
@@ -57,6 +63,18 @@ public final class NumberField {
             left.run();
         });
         text.addListener(SWT.DefaultSelection, e -> settle());
+    }
+
+    /**
+     * A field with words behind it that act on it, in place of a unit.
+     *
+     * @param name for those who hear the window
+     */
+    public static NumberField acting(
+            Form form, CaseField field, String name, String act, Runnable action, DoubleSupplier stored, DoubleConsumer store,
+            Runnable left, Runnable problemChanged) {
+        return new NumberField(
+                form, form.number(field.symbol(), name, act, action), field, stored, store, left, problemChanged);
     }
 
     public String column() {
