@@ -24,7 +24,7 @@ class CaseFieldsTest {
             "pitch_ratio", "impeller_height_m", "ribbon_width_m", "ribbon_count", "shaft_diameter_m", "draft_tube_diameter_m");
 
     private static final Set<String> WORDS =
-            Set.of("case", "family", "correlation", "shear_rate_correlation", "flow_number_correlation", "model");
+            Set.of("case", "family", "correlation", "shear_rate_correlation", "flow_number_correlation", "model", "effects_left_out", "constants");
 
     @Test
     void everyNumberOfTheHelpPageHasAFieldInTheUnitThatThePageSays() throws IOException {

@@ -23,11 +23,11 @@ import stirwright.correlation.Verdict;
 
 class ResultTableTest {
 
-    /** The contract's line, letter by letter. */
+    /** The contract's line, letter by letter, with the duty columns that it names apart and that are filled so far. */
     private static final String CONTRACT = "case,family,correlation,role,verdict,failed_bounds,regime,speed_rev_s,"
             + "shear_rate_correlation,shear_rate_constant,shear_rate_1_s,apparent_viscosity_Pa_s,reynolds,power_number,"
             + "power_W,torque_N_m,power_per_volume_W_m3,flow_number_correlation,flow_kind,flow_number,pumping_m3_s,"
-            + "tip_speed_m_s,deviation_from_pick,spread,status,notes";
+            + "tip_speed_m_s,power_based_shear_rate_1_s,deviation_from_pick,spread,status,notes";
 
     @TempDir
     Path folder;
@@ -72,6 +72,7 @@ class ResultTableTest {
         near(power, pick, "power_W");
         near(power / (4 * Math.PI), pick, "torque_N_m");
         near(power / (Math.PI / 4 * 1.5 * 1.5 * 1.5), pick, "power_per_volume_W_m3");
+        near(Math.sqrt(power / (Math.PI / 4 * 1.5 * 1.5 * 1.5) / 0.1), pick, "power_based_shear_rate_1_s");
         near(0.75, pick, "flow_number");
         near(0.75 * 2 * 0.125, pick, "pumping_m3_s");
         near(Math.PI, pick, "tip_speed_m_s");
@@ -143,7 +144,7 @@ class ResultTableTest {
 
     private static CandidateResult candidate(String id, Optional<FluidState> state, double powerNumber, double power) {
         return new CandidateResult(id, Role.EXCLUDED, Verdict.NEAR, List.of("bound 1", "bound 2"), "why " + id,
-                Optional.empty(), state, "ks", powerNumber, power, 1, 1, "", Optional.empty(), Double.NaN, Double.NaN, 0,
+                Optional.empty(), state, "ks", powerNumber, power, 1, 1, 1, "", Optional.empty(), Double.NaN, Double.NaN, 0,
                 List.of("own " + id));
     }
 }

@@ -41,6 +41,8 @@ final class Invented {
         Picks.choose(one, "power-number", "blades.np.narrow", "measured\non site");
         Picks.give(one, "flow-number", 0.75, "");
         one.getCompared().add("propeller");
+        one.getLeftOut().add("clearance");
+        OwnConstants.set(one, "blades.np.narrow", "a", 0.1 + 0.2);
         return one;
     }
 }

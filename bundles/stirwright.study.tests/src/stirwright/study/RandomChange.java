@@ -22,7 +22,7 @@ final class RandomChange implements Runnable {
     }
 
     private void changeOnce() {
-        switch (random.nextInt(11)) {
+        switch (random.nextInt(12)) {
             case 0 -> study.setNotes("note " + random.nextInt(5));
             case 1 -> part(study.getFluids()).setName("name " + random.nextInt(5));
             case 2 -> add(study.getVessels(), StudyFactory.eINSTANCE.createVessel());
@@ -33,6 +33,7 @@ final class RandomChange implements Runnable {
             case 7 -> amounts();
             case 8 -> picks(part(study.getCases()));
             case 9 -> use(part(study.getCases()));
+            case 10 -> correlations(part(study.getCases()));
             default -> shorten(study.getCases());
         }
     }
@@ -71,6 +72,16 @@ final class RandomChange implements Runnable {
             case 0 -> Picks.choose(one, "power-number", "np." + random.nextInt(3), "because");
             case 1 -> Picks.give(one, "power-number", 1 + random.nextInt(3), "told so");
             default -> Picks.remove(one, "power-number");
+        }
+    }
+
+    private void correlations(Case one) {
+        String name = random.nextBoolean() ? "a" : "b";
+        switch (random.nextInt(4)) {
+            case 0 -> OwnConstants.set(one, "np." + random.nextInt(2), name, random.nextInt(3));
+            case 1 -> OwnConstants.remove(one, "np." + random.nextInt(2), name);
+            case 2 -> one.getLeftOut().remove("effect " + random.nextInt(2));
+            default -> one.getLeftOut().add("effect " + random.nextInt(2));
         }
     }
 

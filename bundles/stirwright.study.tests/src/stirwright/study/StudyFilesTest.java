@@ -51,7 +51,9 @@ class StudyFilesTest {
         assertArrayEquals(text.getBytes(StandardCharsets.UTF_8), StudyFiles.bytes(roundTrip(Invented.study())));
         for (String part : List.of("<?xml version=\"1.0\" encoding=\"UTF-8\"?>", " format=\"1\"", "<notes>Everything is invented.\n",
                 "<amounts column=\"density_kg_m3\" value=\"1035\"/>", "value=\"0.30000000000000004\"",
-                "<amounts column=\"baffle_count\" value=\"0\"/>", "fluid=\"fluid-1\"", "<compared>propeller</compared>")) {
+                "<amounts column=\"baffle_count\" value=\"0\"/>", "fluid=\"fluid-1\"", "<compared>propeller</compared>",
+                "<leftOut>clearance</leftOut>",
+                "<constants correlation=\"blades.np.narrow\" name=\"a\" value=\"0.30000000000000004\"/>")) {
             assertTrue(text.contains(part), () -> part + " is not in\n" + text);
         }
     }
