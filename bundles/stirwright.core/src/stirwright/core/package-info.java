@@ -2,7 +2,7 @@
  * Couples a fluid, a vessel and every correlation found at run time into results that can be
  * compared: start at {@link stirwright.core.CrossCheck}. SI units, speeds in rev/s.
  */
-@Version("1.1.0")
+@Version("1.2.0")
 package stirwright.core;
 
 import org.osgi.annotation.versioning.Version;

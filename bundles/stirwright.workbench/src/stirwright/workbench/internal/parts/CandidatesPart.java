@@ -7,6 +7,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import stirwright.workbench.internal.app.CardsWindow;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
@@ -28,10 +29,12 @@ public final class CandidatesPart {
     @Inject
     private Problems problems;
 
+    private Composite area;
     private CandidateTable table;
 
     @PostConstruct
     void create(Composite parent) {
+        area = parent;
         parent.setLayout(new FillLayout());
         SashForm halves = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
         halves.setSashWidth(Looks.STEP);
@@ -40,8 +43,14 @@ public final class CandidatesPart {
         halves.setWeights(SHARES);
     }
 
+    /** The table, unless somebody went for another control in here. */
     @Focus
     void focus() {
+        for (Control at = area.getDisplay().getFocusControl(); at != null; at = at.getParent()) {
+            if (at == area) {
+                return;
+            }
+        }
         table.setFocus();
     }
 }
