@@ -9,11 +9,13 @@ import java.util.Set;
 import org.junit.jupiter.api.Test;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
+import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Standing;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
+import stirwright.rheology.PowerLaw;
 
 /** A correlation of which the case changes constants stands beside the one it was made from, as a draft. */
 class OwnConstantsTest {
@@ -61,6 +63,18 @@ class OwnConstantsTest {
         CandidateResult pick = new CrossCheck(CATALOGUE).check(Invented.water(chosen)).pick().orElseThrow();
         assertEquals(6.5 * 2, pick.state().orElseThrow().shearRate(), 1e-12);
         assertEquals("invented.ks.ten-changed", pick.shearRateCorrelation());
+    }
+
+    /** Re is rho N D^2/(K (ks N)^(n - 1)): 45 with the constant 10 and 14 with 1, which is nearer to the bound. */
+    @Test
+    void thoughNearerToItsBoundsItIsNotUsedUnlessChosen() {
+        Correlation laminar = Invented.correlation(Quantity.SHEAR_RATE_CONSTANT, "ks.laminar").atMost(Measure.REYNOLDS, 0.1)
+                .value("a", 10).build();
+        CaseSpec plain = Invented.at(2, new PowerLaw(50, 0.5));
+        CaseSpec spec = new CaseSpec("case", Invented.FAMILY, plain.geometry(), plain.speed(), plain.fluid(),
+                choices(Map.of(), Map.of("invented.ks.laminar", Map.of("a", 1.0))), List.of());
+        CandidateResult pick = new CrossCheck(Invented.catalogue(laminar, NP)).check(spec).pick().orElseThrow();
+        assertEquals("invented.ks.laminar", pick.shearRateCorrelation());
     }
 
     @Test

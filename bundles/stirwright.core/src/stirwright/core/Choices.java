@@ -67,6 +67,11 @@ public record Choices(
         return correlationId + CHANGED;
     }
 
+    /** Whether an id is called as {@link #changed} calls it. */
+    public static boolean isChanged(String correlationId) {
+        return correlationId.endsWith(CHANGED);
+    }
+
     /** The name of the input that chooses a correlation for a quantity. */
     public static String field(Quantity quantity) {
         if (quantity.equals(Quantity.POWER_NUMBER)) {

@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
+import stirwright.core.Choices;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.FlowKind;
 import stirwright.correlation.Standing;
@@ -51,6 +52,8 @@ public final class Ranking {
      * rule of the trade without a source comes after all that is published.
      */
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
+            // What the case changed stands beside the published numbers and takes the place of one only when chosen.
+            .thenComparing(t -> Choices.isChanged(t.candidate().id()))
             .thenComparing(t -> isCommonPractice(t.candidate()))
             .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
             .thenComparingDouble(t -> t.assessment().distance() + (t.trustworthy() ? 0 : Ranking.DOUBT))
