@@ -35,7 +35,7 @@ public final class DiscTurbine implements Contribution {
                 .regimes(RegimeLimits.IN_GENERAL.withShearThinning(40, 1e4, Sources.metznerOtto(),
                         "The literature gives 40 to 100 for the end of the laminar regime (recalled, from Nienow too), of "
                                 + "which the lower end is taken; the end of the transition is the general one."))
-                .build());
+                .build();
     }
 
     @Override

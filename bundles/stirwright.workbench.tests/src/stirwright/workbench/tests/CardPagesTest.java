@@ -155,32 +155,40 @@ class CardPagesTest {
             window.type("Impeller count", "2");
             window.type("Liquid height, m", "1.2");
             turn(window, 2);
-            double two = window.outcome().rows().get(0).value();
+            String id = window.outcome().rows().get(0).correlationId();
+            double two = power(window, id);
             Button check = window.on(() -> window.all(Button.class, b -> b.isVisible() && b.getText().startsWith("several impellers"))
                     .get(0));
-            assertTrue(window.on(check::getText).contains("times 2"), window.on(check::getText));
+            String text = window.on(check::getText);
+            double factor = Double.parseDouble(text.substring(text.lastIndexOf(' ') + 1));
+            assertTrue(factor > 1 && factor <= 2, text);
             assertTrue(window.on(() -> window.all(Label.class, l -> l.isVisible() && l.getText().contains("range: ")
-                    && l.getText().contains("source: ")).size() == 1), "no range and source beside it");
+                    && l.getText().contains("source: ")).size() >= 1), "no range and source beside it");
             assertTrue(window.on(check::getSelection));
             assertTrue(window.on(() -> reachedByTab(window, check)), "not reached by the keyboard");
             window.press(window.on(check::getText));
             assertEquals(List.of("several-impellers"), window.on(() -> List.copyOf(
                     window.session().current().orElseThrow().getLeftOut())));
-            assertEquals(two / 2, window.outcome().rows().get(0).value(), 1e-12 * two);
+            assertEquals(two / factor, power(window, id), 1e-3 * two, "the text has four digits");
             assertFalse(window.on(check::isDisposed), "the focus is lost");
             assertFalse(window.on(check::getSelection));
             List<Map<String, String>> console = agrees(window);
-            assertTrue(console.get(0).get("notes").contains("as the case says; it would be times 2"), console.get(0).get("notes"));
+            assertTrue(console.get(0).get("notes").contains("as the case says; it would be times "), console.get(0).get("notes"));
             window.run(() -> window.session().undo());
-            assertEquals(two, window.outcome().rows().get(0).value(), 0.0);
+            assertEquals(two, power(window, id), 0.0);
             assertTrue(window.on(check::getSelection));
         });
+    }
+
+    private static double power(OpenWindow window, String correlationId) throws Exception {
+        return window.outcome().rows().stream().filter(r -> r.correlationId().equals(correlationId)).findFirst().orElseThrow()
+                .value();
     }
 
     /** Whether a few tabs from the words above the page lead there. */
     private static boolean reachedByTab(OpenWindow window, Button check) {
         window.find(WordBar.class, "pages of the selected candidate").forceFocus();
-        for (int keys = 0; keys < 4 && !check.isFocusControl(); keys++) {
+        for (int keys = 0; keys < 8 && !check.isFocusControl(); keys++) {
             window.display().getFocusControl().traverse(SWT.TRAVERSE_TAB_NEXT);
         }
         return check.isFocusControl();
