@@ -122,12 +122,15 @@ public final class VesselGeometry implements Geometry {
      * which others their values rest.
      */
     public Geometry recordingDefaults(Set<GeometryParameter> read) {
+        // Read over and over in loops, and to be told once.
+        boolean[] told = new boolean[parameters.length];
         return parameter -> {
             int at = indexOf(parameter);
             if (at < 0) {
                 return Double.NaN;
             }
-            if (filled[at] != null) {
+            if (filled[at] != null && !told[at]) {
+                told[at] = true;
                 read.add(parameters[at]);
                 read.addAll(filled[at].restsOn());
             }

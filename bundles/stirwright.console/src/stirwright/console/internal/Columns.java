@@ -47,18 +47,26 @@ final class Columns {
             }
         }
         for (Line line : lines) {
-            text.append(indent).append(set(line.cells(), widths).stripTrailing()).append('\n');
+            text.append(indent);
+            set(text, line.cells(), widths);
+            text.append('\n');
             line.under().forEach(sentence -> appendWrapped(text, indent + UNDER, sentence, width));
         }
     }
 
-    private String set(String[] cells, int[] widths) {
-        StringBuilder line = new StringBuilder();
+    private void set(StringBuilder text, String[] cells, int[] widths) {
         for (int i = 0; i < widths.length; i++) {
-            String gap = " ".repeat(widths[i] - cells[i].length());
-            line.append(right[i] ? gap + cells[i] : cells[i] + gap).append("  ");
+            int gap = widths[i] - cells[i].length();
+            if (right[i]) {
+                text.repeat(' ', gap).append(cells[i]);
+            } else {
+                text.append(cells[i]).repeat(' ', gap);
+            }
+            text.append("  ");
         }
-        return line.toString();
+        while (text.charAt(text.length() - 1) == ' ') {
+            text.setLength(text.length() - 1);
+        }
     }
 
     /** Appends a paragraph broken at spaces to fit a width, later lines indented further. */

@@ -61,27 +61,36 @@ final class Assessment {
             return new Assessment(Verdict.NOT_STATED, 0, List.of(), "");
         }
         String unknown = unknown(candidate, point, state);
-        Verdict verdict = candidate.verdict(point, state);
-        List<Failure> failures = verdict.fails()
-                ? candidate.foreign().call(() -> failures(candidate, point, state), List.of()) : List.of();
-        double distance = failures.isEmpty() ? 0 : candidate.foreign().call(
-                () -> failures.stream().mapToDouble(Failure::distance).sum(), Double.POSITIVE_INFINITY);
-        return new Assessment(verdict, distance, failures, problem(candidate, value, unknown, failures.isEmpty()));
+        Findings findings = candidate.foreign().call(() -> findings(candidate, point, state), Findings.UNKNOWN);
+        return new Assessment(findings.worst(), findings.distance(), findings.failures(),
+                problem(candidate, value, unknown, findings.failures().isEmpty()));
     }
 
-    private static List<Failure> failures(Candidate candidate, Point point, FluidState state) {
-        List<Failure> failures = new ArrayList<>();
+    /** What a look at every bound finds. */
+    private record Findings(Verdict worst, double distance, List<Failure> failures) {
+        /** Where the bounds' own code fails. */
+        static final Findings UNKNOWN = new Findings(Verdict.OUTSIDE, Double.POSITIVE_INFINITY, List.of());
+    }
+
+    private static Findings findings(Candidate candidate, Point point, FluidState state) {
+        Verdict worst = Verdict.INSIDE;
+        double distance = 0;
+        List<Failure> failures = List.of();
         for (Candidate.Part part : candidate.parts()) {
             double reynolds = part.reynolds(state, state.reynolds());
             point.set(Variable.REYNOLDS, reynolds);
             for (Bound bound : part.correlation().validity()) {
                 Verdict found = bound.verdict(candidate.geometry(), point);
+                worst = worst.worseOf(found);
                 if (found.fails()) {
-                    failures.add(new Failure(candidate, part, bound, found, point, reynolds));
+                    Failure failure = new Failure(candidate, part, bound, found, point, reynolds);
+                    distance += failure.distance();
+                    failures = failures.isEmpty() ? new ArrayList<>() : failures;
+                    failures.add(failure);
                 }
             }
         }
-        return failures;
+        return new Findings(worst, distance, failures);
     }
 
     /** What stands in its way apart from bounds; what no case can mend counts only where none fails. */
@@ -106,12 +115,8 @@ final class Assessment {
                         + ") cannot be computed here";
             }
         }
-        for (Variable variable : candidate.reads()) {
-            if (!variable.equals(Variable.REYNOLDS) && Double.isNaN(point.get(variable))) {
-                return "it needs the " + variable.title() + ", which is not known here";
-            }
-        }
-        return "";
+        Variable unknown = candidate.unknownAt(point);
+        return unknown == null ? "" : "it needs the " + unknown.title() + ", which is not known here";
     }
 
     /** The worst over all bounds, those of the applied modifiers included. */

@@ -38,6 +38,7 @@ final class Candidate {
     private final List<Part> parts;
     private final List<Part> leftOut;
     private final Set<Variable> reads;
+    private final Variable[] readsBesidesReynolds;
     /** Asked for at every step of every loop. */
     private final boolean readsFlowNumber;
     private final boolean readsLaminarPower;
@@ -69,6 +70,7 @@ final class Candidate {
         this.geometry = geometry;
         this.defaultsRead = defaultsRead;
         this.reads = parts.size() == 1 ? parts.get(0).correlation().reads() : reads(parts);
+        this.readsBesidesReynolds = reads.stream().filter(v -> !v.equals(Variable.REYNOLDS)).toArray(Variable[]::new);
         this.readsFlowNumber = !quantity.equals(Quantity.FLOW_NUMBER) && reads.contains(Variable.FLOW_NUMBER);
         this.readsLaminarPower = !quantity.equals(Quantity.POWER_NUMBER) && reads.contains(Variable.LAMINAR_POWER);
     }
@@ -85,7 +87,7 @@ final class Candidate {
      * @param effectsLeftOut the ids of effects for which none is applied
      */
     static Candidate of(
-            Correlation correlation, List<Correlation> modifiers, Set<String> effectsLeftOut, VesselGeometry vessel) {
+            Correlation correlation, Modifiers modifiers, Set<String> effectsLeftOut, VesselGeometry vessel) {
         Set<GeometryParameter> defaultsRead = new LinkedHashSet<>();
         Geometry geometry = vessel.recordingDefaults(defaultsRead);
         ForeignCode foreign = new ForeignCode();
@@ -133,6 +135,16 @@ final class Candidate {
         return reads;
     }
 
+    /** The first variable besides the Reynolds number that it reads and that a point does not know; null when all is known. */
+    Variable unknownAt(Point point) {
+        for (Variable variable : readsBesidesReynolds) {
+            if (Double.isNaN(point.get(variable))) {
+                return variable;
+            }
+        }
+        return null;
+    }
+
     /** Whether it reads the flow number and does not give it. */
     boolean readsFlowNumber() {
         return readsFlowNumber;
@@ -159,11 +171,6 @@ final class Candidate {
     /** The value at a state, all modifiers included; NaN when its code fails. */
     double value(Point point, FluidState state) {
         return foreign.call(() -> product(point, state, state.reynolds()), Double.NaN);
-    }
-
-    /** The worst verdict over all bounds, without words. */
-    Verdict verdict(Point point, FluidState state) {
-        return foreign.call(() -> worst(point, state, state.reynolds()), Verdict.OUTSIDE);
     }
 
     /**

@@ -48,7 +48,7 @@ final class Candidates {
                         + String.join(", ", correlations.stream().map(Correlation::id).toList()));
             }
         });
-        List<Correlation> modifiers = catalogue.modifiers(quantity, family.id());
+        Modifiers modifiers = new Modifiers(catalogue.modifiers(quantity, family.id()), vessel);
         List<Candidate> candidates = new ArrayList<>();
         choices.given(quantity).ifPresent(value -> candidates.add(Candidate.given(quantity, value, vessel)));
         correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, choices.effectsLeftOut(), vessel)));

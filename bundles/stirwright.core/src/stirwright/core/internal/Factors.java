@@ -25,14 +25,14 @@ record Factors(List<Candidate.Part> applied, List<Candidate.Part> leftOut) {
      * @param defaultsRead receives the dimensions that nobody gave and on which the applied ones rest
      */
     static Factors of(
-            Correlation correlation, List<Correlation> modifiers, Set<String> effectsLeftOut, VesselGeometry vessel,
+            Correlation correlation, Modifiers modifiers, Set<String> effectsLeftOut, VesselGeometry vessel,
             Set<GeometryParameter> defaultsRead) {
         Geometry recording = vessel.recordingDefaults(defaultsRead);
         List<Candidate.Part> applied = new ArrayList<>();
         List<Candidate.Part> leftOut = new ArrayList<>();
         applied.add(new Candidate.Part(correlation, correlation.bind(recording)));
         Set<Effect> done = new LinkedHashSet<>(correlation.contains());
-        for (Correlation modifier : modifiers) {
+        for (Correlation modifier : modifiers.all()) {
             Effect effect = modifier.modifierFor().orElseThrow();
             if (done.contains(effect)) {
                 continue;
@@ -45,23 +45,12 @@ record Factors(List<Candidate.Part> applied, List<Candidate.Part> leftOut) {
                     leftOut.add(left);
                     done.add(effect);
                 });
-            } else if (applies(modifier, vessel, defaultsRead)) {
+            } else if (modifiers.applies(modifier, defaultsRead)) {
                 applied.add(new Candidate.Part(modifier, modifier.bind(recording)));
                 done.add(effect);
                 done.addAll(modifier.contains());
             }
         }
         return new Factors(applied, leftOut);
-    }
-
-    private static boolean applies(Correlation modifier, VesselGeometry vessel, Set<GeometryParameter> defaultsRead) {
-        Set<GeometryParameter> askedFor = new LinkedHashSet<>();
-        boolean applies = modifier.appliesTo(vessel.recordingDefaults(askedFor));
-        if (!applies) {
-            // The standard geometry is where no modifier applies, so that nothing rests on its having been assumed.
-            askedFor.removeIf(p -> vessel.defaultKind(p) == GeometryParameter.Default.ASSUMED);
-        }
-        defaultsRead.addAll(askedFor);
-        return applies;
     }
 }

@@ -28,7 +28,10 @@ public sealed interface Column<R> {
     record Number<R>(String name, ToDoubleFunction<R> of) implements Column<R> {
         @Override
         public String cell(R row) {
-            double value = of.applyAsDouble(row);
+            return cell(of.applyAsDouble(row));
+        }
+
+        String cell(double value) {
             return Double.isFinite(value) ? Double.toString(value) : "";
         }
     }
