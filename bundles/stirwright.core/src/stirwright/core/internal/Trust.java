@@ -21,9 +21,9 @@ final class Trust {
     static String obstacle(Candidate candidate) {
         for (Candidate.Part part : candidate.parts()) {
             boolean base = part == candidate.parts().get(0);
-            String doubt = base ? silence(part.correlation()) : "";
-            if (doubt.isEmpty()) {
-                doubt = doubt(part.correlation());
+            String doubt = doubt(part.correlation());
+            if (doubt.isEmpty() && base) {
+                doubt = silence(part.correlation());
             }
             if (!doubt.isEmpty()) {
                 return base ? doubt : "of its factor " + part.correlation().id() + ", " + doubt;
