@@ -43,12 +43,13 @@ final class ReferenceReader {
             problem(file.name(), "has no header");
             return;
         }
+        Legend legend = Legend.of(text);
         Columns columns = Columns.of(records.get(0).getFields(), workpiece);
         columns.problems().forEach(message -> problem(file.name(), message));
         for (CsvRecord each : records.subList(1, records.size())) {
             String place = file.name() + " line " + each.getStartingLineNumber();
             try {
-                RowReader row = new RowReader(workpiece, columns, each.getFields());
+                RowReader row = new RowReader(workpiece, columns, legend, each.getFields());
                 row.lack().ifPresentOrElse(lacks::add, () -> rows.add(row.read(place)));
             } catch (RowException unreadable) {
                 problem(place, unreadable.getMessage());

@@ -22,11 +22,13 @@ final class RowReader {
 
     private final Workpiece workpiece;
     private final Columns columns;
+    private final Legend legend;
     private final List<String> cells;
 
-    RowReader(Workpiece workpiece, Columns columns, List<String> cells) {
+    RowReader(Workpiece workpiece, Columns columns, Legend legend, List<String> cells) {
         this.workpiece = workpiece;
         this.columns = columns;
+        this.legend = legend;
         this.cells = cells;
     }
 
@@ -64,7 +66,7 @@ final class RowReader {
         if (text(Columns.SOURCE).isEmpty()) {
             throw unusable(Columns.SOURCE, "is blank; every number has its source beside it, and every lack its reason");
         }
-        return text(Columns.SOURCE);
+        return legend.resolve(text(Columns.SOURCE));
     }
 
     private double tolerance(RowKind kind) {

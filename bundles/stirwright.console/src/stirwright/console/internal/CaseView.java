@@ -1,9 +1,11 @@
 package stirwright.console.internal;
 
 import java.math.BigDecimal;
+import java.util.List;
 import stirwright.core.CandidateResult;
 import stirwright.core.CaseResult;
 import stirwright.core.FluidState;
+import stirwright.core.Role;
 import stirwright.correlation.Figures;
 import stirwright.correlation.FlowKind;
 import stirwright.correlation.Regime;
@@ -29,6 +31,7 @@ final class CaseView {
         result.pick().ifPresent(pick -> {
             pick.state().ifPresent(state -> productAndFlow(text, pick, state));
             candidates(text, result);
+            notesOfAll(result.candidates()).forEach(n -> Columns.appendWrapped(text, "  ", "for every candidate: " + n, WIDTH));
             result.notes().forEach(n -> Columns.appendWrapped(text, "  ", "note: " + n, WIDTH));
             Columns.appendWrapped(text, "  ", CAUTION, WIDTH);
         });
@@ -66,17 +69,29 @@ final class CaseView {
         Columns table = new Columns("llrrrrr")
                 .add("power number by", "verdict", "Np", "speed", "power", "torque", "from pick")
                 .add("", "", "-", "rev/s", "W", "N m", "%");
+        List<String> everywhere = notesOfAll(result.candidates());
         for (CandidateResult row : result.candidates()) {
             table.add(mark(row) + row.correlation(), row.verdict().id(), shown(row.powerNumber()),
                     row.state().map(s -> shown(s.speed())).orElse(""), shown(row.power()), shown(row.torque()),
                     percent(row.deviation()));
             table.under(row.why());
-            row.notes().forEach(table::under);
+            row.notes().stream().filter(note -> !everywhere.contains(note)).forEach(table::under);
         }
         table.appendTo(text, "  ", WIDTH);
-        Columns.appendWrapped(text, "  ", Double.isNaN(result.spread())
-                ? "no candidate qualifies, so there is no spread"
+        long qualified = result.candidates().stream().filter(CaseView::qualifies).count();
+        Columns.appendWrapped(text, "  ", Double.isNaN(result.spread()) ? "no candidate qualifies, so there is no spread"
+                : qualified < 2 && result.spread() == 1 ? "only one candidate qualifies, so there is no spread"
                 : "largest over smallest power of those that qualify: " + Figures.show(result.spread()), WIDTH);
+    }
+
+    /** What is said of every candidate alike, if there are several, and so once. */
+    private static List<String> notesOfAll(List<CandidateResult> rows) {
+        return rows.size() < 2 ? List.of() : rows.get(0).notes().stream()
+                .filter(note -> rows.stream().allMatch(row -> row.notes().contains(note))).distinct().toList();
+    }
+
+    private static boolean qualifies(CandidateResult row) {
+        return row.role() == Role.RECOMMENDED || row.role() == Role.CANDIDATE;
     }
 
     /** What a row is to its case, readable without colour; the summary says what the marks mean. */

@@ -22,24 +22,14 @@ final class Assessment {
 
     /** A stated bound that the case fails, and all that it takes to say so. */
     private record Failure(
-            Candidate candidate, Candidate.Part part, Bound bound, Verdict verdict, Point point, double reynolds) {
+            Candidate candidate, Candidate.Part part, Bound bound, Verdict verdict, Point point, double reynolds,
+            double distance) {
         String words() {
             point.set(Variable.REYNOLDS, reynolds);
             String whose = part == candidate.parts().get(0) ? "" : part.correlation().id() + ": ";
             String found = candidate.foreign().call(
                     () -> bound.found(candidate.geometry(), point), bound.subject().title());
-            return found + " is " + verdict.id()
-                    + " (" + whose + bound.allowance() + ")";
-        }
-
-        /** The logarithm of the ratio to the bound; infinite for a class or a count. */
-        double distance() {
-            if (bound instanceof Bound.Range range) {
-                double value = range.subject().value(candidate.geometry(), point);
-                double ratio = value < range.least() ? range.least() / value : value / range.most();
-                return ratio > 0 ? Math.log(ratio) : Double.POSITIVE_INFINITY;
-            }
-            return Double.POSITIVE_INFINITY;
+            return found + (verdict == Verdict.NEAR ? " is just outside (" : " is outside (") + whose + bound.allowance() + ")";
         }
     }
 
@@ -83,14 +73,24 @@ final class Assessment {
                 Verdict found = bound.verdict(candidate.geometry(), point);
                 worst = worst.worseOf(found);
                 if (found.fails()) {
-                    Failure failure = new Failure(candidate, part, bound, found, point, reynolds);
-                    distance += failure.distance();
+                    double beyond = distance(bound, candidate, point);
+                    distance += beyond;
                     failures = failures.isEmpty() ? new ArrayList<>() : failures;
-                    failures.add(failure);
+                    failures.add(new Failure(candidate, part, bound, found, point, reynolds, beyond));
                 }
             }
         }
         return new Findings(worst, distance, failures);
+    }
+
+    /** The logarithm of the ratio to the bound; infinite for a class or a count. */
+    private static double distance(Bound bound, Candidate candidate, Point point) {
+        if (bound instanceof Bound.Range range) {
+            double value = range.subject().value(candidate.geometry(), point);
+            double ratio = value < range.least() ? range.least() / value : value / range.most();
+            return ratio > 0 ? Math.log(ratio) : Double.POSITIVE_INFINITY;
+        }
+        return Double.POSITIVE_INFINITY;
     }
 
     /** What stands in its way apart from bounds; what no case can mend counts only where none fails. */
@@ -156,6 +156,15 @@ final class Assessment {
         if (!problem.isEmpty() || failures.isEmpty()) {
             return problem;
         }
-        return failed().get(0) + (failures.size() > 1 ? " (and " + (failures.size() - 1) + " more)" : "");
+        return failed().get(worst()) + (failures.size() > 1 ? " (and " + (failures.size() - 1) + " more)" : "");
+    }
+
+    /** The failure that lies furthest out; of equal ones the first. */
+    private int worst() {
+        int worst = 0;
+        for (int i = 1; i < failures.size(); i++) {
+            worst = failures.get(i).distance() > failures.get(worst).distance() ? i : worst;
+        }
+        return worst;
     }
 }

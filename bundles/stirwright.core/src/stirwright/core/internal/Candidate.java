@@ -47,6 +47,7 @@ final class Candidate {
     private final ForeignCode foreign;
     private String distrust;
     private double givenValue = Double.NaN;
+    private int doubts = -1;
 
     /** One factor: a correlation bound to the geometry. */
     record Part(Correlation correlation, BoundCorrelation bound) {
@@ -161,6 +162,14 @@ final class Candidate {
             distrust = Trust.obstacle(this);
         }
         return distrust;
+    }
+
+    /** How often it must be doubted that it is near: once for its digits, source or standing, once for a range not stated. */
+    int doubts() {
+        if (doubts < 0) {
+            doubts = correlation.map(c -> (Trust.in(c) ? 0 : 1) + (Trust.isSilent(c) ? 1 : 0)).orElse(0);
+        }
+        return doubts;
     }
 
     /** Where its contributed code is run, and what it threw. */

@@ -22,7 +22,7 @@ record Trial(Candidate candidate, Optional<FluidState> state, double value, Asse
 
     /** Whether none can be nearer: trusted and within every stated bound, though it may not qualify. */
     boolean isNearest() {
-        return usable() && trustworthy() && assessment.failureCount() == 0 && assessment.distance() == 0;
+        return usable() && candidate.doubts() == 0 && assessment.failureCount() == 0 && assessment.distance() == 0;
     }
 
     /** Whether its digits, its source and its standing would allow to recommend it elsewhere. */

@@ -44,13 +44,19 @@ final class Trust {
     }
 
     private static String silence(Correlation correlation) {
-        if (!stated(correlation, Measure.REYNOLDS)) {
+        if (isSilent(correlation)) {
             return "the source states no range of the Reynolds number";
         }
         // Blade count or type, and baffled or not; what is made for named families states the type.
-        boolean type = !correlation.families().isEmpty() || stated(correlation, Measure.BLADE_COUNT);
-        return type && stated(correlation, Classifier.BAFFLING)
-                ? "" : "the source does not state the impeller type or whether the vessel was baffled";
+        if (correlation.families().isEmpty() && !stated(correlation, Measure.BLADE_COUNT)) {
+            return "the source does not state the impeller's type or blade count";
+        }
+        return stated(correlation, Classifier.BAFFLING) ? "" : "the source does not state whether the vessel was baffled";
+    }
+
+    /** Whether nobody knows in which flow it holds. */
+    static boolean isSilent(Correlation correlation) {
+        return !stated(correlation, Measure.REYNOLDS);
     }
 
     private static boolean stated(Correlation correlation, Term subject) {
