@@ -62,7 +62,9 @@ final class CloseImpellers {
                 .notStated(Measure.D_OVER_T, "recalled without a range")
                 .constant("a", timesOne)
                 .formula(TurbulentFactor.formula("times {a}", "times 2"))
-                .relation((vessel, k) -> TurbulentFactor.of(k.get("a"), 2));
+                .relation((vessel, k) -> TurbulentFactor.of(k.get("a"), 2))
+                .remark("Below turbulent flow the plain sum stands, which is ours since nothing is reported there; the step between "
+                        + "the two is not physical.");
     }
 
     private static boolean two(Geometry vessel) {

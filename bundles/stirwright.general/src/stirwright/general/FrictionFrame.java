@@ -51,7 +51,7 @@ final class FrictionFrame {
         return "Np0 = {p} pi^4 beta^2/(8 D^3/(T^2 H)) f; "
                 + "f = CL/ReG + Ct ((Ctr/ReG + ReG)^-1 + (finf/Ct)^(1/m))^m; "
                 + "ReG = pi eta ln(T/D)/(4 D/(beta T)) Re; "
-                + "CL = {l1} eta nB (D/H)(1 - (D/T)^2) + {l2} (" + width + sine + "/H)(nB/(2" + sine + "))^(1/3); "
+                + "CL = {l1} eta nB (D/H)(1 - (D/T)^2) + {l2} (" + width + sine + "/H)(nB/" + (sine.isEmpty() ? "2" : "(2" + sine + ")") + ")^(1/3); "
                 + "Ct = (({t1} X^{t2})^-{q} + {t3}^-{q})^(-1/{q}); "
                 + "m = (({m1} X^{m2})^-{q} + {m3}^-{q})^(-1/{q}); "
                 + "Ctr = {r1} (D/T)^-{r2} (" + width + sine + "/T)^-{r3} X^-{r4}; "

@@ -63,7 +63,8 @@ final class PowerLimits {
                 .fluids(FluidClass.NEWTONIAN)
                 .reads(Variable.REYNOLDS)
                 .laminarLimit()
-                .formula(quantity.symbol() + " = 4 pi^3 (h/D)/(Re ((D/" + symbol + ")^2 - (D/Dt)^2)); T for Dt without a tube")
+                .formula(quantity.symbol() + " = 4 pi^3 (h/D)/(Re (" + (symbol.equals("D") ? "1" : "(D/" + symbol + ")^2")
+                        + " - (D/Dt)^2)); T for Dt without a tube")
                 .relation((vessel, k) -> {
                     double kp = laminarPower(vessel, vessel.get(inner));
                     return point -> kp / point.reynolds();
