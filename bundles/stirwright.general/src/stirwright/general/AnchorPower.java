@@ -38,6 +38,7 @@ final class AnchorPower {
                     FrictionFrame frame = new FrictionFrame(vessel, Blades.ARMS, k);
                     return point -> frame.powerNumber(point.reynolds());
                 })
+                .remark("No baffles: near the wall there is no room for them, so the type says it where the source does not.")
                 .remark("That an anchor in laminar flow takes the power of a paddle of its height is said in a review of "
                         + "these equations: H. Furukawa et al., Int. J. Chem. Eng. 2012, article 106496.")
                 .remark("At D/T 0.9 and h = D it gives Np Re 269; McCabe's table has 300 for an anchor, other tables 200 to "

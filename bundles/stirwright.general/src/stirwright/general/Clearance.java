@@ -49,7 +49,7 @@ final class Clearance {
     static Correlation pitchedBlade() {
         return MedekTrend.declare("general.np.medek-clearance", Effect.CLEARANCE, "clearance of a pitched-blade turbine, Medek",
                         "one impeller not about T/3 above the bottom", vessel -> 3 * cOverT(vessel))
-                .notStated(Measure.C_OVER_T, "recalled as C/D 0.5 to 1.5, unsure")
+                .range(Measure.C_OVER_D, 0.5, 1.5, "recalled, unsure")
                 .constant("c", 0.165)
                 .formula(TurbulentFactor.formula("(C/(T/3))^-{c}", "1"))
                 .relation((vessel, k) -> TurbulentFactor.of(Math.pow(3 * cOverT(vessel), -k.get("c")), 1))

@@ -20,6 +20,9 @@ final class PaddlePower {
     private static final String PADDLE_ON_DISC =
             "Made for paddles; that a disc turbine behaves like one is an assumption, so it is never recommended.";
 
+    /** A fence that may stand a little off is better than none. */
+    private static final String RECALLED = "recalled, unsure";
+
     private PaddlePower() {}
 
     static Correlation unbaffledPitchedBlade() {
@@ -133,9 +136,9 @@ final class PaddlePower {
         CorrelationBuilder card = FrictionFrame.declare(Correlation.of(id, Quantity.POWER_NUMBER, title), blades)
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Sources.COMPARED_UP_TO,
                         "laminar to turbulent in words; our comparison with Nagata's equations ended here")
-                .notStated(Measure.BLADE_COUNT, "recalled as 2 to 8, unsure")
-                .notStated(Measure.W_OVER_D, "recalled as 0.05 to 0.9, unsure")
-                .notStated(Measure.D_OVER_T, "recalled as 0.3 to 0.8, unsure")
+                .range(Measure.BLADE_COUNT, 2, 8, RECALLED)
+                .range(Measure.W_OVER_D, 0.05, 0.9, RECALLED)
+                .range(Measure.D_OVER_T, 0.3, 0.8, RECALLED)
                 .notStated(Measure.H_OVER_T, "no range is recalled")
                 .newtonianData()
                 .reads(Variable.REYNOLDS);

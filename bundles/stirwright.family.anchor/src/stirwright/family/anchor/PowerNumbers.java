@@ -1,7 +1,6 @@
 package stirwright.family.anchor;
 
 import stirwright.correlation.Citation;
-import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
@@ -23,8 +22,7 @@ final class PowerNumbers {
                 .atMost(Measure.REYNOLDS, RegimeLimits.IN_GENERAL.laminarUpTo())
                 .notStated(Sources.GAP_OVER_D, "the table has no column for it")
                 .overReynolds("KL", 300)
-                .remark("The table's heading has four baffles of a tenth of the vessel, for which an anchor leaves no room, so "
-                        + "the vessel is taken as not stated.")
+                .remark("The table's heading has four baffles of a tenth of the vessel, which cannot be meant for an anchor.")
                 .remark("The paddle's equations give 269 at D/T 0.9 and 354 at 0.95 for h = D; other tables have 200 to 300.")
                 .build();
     }
@@ -36,8 +34,7 @@ final class PowerNumbers {
                 .turbulent()
                 .notStated(Sources.GAP_OVER_D, "the table has no column for it")
                 .value("KT", 0.35)
-                .remark("The table's heading has four baffles of a tenth of the vessel, for which an anchor leaves no room, so "
-                        + "the vessel is taken as not stated.")
+                .remark("The table's heading has four baffles of a tenth of the vessel, which cannot be meant for an anchor.")
                 .build();
     }
 
@@ -103,7 +100,8 @@ final class PowerNumbers {
     private static CorrelationBuilder card(String id, String title, String family) {
         return Correlation.of(id, Quantity.POWER_NUMBER, title)
                 .families(family)
-                .notStated(Classifier.BAFFLING, Sources.NO_BAFFLES_NAMED)
+                .unbaffled()
+                .remark(Sources.NO_ROOM)
                 .notStated(Measure.BLADE_COUNT, "recalled without it")
                 .newtonianData();
     }

@@ -7,14 +7,11 @@ import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
+import stirwright.correlation.Standing;
 import stirwright.correlation.Transcription;
 
 /** Average shear rate over speed, per revolution, in laminar flow. */
 final class ShearRateConstants {
-
-    /** Where the loosely recalled form was compared with the Couette analogy. */
-    private static final double LEAST_COMPARED = 0.024;
-    private static final double MOST_COMPARED = 0.05;
 
     private ShearRateConstants() {}
 
@@ -23,8 +20,7 @@ final class ShearRateConstants {
                 .cite(Sources.becknerSmith())
                 .transcription(Transcription.CHECKED_NUMERICALLY)
                 .scatter(0.3)
-                .unbaffled()
-                .range(Sources.GAP_OVER_T, LEAST_COMPARED, MOST_COMPARED, "as far as compared with the Couette analogy")
+                .notStated(Sources.GAP_OVER_T, "recalled without a range; compared with the Couette analogy from 0.024 to 0.05")
                 .notStated(Classifier.FLUID, "recalled for power-law fluids, not of which flow index")
                 .constant("a", 37)
                 .constant("b", 120)
@@ -36,7 +32,6 @@ final class ShearRateConstants {
                 })
                 .remark("Recalled within about 30 %: 34.1 at c/T 0.024 where the Couette analogy gives 33.7, 31 at 0.05 where "
                         + "it gives 23 to 28. A factor (1 - n), sometimes quoted with it, contradicts both and is left out.")
-                .remark("No baffles: an impeller that sweeps the wall leaves no room for them.")
                 .remark("Conflict: Metzner et al. (1961) have 11 plus or minus 5; Calderbank and Moo-Young (1961) 45 at D/T 0.9.")
                 .build();
     }
@@ -47,11 +42,11 @@ final class ShearRateConstants {
                         + "AIChE J. 7 (1961) 3-9"))
                 .transcription(Transcription.FROM_MEMORY)
                 .scatter(0.455)
-                .notStated(Classifier.BAFFLING, Sources.NO_BAFFLES_NAMED)
+                .standing(Standing.RETIRED)
                 .nominal(Measure.D_OVER_T, 1 / 1.02)
                 .notStated(Classifier.FLUID, "recalled for non-Newtonian fluids, not of which kind")
                 .value("ks", 11)
-                .remark("11 plus or minus 5 at T/D 1.02.")
+                .remark("11 plus or minus 5 at T/D 1.02. Set aside here, not by its authors: it is shown and never used by itself.")
                 .remark("Conflict: design practice has 20 to 25, and by the Couette analogy 11 does not go with an anchor's "
                         + "power: Kp 200 at D/T 0.9 asks for 23.")
                 .build();
@@ -74,7 +69,6 @@ final class ShearRateConstants {
         return card(id, title, family)
                 .cite(Citation.commonPractice())
                 .scatter(0.11)
-                .notStated(Classifier.BAFFLING, Sources.NO_BAFFLES_NAMED)
                 .notStated(Measure.D_OVER_T, "a rule of the trade without a range")
                 .notStated(Classifier.FLUID, "a rule of the trade for non-Newtonian fluids")
                 .value("ks", 22.5)
@@ -84,6 +78,8 @@ final class ShearRateConstants {
     private static CorrelationBuilder card(String id, String title, String family) {
         return Correlation.of(id, Quantity.SHEAR_RATE_CONSTANT, title)
                 .families(family)
+                .unbaffled()
+                .remark(Sources.NO_ROOM)
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Anchors.LAMINAR_UP_TO,
                         "laminar in words; the end of it is the family's limit");
     }

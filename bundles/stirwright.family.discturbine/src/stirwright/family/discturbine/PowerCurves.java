@@ -36,14 +36,14 @@ final class PowerCurves {
                 .notStated(Measure.D_OVER_T, "recalled without a range")
                 .newtonianData()
                 .reads(Variable.REYNOLDS)
-                .curve("phi", 1, 70, 10, 8.5, 100, 3.6, 400, 3.5, 1000, 4.25, 1e4, 5, 1e5, 5)
+                .curve("phi", 1, 70, 5.185, 14, 10, 8.5, 100, 3.6, 400, 3.5, 1000, 4.25, 1e4, 5, 1e5, 5)
                 .formula("Np over Re {phi}")
                 .relation((vessel, k) -> {
                     ChartCurve phi = k.curve("phi");
                     return point -> phi.at(point.reynolds());
                 })
-                .remark("The points are recalled, not read again; two readings printed in Geankoplis, Transport "
-                        + "Processes and Unit Operations, Example 3.4-1, are its reference rows.")
+                .remark("The points are recalled, not read again, but for 14 at Re 5.185, which is printed in Geankoplis, Transport "
+                        + "Processes and Unit Operations, Example 3.4-1, as is its reference row at Re 5.185e4.")
                 .remark("Conflict: a non-Newtonian problem of the same book has 3.1 at Re 27.6, well below this "
                         + "curve; in shear-thinning fluids the drop to the turbulent level comes later.")
                 .remark("In shear-thinning fluids power numbers up to 25 to 30 % below this curve are reported between Re 10 and "
@@ -88,7 +88,8 @@ final class PowerCurves {
                 .families(DiscTurbine.ID)
                 .cite(Sources.rushtonTable("columns Re 5, 200 and 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
-                .range(Measure.REYNOLDS, 5, 1e5)
+                .range(Measure.REYNOLDS, 5, FROUDE_ACTS_ABOVE,
+                        "the table goes on to 1e5, and does not say whether its numbers there are Np or Np/Fr^m")
                 .unbaffled()
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .notStated(Measure.W_OVER_D, Sources.NO_WIDTH)
@@ -106,8 +107,8 @@ final class PowerCurves {
                 })
                 .remark("Three printed points, and 7.1 at Re 10 by the slope -1 that the same page has up to there; the "
                         + "straight lines between them are ours, and the curve between 200 and 1e5 may well be bent.")
-                .remark("Whether 1.15 is Np or Np/Fr^m is not said; it is taken for Np, which agrees with 0.97 Fr^m "
-                        + "of the power curve without baffles at Fr 0.14.")
+                .remark("Were 1.15 at Re 1e5 Np/Fr^m, the power would be 29 % more at Fr 0.08. Taken for Np it agrees with 0.97 Fr^m of "
+                        + "the power curve without baffles at Fr 0.14.")
                 .build();
     }
 

@@ -34,6 +34,7 @@ public final class FlatBlade implements Contribution {
         return List.of(
                 LaminarPower.twoBlades(),
                 LaminarPower.sixBlades(),
+                RushtonTable.paddle(),
                 TurbulentPower.twoBlades(),
                 TurbulentPower.fourBlades(),
                 TurbulentPower.sixBlades(),

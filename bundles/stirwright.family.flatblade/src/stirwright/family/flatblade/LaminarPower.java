@@ -25,7 +25,8 @@ final class LaminarPower {
                 .notStated(Measure.D_OVER_T, "recalled without a range")
                 .newtonianData()
                 .overReynolds("KL", 36.5)
-                .remark("Checked against Kamei and Hiraoka's equations: 35.9 for this paddle at D/T 1/2, 2 % less.")
+                .remark("Checked against Kamei and Hiraoka's equations, 35.9 for this paddle at D/T 1/2, and Rushton's table of 1950, "
+                        + "7.3 at Re 5.")
                 .remark("In laminar flow baffles do not act.")
                 .build();
     }
@@ -37,7 +38,8 @@ final class LaminarPower {
                         + "open turbine is not at hand"))
                 .transcription(Transcription.CHECKED_NUMERICALLY)
                 .atMost(Measure.REYNOLDS, 10)
-                .notStated(Classifier.BAFFLING, "in laminar flow baffles do not act")
+                .inClass(Classifier.BAFFLING, Classifier.BAFFLED, Classifier.UNBAFFLED)
+                .remark("In laminar flow baffles do not act.")
                 .oneOf(Measure.BLADE_COUNT, 6)
                 .nominal(Measure.W_OVER_D, 0.2)
                 .notStated(Measure.D_OVER_T, "recalled without a range; checked at 1/3 and 1/2")

@@ -12,6 +12,16 @@ final class HelixCurve {
 
     private static final String NOT_DESCRIBED = "the section says helix and no more";
 
+    private static final double LAMINAR = 318;
+
+    /** The usable forms for ribbons lie so far around their middle. */
+    private static final double FORMS = 0.12;
+
+    private static final Correlation RIEGER = LaminarPower.rieger();
+
+    private static final Measure BY_RIEGER = Measure.of("laminar_constant_by_rieger", "Np Re by Rieger et al.",
+            (vessel, point) -> LaminarPower.rieger(vessel, RIEGER.constants()));
+
     private HelixCurve() {}
 
     static Correlation dickey() {
@@ -27,10 +37,12 @@ final class HelixCurve {
                 .notStated(Sources.RIBBON_OVER_D, NOT_DESCRIBED)
                 .notStated(Sources.RIBBON_COUNT, NOT_DESCRIBED)
                 .notStated(Measure.H_OVER_T, NOT_DESCRIBED)
+                .range(BY_RIEGER, LAMINAR * (1 - FORMS), LAMINAR / (1 - FORMS),
+                        "ribbons that take about his helix's laminar power; ours, since he describes none")
                 .newtonianData()
                 .reads(Variable.REYNOLDS)
                 .laminarLimit()
-                .constant("Kp", 318)
+                .constant("Kp", LAMINAR)
                 .curve("f", 1, 1, Sources.LAMINAR_UP_TO, 1, 662, 1.8, 1191, 2.3, 1994, 3)
                 .formula("Np = {Kp} f/Re, f over Re {f}")
                 .relation((vessel, k) -> {
@@ -40,8 +52,10 @@ final class HelixCurve {
                 })
                 .remark("Printed are 318, constant below Re 60, and the factors 1.8, 2.3 and 3.0; the straight lines between them "
                         + "are ours, and the longest of them, from 60 to 662, is uncertain.")
-                .remark("No baffles: a helix at the wall leaves no room for them.")
-                .remark("It knows no proportions: for a ribbon of other proportions than his it is a size, not a value.")
+                .remark(Sources.NO_ROOM)
+                .remark("It knows no proportions, and power goes with them: so it is held to ribbons whose laminar constant by Rieger "
+                        + "et al. is within 12 % of his, as far as the forms for ribbons agree. Any other ribbon may take several "
+                        + "times this power.")
                 .build();
     }
 }

@@ -31,8 +31,7 @@ final class LaminarPower {
     static Correlation rieger() {
         return card("helicalribbon.np.rieger-1988", "Rieger, Novak and Havelkova",
                         "Np = {a} (h/D) (c/D)^-{b} (p/D)^-{d} (w/D)^{e} nr^{f}/Re",
-                        (v, k) -> k.get("a") * height(v) * pow(gap(v), -k.get("b")) * pow(pitch(v), -k.get("d"))
-                                * pow(width(v), k.get("e")) * pow(ribbons(v), k.get("f")))
+                        LaminarPower::rieger)
                 .cite(Citation.of("F. Rieger, V. Novak and D. Havelkova, Int. Chem. Eng. 28 (1988) 376-383",
                         "as printed after the Handbook of Industrial Mixing, Wiley (2004), Example 9-6"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
@@ -40,6 +39,12 @@ final class LaminarPower {
                 .remark("The handbook recommends it among the forms for ribbons.")
                 .remark(CHECKED)
                 .build();
+    }
+
+    /** Np Re. */
+    static double rieger(Geometry v, Constants k) {
+        return k.get("a") * height(v) * pow(gap(v), -k.get("b")) * pow(pitch(v), -k.get("d"))
+                * pow(width(v), k.get("e")) * pow(ribbons(v), k.get("f"));
     }
 
     static Correlation shamlouEdwards() {

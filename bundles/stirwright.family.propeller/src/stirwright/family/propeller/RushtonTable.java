@@ -18,6 +18,7 @@ final class RushtonTable {
     static Correlation baffled() {
         return curve("propeller.np.rushton-1950-baffled", "Rushton, Costich and Everett, baffles, table of 1950",
                         5, 8.3, 10, 4.15, 200, 0.77, 1e5, 0.26)
+                .range(Measure.REYNOLDS, 5, 1e5)
                 .baffled()
                 .notStated(Measure.BAFFLE_COUNT, "the table has no column for it")
                 .nominal(Measure.B_OVER_T, 0.083)
@@ -28,10 +29,12 @@ final class RushtonTable {
     static Correlation unbaffled() {
         return curve("propeller.np.rushton-1950-unbaffled", "Rushton, Costich and Everett, no baffles, table of 1950",
                         5, 8.3, 10, 4.15, 200, 0.75, 1e5, 0.22)
+                .range(Measure.REYNOLDS, 5, 300,
+                        "the table goes on to 1e5, and does not say whether its numbers there are Np or Np/Fr^m")
                 .unbaffled()
                 .contains(Effect.FROUDE)
-                .remark("Whether 0.22 is Np or Np/Fr^m is not said; it is taken for Np. The exponents m of this impeller are "
-                        + "not here, since which of those recalled belongs to which vessel is unsure.")
+                .remark("Up to Re 300 the Froude number does not act. The exponents m of this impeller are not here, since which of "
+                        + "those recalled belongs to which vessel is unsure.")
                 .remark("Off the centre line and without baffles the table has 0.32 at Re 1e5.")
                 .build();
     }
@@ -43,7 +46,6 @@ final class RushtonTable {
                         + "467-476", "p. 472 as printed in D. W. Hendricks, Fundamentals of Water Treatment Unit Processes, CRC "
                         + "Press, Table 10.3, p. 258, columns Re 5, 200 and 1e5"))
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
-                .range(Measure.REYNOLDS, 5, 1e5)
                 .oneOf(Measure.BLADE_COUNT, 3)
                 .range(Propeller.PITCH, 1, 1.03, "square pitch, printed as 1.02 and 1.03")
                 .nominal(Measure.D_OVER_T, 1.0 / 3)

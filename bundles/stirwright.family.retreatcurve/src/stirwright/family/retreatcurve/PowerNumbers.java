@@ -44,13 +44,14 @@ final class PowerNumbers {
 
     static Correlation oneBaffle() {
         return turbulent("retreatcurve.np.tables-one-baffle", "handbook tables, one beaver-tail baffle, turbulent")
-                .transcription(Transcription.FROM_MEMORY)
+                .transcription(Transcription.UNSURE)
                 .baffled()
                 .oneOf(Measure.BAFFLE_COUNT, 1)
                 .notStated(Measure.B_OVER_T, "a beaver-tail baffle, recalled without its size")
                 .scatter(0.067)
                 .value("Np", 0.375)
-                .remark("The tables have 0.35 to 0.40; the middle and the scatter are ours.")
+                .remark("The tables have 0.35 to 0.40; the middle and the scatter are ours. Which of the numbers for none, one and four "
+                        + "baffles are recalled surely is not known, so all count as unsure.")
                 .build();
     }
 

@@ -19,6 +19,9 @@ public final class ToothedDisc implements Contribution {
 
     private static final String ID = "tootheddisc";
 
+    /** A floor is no estimate, so it is a quantity of its own; the helical screw has one too. */
+    private static final Quantity LEAST = Quantity.of("power-number-floor", "least power number", "Npmin", "-");
+
     @Override
     public List<Family> families() {
         return List.of(Family.of(ID, "toothed high-speed disc")
@@ -35,7 +38,7 @@ public final class ToothedDisc implements Contribution {
     }
 
     private static Correlation thinDisc() {
-        return Correlation.of("tootheddisc.np.thin-disc-limit", Quantity.POWER_NUMBER, "smooth thin disc, laminar lower limit")
+        return Correlation.of("tootheddisc.npmin.thin-disc", LEAST, "smooth thin disc, laminar lower limit")
                 .families(ID)
                 .cite(Citation.withoutLocator("torque 32/3 mu a^3 omega on a thin disc of radius a that spins in its plane in "
                         + "unbounded liquid without inertia: G. B. Jeffery, Proc. London Math. Soc. 14 (1915)"))
