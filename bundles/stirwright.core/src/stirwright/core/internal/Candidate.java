@@ -18,6 +18,7 @@ import stirwright.correlation.Geometry;
 import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.ReynoldsDefinition;
+import stirwright.correlation.Standing;
 import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 
@@ -164,10 +165,14 @@ final class Candidate {
         return distrust;
     }
 
-    /** How often it must be doubted that it is near: once for its digits, source or standing, once for a range not stated. */
+    /**
+     * How often it must be doubted that it is near: once for its digits, source or standing, once more for a standing
+     * that says not to use it, once for a Reynolds range not stated.
+     */
     int doubts() {
         if (doubts < 0) {
-            doubts = correlation.map(c -> (Trust.in(c) ? 0 : 1) + (Trust.isSilent(c) ? 1 : 0)).orElse(0);
+            doubts = correlation.map(c -> (Trust.in(c) ? 0 : 1) + (c.standing() == Standing.RETIRED ? 1 : 0)
+                    + (Trust.isSilent(c) ? 1 : 0)).orElse(0);
         }
         return doubts;
     }

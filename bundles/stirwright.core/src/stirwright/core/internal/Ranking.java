@@ -49,8 +49,8 @@ public final class Ranking {
      * Among those that do not qualify, the nearest first; equal ones keep their order. One whose
      * digits, source or standing are in doubt counts as a factor of two beyond its bounds, and so does
      * one without a stated Reynolds range, which cannot be known to be near: better than a trusted one
-     * that is far outside of its range, worse than one that is a little outside. What is in doubt and
-     * silent both comes after all that is not, and a rule of the trade without a source after that.
+     * that is far outside of its range, worse than one that is a little outside. What is in doubt
+     * twice, silent or retired besides, comes after all that is not, and a rule of the trade without a source after that.
      */
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
             // What the case changed stands beside the published numbers and takes the place of one only when chosen.
