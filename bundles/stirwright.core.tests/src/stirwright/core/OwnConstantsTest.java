@@ -52,6 +52,30 @@ class OwnConstantsTest {
     }
 
     @Test
+    void aChosenShearRateConstantWithoutValueIsBlamedAndNotTheSpeed() {
+        Map<String, Map<String, Double>> negative = Map.of("invented.ks.ten", Map.of("a", -3.0));
+        Choices changed = choices(Map.of(Quantity.SHEAR_RATE_CONSTANT, "invented.ks.ten-changed"), negative);
+        for (SpeedDemand demand : List.of(new SpeedDemand.At(2), new SpeedDemand.ForTipSpeed(3),
+                new SpeedDemand.ForShearRate(20), new SpeedDemand.ForPowerPerVolume(100))) {
+            assertEquals("constants", refused(CATALOGUE, demand, changed).field(), demand.toString());
+        }
+        Correlation negativeInstalled = Invented.constant(Quantity.SHEAR_RATE_CONSTANT, "ks.negative", -1);
+        Choices installed = choices(Map.of(Quantity.SHEAR_RATE_CONSTANT, "invented.ks.negative"), Map.of());
+        Refusal refusal = refused(Invented.catalogue(KS, NP, negativeInstalled), new SpeedDemand.At(2), installed);
+        assertEquals("shear_rate_correlation", refusal.field());
+        assertEquals("invented.ks.negative", refusal.value());
+        Choices sound = choices(Map.of(Quantity.SHEAR_RATE_CONSTANT, "invented.ks.ten"), Map.of());
+        assertEquals("target_power_per_volume_W_m3",
+                refused(CATALOGUE, new SpeedDemand.ForPowerPerVolume(1e12), sound).field());
+    }
+
+    private static Refusal refused(Catalogue catalogue, SpeedDemand demand, Choices choices) {
+        CaseSpec water = Invented.water(choices);
+        return new CrossCheck(catalogue).check(new CaseSpec("case", Invented.FAMILY, water.geometry(), demand, water.fluid(),
+                choices, List.of())).refusal().orElseThrow();
+    }
+
+    @Test
     void constantsThatAreNotNamedKeepTheirValues() {
         assertEquals(2 + 0.5, Invented.row(check(Map.of("invented.np.two", Map.of("b", 0.5))), "np.two-changed").powerNumber());
     }

@@ -204,6 +204,11 @@ public final class CaseSolver {
     /** No state was found, or the correlation that the case asks for has no number. */
     private CaseRefusedException nothingComputed(Selection.Ranked ranked) {
         String obstacle = ranked.trial().assessment().obstacle();
+        Optional<String> withoutValue = ranked.trial().state().isPresent() ? Optional.empty() : states.chosenWithoutValue();
+        if (withoutValue.isPresent()) {
+            return new CaseRefusedException(Choices.isChanged(withoutValue.get()) ? Choices.CONSTANTS
+                    : Choices.field(Quantity.SHEAR_RATE_CONSTANT), withoutValue.get(), "leads to no power: " + obstacle);
+        }
         if (ranked.role() != Role.CHOSEN || ranked.trial().state().isEmpty()) {
             return new CaseRefusedException(spec.speed().field(), Figures.show(spec.speed().value()),
                     "leads to no power: " + obstacle);

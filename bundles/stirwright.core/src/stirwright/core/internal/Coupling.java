@@ -66,6 +66,11 @@ final class Coupling {
         return search(speed, constant);
     }
 
+    /** Whether a constant has a value where the loop at a speed in rev/s begins. */
+    boolean hasValue(double speed, Candidate constant) {
+        return usable(evaluate(constant, state(speed, FIRST_GUESS)));
+    }
+
     /** For loops that plain iteration runs away from. */
     private Solution search(double speed, Candidate constant) {
         UnivariateFunction gap = ln -> Math.log(evaluate(constant, state(speed, Math.exp(ln)))) - ln;

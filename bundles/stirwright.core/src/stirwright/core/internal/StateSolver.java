@@ -82,6 +82,18 @@ final class StateSolver {
                 : sharedAll.computeIfAbsent(belonging, b -> select(solveForSpeed(false), b));
     }
 
+    /** The id of the constant that the case chooses, where it has no value at the speed of the case or, for a target, at 1 rev/s. */
+    Optional<String> chosenWithoutValue() {
+        double speed = switch (spec.speed()) {
+            case SpeedDemand.At at -> at.value();
+            case SpeedDemand.ForTipSpeed tip -> tip.value() / (Math.PI * diameter);
+            case SpeedDemand.ForShearRate shear -> 1;
+            case SpeedDemand.ForPowerPerVolume power -> 1;
+        };
+        return spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT).filter(id -> constants.stream()
+                .anyMatch(c -> c.id().equals(id) && !coupling.hasValue(speed, c)));
+    }
+
     private Selection select(List<Trial> solved, Optional<String> belonging) {
         return Selection.of(solved, spec.choices().correlation(Quantity.SHEAR_RATE_CONSTANT), belonging);
     }
