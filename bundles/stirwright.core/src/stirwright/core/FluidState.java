@@ -19,7 +19,8 @@ public record FluidState(
         double speed, double shearRateConstant, double shearRate, double viscosity, double flowIndex,
         double density, double diameter, double yieldStress, FluidClass fluid) {
 
-    private static final double GRAVITY = 9.80665;
+    /** Standard gravity, m/s2 (ISO 80000-3). */
+    public static final double GRAVITY = 9.80665;
 
     /** rho N D^2/mu, mu at the average shear rate. */
     public double reynolds() {
@@ -38,7 +39,7 @@ public record FluidState(
         return Double.NaN;
     }
 
-    /** N^2 D/g, with standard gravity 9.80665 m/s2 (ISO 80000-3). */
+    /** N^2 D/g, with {@link #GRAVITY}. */
     public double froude() {
         return speed * speed * diameter / GRAVITY;
     }
