@@ -68,6 +68,24 @@ class EffectsLeftOutTest {
     }
 
     @Test
+    void aFactorThatThePickLacksFlagsTheCase() {
+        assertEquals(Status.OK, check().status(), check().flags().toString());
+        CaseResult result = check("several-impellers");
+        assertEquals(Status.FLAGGED, result.status());
+        assertTrue(result.flags().toString().contains("several impellers on the shaft: the power number lacks a factor of 1.5"), result.flags().toString());
+        assertTrue(result.flags().toString().contains("the flow number lacks a factor of 3"), result.flags().toString());
+    }
+
+    @Test
+    void aFactorOfOneOrOnWhatNothingRestsOnFlagsNothing() {
+        Correlation one = factor("np.one", Quantity.POWER_NUMBER, Effect.CLEARANCE, 1).build();
+        Correlation idle = factor("ks.idle", Quantity.SHEAR_RATE_CONSTANT, Effect.CLEARANCE, 2).build();
+        CaseResult result = check(List.of(KS, NP, one, idle), "clearance");
+        assertEquals(Status.OK, result.status(), result.flags().toString());
+        assertEquals(2, Invented.row(result, "np.single").notes().size(), "the row names both all the same");
+    }
+
+    @Test
     void whatContainsTheEffectKeepsItAndSaysSo() {
         CaseResult result = check(List.of(KS, CONTAINING, SEVERAL), "several-impellers");
         assertEquals(7, result.pick().orElseThrow().powerNumber());

@@ -5,12 +5,14 @@ import java.util.List;
 import java.util.Locale;
 import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
+import stirwright.core.Point;
 import stirwright.core.Role;
 import stirwright.core.SpeedDemand;
 import stirwright.core.VesselGeometry;
 import stirwright.correlation.Dimensions;
 import stirwright.correlation.Figures;
 import stirwright.correlation.FluidClass;
+import stirwright.correlation.Quantity;
 import stirwright.rheology.MeasuredWindow;
 
 /** What a reader must know before using the pick: what flags the case, and what is worth a note. */
@@ -38,6 +40,7 @@ final class Doubts {
             row.constants().pick().filter(c -> !c.sound()).ifPresent(c -> flags.add(constantInDoubt(c)));
         }
         defaults.assumedThatMatter().ifPresent(words -> flags.add("assumed: " + words));
+        factorsLeftOut(flags);
         outsideWindow(flags);
         levelNearBlades(flags);
         bafflesNearBlades(flags);
@@ -63,6 +66,18 @@ final class Doubts {
     /** With a constant viscosity and a speed that does not follow from it, it changes nothing but its own column. */
     private boolean restsOnConstant() {
         return state.fluid() != FluidClass.NEWTONIAN || spec.speed() instanceof SpeedDemand.ForShearRate;
+    }
+
+    /** The case may leave out what it likes, but then its numbers are not those that the sources lead to. */
+    private void factorsLeftOut(List<String> flags) {
+        if (spec.choices().effectsLeftOut().isEmpty()) {
+            return;
+        }
+        row.picks().stream().filter(c -> restsOnConstant() || !c.quantity().equals(Quantity.SHEAR_RATE_CONSTANT))
+                .flatMap(c -> c.factors(new Point().at(state), state).stream())
+                .filter(f -> f.leftOut() && f.value() != 1)
+                .forEach(f -> flags.add("effect left out in the case, " + f.effect().title() + ": the " + f.factor().quantity().title()
+                        + " lacks a factor of " + Figures.show(f.value())));
     }
 
     private static String constantInDoubt(Selection.Ranked constant) {
