@@ -110,6 +110,11 @@ class StudyFilesTest {
         study.getFluids().get(0).setName("broth");
         study.getFluids().get(0).getAmounts().get(0).setValue(Double.NaN);
         refused(study, file, "amount 'density_kg_m3' of fluid 'broth'", "NaN");
+        study.getFluids().get(0).getAmounts().get(0).setValue(1000);
+        OwnConstants.set(study.getCases().get(0), "invented.np.a", "k", 2);
+        study.getCases().get(0).getConstants().getLast().setValue(Double.POSITIVE_INFINITY);
+        refused(study, file, "constant 'k' of 'invented.np.a' in case 'simmer'", "Infinity");
+        study.getCases().get(0).getConstants().clear();
         study.getFluids().remove(0);
         refused(study, file, "case 'simmer'", "fluid 'broth'", "not in the study");
         assertArrayEquals(before, Files.readAllBytes(file));

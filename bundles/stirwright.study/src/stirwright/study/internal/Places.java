@@ -21,7 +21,8 @@ final class Places {
             case Case one -> "case " + quote(one.getName());
             case Amount amount -> "amount " + quote(amount.getColumn()) + " of " + of(amount.eContainer());
             case Pick pick -> "pick " + quote(pick.getQuantity()) + " of " + of(pick.eContainer());
-            case Constant constant -> "constant " + quote(constant.getName()) + " of " + of(constant.eContainer());
+            case Constant constant -> "constant " + quote(constant.getName()) + " of " + quote(constant.getCorrelation()) + " in "
+                    + of(constant.eContainer());
             default -> "the study";
         };
     }
