@@ -32,9 +32,11 @@ class ByHandTest {
     }
 
     @Test
-    void effectsAreWordsBetweenBlanks() {
+    void effectsStandBetweenBlanksOrCommasOrSemicolons() {
         assertEquals(Set.of("baffles", "clearance"), choices(entry("effects_left_out", " baffles   clearance ")).effectsLeftOut());
         assertEquals(Set.of("baffles"), choices(entry("effects_left_out", "baffles baffles")).effectsLeftOut());
+        assertEquals(Set.of("baffles", "clearance"), choices(entry("effects_left_out", "\"baffles, clearance\"")).effectsLeftOut());
+        assertEquals(Set.of("baffles", "clearance"), choices(entry("effects_left_out", "\";baffles;clearance,\"")).effectsLeftOut());
         assertEquals(Choices.NONE, choices(entry("effects_left_out", "")));
     }
 
@@ -52,6 +54,24 @@ class ByHandTest {
         String header = Sheet.good().with("constants", "").header().replace(',', '\t');
         CaseTable read = Sheet.read(folder, header + "\nA\tblades\t0,5\t1,5\t4\t2\t1000\tnewtonian\t0,1\tblades.np.firm c=6,5\n");
         assertEquals(Map.of("blades.np.firm", Map.of("c", 6.5)), choices(read.entries().get(0)).constants());
+    }
+
+    @Test
+    void theDecimalSignIsToldByConstantsToo() {
+        String header = Sheet.good().with("constants", "").header().replace(',', '\t');
+        CaseTable read = Sheet.read(folder, header + "\nA\tblades\t1\t2\t4\t2\t1000\tnewtonian\t1\tblades.np.firm c = 6,5\n");
+        assertEquals(Map.of("blades.np.firm", Map.of("c", 6.5)), choices(read.entries().get(0)).constants());
+        assertTrue(read.messages().toString().contains("decimal comma"), read.messages().toString());
+    }
+
+    @Test
+    void betweenSemicolonsTwoIdsNeedQuotes() {
+        String header = Sheet.good().with("constants", "").header().replace(',', ';');
+        String row = "blades;1;2;4;2;1000;newtonian;1;";
+        CaseTable read = Sheet.read(folder, header + "\nA;" + row + "\"blades.np.firm c=6; blades.ks.ten c=6\"\nB;" + row
+                + "blades.np.firm c=6; blades.ks.ten c=6\n");
+        assertEquals(Set.of("blades.np.firm", "blades.ks.ten"), choices(read.entries().get(0)).constants().keySet());
+        assertRefused(read.entries().get(1), "column 11", "blades.ks.ten c=6", "between semicolons", "quotes");
     }
 
     @Test

@@ -12,12 +12,20 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import stirwright.core.Arrival;
 import stirwright.core.CaseResult;
+import stirwright.core.Catalogue;
 import stirwright.core.Refusal;
+import stirwright.correlation.Citation;
+import stirwright.correlation.Contribution;
+import stirwright.correlation.Correlation;
+import stirwright.correlation.Quantity;
+import stirwright.correlation.Transcription;
 
 class OutputsTest {
     private static final CaseResult RESULT = CaseResult.refused("A", "x", new Refusal("family", "x", "is not installed"));
@@ -80,6 +88,24 @@ class OutputsTest {
         assertEquals(List.of(), Json.object(Files.readString(folder.resolve("c.json"))).get("candidates"));
         assertEquals(List.of(), Json.object(Files.readString(folder.resolve("f.json"))).get("fits"));
         assertEquals(6, Files.readAllLines(folder.resolve("k.csv")).size());
+    }
+
+    @Test
+    void constantsOfTheListFitIntoACaseTable() throws IOException {
+        Correlation two = Correlation.of("blades.np.two", Quantity.POWER_NUMBER, "two constants").families("blades")
+                .cite(Citation.of("nowhere", "p. 1")).transcription(Transcription.FROM_MEMORY).constant("c", 1.5).constant("d", 2)
+                .formula("{c} + {d}").relation((geometry, constants) -> point -> 3.5).build();
+        Contribution only = new Contribution() {
+            @Override
+            public List<Correlation> correlations() {
+                return List.of(two);
+            }
+        };
+        outputs.catalogue(folder.resolve("k.csv"), Catalogue.of(List.of(Arrival.of(only, "invented 1.0.0"))));
+        String row = Files.readAllLines(folder.resolve("k.csv")).get(1);
+        String cell = row.substring(row.lastIndexOf(',') + 1);
+        assertEquals(Map.of(two.id(), Map.of("c", 1.5, "d", 2.0)), Sheet.good().with("constants", two.id() + " " + cell)
+                .entry(folder).spec().orElseThrow().choices().constants(), cell);
     }
 
     @Test

@@ -94,6 +94,11 @@ public final class CaseColumns {
         return numeric.contains(column);
     }
 
+    /** Whether its cells hold numbers, alone or behind equal signs. */
+    boolean showsDecimals(String column) {
+        return isNumeric(column) || column.equals(CONSTANTS);
+    }
+
     boolean isKnown(String column) {
         return numeric.contains(column) || TEXTS.contains(column);
     }

@@ -19,7 +19,7 @@ public record CaseRows(Grid grid, CaseReader reader, List<String> messages) {
     /** @throws UnusableFileException when the file is no case table */
     public static CaseRows open(TextFile file, Catalogue catalogue) {
         CaseColumns columns = new CaseColumns(catalogue);
-        Grid grid = Grid.read(file, columns::isKnown, columns::isNumeric);
+        Grid grid = Grid.read(file, columns::isKnown, columns::showsDecimals);
         HeaderChecks checks = new HeaderChecks(file, grid.header(), columns);
         checks.require();
         List<String> messages = new ArrayList<>(grid.messages());

@@ -60,7 +60,8 @@ final class ChoiceCells {
     }
 
     private static Set<String> effectsLeftOut(Cells cells) {
-        return cells.given(CaseColumns.EFFECTS_LEFT_OUT)
-                ? new LinkedHashSet<>(List.of(cells.text(CaseColumns.EFFECTS_LEFT_OUT).split("\\s+"))) : Set.of();
+        Set<String> effects = new LinkedHashSet<>(List.of(cells.text(CaseColumns.EFFECTS_LEFT_OUT).split("[\\s,;]+")));
+        effects.remove("");
+        return effects;
     }
 }

@@ -7,7 +7,19 @@ final class DecimalVote {
     private final int[] votes = new int[DecimalSign.values().length];
     private final String[] firstSeen = new String[votes.length];
 
+    /** Takes a number, or the numbers behind the equal signs of a cell. */
     void take(int line, String column, String cell) {
+        if (cell.indexOf('=') < 0) {
+            takeNumber(line, column, cell);
+            return;
+        }
+        String[] parts = cell.split("=\\s*");
+        for (int i = 1; i < parts.length; i++) {
+            takeNumber(line, column, parts[i].split("[\\s;]", 2)[0]);
+        }
+    }
+
+    private void takeNumber(int line, String column, String cell) {
         for (DecimalSign sign : DecimalSign.values()) {
             if (Numbers.shows(cell, sign) && votes[sign.ordinal()]++ == 0) {
                 firstSeen[sign.ordinal()] = "line " + line + " " + column + " '" + Texts.show(cell) + "'";

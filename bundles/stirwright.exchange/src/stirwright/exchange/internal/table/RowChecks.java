@@ -21,9 +21,17 @@ final class RowChecks {
             // Blank ones too: an unquoted decimal comma shifts every cell after it, to the blank end of a row.
             return row.flawed(new Row.Flaw(width, row.cell(width), "has no column: the row has " + row.cells().size()
                     + " cells, the header " + width
-                    + (separator == Separator.COMMA ? "; between commas a decimal comma needs quotes" : "")));
+                    + hint(separator)));
         }
         return row;
+    }
+
+    private static String hint(Separator separator) {
+        return switch (separator) {
+            case COMMA -> "; between commas a decimal comma needs quotes";
+            case SEMICOLON -> "; between semicolons a cell that holds one needs quotes";
+            case TAB -> "";
+        };
     }
 
     /**

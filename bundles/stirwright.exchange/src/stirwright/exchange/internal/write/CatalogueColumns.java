@@ -1,5 +1,6 @@
 package stirwright.exchange.internal.write;
 
+import static stirwright.exchange.internal.write.Column.entries;
 import static stirwright.exchange.internal.write.Column.number;
 import static stirwright.exchange.internal.write.Column.text;
 import static stirwright.exchange.internal.write.Column.words;
@@ -40,7 +41,7 @@ public final class CatalogueColumns {
             words("contains", r -> r.correlation().map(c -> c.contains().stream().map(Term::id).toList()).orElse(List.of())),
             text("bundle", Row::bundle),
             of("modifier_for", c -> c.modifierFor().map(Effect::id).orElse("")),
-            words("constants", r -> r.correlation().map(CatalogueColumns::constants).orElse(List.of())));
+            entries("constants", r -> r.correlation().map(CatalogueColumns::constants).orElse(List.of())));
 
     private CatalogueColumns() {}
 

@@ -45,11 +45,11 @@ public sealed interface Column<R> {
         }
     }
 
-    /** Several sentences: joined by "; " in a cell, an array in JSON. */
-    record Words<R>(String name, Function<R, List<String>> of) implements Column<R> {
+    /** Several entries: joined in a cell, an array in JSON. */
+    record Words<R>(String name, Function<R, List<String>> of, String joint) implements Column<R> {
         @Override
         public String cell(R row) {
-            return String.join("; ", of.apply(row));
+            return String.join(joint, of.apply(row));
         }
     }
 
@@ -66,7 +66,12 @@ public sealed interface Column<R> {
     }
 
     static <R> Column<R> words(String name, Function<R, List<String>> of) {
-        return new Words<>(name, of);
+        return new Words<>(name, of, "; ");
+    }
+
+    /** Joined by blanks, as a case table takes them. */
+    static <R> Column<R> entries(String name, Function<R, List<String>> of) {
+        return new Words<>(name, of, " ");
     }
 
     static List<String> names(List<? extends Column<?>> columns) {
