@@ -13,11 +13,19 @@ die() {
   exit 3
 }
 
+packages_listed=
+
+# list_packages: asks the network once in a run, whether it answers or not.
+list_packages() {
+  [ -n "$packages_listed" ] || { apt-get update >&2 && packages_listed=yes || packages_listed=no; }
+  [ "$packages_listed" = yes ]
+}
+
 # install PACKAGE...: the first that this Debian release has; fails when there is none or no right to install.
 install() {
   local package
   [ "$(id -u)" = 0 ] && command -v apt-get >/dev/null || return 1
-  apt-get update >&2 || return 1
+  list_packages || return 1
   for package; do
     apt-cache show "$package" >/dev/null 2>&1 || continue
     say "installing $package"
