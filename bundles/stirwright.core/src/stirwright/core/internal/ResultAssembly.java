@@ -60,6 +60,7 @@ final class ResultAssembly {
         Doubts doubts = new Doubts(spec, vessel, first, anyQualifies);
         List<String> notes = new ArrayList<>(doubts.notes());
         notes.addAll(new ByHand(spec, catalogue, first).notes());
+        notes.addAll(DriveCautions.of(rows));
         new ShearRateUse(first, results.get(0)).note().ifPresent(notes::add);
         List<QuantityResult> quantities = listed.stream()
                 .flatMap(s -> s.ranked().stream()).map(ResultAssembly::quantity).toList();
