@@ -121,6 +121,14 @@ class OwnConstantsTest {
     }
 
     @Test
+    void aChangedOneIsThereOnlyWhileSomethingOfItIsChanged() {
+        Map<Quantity, String> pick = Map.of(Quantity.POWER_NUMBER, "invented.np.five-changed");
+        Refusal none = new CrossCheck(CATALOGUE).check(Invented.water(choices(pick, Map.of()))).refusal().orElseThrow();
+        assertTrue(none.reason().contains("only while the case changes constants of invented.np.five"), none.reason());
+        assertEquals("correlation", none.field());
+    }
+
+    @Test
     void whatIsNotThereIsRefusedWithWhatIs() {
         refused(Map.of("invented.np.none", Map.of("a", 1.0)), "'invented.np.none'", "no installed correlation");
         refused(Map.of("invented.np.two", Map.of("c", 1.0)), "'invented.np.two'", "no constant 'c'", "a = 2, b = 3");

@@ -45,7 +45,9 @@ final class Candidates {
             if (correlations.stream().noneMatch(c -> c.id().equals(id))) {
                 throw new CaseRefusedException(Choices.field(quantity), id, "is not a correlation for the "
                         + quantity.title() + " of family " + family.id() + "; installed: "
-                        + String.join(", ", correlations.stream().map(Correlation::id).toList()));
+                        + String.join(", ", correlations.stream().map(Correlation::id).toList())
+                        + Choices.published(id).filter(base -> !choices.constants().containsKey(base)).map(base ->
+                                "; " + id + " exists only while the case changes constants of " + base).orElse(""));
             }
         });
         Modifiers modifiers = new Modifiers(catalogue.modifiers(quantity, family.id()), vessel);
