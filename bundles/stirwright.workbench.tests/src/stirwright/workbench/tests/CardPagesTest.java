@@ -34,7 +34,7 @@ class CardPagesTest {
     Path folder;
 
     /** Turns the card's page with the arrow keys. */
-    private static void turn(OpenWindow window, int page) throws Exception {
+    static void turn(OpenWindow window, int page) throws Exception {
         window.run(() -> {
             WordBar bar = window.find(WordBar.class, "pages of the selected candidate");
             bar.forceFocus();
@@ -48,7 +48,7 @@ class CardPagesTest {
     }
 
     /** Selects the first correlation that has constants, and turns to their page. */
-    private static Row turnToConstants(OpenWindow window) throws Exception {
+    static Row turnToConstants(OpenWindow window) throws Exception {
         Row row = window.outcome().rows().stream().filter(r -> !r.correlation().orElseThrow().constants().names().isEmpty())
                 .findFirst().orElseThrow();
         window.run(() -> window.session().select(row.key()));
@@ -57,17 +57,17 @@ class CardPagesTest {
     }
 
     /** The field of the first constant of the selected correlation. */
-    private static Text field(OpenWindow window) throws Exception {
+    static Text field(OpenWindow window) throws Exception {
         return window.on(() -> window.all(Text.class, t -> t.isVisible() && String.valueOf(
                 t.getData("stirwright.name")).startsWith("constant ")).get(0));
     }
 
-    private static String name(OpenWindow window) throws Exception {
+    static String name(OpenWindow window) throws Exception {
         Text text = field(window);
         return window.on(() -> (String) text.getData("stirwright.name"));
     }
 
-    private static Optional<Row> changed(OpenWindow window) throws Exception {
+    static Optional<Row> changed(OpenWindow window) throws Exception {
         return window.outcome().rows().stream().filter(r -> r.correlationId().endsWith(CHANGED)).findFirst();
     }
 
@@ -143,7 +143,7 @@ class CardPagesTest {
         });
     }
 
-    private static String changedKey(OpenWindow window) {
+    static String changedKey(OpenWindow window) {
         return window.session().outcome().orElseThrow().rows().stream().filter(r -> r.correlationId().endsWith(CHANGED))
                 .findFirst().orElseThrow().key();
     }
@@ -212,7 +212,7 @@ class CardPagesTest {
         });
     }
 
-    private static void link(OpenWindow window, String words) throws Exception {
+    static void link(OpenWindow window, String words) throws Exception {
         window.run(() -> window.all(Link.class, l -> l.isVisible() && l.getText().contains(words)).get(0)
                 .notifyListeners(SWT.Selection, new Event()));
         window.settle();

@@ -47,6 +47,14 @@ abstract class CardPage extends ScrolledComposite {
         fit();
     }
 
+    /** Drops fields that belong to something else than what is at hand now, together with what is typed in them. */
+    final void dropStale() {
+        if (form != null && !shape().equals(shape)) {
+            form.dispose();
+            form = null;
+        }
+    }
+
     /** What decides which fields there are. */
     abstract List<Object> shape();
 

@@ -9,6 +9,7 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Text;
 import stirwright.core.Choices;
@@ -34,6 +35,9 @@ import stirwright.workbench.internal.widgets.WordBar;
  * factors; and the pick with its reason.
  */
 final class CardView extends Composite {
+    /** The place of the constants among the pages. */
+    private static final int CONSTANTS = 1;
+
     private final Session session;
     private final CaseEdits edits;
     private final Composite pages;
@@ -64,7 +68,10 @@ final class CardView extends Composite {
         looks.onPage(card);
         card.setAlwaysShowScrollBars(false);
         card.setMargins(Looks.STEP, Looks.STEP, Looks.STEP, Looks.STEP);
-        new ConstantsPage(pages, looks, session, problems);
+        new ConstantsPage(pages, looks, session, problems, () -> {
+            turn.setCurrent(CONSTANTS);
+            turnTo(CONSTANTS);
+        });
         new FactorsPage(pages, looks, session);
         onTop.topControl = card;
         // Tab leaves the card as it leaves every other control.
@@ -100,8 +107,14 @@ final class CardView extends Composite {
     }
 
     private void showPage() {
-        if (onTop.topControl instanceof CardPage page) {
-            page.show();
+        for (Control control : pages.getChildren()) {
+            if (control instanceof CardPage page) {
+                if (page == onTop.topControl) {
+                    page.show();
+                } else {
+                    page.dropStale();
+                }
+            }
         }
     }
 

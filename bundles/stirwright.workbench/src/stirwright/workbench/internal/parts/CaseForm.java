@@ -152,6 +152,11 @@ final class CaseForm extends Composite {
         }
     }
 
+    /** Leaves out of the count what cannot be read in these fields, since they go. */
+    void dropProblems() {
+        fields.forEach(field -> problems.remove(field.column()));
+    }
+
     /** Whether these are still the fields that the case needs. */
     boolean fits() {
         return shape.equals(shape());

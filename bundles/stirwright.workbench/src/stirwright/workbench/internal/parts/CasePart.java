@@ -68,9 +68,9 @@ public final class CasePart {
     private void rebuild() {
         scroller.setRedraw(false);
         if (form != null) {
+            form.dropProblems();
             form.dispose();
         }
-        problems.clear();
         form = new CaseForm(scroller, looks, session, problems);
         form.addListener(SWT.Resize, this::resized);
         scroller.setContent(form);

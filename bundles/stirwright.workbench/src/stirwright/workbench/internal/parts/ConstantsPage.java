@@ -24,12 +24,15 @@ import stirwright.workbench.internal.widgets.NumberField;
 final class ConstantsPage extends CardPage {
     private final CorrelationEdits edits;
     private final Problems problems;
+    private final Runnable toFront;
     private final List<NumberField> fields = new ArrayList<>();
 
-    ConstantsPage(Composite parent, Looks looks, Session session, Problems problems) {
+    /** @param toFront turns to this page */
+    ConstantsPage(Composite parent, Looks looks, Session session, Problems problems, Runnable toFront) {
         super(parent, looks, session);
         this.edits = new CorrelationEdits(session);
         this.problems = problems;
+        this.toFront = toFront;
     }
 
     @Override
@@ -69,14 +72,28 @@ final class ConstantsPage extends CardPage {
 
     private void field(Form form, Correlation c, String name, double published) {
         Case one = theCase();
+        boolean[] typed = new boolean[1];
         CaseField field = new CaseField(c.id() + ' ' + name, Messages.bind(Messages.Constants_name, name), name, "-");
         NumberField[] made = new NumberField[1];
         made[0] = NumberField.acting(form, field, Messages.bind(Messages.Constants_nameOf, name, c.title()),
                 Messages.bind(Messages.Constants_published, TypedNumber.show(published)),
-                () -> edits.constant(one, c.id(), name, published, Double.NaN),
+                () -> {
+                    edits.publish(one, c.id(), name);
+                    made[0].reset();
+                }, published,
                 () -> OwnConstants.get(one, c.id(), name).orElse(published),
-                value -> edits.constant(one, c.id(), name, published, value),
-                () -> session.editor().endMerge(), () -> note(made[0]));
+                value -> {
+                    typed[0] = true;
+                    edits.typed(one, c.id(), name, published, value);
+                },
+                () -> {
+                    // Passing through a field changes nothing, nor does one that goes with its case.
+                    if (typed[0] && session.current().filter(one::equals).isPresent()) {
+                        edits.left(one, c.id(), name, published);
+                    }
+                    typed[0] = false;
+                    session.editor().endMerge();
+                }, () -> note(made[0]));
         fields.add(made[0]);
         made[0].control().addListener(SWT.Dispose, e -> problems.remove(field.column()));
     }
@@ -85,7 +102,12 @@ final class ConstantsPage extends CardPage {
         if (field.problem().isEmpty()) {
             problems.remove(field.column());
         } else {
-            problems.add(field.column(), () -> field.control().setFocus());
+            problems.add(field.column(), () -> {
+                toFront.run();
+                if (!field.control().isDisposed()) {
+                    field.control().setFocus();
+                }
+            });
         }
     }
 

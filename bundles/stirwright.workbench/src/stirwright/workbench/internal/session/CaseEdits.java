@@ -1,7 +1,9 @@
 package stirwright.workbench.internal.session;
 
+import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
+import java.util.Set;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import org.eclipse.emf.common.util.EList;
@@ -71,16 +73,19 @@ public final class CaseEdits {
         if (!familyId.equals(impeller.getFamily())) {
             session.editor().edit(Messages.Edit_family, () -> {
                 impeller.setFamily(familyId);
-                Parts.users(impeller).forEach(CaseEdits::settleAnew);
+                Parts.users(impeller).forEach(user -> settleAnew(user, familyId));
                 one.getCompared().remove(familyId);
             });
         }
     }
 
-    /** Neither picks nor constants of another family's correlations mean anything. */
-    private static void settleAnew(Case one) {
+    /** Picks made for another family mean nothing, nor do constants of correlations that hold for none of those shown. */
+    private void settleAnew(Case one, String familyId) {
         one.getPicks().clear();
-        one.getConstants().clear();
+        Set<String> shown = new HashSet<>(one.getCompared());
+        shown.add(familyId);
+        one.getConstants().removeIf(constant -> session.catalogue().entry(String.valueOf(constant.getCorrelation()))
+                .filter(entry -> shown.stream().noneMatch(entry.correlation()::holdsFor)).isPresent());
     }
 
     public void compare(Case one, String familyId, boolean shown) {
@@ -142,7 +147,7 @@ public final class CaseEdits {
                 one.setImpeller(impeller);
                 // Picks made for another family mean nothing for this one.
                 if (!before.equals(impeller.getFamily())) {
-                    settleAnew(one);
+                    settleAnew(one, String.valueOf(impeller.getFamily()));
                 }
             });
         }

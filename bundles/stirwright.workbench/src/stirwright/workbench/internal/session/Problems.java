@@ -25,13 +25,6 @@ public final class Problems {
         }
     }
 
-    public void clear() {
-        if (!jumps.isEmpty()) {
-            jumps.clear();
-            tell();
-        }
-    }
-
     public int count() {
         return jumps.size();
     }

@@ -121,7 +121,7 @@ public final class Form extends Composite {
     /** A field for a number with words behind it that act on it. */
     Text number(String title, String name, String act, Runnable action) {
         Text text = field(title, name);
-        looks.link(this, act, action).setLayoutData(new GridData(SWT.LEFT, SWT.CENTER, false, false));
+        Names.name(looks.link(this, act, action), act + ", " + name).setLayoutData(new GridData(SWT.LEFT, SWT.CENTER, false, false));
         return text;
     }
 

@@ -18,6 +18,8 @@ public final class NumberField {
     private final DoubleSupplier stored;
     private final DoubleConsumer store;
     private final Runnable problemChanged;
+    /** What a blank stands for. */
+    private final double blankMeans;
     private final Text text;
     private final Label remark;
     private final Looks looks;
@@ -35,13 +37,14 @@ public final class NumberField {
     public NumberField(
             Form form, String title, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
             Runnable problemChanged) {
-        this(form, form.number(title, field.unit()), field, stored, store, left, problemChanged);
+        this(form, form.number(title, field.unit()), field, Double.NaN, stored, store, left, problemChanged);
     }
 
     private NumberField(
-            Form form, Text text, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
+            Form form, Text text, CaseField field, double blankMeans, DoubleSupplier stored, DoubleConsumer store, Runnable left,
             Runnable problemChanged) {
         this.field = field;
+        this.blankMeans = blankMeans;
         this.stored = stored;
         this.store = store;
         this.problemChanged = problemChanged;
@@ -69,12 +72,13 @@ public final class NumberField {
      * A field with words behind it that act on it, in place of a unit.
      *
      * @param name for those who hear the window
+     * @param blankMeans what the study has while the field is blank
      */
     public static NumberField acting(
-            Form form, CaseField field, String name, String act, Runnable action, DoubleSupplier stored, DoubleConsumer store,
-            Runnable left, Runnable problemChanged) {
+            Form form, CaseField field, String name, String act, Runnable action, double blankMeans, DoubleSupplier stored,
+            DoubleConsumer store, Runnable left, Runnable problemChanged) {
         return new NumberField(
-                form, form.number(field.symbol(), name, act, action), field, stored, store, left, problemChanged);
+                form, form.number(field.symbol(), name, act, action), field, blankMeans, stored, store, left, problemChanged);
     }
 
     public String column() {
@@ -136,7 +140,7 @@ public final class NumberField {
     public void refresh() {
         boolean same = switch (TypedNumber.read(text.getText(), field)) {
             case TypedNumber.Value value -> Double.compare(value.value(), stored.getAsDouble()) == 0;
-            case TypedNumber.Blank blank -> Double.isNaN(stored.getAsDouble());
+            case TypedNumber.Blank blank -> Double.compare(stored.getAsDouble(), blankMeans) == 0;
             // The study is still where it was, so nothing speaks against the text.
             case TypedNumber.Problem unreadable -> Double.compare(before, stored.getAsDouble()) == 0;
         };
@@ -145,6 +149,12 @@ public final class NumberField {
             put(TypedNumber.show(stored.getAsDouble()));
             setProblem("");
         }
+    }
+
+    /** Puts what the study has in place of whatever was typed. */
+    public void reset() {
+        setProblem("");
+        settle();
     }
 
     private void put(String words) {
