@@ -28,8 +28,8 @@ final class SeveralImpellers {
                 .cite(bates())
                 .transcription(Transcription.FROM_MEMORY)
                 .atLeast(Measure.S_OVER_D, 1)
-                .remark("The full sum is recalled for S/D from 1 to 1.5 on; conflict: for two pitched-blade turbines at "
-                        + "S/D 1 less is reported, see general.np.two-pitched-blades.")
+                .remark("The full sum is recalled for S/D from 1 to 1.5 on.")
+                .remark("Conflict: for two pitched-blade turbines at S/D 1 less is reported, see general.np.two-pitched-blades.")
                 .build();
     }
 

@@ -22,7 +22,8 @@ final class FlowNumbers {
                 .cite(TABLES)
                 .oneOf(Measure.BLADE_COUNT, Hydrofoil.NARROW)
                 .value("Nq", 0.55)
-                .remark("0.55 and 0.56 are both listed. Conflict: McCabe, Smith and Harriott have 0.5.")
+                .remark("0.55 and 0.56 are both listed.")
+                .remark("Conflict: McCabe, Smith and Harriott have 0.5.")
                 .build();
     }
 

@@ -91,7 +91,8 @@ final class PowerNumbers {
                         + "printed as such. The table's own formula for the diameter gives back 1.37 at 85 % of the motor.")
                 .remark("The table ends at Re 700 with the factor 1; the point at 1000 is ours and keeps it there.")
                 .remark("Conflict: McCabe, Smith and Harriott have 1.27 for W/D 1/5.")
-                .remark("Blade width: Bates et al. (1963) have exponents from 1.0 to 1.25; conflict: Hiraoka et al. (1997) have 1.")
+                .remark("Blade width: Bates et al. (1963) have exponents from 1.0 to 1.25.")
+                .remark("Conflict: for the blade width Hiraoka et al. (1997) have the exponent 1.")
                 .build();
     }
 
@@ -128,10 +129,11 @@ final class PowerNumbers {
                 })
                 .remark("For four blades at 45 degrees it gives 1.30, between 1.27 (McCabe) and 1.37 (Dickey); Hiraoka et al. "
                         + "(1997) are 4 % above it at 45 degrees and 15 % below it at 30, at D/T 1/3 and C/D 1.")
-                .remark("Blade count: Hiraoka et al. have the exponent 0.7 too; conflict: Bates et al. (1963) have 0.8 for three "
-                        + "to six blades. Angle: conflict: Bates et al. have the sine to 2.6.")
-                .remark("D/T: conflict: a form of Kumaresan and Joshi (2006), recalled and unsure, has (T/D)^0.11, which goes "
-                        + "the other way. For the clearance no second source is at hand.")
+                .remark("Blade count: Hiraoka et al. have the exponent 0.7 too. For the clearance no second source is at hand.")
+                .remark("Conflict: for the blade count Bates et al. (1963) have the exponent 0.8, for three to six blades, and for "
+                        + "the angle the sine to 2.6.")
+                .remark("Conflict: for D/T a form of Kumaresan and Joshi (2006), recalled and unsure, has (T/D)^0.11, which goes "
+                        + "the other way.")
                 .build();
     }
 
