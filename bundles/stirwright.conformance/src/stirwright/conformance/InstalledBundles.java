@@ -9,7 +9,10 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Collections;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.osgi.framework.Bundle;
@@ -38,12 +41,24 @@ public final class InstalledBundles {
 
     /** The bundles that publish a contribution at this moment, the one installed first first. */
     static Stream<Bundle> bundles(BundleContext context) {
-        return references(context).stream().map(ServiceReference::getBundle).distinct();
+        return references(context).stream().map(ServiceReference::getBundle).filter(Objects::nonNull).distinct();
     }
 
     /** What holds up the correlations that are published at this moment. */
     public static List<Proof> proofs(BundleContext context) {
-        return subjects(context).stream().flatMap(subject -> subject.proofs().stream()).toList();
+        return bundles(context).flatMap(bundle -> proofs(context, bundle)).toList();
+    }
+
+    private static Stream<Proof> proofs(BundleContext context, Bundle bundle) {
+        try {
+            return subject(context, bundle).proofs().stream();
+        } catch (IllegalStateException | UncheckedIOException failure) {
+            if (bundle.getState() == Bundle.UNINSTALLED) {
+                // It left while it was read, so nobody asks for what it brought.
+                return Stream.empty();
+            }
+            throw failure;
+        }
     }
 
     /** What one bundle publishes, amid what the others publish. */
@@ -51,13 +66,16 @@ public final class InstalledBundles {
         List<Arrival> own = new ArrayList<>();
         List<Arrival> others = new ArrayList<>();
         for (ServiceReference<Contribution> reference : references(context)) {
-            (bundle.equals(reference.getBundle()) ? own : others).add(ask(context, reference));
+            Bundle publisher = reference.getBundle();
+            // None once the service is gone.
+            if (publisher != null) {
+                (bundle.equals(publisher) ? own : others).add(ask(context, reference, Arrival.origin(publisher)));
+            }
         }
         return Subject.of(Arrival.origin(bundle), own, referenceFiles(bundle), Catalogue.of(others));
     }
 
-    private static Arrival ask(BundleContext context, ServiceReference<Contribution> reference) {
-        String origin = Arrival.origin(reference.getBundle());
+    private static Arrival ask(BundleContext context, ServiceReference<Contribution> reference, String origin) {
         Contribution contribution = context.getService(reference);
         if (contribution == null) {
             return new Arrival(origin, List.of(), List.of(), Optional.of(NOT_CREATED));
@@ -72,8 +90,11 @@ public final class InstalledBundles {
     private static List<ServiceReference<Contribution>> references(BundleContext context) {
         try {
             Collection<ServiceReference<Contribution>> found = context.getServiceReferences(Contribution.class, null);
-            return found.stream().filter(reference -> reference.getBundle() != null)
-                    .sorted(Comparator.comparingLong(reference -> reference.getBundle().getBundleId())).toList();
+            // Kept aside, since a reference loses its bundle when the service goes.
+            Map<ServiceReference<Contribution>, Long> ids = new LinkedHashMap<>();
+            found.forEach(reference -> Optional.ofNullable(reference.getBundle())
+                    .ifPresent(bundle -> ids.put(reference, bundle.getBundleId())));
+            return ids.entrySet().stream().sorted(Map.Entry.comparingByValue()).map(Map.Entry::getKey).toList();
         } catch (InvalidSyntaxException impossible) {
             throw new IllegalStateException("no filter was given", impossible);
         }
