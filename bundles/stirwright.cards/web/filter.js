@@ -1,4 +1,4 @@
-// Shows the rows that hold every word; a list without such a row goes. Without a script all rows stay.
+// Stirwright cards: shows the rows that hold every word; a list without such a row goes. Without a script all rows stay.
 const words = document.getElementById('words');
 document.getElementById('filter').hidden = false;
 words.addEventListener('input', () => {

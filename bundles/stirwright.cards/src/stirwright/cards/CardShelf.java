@@ -1,6 +1,7 @@
 package stirwright.cards;
 
 import java.io.IOException;
+import java.nio.file.DirectoryIteratorException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -39,7 +40,8 @@ public final class CardShelf {
      */
     public synchronized Path index() throws IOException {
         Catalogue now = library.catalogue();
-        if (now != written) {
+        // Whoever tidies up temporary files may have taken the folder.
+        if (now != written || !Files.isRegularFile(index)) {
             index = Cards.write(now, proofs.get(), folder);
             written = now;
         }
@@ -54,7 +56,7 @@ public final class CardShelf {
                 Files.deleteIfExists(file);
             }
             Files.deleteIfExists(folder);
-        } catch (IOException left) {
+        } catch (IOException | DirectoryIteratorException left) {
             // A temporary folder that stays for a while harms nobody.
         }
     }

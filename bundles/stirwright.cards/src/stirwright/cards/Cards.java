@@ -3,6 +3,10 @@ package stirwright.cards;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.DirectoryIteratorException;
+import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -22,6 +26,9 @@ import stirwright.correlation.Family;
 
 /** Writes all cards into a folder. */
 public final class Cards {
+    /** The name of the index in the folder. */
+    public static final String INDEX = Page.INDEX;
+
     private static final String PAGES = "{card,family}-*.html";
 
     private Cards() {}
@@ -38,14 +45,11 @@ public final class Cards {
      * @param proofs what the correlations were checked against; one that has none says so on its card
      * @param folder is made when it is not there
      * @return the index
-     * @throws FolderInUseException when the folder has an index that is not ours; then nothing was written
+     * @throws FolderInUseException when the folder has a file that is not ours under a name to be written; then nothing was
+     *     written
      * @throws IOException when a file cannot be written
      */
     public static Path write(Catalogue catalogue, List<Proof> proofs, Path folder) throws IOException {
-        Path index = folder.resolve(Page.INDEX);
-        if (Files.exists(index) && !isOurs(index)) {
-            throw new FolderInUseException(folder, index);
-        }
         Holdings holdings = new Holdings(catalogue, proofs);
         Map<String, String> pages = new LinkedHashMap<>();
         for (Entry entry : holdings.entries()) {
@@ -57,13 +61,31 @@ public final class Cards {
         pages.put(Page.STYLE, resource(Page.STYLE));
         pages.put(Page.SCRIPT, resource(Page.SCRIPT));
         // Last, so that whoever sees the index finds what it leads to.
-        pages.put(Page.INDEX, IndexPage.of(holdings));
+        pages.put(INDEX, IndexPage.of(holdings));
+        for (String name : pages.keySet()) {
+            Path file = folder.resolve(name);
+            if (Files.exists(file) && !isOurs(file)) {
+                throw new FolderInUseException(folder, file);
+            }
+        }
         Files.createDirectories(folder);
         for (Map.Entry<String, String> page : pages.entrySet()) {
             Files.writeString(folder.resolve(page.getKey()), page.getValue());
         }
         removeOthers(folder, pages);
-        return index;
+        return folder.resolve(INDEX);
+    }
+
+    /** What hindered the writing and what to do, in words that follow a colon. */
+    public static String words(IOException hindrance) {
+        return switch (hindrance) {
+            case FolderInUseException inUse -> inUse.getMessage();
+            case AccessDeniedException denied -> "you have no permission to write " + denied.getFile() + "; name another folder";
+            case FileAlreadyExistsException taken -> taken.getFile() + " is a file and not a folder; name another folder";
+            case FileSystemException other when other.getReason() != null ->
+                    other.getFile() + " cannot be written (" + other.getReason() + "); name another folder";
+            default -> "the cards cannot be written (" + hindrance.getMessage() + "); name another folder";
+        };
     }
 
     private static void removeOthers(Path folder, Map<String, String> wanted) throws IOException {
@@ -74,6 +96,8 @@ public final class Cards {
                     others.add(page);
                 }
             });
+        } catch (DirectoryIteratorException unreadable) {
+            throw unreadable.getCause();
         }
         for (Path page : others) {
             if (isOurs(page)) {
@@ -85,7 +109,8 @@ public final class Cards {
     /** Compared as bytes, since a stranger's file may be in any encoding. */
     private static boolean isOurs(Path page) throws IOException {
         return Files.isRegularFile(page)
-                && new String(Files.readAllBytes(page), StandardCharsets.ISO_8859_1).contains(Page.MARK);
+                && new String(Files.readAllBytes(page), StandardCharsets.ISO_8859_1)
+                        .contains(page.toString().endsWith(".html") ? Page.GENERATOR : Page.MARK);
     }
 
     private static String resource(String name) throws IOException {

@@ -7,7 +7,7 @@ import java.nio.file.Path;
 public final class FolderInUseException extends IOException {
     private static final long serialVersionUID = 1;
 
-    FolderInUseException(Path folder, Path index) {
-        super(folder + " holds " + index.getFileName() + " that is not an index of cards; name another folder");
+    FolderInUseException(Path folder, Path file) {
+        super(folder + " holds a " + file.getFileName() + " that is not of our cards; name another folder");
     }
 }

@@ -5,11 +5,11 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
 import stirwright.core.Entry;
+import stirwright.correlation.Constants;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Effect;
 import stirwright.correlation.Family;
 import stirwright.correlation.Figures;
-import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 
@@ -29,8 +29,16 @@ public final class CardPage {
 
     public static String of(Holdings holdings, Entry entry) {
         Correlation card = entry.correlation();
-        return Page.of(Holdings.heading(card.title()) + ", " + card.quantity().title(), "card",
-                html -> new CardPage(holdings, card, html).write(entry.origin()));
+        String title = Holdings.heading(card.title()) + ", " + card.quantity().title();
+        try {
+            return Page.of(title, "card", html -> new CardPage(holdings, card, html).write(entry.origin()));
+        } catch (RuntimeException | LinkageError | StackOverflowError failure) {
+            // Code of a contributor in its formula or its family; one defect must not take away all other cards.
+            return Page.of(title, "card", html -> html.leaf("h1", Holdings.heading(card.title())).line()
+                    .open("p").leaf("code", card.id()).words(" ").leaf("span", "brought by " + entry.origin(), "class", "quiet").close()
+                    .leaf("p", "This card cannot be made: code of its bundle fails with " + failure
+                            + ". 'check' with the bundle's file says more.", "class", "doubt").line());
+        }
     }
 
     private void write(String origin) {
@@ -43,7 +51,7 @@ public final class CardPage {
         source();
         ProofTable.write(html, card, holdings.proof(card), plot.map(PlotData::read).orElse(Set.of()));
         remarks();
-        regimes();
+        families();
         Neighbours.write(html, holdings, card);
     }
 
@@ -75,7 +83,14 @@ public final class CardPage {
         for (String part : card.formula().split("(?<=; )")) {
             html.leaf("span", part);
         }
-        html.close().line();
+        html.close();
+        Constants constants = card.constants();
+        if (!constants.names().isEmpty()) {
+            html.leaf("p", (card.modifierFor().isPresent() ? "Constants: " : "Constants, by the names under which a case can change them: ")
+                    + String.join(", ",
+                    constants.names().stream().map(name -> name + " = " + Figures.show(constants.get(name))).toList()) + ".");
+        }
+        html.line();
     }
 
     private void range() {
@@ -131,19 +146,14 @@ public final class CardPage {
         }
     }
 
-    private void regimes() {
+    private void families() {
         List<Family> families = card.families().stream().flatMap(id -> holdings.family(id).stream()).toList();
         if (!families.isEmpty()) {
             html.leaf("h2", families.size() == 1 ? "The family" : "The families").line();
         }
         for (Family family : families) {
-            html.open("p").leaf("a", family.title(), "href", Holdings.file(family)).words(": " + family.description() + " "
-                    + limits(family.regimes())).close().line();
+            html.open("p").leaf("a", family.title(), "href", Holdings.file(family)).words(": " + family.description()).close().line();
+            RegimeWords.write(html, family.regimes());
         }
-    }
-
-    static String limits(RegimeLimits regimes) {
-        return "Laminar up to Reynolds number " + Figures.show(regimes.laminarUpTo()) + ", turbulent from "
-                + Figures.show(regimes.turbulentFrom()) + " (" + regimes.citation() + ").";
     }
 }

@@ -22,7 +22,8 @@ public final class FamilyPage {
             html.leaf("p", family.description(), "class", "lead");
             html.open("p").leaf("code", family.id()).words(" ")
                     .leaf("span", "brought by " + holdings.originOf(family), "class", "quiet").close().line();
-            html.leaf("h2", "Regimes").leaf("p", CardPage.limits(family.regimes())).line();
+            html.leaf("h2", "Regimes").line();
+            RegimeWords.write(html, family.regimes());
             html.leaf("h2", "Dimensions").leaf("p", "A blank takes the first that follows; an assumed one is flagged in results.");
             parameters(html, family);
             html.leaf("h2", "Its cards").line();

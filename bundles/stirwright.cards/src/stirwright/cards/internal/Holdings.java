@@ -1,6 +1,10 @@
 package stirwright.cards.internal;
 
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
 import java.util.Comparator;
+import java.util.HexFormat;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -18,7 +22,11 @@ import stirwright.correlation.Quantity;
 
 /** What is installed, as the pages need it: in order, with its proofs and the addresses of its pages. */
 public final class Holdings {
-    private static final Pattern ID = Pattern.compile("[a-z][a-z0-9]*(\\.[a-z0-9]+(-[a-z0-9]+)*)+");
+    private static final Pattern ID = Pattern.compile("[a-z][a-z0-9]*+(?:\\.[a-z0-9]++(?:-[a-z0-9]++)*+)++");
+
+    /** Of an id in a file's name, which with what stands around it is at most 255 bytes on common file systems. */
+    private static final int LONGEST = 120;
+    private static final int HASH = 17;
 
     private final Catalogue catalogue;
     private final Map<String, Proof> proofs = new LinkedHashMap<>();
@@ -73,11 +81,26 @@ public final class Holdings {
 
     /** Not the bare id: on Windows a file called con.something or nul.something cannot be made. */
     public static String file(Correlation correlation) {
-        return "card-" + correlation.id() + ".html";
+        return file("card-", correlation.id());
     }
 
     public static String file(Family family) {
-        return "family-" + family.id() + ".html";
+        return file("family-", family.id());
+    }
+
+    /** Long ids are cut, since no file system takes any length; the hash keeps them apart. */
+    private static String file(String kind, String id) {
+        String name = id.length() <= LONGEST ? id : id.substring(0, LONGEST - HASH) + '-' + hash(id);
+        return kind + name + ".html";
+    }
+
+    private static String hash(String id) {
+        try {
+            byte[] all = MessageDigest.getInstance("SHA-256").digest(id.getBytes(StandardCharsets.UTF_8));
+            return HexFormat.of().formatHex(all).substring(0, HASH - 1);
+        } catch (NoSuchAlgorithmException impossible) {
+            throw new IllegalStateException("every Java has SHA-256", impossible);
+        }
     }
 
     /** What a correlation gives, for instance "flow number, discharge". */

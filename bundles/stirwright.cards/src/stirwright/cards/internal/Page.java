@@ -8,8 +8,11 @@ public final class Page {
     public static final String SCRIPT = "filter.js";
     public static final String INDEX = "index.html";
 
-    /** By this line a folder's pages are known as ours. */
-    public static final String MARK = "<meta name=\"generator\" content=\"Stirwright cards\"/>";
+    /** In the first line of the style and the script; by these words they are known as ours. */
+    public static final String MARK = "Stirwright cards";
+
+    /** The same for pages. */
+    public static final String GENERATOR = "<meta name=\"generator\" content=\"" + MARK + "\"/>";
 
     private static final String CAUTION = "Stirwright estimates. Drive, mechanical and safety design is for the responsible"
             + " engineer, by the codes that apply and with the equipment maker.";
@@ -26,7 +29,7 @@ public final class Page {
         body.accept(html);
         html.close().line().leaf("footer", CAUTION).line().close();
         return "<!DOCTYPE html>\n<html xmlns=\"http://www.w3.org/1999/xhtml\" lang=\"en\">\n<head>\n<meta charset=\"utf-8\"/>\n"
-                + MARK + "\n<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n"
+                + GENERATOR + "\n<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n"
                 + new Html().leaf("title", title) + "\n" + new Html().single("link", "rel", "stylesheet", "href", STYLE)
                 + "\n</head>\n" + html + "\n</html>\n";
     }

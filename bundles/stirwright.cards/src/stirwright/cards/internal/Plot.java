@@ -33,7 +33,7 @@ final class Plot {
         PlotFrame frame = PlotFrame.of(data);
         frame.axes(html, data, yTitle);
         if (data.sweep().reynolds()) {
-            frame.regimes(html, data.base().family().regimes());
+            frame.regimes(html, data.base().family().regimes().forFluid(data.base().fluid()));
         }
         new PlotInk(html, frame).draw(data);
         html.close().line();

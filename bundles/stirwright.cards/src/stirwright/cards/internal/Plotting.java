@@ -9,7 +9,6 @@ import java.util.stream.DoubleStream;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import stirwright.conformance.Proof;
-import stirwright.core.CaseRefusedException;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
 import stirwright.correlation.Geometry;
@@ -66,12 +65,14 @@ final class Plotting {
         if (cases.isEmpty()) {
             Stream<Family> families = card.families().isEmpty() ? holdings.families().stream()
                     : card.families().stream().flatMap(id -> holdings.family(id).stream());
-            try {
-                families.flatMap(family -> PlotCase.standards(card, family)).forEach(cases::add);
-            } catch (CaseRefusedException noDefault) {
-                // A family that demands more than a diameter has no standard impeller to draw.
-                return cases.stream().findFirst();
-            }
+            families.forEach(family -> {
+                try {
+                    PlotCase.standards(card, family).forEach(cases::add);
+                } catch (RuntimeException | LinkageError none) {
+                    // One that demands more than a diameter is refused, and the defaults are code of a contributor; another
+                    // family may have a standard impeller to draw.
+                }
+            });
         }
         return cases.stream().filter(this::inside).findFirst().or(() -> cases.stream().findFirst());
     }

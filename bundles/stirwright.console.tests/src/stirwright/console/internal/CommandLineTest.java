@@ -234,4 +234,11 @@ class CommandLineTest {
         assertTrue(err.toString().contains(folder.toString()), err::toString);
         assertEquals("mine", Files.readString(index));
     }
+
+    @Test
+    void cardsThatCannotBeWrittenSayWhy() throws IOException {
+        Path file = Files.writeString(folder.resolve("afile"), "");
+        assertEquals(3, run("cards", "--out", file.toString()));
+        assertTrue(err.toString().contains("is a file and not a folder; name another folder"), err::toString);
+    }
 }

@@ -35,7 +35,7 @@ final class CardsCommand implements Callable<Integer> {
             desk.err().println(strange.getMessage());
             return ExitCode.UNUSABLE;
         } catch (IOException unwritable) {
-            throw new UnusableFileException(folder, "cannot be written: " + unwritable.getMessage(), unwritable);
+            throw new UnusableFileException(folder, Cards.words(unwritable), unwritable);
         }
         desk.out().println(catalogue.entries().size() + " correlations and " + catalogue.families().size()
                 + " families have cards; open " + index.toAbsolutePath().normalize() + " in a browser.");

@@ -10,6 +10,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -33,8 +34,10 @@ import stirwright.core.Catalogue;
 import stirwright.core.Entry;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Family;
+import stirwright.correlation.Figures;
 import stirwright.correlation.GeometryParameter;
 import stirwright.correlation.Quantity;
+import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Transcription;
 
 /** A card for everything that is installed, complete, and no link into the void. */
@@ -130,6 +133,7 @@ class CardsTest {
             c.contains().stream().filter(effect -> c.modifierFor().isEmpty()).forEach(effect -> parts.add(effect.title()));
             c.reads().forEach(variable -> parts.add(variable.title()));
             c.families().forEach(id -> catalogue.family(id).map(Family::description).ifPresent(parts::add));
+            c.constants().names().forEach(name -> parts.add(name + " = " + Figures.show(c.constants().get(name))));
             c.remarks().forEach(remark -> parts.add(remark.replaceFirst("^Conflict:\\s*\\w", "")));
             c.modifierFor().ifPresent(effect -> parts.add(c.appliesWhen()));
             proofs.stream().filter(proof -> proof.correlation().id().equals(c.id())).forEach(proof -> {
@@ -153,6 +157,33 @@ class CardsTest {
     }
 
     @Test
+    void regimesThatAreOthersForShearThinningFluidsAreTold() {
+        List<Family> apart = catalogue.families().stream().filter(family -> family.regimes().shearThinning().isPresent()).toList();
+        assertFalse(apart.isEmpty());
+        for (Family family : apart) {
+            RegimeLimits thinning = family.regimes().shearThinning().orElseThrow();
+            List<String> pages = new ArrayList<>(List.of("family-" + family.id() + ".html"));
+            catalogue.entries().stream().map(Entry::correlation).filter(c -> c.families().contains(family.id()))
+                    .forEach(c -> pages.add(Cards.file(c)));
+            for (String page : pages) {
+                String words = CardPages.words(cards.page(page));
+                assertTrue(words.contains("thin with shear") && words.contains(thinning.remark())
+                        && words.contains("laminar up to Reynolds number " + Figures.show(thinning.laminarUpTo())), () -> page + ": " + words);
+            }
+        }
+    }
+
+    @Test
+    void aConflictIsARemarkOfItsOwn() {
+        for (Entry entry : catalogue.entries()) {
+            for (String remark : entry.correlation().remarks()) {
+                assertTrue(remark.toLowerCase(Locale.ROOT).lastIndexOf("conflict:") <= 0 && !remark.startsWith("conflict"),
+                        () -> entry.correlation().id() + ": " + remark);
+            }
+        }
+    }
+
+    @Test
     void everyCardHasAPlotWithinItsFrame() {
         for (Entry entry : catalogue.entries()) {
             Document card = cards.page(Cards.file(entry.correlation()));
@@ -170,6 +201,10 @@ class CardsTest {
                 for (int i = 0; i < numbers.size(); i += 2) {
                     double x = numbers.get(i);
                     assertTrue(x >= 67.9 && x <= 624.1, () -> entry.correlation().id() + " is drawn at x " + x);
+                    double y = numbers.get(i + 1);
+                    // What lies beyond the stated range may leave the frame and is clipped there.
+                    assertTrue(y >= 25.9 && y <= 262.1 || curve.getAttribute("class").contains("beyond"),
+                            () -> entry.correlation().id() + " is drawn at y " + y);
                 }
             }
             assertFalse(CardPages.elements(card, "title").get(1).getTextContent().isBlank(), "the picture has no name");
