@@ -85,11 +85,13 @@ class CardsTest {
                 help(window);
                 Path index = shows(window, INDEX);
                 assertTrue(!Files.readString(index).contains("dropped"), "it is there before it was dropped");
+                window.run(() -> engine(cards(window).orElseThrow()).setUrl(index.toUri() + "#quantities"));
                 Path jar = DroppedJar.drop("cards.jar", DroppedJar.bytes());
                 OpenWindow.await("the question", () -> asks(window));
                 window.press("Approve");
                 OpenWindow.await("its card", () -> holds(index, "dropped"));
-                shows(window, INDEX);
+                OpenWindow.await("the new index in the shell", () -> evaluates(window, "return document.body.textContent.includes('dropped');"));
+                assertTrue(window.on(() -> engine(cards(window).orElseThrow()).getUrl()).endsWith("#quantities"), "it lost the place");
                 Files.delete(jar);
                 OpenWindow.await("its card to go", () -> !holds(index, "dropped"));
             }
@@ -155,10 +157,20 @@ class CardsTest {
 
     /** The page itself must have come; the shell has the index's title before that. */
     private static Path loaded(Shell shell) {
-        Browser browser = (Browser) Arrays.stream(shell.getChildren()).filter(Browser.class::isInstance).findFirst().orElseThrow();
+        Browser browser = engine(shell);
         String url = browser.getUrl();
         Object heading = url.startsWith("file:") ? browser.evaluate("return document.title;") : "";
         return shell.getText().equals(heading) ? Path.of(URI.create(url)) : null;
+    }
+
+    private static Browser engine(Shell shell) {
+        return (Browser) Arrays.stream(shell.getChildren()).filter(Browser.class::isInstance).findFirst().orElseThrow();
+    }
+
+    private static boolean evaluates(OpenWindow window, String script) {
+        boolean[] answer = new boolean[1];
+        window.display().syncExec(() -> answer[0] = Boolean.TRUE.equals(engine(cards(window).orElseThrow()).evaluate(script)));
+        return answer[0];
     }
 
     private static int shells(OpenWindow window) {

@@ -45,6 +45,7 @@ public final class Messages extends NLS {
     public static String Cards_failed;
     public static String Cards_name;
     public static String Cards_noBrowserAtAll;
+    public static String Cards_notOutside;
     public static String Cards_outside;
     public static String Cards_systemBrowser;
     public static String Cards_title;

@@ -1,7 +1,9 @@
 package stirwright.workbench.internal.app;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
+import java.util.function.Consumer;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.SWTError;
 import org.eclipse.swt.browser.Browser;
@@ -26,8 +28,10 @@ final class CardsBrowser {
     private final Shell shell;
     private final Browser browser;
     private final Button back;
+    private final Consumer<String> notOutside;
 
-    private CardsBrowser(Shell parent, Looks looks) {
+    private CardsBrowser(Shell parent, Looks looks, Consumer<String> notOutside) {
+        this.notOutside = notOutside;
         shell = looks.onPage(new Shell(parent, SWT.SHELL_TRIM));
         shell.setText(Messages.Cards_title);
         GridLayout layout = new GridLayout(1, false);
@@ -52,11 +56,15 @@ final class CardsBrowser {
         shell.setBounds(around.x + (around.width - WIDTH) / 2, around.y + Math.max(0, (around.height - HEIGHT) / 2), WIDTH, HEIGHT);
     }
 
-    /** Empty when this machine has no browser engine that a window can hold. */
-    static Optional<CardsBrowser> open(Shell parent, Looks looks) {
+    /**
+     * Empty when this machine has no browser engine that a window can hold.
+     *
+     * @param notOutside receives the address that the system's browser did not open
+     */
+    static Optional<CardsBrowser> open(Shell parent, Looks looks, Consumer<String> notOutside) {
         int shells = parent.getShells().length;
         try {
-            return Optional.of(new CardsBrowser(parent, looks));
+            return Optional.of(new CardsBrowser(parent, looks, notOutside));
         } catch (SWTError noEngine) {
             Shell[] left = parent.getShells();
             if (left.length > shells) {
@@ -80,8 +88,17 @@ final class CardsBrowser {
         browser.setFocus();
     }
 
+    /** Shows what was written anew, at the same place and wherever the focus is; the index where the page is gone. */
+    void reload(Path index) {
+        if (Files.exists(index.resolveSibling(page()))) {
+            browser.refresh();
+        } else {
+            browser.setUrl(index.toUri().toString());
+        }
+    }
+
     /** The name of the file that is shown. */
-    String page() {
+    private String page() {
         String address = browser.getUrl().replaceFirst("[#?].*", "");
         return address.substring(address.lastIndexOf('/') + 1);
     }
@@ -95,6 +112,8 @@ final class CardsBrowser {
     }
 
     private void openOutside() {
-        Program.launch(browser.getUrl());
+        if (!Program.launch(browser.getUrl())) {
+            notOutside.accept(browser.getUrl());
+        }
     }
 }

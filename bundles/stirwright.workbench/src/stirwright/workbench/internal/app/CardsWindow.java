@@ -9,6 +9,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CompletionException;
+import java.util.function.Consumer;
 import org.eclipse.swt.program.Program;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Shell;
@@ -28,7 +29,6 @@ import stirwright.workbench.internal.widgets.Looks;
  */
 public final class CardsWindow {
     private static final String KEY = "cards";
-    private static final String INDEX = "index.html";
     private static final String FOLDER = "stirwright-cards-";
 
     @Inject
@@ -57,7 +57,7 @@ public final class CardsWindow {
 
     /** Shows the index of all cards. */
     public void openIndex(Shell parent) {
-        open(parent, INDEX);
+        open(parent, Cards.INDEX);
     }
 
     /** Shows the card of a correlation. */
@@ -70,15 +70,29 @@ public final class CardsWindow {
             shelf = CompletableFuture.supplyAsync(this::newShelf);
         }
         Display display = parent.getDisplay();
+        written(display, index -> show(parent, index, page));
+    }
+
+    /** Writes the cards on another thread; then hands over the index. */
+    private void written(Display display, Consumer<Path> use) {
         // Handed over and not chained, so that a defect in what shows them reaches the event loop.
         shelf.thenApplyAsync(CardsWindow::index).whenComplete((index, failure) -> later(display, () -> {
             if (failure == null) {
-                show(parent, index, page);
+                notices.remove(KEY);
+                use.accept(index);
             } else {
-                Throwable cause = failure instanceof CompletionException wrapped ? wrapped.getCause() : failure;
-                notices.put(new Notice(KEY, Messages.bind(Messages.Cards_failed, cause.getMessage()), List.of()));
+                say(Messages.bind(Messages.Cards_failed, words(failure)));
             }
         }));
+    }
+
+    private static String words(Throwable failure) {
+        Throwable cause = failure instanceof CompletionException wrapped ? wrapped.getCause() : failure;
+        return cause instanceof UncheckedIOException unwritable ? Cards.words(unwritable.getCause()) : String.valueOf(cause);
+    }
+
+    private void say(String words) {
+        notices.put(new Notice(KEY, words, List.of()));
     }
 
     /** The families go on arriving while the window closes. */
@@ -107,7 +121,11 @@ public final class CardsWindow {
 
     private void refresh() {
         if (browser != null && browser.isOpen()) {
-            open(browser.parent(), browser.page());
+            written(browser.parent().getDisplay(), index -> {
+                if (browser.isOpen()) {
+                    browser.reload(index);
+                }
+            });
         }
     }
 
@@ -118,13 +136,13 @@ public final class CardsWindow {
         // The card of a correlation that has just left is not there.
         Path file = Files.exists(index.resolveSibling(page)) ? index.resolveSibling(page) : index;
         if (browser == null || !browser.isOpen()) {
-            browser = CardsBrowser.open(parent, looks).orElse(null);
+            browser = CardsBrowser.open(parent, looks, address -> say(Messages.bind(Messages.Cards_notOutside, address))).orElse(null);
         }
         if (browser != null) {
             browser.show(file);
         } else {
             String words = Program.launch(file.toUri().toString()) ? Messages.Cards_systemBrowser : Messages.Cards_noBrowserAtAll;
-            notices.put(new Notice(KEY, Messages.bind(words, file), List.of()));
+            say(Messages.bind(words, file));
         }
     }
 }

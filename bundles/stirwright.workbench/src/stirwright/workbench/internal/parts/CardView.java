@@ -9,7 +9,6 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Text;
 import stirwright.core.Choices;
@@ -43,6 +42,7 @@ final class CardView extends Composite {
     private final Composite pages;
     private final StackLayout onTop = new StackLayout();
     private final StyledText card;
+    private final ConstantsPage constants;
     private final Text reason;
     private final Button pick;
     private final Button unpick;
@@ -68,7 +68,7 @@ final class CardView extends Composite {
         looks.onPage(card);
         card.setAlwaysShowScrollBars(false);
         card.setMargins(Looks.STEP, Looks.STEP, Looks.STEP, Looks.STEP);
-        new ConstantsPage(pages, looks, session, problems, () -> {
+        constants = new ConstantsPage(pages, looks, session, problems, () -> {
             turn.setCurrent(CONSTANTS);
             turnTo(CONSTANTS);
         });
@@ -107,14 +107,12 @@ final class CardView extends Composite {
     }
 
     private void showPage() {
-        for (Control control : pages.getChildren()) {
-            if (control instanceof CardPage page) {
-                if (page == onTop.topControl) {
-                    page.show();
-                } else {
-                    page.dropStale();
-                }
-            }
+        if (onTop.topControl instanceof CardPage page) {
+            page.show();
+        }
+        if (onTop.topControl != constants) {
+            // What could not be read there must not be counted any longer than it matters.
+            constants.dropStale();
         }
     }
 

@@ -24,19 +24,22 @@ final class FactorsPage extends CardPage {
     private final CorrelationEdits edits;
     private final Map<String, Button> checks = new LinkedHashMap<>();
     private final Map<String, Label> words = new LinkedHashMap<>();
+    private List<FactorFinding> factors = List.of();
 
     FactorsPage(Composite parent, Looks looks, Session session) {
         super(parent, looks, session);
         this.edits = new CorrelationEdits(session);
     }
 
+    /** Asks for the factors once each time; what follows it uses the answer. */
     @Override
     List<Object> shape() {
-        return List.of(session.current(), factors().stream().map(f -> f.factor().id()).toList(), withoutFactor());
+        factors = find();
+        return List.of(session.current(), factors.stream().map(f -> f.factor().id()).toList(), withoutFactor());
     }
 
     /** In an order that stays when one is left out. */
-    private List<FactorFinding> factors() {
+    private List<FactorFinding> find() {
         List<FactorFinding> all = new ArrayList<>();
         row().filter(r -> r.correlation().isPresent()).ifPresent(row -> session.outcome().orElseThrow().sheets().stream()
                 .filter(s -> s.familyId().equals(row.familyId()) && s.computed()).findFirst().flatMap(s -> s.open())
@@ -48,7 +51,7 @@ final class FactorsPage extends CardPage {
     /** The effects that the case leaves out though the selected candidate has no factor for them. */
     private List<String> withoutFactor() {
         List<String> ids = new ArrayList<>(session.current().map(c -> List.copyOf(c.getLeftOut())).orElse(List.of()));
-        factors().forEach(f -> ids.remove(f.effect().id()));
+        factors.forEach(f -> ids.remove(f.effect().id()));
         return ids;
     }
 
@@ -56,7 +59,6 @@ final class FactorsPage extends CardPage {
     void build(Form form) {
         checks.clear();
         words.clear();
-        List<FactorFinding> factors = factors();
         form.sentence(factors.isEmpty() ? Messages.Factors_none : Messages.Factors_words);
         factors.forEach(f -> line(form, f.effect().id()));
         withoutFactor().forEach(id -> line(form, id));
@@ -74,7 +76,7 @@ final class FactorsPage extends CardPage {
     void refresh() {
         Optional<Case> one = session.current();
         Map<String, FactorFinding> found = new LinkedHashMap<>();
-        factors().forEach(f -> found.put(f.effect().id(), f));
+        factors.forEach(f -> found.put(f.effect().id(), f));
         checks.forEach((id, check) -> {
             FactorFinding factor = found.get(id);
             check.setSelection(one.map(c -> !c.getLeftOut().contains(id)).orElse(true));
