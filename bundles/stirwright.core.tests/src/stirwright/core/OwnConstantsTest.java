@@ -101,6 +101,16 @@ class OwnConstantsTest {
         assertEquals("invented.ks.laminar", pick.shearRateCorrelation());
     }
 
+    /** Only what the case itself made stands back; a name alone means nothing. */
+    @Test
+    void anInstalledOneOfThatNameIsRankedLikeAnyOther() {
+        Correlation near = Invented.correlation(Quantity.POWER_NUMBER, "np.near-changed").atMost(Measure.REYNOLDS, 0.2)
+                .value("a", 10).build();
+        Correlation far = Invented.correlation(Quantity.POWER_NUMBER, "np.far").atMost(Measure.REYNOLDS, 0.1).value("a", 10).build();
+        CaseResult result = new CrossCheck(Invented.catalogue(KS, near, far)).check(Invented.water(Choices.NONE));
+        assertEquals("invented.np.near-changed", result.pick().orElseThrow().correlation());
+    }
+
     @Test
     void whatIsInstalledStaysAsItIs() {
         check(Map.of("invented.np.five", Map.of("a", 4.0)));

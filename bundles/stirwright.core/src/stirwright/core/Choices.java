@@ -67,14 +67,9 @@ public record Choices(
         return correlationId + CHANGED;
     }
 
-    /** The id behind one that {@link #changed} made; empty for any other. */
+    /** The id behind one that is called as {@link #changed} calls it; empty for any other. */
     public static Optional<String> published(String id) {
-        return isChanged(id) ? Optional.of(id.substring(0, id.length() - CHANGED.length())) : Optional.empty();
-    }
-
-    /** Whether an id is called as {@link #changed} calls it. */
-    public static boolean isChanged(String correlationId) {
-        return correlationId.endsWith(CHANGED);
+        return id.endsWith(CHANGED) ? Optional.of(id.substring(0, id.length() - CHANGED.length())) : Optional.empty();
     }
 
     /** The name of the input that chooses a correlation for a quantity. */

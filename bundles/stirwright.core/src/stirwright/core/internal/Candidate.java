@@ -48,6 +48,7 @@ final class Candidate {
     private final ForeignCode foreign;
     private String distrust;
     private double givenValue = Double.NaN;
+    private boolean changedInCase;
     private int doubts = -1;
 
     /** One factor: a correlation bound to the geometry. */
@@ -105,6 +106,16 @@ final class Candidate {
                 quantity, Optional.empty(), Factors.NONE, vessel, Set.of(), new ForeignCode());
         candidate.givenValue = value;
         return candidate;
+    }
+
+    /** The same, made by the case itself from an installed correlation. */
+    Candidate changedInCase(boolean changed) {
+        changedInCase = changed;
+        return this;
+    }
+
+    boolean isChangedInCase() {
+        return changedInCase;
     }
 
     String id() {

@@ -53,7 +53,8 @@ final class Candidates {
         Modifiers modifiers = new Modifiers(catalogue.modifiers(quantity, family.id()), vessel);
         List<Candidate> candidates = new ArrayList<>();
         choices.given(quantity).ifPresent(value -> candidates.add(Candidate.given(quantity, value, vessel)));
-        correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, choices.effectsLeftOut(), vessel)));
+        correlations.forEach(c -> candidates.add(Candidate.of(c, modifiers, choices.effectsLeftOut(), vessel)
+                .changedInCase(Choices.published(c.id()).filter(choices.constants()::containsKey).isPresent())));
         return candidates;
     }
 }

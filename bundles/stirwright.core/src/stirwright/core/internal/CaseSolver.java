@@ -206,7 +206,7 @@ public final class CaseSolver {
         String obstacle = ranked.trial().assessment().obstacle();
         Optional<String> withoutValue = ranked.trial().state().isPresent() ? Optional.empty() : states.chosenWithoutValue();
         if (withoutValue.isPresent()) {
-            return new CaseRefusedException(Choices.isChanged(withoutValue.get()) ? Choices.CONSTANTS
+            return new CaseRefusedException(Choices.published(withoutValue.get()).isPresent() ? Choices.CONSTANTS
                     : Choices.field(Quantity.SHEAR_RATE_CONSTANT), withoutValue.get(), "leads to no power: " + obstacle);
         }
         if (ranked.role() != Role.CHOSEN || ranked.trial().state().isEmpty()) {

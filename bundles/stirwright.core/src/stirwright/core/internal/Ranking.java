@@ -4,7 +4,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
-import stirwright.core.Choices;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.FlowKind;
 import stirwright.correlation.Standing;
@@ -54,7 +53,7 @@ public final class Ranking {
      */
     static final Comparator<Trial> NEAREST_FIRST = Comparator.<Trial, Boolean>comparing(t -> !t.usable())
             // What the case changed stands beside the published numbers and takes the place of one only when chosen.
-            .thenComparing(t -> Choices.isChanged(t.candidate().id()))
+            .thenComparing(t -> t.candidate().isChangedInCase())
             .thenComparing(t -> isCommonPractice(t.candidate()))
             .thenComparing(t -> t.candidate().doubts() > 1)
             .thenComparing(t -> t.candidate().correlation().map(Ranking::countsCirculation).orElse(false))
