@@ -37,6 +37,7 @@ class CorrelationTest {
         assertEquals(List.of("First."), first.remarks());
         assertEquals(Set.of("a"), first.constants().names());
         assertTrue(first.formula().startsWith("Np = 3 + through"), first.formula());
+        assertEquals("Np = a + phi", first.formulaByName());
         assertEquals(5, first.bind(ANY).at(null), 1e-12);
         assertEquals(4, second.bind(ANY).at(null));
         assertEquals(2, second.validity().size());

@@ -166,6 +166,11 @@ public final class Correlation {
         return FormulaText.print(card.formula, card.constants);
     }
 
+    /** The formula with the names of constants and curves in place of their values. */
+    public String formulaByName() {
+        return FormulaText.names(card.formula);
+    }
+
     /**
      * The relation, bound to a geometry. May be called from several threads at once; what it returns
      * is for one thread at a time.

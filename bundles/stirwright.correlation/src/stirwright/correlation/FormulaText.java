@@ -22,6 +22,10 @@ final class FormulaText {
         return SLOT.matcher(template).replaceAll(slot -> Matcher.quoteReplacement(value(slot, constants)));
     }
 
+    static String names(String template) {
+        return SLOT.matcher(template).replaceAll("$1");
+    }
+
     private static String value(MatchResult slot, Constants constants) {
         String name = slot.group(1);
         return constants.curveNames().contains(name)

@@ -15,6 +15,7 @@ import java.util.Map;
 import java.util.Set;
 import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
+import stirwright.correlation.Dimensions;
 import stirwright.correlation.Family;
 import stirwright.rheology.ModelKind;
 
@@ -66,6 +67,16 @@ class CaseFieldsTest {
         List<String> both = new ArrayList<>(columns(CaseFields.vessel(family)));
         both.addAll(impeller);
         assertEquals(family.parameters().stream().map(p -> p.column()).sorted().toList(), both.stream().sorted().toList());
+    }
+
+    @Test
+    void aDimensionSaysWhatTheFamilyMeansByIt() {
+        Family family = Family.of("hanging", "hanging impeller").description("Invented.")
+                .parameter(Dimensions.CLEARANCE.withMeaning("lower edge above the bottom")).build();
+        CaseField clearance = CaseFields.impeller(family).stream().filter(f -> f.column().equals("clearance_m")).findFirst()
+                .orElseThrow();
+        assertEquals("lower edge above the bottom", clearance.meaning());
+        assertEquals("C", clearance.symbol());
     }
 
     @Test

@@ -64,7 +64,7 @@ public final class CaseFields {
     /** A dimension in the unit of its column, angles in degrees. */
     public static CaseField of(GeometryParameter parameter) {
         String unit = parameter.kind() == Kind.ANGLE ? "deg" : parameter.kind().columnUnit();
-        return new CaseField(parameter.column(), parameter.title(), parameter.symbol(), unit);
+        return new CaseField(parameter.column(), parameter.title(), parameter.symbol(), unit, parameter.meaning());
     }
 
     private static CaseField of(String column, Variable variable) {
