@@ -7,7 +7,7 @@ package stirwright.chart;
  * @param label its name on the chart
  * @param x ascending, in values of the x axis
  * @param y as many, in values of the y axis. What is not a number, not finite or not positive on a logarithmic axis is a gap
- * @param inside as many: false where the curve is shown outside the range that its source states
+ * @param inside as many: false where the curve is shown beyond what its source stands behind
  * @param style see {@link CurveStyle}
  * @param pick true for the one that the user relies on
  */

@@ -16,7 +16,7 @@ public record Reading(double x, List<At> values) {
      * @param curveId the curve's id
      * @param label its name
      * @param value in values of the y axis
-     * @param inside false where one of the two neighbours is outside the curve's stated range
+     * @param inside false where one of the two neighbours is beyond what the curve's source stands behind
      */
     public record At(String curveId, String label, double value, boolean inside) { }
 

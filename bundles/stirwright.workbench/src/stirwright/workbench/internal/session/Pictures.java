@@ -22,7 +22,7 @@ final class Pictures {
         }
         return switch (view) {
             case POWER_NUMBER, FLOW_NUMBER -> SlicePicture.overReynolds(catalogue, view, sheets, rows, stale);
-            case SHEAR_RATE_CONSTANT -> SlicePicture.overFlowIndex(view, sheets, rows, stale);
+            case SHEAR_RATE_CONSTANT -> SlicePicture.overFlowIndex(catalogue, view, sheets, rows, stale);
             case POWER, TORQUE -> SpeedPicture.of(catalogue, view, sheets, rows, stale);
         };
     }

@@ -12,7 +12,6 @@ import stirwright.chart.Mark;
 import stirwright.chart.Picture;
 import stirwright.core.Catalogue;
 import stirwright.core.FluidState;
-import stirwright.core.OpenCase;
 import stirwright.correlation.Figures;
 import stirwright.correlation.RegimeLimits;
 import stirwright.correlation.Variable;
@@ -31,13 +30,16 @@ final class SlicePicture {
     private static final double LEAST_INDEX = 0.1;
     private static final double MOST_INDEX = 1.6;
 
+    private final Catalogue catalogue;
     private final View view;
     private final Variable over;
     private final double[] x;
     private final List<Sheet> sheets;
     private final BooleanSupplier stale;
 
-    private SlicePicture(View view, Variable over, double[] x, List<Sheet> sheets, BooleanSupplier stale) {
+    private SlicePicture(
+            Catalogue catalogue, View view, Variable over, double[] x, List<Sheet> sheets, BooleanSupplier stale) {
+        this.catalogue = catalogue;
         this.view = view;
         this.over = over;
         this.x = x;
@@ -50,7 +52,8 @@ final class SlicePicture {
         double here = state(sheets.get(0)).map(FluidState::reynolds).orElse(LEAST_REYNOLDS);
         double least = Math.min(LEAST_REYNOLDS, decade(here / 2));
         double most = Math.max(MOST_REYNOLDS, 10 * decade(here * 2));
-        SlicePicture picture = new SlicePicture(view, Variable.REYNOLDS, logarithmic(least, most), sheets, stale);
+        SlicePicture picture = new SlicePicture(
+                catalogue, view, Variable.REYNOLDS, logarithmic(least, most), sheets, stale);
         List<Curve> curves = picture.curves(rows);
         boolean power = view == View.POWER_NUMBER;
         return new Picture(
@@ -60,12 +63,13 @@ final class SlicePicture {
                 mark(rows.get(0), here, "Re", power ? "Np" : "Nq"), "");
     }
 
-    static Picture overFlowIndex(View view, List<Sheet> sheets, List<Row> rows, BooleanSupplier stale) {
+    static Picture overFlowIndex(
+            Catalogue catalogue, View view, List<Sheet> sheets, List<Row> rows, BooleanSupplier stale) {
         double here = state(sheets.get(0)).map(FluidState::flowIndex).orElse(1.0);
         double most = Math.max(MOST_INDEX, Math.ceil(10 * here) / 10);
         double[] x = new double[POINTS];
         Arrays.setAll(x, i -> LEAST_INDEX + (most - LEAST_INDEX) * i / (POINTS - 1));
-        List<Curve> curves = new SlicePicture(view, Variable.FLOW_INDEX, x, sheets, stale).curves(rows);
+        List<Curve> curves = new SlicePicture(catalogue, view, Variable.FLOW_INDEX, x, sheets, stale).curves(rows);
         return new Picture(
                 new Axis(Messages.Axis_flowIndex, "", false, LEAST_INDEX, most),
                 Range.fromZero(curves).axis(Messages.Axis_shearRateConstant, Messages.Unit_perRevolution, false),
@@ -77,18 +81,19 @@ final class SlicePicture {
         for (Row row : rows) {
             Stale.check(stale);
             Sheet sheet = sheets.stream().filter(s -> s.familyId().equals(row.familyId())).findFirst().orElseThrow();
-            curves.add(curve(row, sheet.open().orElseThrow()));
+            curves.add(curve(row, sheet));
         }
         return curves;
     }
 
-    private Curve curve(Row row, OpenCase open) {
+    private Curve curve(Row row, Sheet sheet) {
         double[] y = new double[x.length];
         Verdict[] verdicts = new Verdict[x.length];
-        open.slice(view.quantity(), row.correlationId(), over).evaluate(x, y, verdicts);
+        sheet.open().orElseThrow().slice(view.quantity(), row.correlationId(), over).evaluate(x, y, verdicts);
         boolean[] inside = new boolean[x.length];
+        HomeRegime home = HomeRegime.of(catalogue, sheet, row);
         for (int i = 0; i < x.length; i++) {
-            inside[i] = !verdicts[i].fails();
+            inside[i] = !verdicts[i].fails() && (over != Variable.REYNOLDS || home.covers(x[i]));
         }
         return new Curve(row.key(), Labels.of(row, sheets.size() > 1), x, y, inside, row.style(), row.pick());
     }
@@ -105,8 +110,7 @@ final class SlicePicture {
     }
 
     private static List<Band> bands(Catalogue catalogue, Sheet main, double least, double most) {
-        RegimeLimits ofFamily = catalogue.family(main.familyId()).orElseThrow().regimes();
-        RegimeLimits limits = state(main).map(s -> ofFamily.forFluid(s.fluid())).orElse(ofFamily);
+        RegimeLimits limits = HomeRegime.limits(catalogue, main);
         return List.of(new Band(Messages.Regime_laminar, least, limits.laminarUpTo()),
                 new Band(Messages.Regime_transitional, limits.laminarUpTo(), limits.turbulentFrom()),
                 new Band(Messages.Regime_turbulent, limits.turbulentFrom(), most));

@@ -30,6 +30,7 @@ final class SpeedPicture {
 
     private static final double MINUTE = 60;
 
+    private final Catalogue catalogue;
     private final View view;
     private final double[] speeds = new double[POINTS];
     private final CrossCheck crossCheck;
@@ -39,13 +40,16 @@ final class SpeedPicture {
     private static final class Line {
         private final double[] y = new double[POINTS];
         private final boolean[] inside = new boolean[POINTS];
+        private final HomeRegime home;
 
-        Line() {
+        Line(HomeRegime home) {
+            this.home = home;
             Arrays.fill(y, Double.NaN);
         }
     }
 
     private SpeedPicture(Catalogue catalogue, View view, double most, BooleanSupplier stale) {
+        this.catalogue = catalogue;
         this.view = view;
         this.crossCheck = new CrossCheck(catalogue).withoutQuantities();
         this.stale = stale;
@@ -69,8 +73,11 @@ final class SpeedPicture {
 
     private List<Curve> curves(List<Sheet> sheets, List<Row> rows) {
         Map<String, Line> lines = new HashMap<>();
-        rows.forEach(row -> lines.put(row.key(), new Line()));
-        sheets.forEach(sheet -> sweep(sheet, lines));
+        for (Sheet sheet : sheets) {
+            rows.stream().filter(row -> row.familyId().equals(sheet.familyId()))
+                    .forEach(row -> lines.put(row.key(), new Line(HomeRegime.of(catalogue, sheet, row))));
+            sweep(sheet, lines);
+        }
         double[] x = Arrays.stream(speeds).map(s -> MINUTE * s).toArray();
         List<Curve> curves = new ArrayList<>();
         for (Row row : rows) {
@@ -88,7 +95,8 @@ final class SpeedPicture {
                     Line line = lines.get(Row.key(sheet.familyId(), result.correlation()));
                     if (line != null) {
                         line.y[i] = view == View.POWER ? result.power() : result.torque();
-                        line.inside[i] = !result.verdict().fails();
+                        line.inside[i] = !result.verdict().fails()
+                                && result.state().filter(s -> line.home.covers(s.reynolds())).isPresent();
                     }
                 }
             }
