@@ -94,7 +94,7 @@ final class CaseGroups {
         form.looks().link(head, Messages.Case_copy, () -> edits.copyImpeller(c));
         fields.text(Messages.Case_nameOfImpeller, impeller::getName, name -> edits.rename(Messages.Edit_name, impeller, name));
         List<String> ids = families.stream().map(Family::id).toList();
-        form.choice(Messages.Case_family, families.stream().map(Family::title).toList(), ids.indexOf(session.familyId()),
+        form.wideChoice(Messages.Case_family, families.stream().map(Family::title).toList(), ids.indexOf(session.familyId()),
                 i -> edits.family(c, impeller, ids.get(i)));
         family().ifPresent(f -> CaseFields.impeller(f).forEach(d -> fields.number(d, impeller.getAmounts())));
     }

@@ -15,6 +15,7 @@ import stirwright.exchange.CaseField;
 import stirwright.exchange.CaseFields;
 import stirwright.rheology.ModelKind;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.Units;
 
 /** Sentences of the core as the window says them: with the titles of its fields in place of the case table's columns. */
 public final class Words {
@@ -32,7 +33,7 @@ public final class Words {
             fields.addAll(CaseFields.impeller(family));
         }
         fields.stream().sorted(Comparator.comparing(f -> -f.column().length())).forEach(f -> titles.putIfAbsent(f.column(),
-                f.unit().equals("-") ? f.title() : f.title() + " (" + f.unit() + ")"));
+                f.unit().equals("-") ? f.title() : f.title() + " (" + Units.show(f.unit()) + ")"));
         columns = Pattern.compile("(?<![\\w.])(" + String.join("|", titles.keySet()) + ")(?![\\w.])");
     }
 

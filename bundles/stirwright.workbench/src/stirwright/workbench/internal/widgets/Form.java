@@ -11,10 +11,12 @@ import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
+import stirwright.workbench.internal.Units;
 
 /** A column of labelled fields: labels flush right, fields, units in grey. */
 public final class Form extends Composite {
-    private static final int COLUMNS = 3;
+    /** A short caption, the rest of a caption, the field, its unit. */
+    private static final int COLUMNS = 4;
     private static final int LABEL_WIDTH = 33 * Looks.STEP;
     private static final int UNIT_WIDTH = 14 * Looks.STEP;
     private static final int FIELD_WIDTH = 20 * Looks.STEP;
@@ -77,7 +79,17 @@ public final class Form extends Composite {
 
     /** A choice among words; the unit's column stays empty. */
     public Combo choice(String title, List<String> words, int current, IntConsumer chosen) {
-        caption(title);
+        caption(title, "");
+        return combo(2, FIELD_WIDTH + UNIT_WIDTH, title, words, current, chosen);
+    }
+
+    /** A choice among long words: its caption is short and leaves it the room. */
+    public Combo wideChoice(String title, List<String> words, int current, IntConsumer chosen) {
+        looks.label(this, SWT.NONE, title).setLayoutData(new GridData(SWT.LEFT, SWT.CENTER, false, false));
+        return combo(3, labelWidth, title, words, current, chosen);
+    }
+
+    private Combo combo(int columns, int width, String title, List<String> words, int current, IntConsumer chosen) {
         Combo combo = Names.name(new Combo(this, SWT.READ_ONLY | SWT.DROP_DOWN), title);
         combo.setItems(words.toArray(String[]::new));
         if (current >= 0) {
@@ -86,8 +98,8 @@ public final class Form extends Composite {
         combo.addListener(SWT.Selection, e -> chosen.accept(combo.getSelectionIndex()));
         // The wheel scrolls the form; it must not change a case in passing.
         combo.addListener(SWT.MouseVerticalWheel, e -> e.doit = false);
-        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
-        data.widthHint = FIELD_WIDTH + UNIT_WIDTH;
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, columns, 1);
+        data.widthHint = width;
         combo.setLayoutData(data);
         return combo;
     }
@@ -98,7 +110,7 @@ public final class Form extends Composite {
      * @param name for those who hear the window, where the title alone says too little
      */
     public Text text(String title, String name, String value) {
-        caption(title);
+        caption(title, "");
         Text text = looks.field(Names.name(new Text(this, SWT.BORDER), name));
         text.setText(value);
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
@@ -107,11 +119,16 @@ public final class Form extends Composite {
         return text;
     }
 
-    /** A field for a number with the unit behind it. */
-    Text number(String title, String unit) {
-        String shownUnit = unit.equals("-") ? "" : unit.replace("revolution", "rev");
-        Text text = field(title, shownUnit.isEmpty() ? title : title + ", " + shownUnit);
-        Label behind = looks.quiet(this, SWT.NONE, shownUnit);
+    /**
+     * A field for a number with the unit behind it.
+     *
+     * @param meaning shown by the caption on hovering
+     */
+    Text number(String title, String unit, String meaning) {
+        // The name that is heard keeps plain letters, which voices and keyboards know.
+        String heard = Units.brief(unit);
+        Text text = field(title, heard.isEmpty() ? title : title + ", " + heard, meaning);
+        Label behind = looks.quiet(this, SWT.NONE, Units.show(unit));
         GridData unitData = new GridData(SWT.LEFT, SWT.CENTER, false, false);
         unitData.widthHint = UNIT_WIDTH;
         behind.setLayoutData(unitData);
@@ -120,13 +137,13 @@ public final class Form extends Composite {
 
     /** A field for a number with words behind it that act on it. */
     Text number(String title, String name, String act, Runnable action) {
-        Text text = field(title, name);
+        Text text = field(title, name, "");
         Names.name(looks.link(this, act, action), act + ", " + name).setLayoutData(new GridData(SWT.LEFT, SWT.CENTER, false, false));
         return text;
     }
 
-    private Text field(String title, String name) {
-        caption(title);
+    private Text field(String title, String name, String meaning) {
+        caption(title, meaning);
         Text text = looks.field(Names.name(new Text(this, SWT.BORDER | SWT.RIGHT), name));
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
         data.widthHint = FIELD_WIDTH;
@@ -149,21 +166,23 @@ public final class Form extends Composite {
 
     /** Something to switch on and off. */
     public Button check(String words, boolean on, Consumer<Boolean> switched) {
-        Button button = looks.onPage(new Button(this, SWT.CHECK));
+        Button button = looks.onPage(new Button(this, SWT.CHECK | SWT.WRAP));
         button.setText(words);
         button.setSelection(on);
         button.addListener(SWT.Selection, e -> switched.accept(button.getSelection()));
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, COLUMNS, 1);
-        data.horizontalIndent = 6 * Looks.STEP;
+        data.horizontalIndent = labelWidth < LABEL_WIDTH ? 0 : 6 * Looks.STEP;
+        // Long words take a second line instead of room that is not there.
+        data.widthHint = labelWidth + FIELD_WIDTH;
         button.setLayoutData(data);
         return button;
     }
 
-    private void caption(String title) {
+    private void caption(String title, String meaning) {
         Label label = looks.label(this, SWT.RIGHT, title);
-        GridData data = new GridData(SWT.RIGHT, SWT.CENTER, false, false);
+        GridData data = new GridData(SWT.RIGHT, SWT.CENTER, false, false, 2, 1);
         data.widthHint = labelWidth;
         label.setLayoutData(data);
-        label.setToolTipText(title);
+        label.setToolTipText(meaning.isEmpty() ? null : meaning);
     }
 }

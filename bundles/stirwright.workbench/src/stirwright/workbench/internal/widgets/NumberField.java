@@ -37,7 +37,7 @@ public final class NumberField {
     public NumberField(
             Form form, String title, CaseField field, DoubleSupplier stored, DoubleConsumer store, Runnable left,
             Runnable problemChanged) {
-        this(form, form.number(title, field.unit()), field, Double.NaN, stored, store, left, problemChanged);
+        this(form, form.number(title, field.unit(), meaning(field)), field, Double.NaN, stored, store, left, problemChanged);
     }
 
     private NumberField(
@@ -79,6 +79,11 @@ public final class NumberField {
             DoubleConsumer store, Runnable left, Runnable problemChanged) {
         return new NumberField(
                 form, form.number(field.symbol(), name, act, action), field, blankMeans, stored, store, left, problemChanged);
+    }
+
+    /** "C: impeller centre above the bottom". */
+    private static String meaning(CaseField field) {
+        return field.symbol() + ": " + (field.meaning().isEmpty() ? field.title() : field.meaning());
     }
 
     public String column() {
