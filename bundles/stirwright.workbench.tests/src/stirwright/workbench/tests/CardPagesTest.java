@@ -83,10 +83,15 @@ class CardPagesTest {
             byte[] start = window.on(() -> StudyFiles.bytes(window.session().editor().study()));
             String name = name(window);
             String published = window.on(() -> field(window).getText());
+            String formula = row.correlation().orElseThrow().formulaByName();
+            assertTrue(formula.contains(name.split(" ")[1]), formula);
+            assertTrue(window.on(() -> window.all(Label.class, l -> l.isVisible() && l.getText().equals(formula)).size() == 1),
+                    "the constants stand there without a meaning");
+            assertEquals("<a>Full card</a>", cardLink(window));
             window.typeLetters(name, "3.5");
             Row changed = changed(window).orElseThrow();
             assertEquals(row.correlationId() + CHANGED, changed.correlationId());
-            assertTrue(changed.title().startsWith(row.title()) && !changed.title().equals(row.title()), changed.title());
+            assertEquals(name.split(" ")[1] + " = 3.5: " + row.title(), changed.title());
             assertEquals("excluded", changed.role().id());
             assertEquals(before.rows().size() + 1, window.outcome().rows().size());
             for (Row other : before.rows()) {
@@ -101,7 +106,7 @@ class CardPagesTest {
             assertEquals(published, window.on(() -> field(window).getText()));
             window.run(() -> window.session().redo());
             assertEquals("3.5", window.on(() -> field(window).getText()));
-            link(window, "published");
+            link(window, "as shipped");
             assertTrue(changed(window).isEmpty());
             assertEquals(published, window.on(() -> field(window).getText()));
             assertArrayEquals(start, window.on(() -> StudyFiles.bytes(window.session().editor().study())));
@@ -129,18 +134,23 @@ class CardPagesTest {
             window.typeLetters(name(window), "3.5");
             window.run(() -> window.session().select(changedKey(window)));
             assertEquals("3.5", window.on(() -> field(window).getText()), "the changed one shows the same constants");
+            assertEquals("<a>Full card of the published one</a>", cardLink(window));
             window.type("reason for picking the selected candidate", "measured here");
             window.press("Pick this");
             assertEquals(id + CHANGED, window.outcome().rows().get(0).correlationId());
             assertEquals("chosen", window.outcome().rows().get(0).role().id());
             agrees(window);
-            link(window, "published");
+            link(window, "as shipped");
             assertTrue(window.outcome().main().result().refusal().isEmpty());
             assertEquals(id, window.outcome().rows().get(0).correlationId(), "the pick stays, with the published constants");
             assertFalse(id.equals(recommended));
             window.run(() -> window.session().undo());
             assertEquals(id + CHANGED, window.outcome().rows().get(0).correlationId());
         });
+    }
+
+    private static String cardLink(OpenWindow window) throws Exception {
+        return window.on(() -> window.find(Link.class, "full card of the selected candidate").getText());
     }
 
     static String changedKey(OpenWindow window) {
@@ -157,10 +167,10 @@ class CardPagesTest {
             turn(window, 2);
             String id = window.outcome().rows().get(0).correlationId();
             double two = power(window, id);
-            Button check = window.on(() -> window.all(Button.class, b -> b.isVisible() && b.getText().startsWith("several impellers"))
+            Button check = window.on(() -> window.all(Button.class, b -> b.isVisible() && b.getText().endsWith("several impellers on the shaft"))
                     .get(0));
             String text = window.on(check::getText);
-            double factor = Double.parseDouble(text.substring(text.lastIndexOf(' ') + 1));
+            double factor = Double.parseDouble(text.substring("times ".length(), text.indexOf(':')));
             assertTrue(factor > 1 && factor <= 2, text);
             assertTrue(window.on(() -> window.all(Label.class, l -> l.isVisible() && l.getText().contains("range: ")
                     && l.getText().contains("source: ")).size() >= 1), "no range and source beside it");

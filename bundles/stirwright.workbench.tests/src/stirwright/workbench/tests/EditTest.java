@@ -210,8 +210,9 @@ class EditTest {
             int value = List.of(table(window).getColumns()).stream().map(c -> c.getText()).toList().indexOf("Np");
             for (TableItem item : table(window).getItems()) {
                 String title = ((Row) item.getData()).title();
-                String shown = item.getText(1).replace("\u2026", "").strip();
-                assertTrue(title.startsWith(shown), title + " is shown as " + shown);
+                String[] shown = item.getText(1).split("\u2026");
+                assertTrue(title.startsWith(shown[0]) && title.endsWith(shown[shown.length - 1]),
+                        title + " is shown as " + item.getText(1));
                 rows.add(title + " " + item.getText(value).strip().replaceAll("[\u2007\u2008]", ""));
             }
             return rows;

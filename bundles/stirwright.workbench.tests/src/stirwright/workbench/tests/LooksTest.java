@@ -32,7 +32,7 @@ import stirwright.workbench.internal.widgets.Names;
 class LooksTest {
     private static final List<String> DEMO = List.of("demo", "--window");
     private static final Path PICTURES = Path.of(System.getProperty("stirwright.pictures"));
-    private static final Point NORMAL = new Point(1280, 800);
+    static final Point NORMAL = new Point(1280, 800);
     private static final Point SMALL = new Point(1280, 720);
 
     @Test
@@ -215,7 +215,7 @@ class LooksTest {
     }
 
     /** Without a window manager the frame is guessed, so the size is set until the area within has it. */
-    private static void size(OpenWindow window, Point size) throws Exception {
+    static void size(OpenWindow window, Point size) throws Exception {
         Point[] asked = {size};
         OpenWindow.await("the size", () -> {
             boolean[] there = new boolean[1];

@@ -28,6 +28,9 @@ public final class Messages extends NLS {
     public static String Card_notes;
     public static String Card_open;
     public static String Card_openName;
+    public static String Card_openPublished;
+    public static String Card_openShipped;
+    public static String Card_openTip;
     public static String Card_page;
     public static String Card_pages;
     public static String Card_pick;
@@ -35,6 +38,7 @@ public final class Messages extends NLS {
     public static String Card_range;
     public static String Card_reason;
     public static String Card_reasonName;
+    public static String Card_reasonTip;
     public static String Card_refused;
     public static String Card_remarks;
     public static String Card_scatter;
@@ -95,9 +99,6 @@ public final class Messages extends NLS {
     public static String Constants_page;
     public static String Constants_published;
     public static String Constants_words;
-    public static String Digits_checked;
-    public static String Digits_recalled;
-    public static String Digits_recalledChecked;
     public static String Digits_unsure;
     public static String Documents_back;
     public static String Documents_drop;
@@ -132,6 +133,7 @@ public final class Messages extends NLS {
     public static String Factors_source;
     public static String Factors_words;
     public static String Grade_ruleOfTrade;
+    public static String Grade_ruleOfTradeBriefly;
     public static String Menu_redo;
     public static String Menu_undo;
     public static String Model_bingham;
@@ -153,6 +155,7 @@ public final class Messages extends NLS {
     public static String Role_nearest;
     public static String Role_recommended;
     public static String Row_changed;
+    public static String Row_constant;
     public static String Row_given;
     public static String Standing_again;
     public static String Standing_busy;
@@ -169,8 +172,10 @@ public final class Messages extends NLS {
     public static String Strip_caution;
     public static String Strip_circulation;
     public static String Strip_discharge;
+    public static String Strip_doubtReason;
     public static String Strip_flag;
     public static String Strip_flags;
+    public static String Strip_noneKnown;
     public static String Strip_perRevolution;
     public static String Strip_power;
     public static String Strip_powerPerVolume;

@@ -5,10 +5,13 @@ import java.util.Locale;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.Stream;
+import org.eclipse.swt.graphics.Color;
+import stirwright.chart.Palette;
 import stirwright.core.Role;
 import stirwright.correlation.Correlation;
 import stirwright.correlation.Figures;
 import stirwright.correlation.Measure;
+import stirwright.correlation.Transcription;
 import stirwright.correlation.Variable;
 import stirwright.correlation.Verdict;
 import stirwright.workbench.internal.Messages;
@@ -17,7 +20,7 @@ import stirwright.workbench.internal.session.View;
 
 /** The columns of the candidates, with how each is read and sorted. */
 enum CandidateColumn {
-    CANDIDATE(28, Row::title),
+    CANDIDATE(48, Row::title),
     FAMILY(18, Row::familyTitle),
     VALUE(Row::value, v -> Figures.show(v)),
     POWER(Row::power, v -> Figures.show(v)),
@@ -25,7 +28,7 @@ enum CandidateColumn {
     DEVIATION(Row::deviation, v -> String.format(Locale.ROOT, "%+.1f", 100 * v)),
     VERDICT(38, r -> verdict(r), Comparator.comparing(Row::role).thenComparing(Row::verdict)),
     SOURCE(26, r -> r.correlation().map(c -> c.citation().toString()).orElse("")),
-    GRADE(27, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
+    GRADE(22, r -> r.correlation().map(CandidateColumn::shortGrade).orElse(""));
 
     /** Where the table is narrower, the source stands in the card alone. In points. */
     private static final int ROOM_FOR_SOURCE = 720;
@@ -62,6 +65,11 @@ enum CandidateColumn {
         return number;
     }
 
+    /** Where two texts differ often at their ends only, the end is kept. */
+    boolean keepsEnd() {
+        return this == CANDIDATE;
+    }
+
     String text(Row row) {
         return text.apply(row);
     }
@@ -82,12 +90,15 @@ enum CandidateColumn {
     }
 
     /**
-     * What a cell does not show of a row: of a candidate its source and grade, else the text that was cut; null where it
-     * shows all.
+     * What a cell does not show of a row: of a candidate its source and grade, of a grade the whole, else the text that was
+     * cut; null where it shows all.
      */
     String tip(Row row, String shown) {
         if (this == CANDIDATE) {
-            return String.join("\n", Stream.of(row.title(), SOURCE.text(row), GRADE.text(row)).filter(t -> !t.isEmpty()).toList());
+            return String.join("\n", Stream.of(row.title(), SOURCE.text(row), row.correlation().map(CandidateColumn::grade).orElse("")).filter(t -> !t.isEmpty()).toList());
+        }
+        if (this == GRADE) {
+            return row.correlation().map(CandidateColumn::grade).orElse(null);
         }
         return number() || text(row).equals(shown) ? null : text(row);
     }
@@ -134,6 +145,15 @@ enum CandidateColumn {
         };
     }
 
+    static Color colour(Verdict verdict, Palette palette) {
+        return switch (verdict) {
+            case INSIDE -> palette.inside();
+            case NOT_STATED -> palette.notStated();
+            case NEAR -> palette.near();
+            case OUTSIDE -> palette.outside();
+        };
+    }
+
     /** A pick that was neither chosen nor recommended is only the nearest. */
     static String role(Row row) {
         if (row.pick() && (row.role() == Role.CANDIDATE || row.role() == Role.EXCLUDED)) {
@@ -152,14 +172,11 @@ enum CandidateColumn {
                 + correlation.transcription().words();
     }
 
-    /** The same in as few words as a column takes. */
+    /** The same in as few words as a narrow column takes: who stands behind it, unless its digits are in doubt. */
     private static String shortGrade(Correlation correlation) {
-        String digits = switch (correlation.transcription()) {
-            case CHECKED_AGAINST_SOURCE -> Messages.Digits_checked;
-            case CHECKED_NUMERICALLY -> Messages.Digits_recalledChecked;
-            case FROM_MEMORY -> Messages.Digits_recalled;
-            case UNSURE -> Messages.Digits_unsure;
-        };
-        return (correlation.citation().hasSource() ? correlation.standing().words() : Messages.Grade_ruleOfTrade) + ", " + digits;
+        if (correlation.transcription() == Transcription.UNSURE) {
+            return Messages.Digits_unsure;
+        }
+        return correlation.citation().hasSource() ? correlation.standing().words() : Messages.Grade_ruleOfTradeBriefly;
     }
 }

@@ -5,7 +5,6 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.Font;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Point;
@@ -17,7 +16,6 @@ import org.eclipse.swt.widgets.MenuItem;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
-import stirwright.correlation.Verdict;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Outcome;
 import stirwright.workbench.internal.session.Row;
@@ -45,6 +43,7 @@ final class CandidateTable extends Composite {
     private final Table table;
     private final Font strong;
     private final Shortened shortened = new Shortened();
+    private final Shortened shortenedStrong = new Shortened();
     private final Swatches swatches;
     private final List<CandidateColumn> columns = new ArrayList<>();
     private CandidateColumn sortedBy;
@@ -99,7 +98,7 @@ final class CandidateTable extends Composite {
 
     private void fill(int c, List<Row> rows) {
         List<String> texts = rows.stream().map(columns.get(c)::text).toList();
-        List<String> shown = columns.get(c).number() ? Aligned.atDecimalSign(texts) : fitted(texts, table.getColumn(c + 1));
+        List<String> shown = columns.get(c).number() ? Aligned.atDecimalSign(texts) : fitted(texts, rows, c);
         for (int r = 0; r < shown.size(); r++) {
             TableItem item = table.getItem(r);
             if (!item.getText(c + 1).equals(shown.get(r))) {
@@ -108,11 +107,16 @@ final class CandidateTable extends Composite {
         }
     }
 
-    private List<String> fitted(List<String> texts, TableColumn column) {
+    private List<String> fitted(List<String> texts, List<Row> rows, int c) {
         GC gc = new GC(table);
-        // The pick's row is bold, so every text is fitted as if it were.
-        gc.setFont(strong);
-        List<String> shown = texts.stream().map(t -> shortened.fit(gc, t, column.getWidth() - CELL_MARGIN)).toList();
+        int width = table.getColumn(c + 1).getWidth() - CELL_MARGIN;
+        List<String> shown = new ArrayList<>();
+        for (int r = 0; r < texts.size(); r++) {
+            boolean pick = rows.get(r).pick();
+            Shortened fit = pick ? shortenedStrong : shortened;
+            gc.setFont(pick ? strong : looks.small());
+            shown.add(columns.get(c).keepsEnd() ? fit.fitMiddle(gc, texts.get(r), width) : fit.fit(gc, texts.get(r), width));
+        }
         gc.dispose();
         return shown;
     }
@@ -127,15 +131,6 @@ final class CandidateTable extends Composite {
             }
         }
         table.setToolTipText(words);
-    }
-
-    private Color colour(Verdict verdict) {
-        return switch (verdict) {
-            case INSIDE -> looks.palette().inside();
-            case NOT_STATED -> looks.palette().notStated();
-            case NEAR -> looks.palette().near();
-            case OUTSIDE -> looks.palette().outside();
-        };
     }
 
     private List<Row> sorted(List<Row> rows) {
@@ -254,7 +249,7 @@ final class CandidateTable extends Composite {
             boolean selected = row.key().equals(key);
             item.setChecked(!session.hidden().contains(row.key()));
             // On the selection the system's own colour is the one that can be read.
-            item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, selected ? null : colour(row.verdict()));
+            item.setForeground(columns.indexOf(CandidateColumn.VERDICT) + 1, selected ? null : CandidateColumn.colour(row.verdict(), looks.palette()));
             if (selected && (table.getSelectionCount() == 0 || table.getSelection()[0] != item)) {
                 table.setSelection(item);
             }

@@ -7,12 +7,16 @@ import org.eclipse.swt.custom.StackLayout;
 import org.eclipse.swt.custom.StyledText;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.layout.RowData;
+import org.eclipse.swt.layout.RowLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Text;
 import stirwright.core.Choices;
 import stirwright.core.Role;
+import stirwright.correlation.Correlation;
 import stirwright.correlation.Quantity;
 import stirwright.study.Amounts;
 import stirwright.study.Case;
@@ -46,7 +50,6 @@ final class CardView extends Composite {
     private final Text reason;
     private final Button pick;
     private final Button unpick;
-    private final Composite foot;
     private final Link open;
 
     CardView(Composite parent, Looks looks, Session session, CardsWindow cards, Problems problems) {
@@ -76,23 +79,30 @@ final class CardView extends Composite {
         onTop.topControl = card;
         // Tab leaves the card as it leaves every other control.
         card.addListener(SWT.Traverse, e -> e.doit |= e.detail == SWT.TRAVERSE_TAB_NEXT || e.detail == SWT.TRAVERSE_TAB_PREVIOUS);
-        foot = looks.area(this);
-        foot.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false));
-        GridLayout footLayout = new GridLayout(2, false);
-        footLayout.marginWidth = 0;
-        footLayout.marginHeight = 0;
-        foot.setLayout(footLayout);
-        open = Names.name(looks.link(foot, Messages.Card_open, () -> Published.ofSelected(session)
-                .ifPresent(correlation -> cards.open(getShell(), correlation))), Messages.Card_openName);
-        open.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
-        reason = looks.field(Names.name(new Text(foot, SWT.BORDER), Messages.Card_reasonName));
+        reason = looks.field(Names.name(new Text(this, SWT.BORDER), Messages.Card_reasonName));
         reason.setMessage(Messages.Card_reason);
-        reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
+        reason.setToolTipText(Messages.Card_reasonTip);
+        reason.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
         reason.addListener(SWT.Modify, e -> enable());
         reason.addListener(SWT.DefaultSelection, e -> pickThis());
+        // One line, unless the words need more.
+        Composite foot = looks.area(this);
+        foot.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false));
+        RowLayout line = new RowLayout(SWT.HORIZONTAL);
+        line.center = true;
+        line.spacing = 2 * Looks.STEP;
+        line.marginLeft = 0;
+        line.marginTop = 0;
+        line.marginBottom = 0;
+        foot.setLayout(line);
         pick = looks.button(foot, Messages.Card_pick, this::pickThis);
+        pick.setLayoutData(new RowData());
         unpick = looks.button(foot, Messages.Card_unpick, this::leaveIt);
+        unpick.setLayoutData(new RowData());
         unpick.setToolTipText(Messages.Card_unpickTip);
+        open = Names.name(looks.link(foot, Messages.Card_open, () -> Published.ofSelected(session)
+                .ifPresent(correlation -> cards.open(getShell(), correlation))), Messages.Card_openName);
+        open.setToolTipText(Messages.Card_openTip);
         session.onOutcome(this::show);
         session.onSelection(this::show);
         session.onStudy(this::showPage);
@@ -139,14 +149,52 @@ final class CardView extends Composite {
     /** A reason is asked for whoever is not recommended; only candidates of the case's own family can be picked. */
     private void enable() {
         Optional<Row> row = session.selected();
-        boolean own = row.isPresent() && row.get().familyId().equals(session.familyId());
-        boolean pickable = session.fresh() && own && row.get().correlation().isPresent() && row.get().role() != Role.CHOSEN;
+        boolean pickable = row.filter(r -> r.familyId().equals(session.familyId()) && r.correlation().isPresent()
+                && r.role() != Role.CHOSEN).isPresent();
+        boolean asked = pickable && row.get().role() != Role.RECOMMENDED;
         boolean chosen = session.current().map(c -> Picks.get(c, session.view().quantity().id()).isPresent()
                 || Amounts.get(c.getAmounts(), Choices.givenField(session.view().quantity())).isPresent()).orElse(false);
-        open.setEnabled(Published.ofSelected(session).isPresent());
-        reason.setEnabled(pickable);
-        pick.setEnabled(pickable && !reason.getText().isBlank());
-        unpick.setEnabled(chosen);
+        boolean missing = asked && reason.getText().isBlank();
+        showLink();
+        reason.setEnabled(session.fresh());
+        pick.setEnabled(pickable && session.fresh() && !missing);
+        pick.setToolTipText(missing ? Messages.Card_reasonTip : null);
+        // While the numbers are on their way everything keeps its place.
+        boolean moved = shown(unpick, chosen) | shown(pick, !row.map(Row::role).equals(Optional.of(Role.CHOSEN))) | shown(reason, asked);
+        if (moved) {
+            layout(true, true);
+        }
+    }
+
+    /** What its words open: of a candidate with constants of the case's own the card of that which it was made from. */
+    private void showLink() {
+        Optional<Correlation> of = Published.ofSelected(session);
+        boolean changed = of.isPresent() && !session.selected().map(Row::correlationId).equals(of.map(Correlation::id));
+        String words = !changed ? Messages.Card_open
+                : of.get().citation().hasSource() ? Messages.Card_openPublished : Messages.Card_openShipped;
+        open.setEnabled(of.isPresent());
+        if (!open.getText().equals(Looks.act(words))) {
+            open.setText(Looks.act(words));
+            open.requestLayout();
+        }
+    }
+
+    /** Shows or hides what may take part in a layout; says whether that changed anything. */
+    private boolean shown(Control control, boolean wanted) {
+        boolean excluded = control.getLayoutData() instanceof GridData grid ? grid.exclude : ((RowData) control.getLayoutData()).exclude;
+        if (excluded != wanted) {
+            return false;
+        }
+        if (!wanted && control.isFocusControl()) {
+            card.setFocus();
+        }
+        if (control.getLayoutData() instanceof GridData grid) {
+            grid.exclude = !wanted;
+        } else {
+            ((RowData) control.getLayoutData()).exclude = !wanted;
+        }
+        control.setVisible(wanted);
+        return true;
     }
 
     private void pickThis() {

@@ -59,6 +59,9 @@ final class ConstantsPage extends CardPage {
         Optional<Correlation> published = published();
         published.ifPresent(c -> {
             form.sentence(c.constants().names().isEmpty() ? Messages.Constants_none : Messages.Constants_words);
+            if (!c.constants().names().isEmpty()) {
+                form.sentence(c.formulaByName());
+            }
             c.constants().names().forEach(name -> field(form, c, name, c.constants().get(name)));
         });
         if (published.isEmpty()) {

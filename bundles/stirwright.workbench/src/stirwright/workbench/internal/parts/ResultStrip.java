@@ -7,9 +7,12 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import stirwright.core.CandidateResult;
+import stirwright.core.Catalogue;
+import stirwright.core.Entry;
 import stirwright.core.FluidState;
 import stirwright.correlation.Figures;
 import stirwright.correlation.FlowKind;
+import stirwright.correlation.Quantity;
 import stirwright.correlation.Regime;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.Outcome;
@@ -23,12 +26,17 @@ final class ResultStrip extends Composite {
 
     private final List<FittedLabel> values = new ArrayList<>();
     private final List<FittedLabel> remarks = new ArrayList<>();
+    private final List<FittedLabel> doubts = new ArrayList<>();
     private final FittedLabel flag;
     private final Looks looks;
 
-    /** A figure and, in small words, what stands behind it. */
-    private record Item(String value, String remark) {
+    /** A figure and, in small words, what stands behind it and what speaks against it. */
+    private record Item(String value, String remark, Doubt doubt) {
         private static final Item NONE = new Item("", "");
+
+        Item(String value, String remark) {
+            this(value, remark, Doubt.NONE);
+        }
     }
 
     ResultStrip(Composite parent, Looks looks) {
@@ -48,6 +56,7 @@ final class ResultStrip extends Composite {
         captions.forEach(c -> small(1).setText(c));
         captions.forEach(c -> values.add(figure()));
         captions.forEach(c -> remarks.add(small(1)));
+        captions.forEach(c -> doubts.add(small(1)));
         FittedLabel caution = small(captions.size());
         caution.label().setForeground(looks.palette().near());
         caution.setText(Messages.Strip_caution);
@@ -77,37 +86,49 @@ final class ResultStrip extends Composite {
 
     void show(Outcome outcome) {
         Sheet sheet = outcome.main();
-        List<Item> items = sheet.result().pick().filter(p -> p.state().isPresent()).map(ResultStrip::items).orElse(List.of());
+        List<Item> items = sheet.result().pick().filter(p -> p.state().isPresent()).map(p -> items(sheet, p, outcome.catalogue())).orElse(List.of());
         for (int i = 0; i < values.size(); i++) {
             Item item = i < items.size() ? items.get(i) : Item.NONE;
-            values.get(i).setText(item.value());
-            remarks.get(i).setText(item.remark());
+            values.get(i).setText(item.value(), item.doubt().reason());
+            values.get(i).label().setForeground(item.doubt().none() ? looks.palette().text() : looks.palette().quiet());
+            remarks.get(i).setText(item.remark(), item.doubt().reason());
+            doubts.get(i).setText(item.doubt().word(), item.doubt().reason());
+            doubts.get(i).label().setForeground(item.doubt().colour(looks.palette()));
         }
+        boolean doubt = items.stream().anyMatch(item -> !item.doubt().none());
+        doubts.forEach(label -> shown(label, doubt));
         List<String> flags = outcome.words().of(sheet.result().flags());
         flag.setText(flags.isEmpty() ? "" : Messages.bind(flags.size() == 1 ? Messages.Strip_flag : Messages.Strip_flags,
                 String.join("; ", flags), flags.size()));
-        GridData data = (GridData) flag.label().getLayoutData();
-        if (data.exclude != flags.isEmpty()) {
-            data.exclude = flags.isEmpty();
-            flag.label().setVisible(!data.exclude);
-            flag.label().requestLayout();
+        shown(flag, !flags.isEmpty());
+    }
+
+    private static void shown(FittedLabel label, boolean wanted) {
+        GridData data = (GridData) label.label().getLayoutData();
+        if (data.exclude == wanted) {
+            data.exclude = !wanted;
+            label.label().setVisible(wanted);
+            label.label().requestLayout();
         }
     }
 
-    private static List<Item> items(CandidateResult pick) {
+    private static List<Item> items(Sheet sheet, CandidateResult pick, Catalogue installed) {
         FluidState state = pick.state().orElseThrow();
+        Doubt power = Doubt.of(pick, sheet.catalogue(installed).entry(pick.correlation()).map(Entry::correlation));
         return List.of(
-                new Item(shown(pick.power(), "W"), "Np " + Figures.show(pick.powerNumber())),
-                new Item(shown(pick.torque(), "N m"), ""),
-                new Item(shown(pick.powerPerVolume(), "W/m³"), ""),
+                new Item(shown(pick.power(), "W"), "Np " + Figures.show(pick.powerNumber()), power),
+                new Item(shown(pick.torque(), "N m"), "", power),
+                new Item(shown(pick.powerPerVolume(), "W/m³"), "", power),
                 new Item(shown(MINUTE * state.speed(), "rev/min"),
                         Messages.bind(Messages.Strip_tipSpeed, Figures.show(state.tipSpeed()))),
                 new Item(Figures.show(state.reynolds()), pick.regime().map(ResultStrip::regime).orElse("")),
                 new Item(shown(state.shearRate(), "1/s"),
-                        Messages.bind(Messages.Strip_perRevolution, Figures.show(state.shearRateConstant()))),
+                        Messages.bind(Messages.Strip_perRevolution, Figures.show(state.shearRateConstant())),
+                        Doubt.of(sheet.result(), Quantity.SHEAR_RATE_CONSTANT, pick.shearRateCorrelation())),
                 new Item(shown(state.viscosity(), "Pa s"), Messages.Strip_atShearRate),
-                Double.isNaN(pick.pumping()) ? Item.NONE
-                        : new Item(shown(pick.pumping(), "m³/s"), pick.flowKind().map(ResultStrip::kind).orElse("")));
+                Double.isNaN(pick.pumping()) ? new Item("", Messages.Strip_noneKnown)
+                        : new Item(shown(pick.pumping(), "m³/s"), pick.flowKind().map(ResultStrip::kind).orElse(""),
+                                Doubt.of(sheet.result(), Quantity.FLOW_NUMBER, pick.flowCorrelation())));
     }
 
     private static String shown(double value, String unit) {

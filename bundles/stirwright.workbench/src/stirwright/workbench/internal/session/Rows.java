@@ -8,10 +8,12 @@ import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 import stirwright.core.CandidateResult;
 import stirwright.core.Catalogue;
+import stirwright.core.Choices;
 import stirwright.core.Entry;
 import stirwright.core.FluidState;
 import stirwright.core.QuantityResult;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.Figures;
 import stirwright.correlation.Quantity;
 import stirwright.workbench.internal.Messages;
 
@@ -92,7 +94,14 @@ final class Rows {
 
     private String title(Sheet sheet, String id) {
         String title = correlation(sheet, id).map(Correlation::title).orElse(Messages.Row_given);
-        boolean changed = correlation(sheet, id).isPresent() && catalogue.entry(id).isEmpty();
-        return changed ? Messages.bind(Messages.Row_changed, title) : title;
+        return sheet.spec().map(spec -> spec.choices().constants()).orElse(Map.of()).entrySet().stream()
+                .filter(own -> Choices.changed(own.getKey()).equals(id)).findFirst()
+                .map(own -> Messages.bind(Messages.Row_changed, constants(own.getValue()), title)).orElse(title);
+    }
+
+    /** "k = 10", which tells it from the published one even where there is little room. */
+    private static String constants(Map<String, Double> own) {
+        return String.join(", ", own.entrySet().stream()
+                .map(c -> Messages.bind(Messages.Row_constant, c.getKey(), Figures.exact(c.getValue()))).toList());
     }
 }

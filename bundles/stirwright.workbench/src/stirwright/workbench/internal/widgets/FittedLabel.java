@@ -1,15 +1,17 @@
 package stirwright.workbench.internal.widgets;
 
+import java.util.stream.Stream;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 
-/** A label that ends in an ellipsis where its text does not fit; the whole text is its tooltip then. */
+/** A label that ends in an ellipsis where its text does not fit; the whole text is its tooltip then, before any reason. */
 public final class FittedLabel {
     private final Label label;
     private final Shortened shortened = new Shortened();
     private String text = "";
+    private String reason = "";
 
     public FittedLabel(Composite parent, Looks looks) {
         label = looks.label(parent, SWT.NONE, "");
@@ -21,8 +23,14 @@ public final class FittedLabel {
     }
 
     public void setText(String words) {
-        if (!words.equals(text)) {
+        setText(words, "");
+    }
+
+    /** @param why what stands behind the text, shown on hovering; may be empty */
+    public void setText(String words, String why) {
+        if (!words.equals(text) || !why.equals(reason)) {
             text = words;
+            reason = why;
             fit();
         }
     }
@@ -41,6 +49,7 @@ public final class FittedLabel {
         if (!label.getText().equals(literal)) {
             label.setText(literal);
         }
-        label.setToolTipText(shown.equals(text) ? null : text);
+        String tip = String.join("\n", Stream.of(shown.equals(text) ? "" : text, reason).filter(t -> !t.isEmpty()).toList());
+        label.setToolTipText(tip.isEmpty() ? null : tip);
     }
 }

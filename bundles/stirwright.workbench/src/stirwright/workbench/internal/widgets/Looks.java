@@ -96,10 +96,15 @@ public final class Looks {
     /** Words that act, in place of a button where there are many. */
     public Link link(Composite parent, String text, Runnable action) {
         Link link = onPage(new Link(parent, SWT.NONE));
-        link.setText("<a>" + text + "</a>");
+        link.setText(act(text));
         link.setLinkForeground(palette.accent());
         link.addListener(SWT.Selection, e -> action.run());
         return link;
+    }
+
+    /** Words as a link takes them. */
+    public static String act(String words) {
+        return "<a>" + words + "</a>";
     }
 
     public Button button(Composite parent, String verb, Runnable action) {
