@@ -1,6 +1,7 @@
 package stirwright.cards.internal;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -184,6 +185,8 @@ final class Plotting {
                 rings.add(new PlotData.Ring(x, row.expected(), row.fromOutside()));
             }
         }
+        // Where two lie on each other the one from outside is seen.
+        rings.sort(Comparator.comparing(PlotData.Ring::fromOutside));
         return rings;
     }
 

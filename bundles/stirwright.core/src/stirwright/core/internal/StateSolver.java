@@ -109,9 +109,12 @@ final class StateSolver {
         return solved;
     }
 
-    /** A rule of the trade is not picked where anything else has a number; they come last. */
+    /**
+     * A rule of the trade comes last and is not picked where anything published has a number. Nor does it stand in
+     * where that has none because nothing meets the target: with a power law that cannot reach it, no constant helps.
+     */
     private static boolean isIdle(Candidate constant, List<Trial> solved) {
-        return Ranking.isCommonPractice(constant) && solved.stream().anyMatch(Trial::usable);
+        return Ranking.isCommonPractice(constant) && !solved.isEmpty();
     }
 
     private Solution atSpeed(Candidate constant) {
