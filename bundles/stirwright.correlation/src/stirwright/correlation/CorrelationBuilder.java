@@ -157,6 +157,12 @@ public final class CorrelationBuilder {
         return inClass(Classifier.BAFFLING, Classifier.UNBAFFLED);
     }
 
+    /** For an impeller that sweeps the wall: it has no baffles, by its type and not by the word of a source, and a remark says so. */
+    public CorrelationBuilder noRoomForBaffles() {
+        return unbaffled().remark(
+                "No baffles: near the wall there is no room for them, so the type says it where the source does not.");
+    }
+
     /** For a source with data of Newtonian fluids that is used for others too: no bound on the fluid, and why. */
     public CorrelationBuilder newtonianData() {
         return notStated(Classifier.FLUID,

@@ -6,6 +6,9 @@ public final class Quantity extends Term {
     /** Power number P/(rho N^3 D^5), of one impeller unless the correlation contains several. */
     public static final Quantity POWER_NUMBER = of("power-number", "power number", "Np", "-");
 
+    /** A power number below which no impeller of the family can lie: no estimate, and so a quantity of its own. */
+    public static final Quantity POWER_NUMBER_FLOOR = of("power-number-floor", "least power number", "Npmin", "-");
+
     /** Flow number Q/(N D^3); whether Q is discharge or circulation is told by {@link FlowKind}. */
     public static final Quantity FLOW_NUMBER = of("flow-number", "flow number", "Nq", "-");
 

@@ -25,7 +25,7 @@ final class AnchorPower {
                 .scatter(0.25)
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, LAMINAR_UP_TO,
                         "common practice for close clearance: laminar up to 30 to 100")
-                .unbaffled()
+                .noRoomForBaffles()
                 .oneOf(Measure.BLADE_COUNT, 2)
                 .notStated(Measure.D_OVER_T, "recalled as 0.3 to 0.8 for paddles, unsure; an anchor has more")
                 .notStated(Measure.ratio(Dimensions.IMPELLER_HEIGHT, Dimensions.IMPELLER_DIAMETER), "no range is recalled")
@@ -38,7 +38,6 @@ final class AnchorPower {
                     FrictionFrame frame = new FrictionFrame(vessel, Blades.ARMS, k);
                     return point -> frame.powerNumber(point.reynolds());
                 })
-                .remark("No baffles: near the wall there is no room for them, so the type says it where the source does not.")
                 .remark("That an anchor in laminar flow takes the power of a paddle of its height is said in a review of "
                         + "these equations: H. Furukawa et al., Int. J. Chem. Eng. 2012, article 106496.")
                 .remark("At D/T 0.9 and h = D it gives Np Re 269; McCabe's table has 300 for an anchor, other tables 200 to "

@@ -64,7 +64,7 @@ public final class Main {
         try {
             return EclipseStarter.run(arguments) instanceof Integer code ? code : 0;
         } catch (Throwable failure) {
-            // As above; told before the framework ends, since that may hang.
+            // Everything is caught, for words and an exit code; told before the framework ends, since that may hang.
             return told(failure);
         }
     }

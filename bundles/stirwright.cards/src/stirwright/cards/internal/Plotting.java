@@ -203,7 +203,7 @@ final class Plotting {
         try {
             return card.validity().stream().noneMatch(bound -> bound.verdict(state, state).fails());
         } catch (RuntimeException | LinkageError failure) {
-            // As above.
+            // Code of a contributor, too: what cannot be told to hold is drawn as not stated to hold.
             return false;
         }
     }

@@ -100,8 +100,7 @@ final class PowerNumbers {
     private static CorrelationBuilder card(String id, String title, String family) {
         return Correlation.of(id, Quantity.POWER_NUMBER, title)
                 .families(family)
-                .unbaffled()
-                .remark(Sources.NO_ROOM)
+                .noRoomForBaffles()
                 .notStated(Measure.BLADE_COUNT, "recalled without it")
                 .newtonianData();
     }

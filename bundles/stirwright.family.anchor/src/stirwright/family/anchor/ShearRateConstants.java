@@ -78,8 +78,7 @@ final class ShearRateConstants {
     private static CorrelationBuilder card(String id, String title, String family) {
         return Correlation.of(id, Quantity.SHEAR_RATE_CONSTANT, title)
                 .families(family)
-                .unbaffled()
-                .remark(Sources.NO_ROOM)
+                .noRoomForBaffles()
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, Anchors.LAMINAR_UP_TO,
                         "laminar in words; the end of it is the family's limit");
     }

@@ -10,9 +10,6 @@ final class Sources {
     static final Measure GAP_OVER_D = Measure.ratio(Dimensions.WALL_GAP, Dimensions.IMPELLER_DIAMETER);
     static final Measure GAP_OVER_T = Measure.ratio(Dimensions.WALL_GAP, Dimensions.VESSEL_DIAMETER);
 
-    static final String NO_ROOM =
-            "No baffles: near the wall there is no room for them, so the type says it where the source does not.";
-
     private Sources() {}
 
     static Citation mccabe() {

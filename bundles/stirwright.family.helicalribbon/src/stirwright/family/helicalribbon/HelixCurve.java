@@ -30,7 +30,7 @@ final class HelixCurve {
                 .cite(Sources.dickey())
                 .transcription(Transcription.CHECKED_AGAINST_SOURCE)
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, 1994, "the last printed factor")
-                .unbaffled()
+                .noRoomForBaffles()
                 .notStated(Sources.GAP_OVER_D, NOT_DESCRIBED)
                 .notStated(Sources.HEIGHT_OVER_D, NOT_DESCRIBED)
                 .notStated(Sources.PITCH_RATIO, NOT_DESCRIBED)
@@ -52,7 +52,6 @@ final class HelixCurve {
                 })
                 .remark("Printed are 318, constant below Re 60, and the factors 1.8, 2.3 and 3.0; the straight lines between them "
                         + "are ours, and the longest of them, from 60 to 662, is uncertain.")
-                .remark(Sources.NO_ROOM)
                 .remark("It knows no proportions, and power goes with them: so it is held to ribbons whose laminar constant by Rieger "
                         + "et al. is within 12 % of his, as far as the forms for ribbons agree. Any other ribbon may take several "
                         + "times this power.")

@@ -20,9 +20,6 @@ final class Sources {
     static final Measure PITCH_RATIO = Measure.of(Dimensions.PITCH_RATIO);
     static final Measure RIBBON_COUNT = Measure.of(Dimensions.RIBBON_COUNT);
 
-    static final String NO_ROOM =
-            "No baffles: near the wall there is no room for them, so the type says it where the source does not.";
-
     private Sources() {}
 
     static Citation dickey() {
@@ -36,7 +33,6 @@ final class Sources {
                 .families(HelicalRibbon.ID)
                 .range(Measure.REYNOLDS, Double.NEGATIVE_INFINITY, LAMINAR_UP_TO,
                         "laminar in words; the end of it is the family's limit")
-                .unbaffled()
-                .remark(NO_ROOM);
+                .noRoomForBaffles();
     }
 }

@@ -26,7 +26,6 @@ import stirwright.correlation.Variable;
  */
 final class PowerLimits {
 
-    private static final Quantity LEAST = Quantity.of("power-number-floor", "least power number", "Npmin", "-");
     private static final Quantity MOST = Quantity.of("power-number-ceiling", "greatest power number", "Npmax", "-");
 
     private static final Measure HEIGHT = Measure.ratio(IMPELLER_HEIGHT, IMPELLER_DIAMETER);
@@ -34,7 +33,7 @@ final class PowerLimits {
     private PowerLimits() {}
 
     static Correlation least() {
-        return limit("helicalscrew.npmin.shaft-alone", LEAST, "the shaft alone", "ds", SHAFT_DIAMETER)
+        return limit("helicalscrew.npmin.shaft-alone", Quantity.POWER_NUMBER_FLOOR, "the shaft alone", "ds", SHAFT_DIAMETER)
                 .notStated(Measure.ratio(SHAFT_DIAMETER, IMPELLER_DIAMETER), "exact for every shaft")
                 .notStated(HelicalScrew.SURROUNDINGS, "with the vessel's wall in place of the tube's for a free screw")
                 .remark("Without the ends, whose drag would add to it, so it stays a floor.")

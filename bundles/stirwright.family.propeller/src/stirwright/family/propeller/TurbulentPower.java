@@ -4,6 +4,7 @@ import stirwright.correlation.ChartCurve;
 import stirwright.correlation.Citation;
 import stirwright.correlation.Classifier;
 import stirwright.correlation.Correlation;
+import stirwright.correlation.CorrelationBuilder;
 import stirwright.correlation.Measure;
 import stirwright.correlation.Quantity;
 import stirwright.correlation.Transcription;
@@ -15,17 +16,10 @@ final class TurbulentPower {
     private TurbulentPower() {}
 
     static Correlation square() {
-        return Correlation.of("propeller.np.mccabe-turbulent-pitch-1", Quantity.POWER_NUMBER,
-                        "McCabe, Smith and Harriott, square pitch, turbulent")
-                .families(Propeller.ID)
+        return row("pitch-1", "square pitch", 1)
                 .cite(Sources.mccabe("chapter 9, table of K_L and K_T"))
                 .transcription(Transcription.FROM_MEMORY)
-                .atLeast(Measure.REYNOLDS, 1e4)
-                .baffled(4, 0.1)
-                .oneOf(Measure.BLADE_COUNT, 3)
-                .nominal(Propeller.PITCH, 1)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .newtonianData()
                 .value("KT", 0.32)
                 .remark("Conflict: Doran has 0.35. Rushton et al. (1950) print 0.26 at Re 1e5 with baffles of T/12, "
                         + "though 0.32 is usually put down to them.")
@@ -74,35 +68,33 @@ final class TurbulentPower {
     }
 
     static Correlation oneAndAHalf() {
-        return Correlation.of("propeller.np.mccabe-turbulent-pitch-1-5", Quantity.POWER_NUMBER,
-                        "McCabe, Smith and Harriott, pitch 1.5, turbulent")
-                .families(Propeller.ID)
+        return row("pitch-1-5", "pitch 1.5", 1.5)
                 .cite(Sources.mccabeSomeEdition())
                 .transcription(Transcription.FROM_MEMORY)
-                .atLeast(Measure.REYNOLDS, 1e4)
-                .baffled(4, 0.1)
-                .oneOf(Measure.BLADE_COUNT, 3)
-                .nominal(Propeller.PITCH, 1.5)
                 .notStated(Measure.D_OVER_T, "recalled without a range")
-                .newtonianData()
                 .value("KT", 0.87)
                 .remark("The Handbook of Industrial Mixing is recalled, unsure, to have 0.9.")
                 .build();
     }
 
     static Correlation two() {
-        return Correlation.of("propeller.np.mccabe-turbulent-pitch-2", Quantity.POWER_NUMBER,
-                        "McCabe, Smith and Harriott, pitch 2, turbulent")
-                .families(Propeller.ID)
+        return row("pitch-2", "pitch 2", 2)
                 .cite(Sources.mccabeSomeEdition())
                 .transcription(Transcription.FROM_MEMORY)
+                .notStated(Measure.D_OVER_T, "recalled without a range")
+                .value("KT", 1)
+                .build();
+    }
+
+    /** What the rows of the table share. */
+    private static CorrelationBuilder row(String id, String title, double pitch) {
+        return Correlation.of("propeller.np.mccabe-turbulent-" + id, Quantity.POWER_NUMBER,
+                        "McCabe, Smith and Harriott, " + title + ", turbulent")
+                .families(Propeller.ID)
                 .atLeast(Measure.REYNOLDS, 1e4)
                 .baffled(4, 0.1)
                 .oneOf(Measure.BLADE_COUNT, 3)
-                .nominal(Propeller.PITCH, 2)
-                .notStated(Measure.D_OVER_T, "recalled without a range")
-                .newtonianData()
-                .value("KT", 1)
-                .build();
+                .nominal(Propeller.PITCH, pitch)
+                .newtonianData();
     }
 }

@@ -19,9 +19,6 @@ public final class ToothedDisc implements Contribution {
 
     private static final String ID = "tootheddisc";
 
-    /** A floor is no estimate, so it is a quantity of its own; the helical screw has one too. */
-    private static final Quantity LEAST = Quantity.of("power-number-floor", "least power number", "Npmin", "-");
-
     @Override
     public List<Family> families() {
         return List.of(Family.of(ID, "toothed high-speed disc")
@@ -38,7 +35,7 @@ public final class ToothedDisc implements Contribution {
     }
 
     private static Correlation thinDisc() {
-        return Correlation.of("tootheddisc.npmin.thin-disc", LEAST, "smooth thin disc, laminar lower limit")
+        return Correlation.of("tootheddisc.npmin.thin-disc", Quantity.POWER_NUMBER_FLOOR, "smooth thin disc, laminar lower limit")
                 .families(ID)
                 .cite(Citation.withoutLocator("torque 32/3 mu a^3 omega on a thin disc of radius a that spins in its plane in "
                         + "unbounded liquid without inertia: G. B. Jeffery, Proc. London Math. Soc. 14 (1915)"))
