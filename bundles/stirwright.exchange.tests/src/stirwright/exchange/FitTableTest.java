@@ -21,7 +21,7 @@ class FitTableTest {
     private static final double[] RATES = {0.1, 0.5, 1, 5, 10, 50, 100};
 
     private static CurveFits fits(FluidModel model) {
-        return CurveFits.of(new MeasuredCurve("invented", FlowCurve.of(RATES, Arrays.stream(RATES).map(model::stress).toArray())));
+        return CurveFits.of(MeasuredCurve.of("invented", FlowCurve.of(RATES, Arrays.stream(RATES).map(model::stress).toArray())));
     }
 
     private static List<NamedCsvRecord> records(CurveFits fits) {
@@ -68,7 +68,7 @@ class FitTableTest {
 
     @Test
     void aModelThatDoesNotDescribeTheCurve() {
-        CurveFits fits = CurveFits.of(new MeasuredCurve("falling", FlowCurve.of(new double[] {1, 10, 100}, new double[] {9, 5, 2})));
+        CurveFits fits = CurveFits.of(MeasuredCurve.of("falling", FlowCurve.of(new double[] {1, 10, 100}, new double[] {9, 5, 2})));
         assertEquals(Status.REFUSED, fits.status());
         List<NamedCsvRecord> rows = records(fits);
         assertEquals(2, rows.size());
@@ -81,7 +81,7 @@ class FitTableTest {
 
     @Test
     void tooFewRatesForOneOfThem() {
-        CurveFits fits = CurveFits.of(new MeasuredCurve("two rates", FlowCurve.of(new double[] {1, 1, 10}, new double[] {2, 2, 9})));
+        CurveFits fits = CurveFits.of(MeasuredCurve.of("two rates", FlowCurve.of(new double[] {1, 1, 10}, new double[] {2, 2, 9})));
         assertEquals(Status.FLAGGED, fits.status());
         assertEquals(ModelKind.POWER_LAW, fits.attempts().get(0).model());
     }

@@ -31,7 +31,7 @@ public final class FlowCurveFile {
         CurveReader reader = CurveReader.read(text);
         int dot = text.name().lastIndexOf('.');
         String label = dot > 0 ? text.name().substring(0, dot) : text.name();
-        return new FlowCurveFile(text.name(), List.of(new MeasuredCurve(label, reader.curve())), reader.messages());
+        return new FlowCurveFile(text.name(), List.of(MeasuredCurve.of(label, reader.curve())), reader.messages());
     }
 
     /** Without the folder. */

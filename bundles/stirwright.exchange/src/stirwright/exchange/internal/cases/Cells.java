@@ -3,7 +3,7 @@ package stirwright.exchange.internal.cases;
 import java.util.List;
 import stirwright.core.CaseRefusedException;
 import stirwright.core.Refusal;
-import stirwright.exchange.internal.table.DecimalSign;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.internal.table.Header;
 import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.Row;

@@ -3,7 +3,7 @@ package stirwright.exchange.internal.cases;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import stirwright.core.CaseRefusedException;
-import stirwright.exchange.internal.table.DecimalSign;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.Texts;
 

@@ -9,7 +9,7 @@ import stirwright.core.CaseRefusedException;
 import stirwright.core.CaseSpec;
 import stirwright.core.Catalogue;
 import stirwright.correlation.Figures;
-import stirwright.exchange.internal.table.DecimalSign;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.internal.table.Header;
 import stirwright.exchange.internal.table.Row;
 import stirwright.exchange.internal.table.Texts;

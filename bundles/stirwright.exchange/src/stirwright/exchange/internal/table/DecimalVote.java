@@ -1,6 +1,7 @@
 package stirwright.exchange.internal.table;
 
 import java.util.Optional;
+import stirwright.exchange.DecimalSign;
 
 /** Finds a file's decimal sign: the one that more of its numbers show. Never guesses between equals. */
 final class DecimalVote {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Predicate;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.UnusableFileException;
 
 /**

@@ -1,5 +1,7 @@
 package stirwright.exchange.internal.table;
 
+import stirwright.exchange.DecimalSign;
+
 /**
  * Numbers as plain decimals: digits, at most one decimal sign, at most one power of ten. Nothing
  * else that a programming language may take for a number (hexadecimal, "1d", "NaN", "Infinity").

@@ -29,10 +29,7 @@ public record TextFile(String name, Path path, String text) {
 
     /** @throws UnusableFileException when it cannot be read or is not text in UTF-8 */
     public static TextFile read(Path path) {
-        if (Files.isDirectory(path)) {
-            throw new UnusableFileException(path, "is a folder; a CSV file is expected");
-        }
-        byte[] bytes = bytes(path);
+        byte[] bytes = bytes(path, "a CSV file");
         FileSignature.foreign(bytes).ifPresent(kind -> {
             throw new UnusableFileException(path, "is " + kind + ", not text in UTF-8" + SAVE_AS);
         });
@@ -40,7 +37,16 @@ public record TextFile(String name, Path path, String text) {
         return new TextFile(path.getFileName().toString(), path, text.startsWith("\uFEFF") ? text.substring(1) : text);
     }
 
-    private static byte[] bytes(Path path) {
+    /**
+     * The bytes of a file of any kind.
+     *
+     * @param expected with an article, for the message when it is a folder
+     * @throws UnusableFileException when it cannot be read, is empty or is larger than {@link #MOST_BYTES}
+     */
+    public static byte[] bytes(Path path, String expected) {
+        if (Files.isDirectory(path)) {
+            throw new UnusableFileException(path, "is a folder; " + expected + " is expected");
+        }
         try (InputStream in = Files.newInputStream(path)) {
             byte[] bytes = in.readNBytes(MOST_BYTES + 1);
             if (bytes.length > MOST_BYTES) {

@@ -5,7 +5,7 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import stirwright.exchange.CaseField;
 import stirwright.exchange.TypedNumber;
-import stirwright.exchange.internal.table.DecimalSign;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.Texts;
 

@@ -1,4 +1,4 @@
-package stirwright.exchange.internal.table;
+package stirwright.exchange;
 
 /** The sign between the whole and the fractional digits of a number. */
 public enum DecimalSign {
@@ -21,7 +21,8 @@ public enum DecimalSign {
         return words;
     }
 
-    DecimalSign other() {
+    /** The one that is not this. */
+    public DecimalSign other() {
         return this == POINT ? COMMA : POINT;
     }
 }
