@@ -21,7 +21,7 @@ class ParameterLimitsTest {
 	private static final String POSITIVE = "must be a finite number greater than 0";
 	private static final String NOT_NEGATIVE = "must be a finite number, 0 or greater";
 	private static final String INDEX = "must be greater than 0 and at most 2";
-	private static final String THINNING_INDEX = "must be greater than 0 and at most 1 for a model with two plateaus";
+	private static final String THINNING_INDEX = "must be greater than 0 and at most 1 for a model with a plateau";
 
 	@ParameterizedTest(name = "{0} = {1}")
 	@MethodSource

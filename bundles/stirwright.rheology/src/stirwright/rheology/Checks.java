@@ -39,8 +39,13 @@ final class Checks {
 					"must be from 0 to the zero-shear viscosity, which is " + zeroShear);
 		}
 		notNegative("time_constant", timeConstant);
-		require(flowIndex > 0 && flowIndex <= 1, "flow_index", flowIndex,
-				"must be greater than 0 and at most 1 for a model with two plateaus");
+		thinningIndex(flowIndex);
+	}
+
+	/** The flow index of a model that ends in a plateau. */
+	static void thinningIndex(double value) {
+		require(value > 0 && value <= 1, "flow_index", value,
+				"must be greater than 0 and at most 1 for a model with a plateau");
 	}
 
 	private static void require(boolean holds, String parameter, double value, String allowed) {

@@ -2,18 +2,19 @@ package stirwright.rheology;
 
 import java.util.Arrays;
 
-import org.apache.commons.math3.stat.regression.SimpleRegression;
-
-import stirwright.rheology.internal.LinearPart;
-import stirwright.rheology.internal.Solution;
-import stirwright.rheology.internal.YieldPowerLawFit;
+import stirwright.rheology.internal.Huber;
+import stirwright.rheology.internal.Points;
+import stirwright.rheology.internal.Quantiles;
+import stirwright.rheology.internal.Scale;
+import stirwright.rheology.internal.Search;
 
 /**
  * Least-squares fits of fluid models to a measured flow curve.
  *
- * <p>Every fit throws {@link ParameterException} when the best parameters lie outside the model's limits, for example a
- * flow index below 0 for stresses that fall as the shear rate rises: the model does not describe such a curve, and a
- * parameter moved to its limit would hide that. The yield stress alone is held at 0 or above.
+ * <p>A yield stress and a plateau at high rates are held at 0 or above, and a model with a plateau keeps its flow index
+ * above 0. The other parameters are free: where the best ones lie outside the model's limits, for example a flow index
+ * below 0 for stresses that fall as the shear rate rises, the model does not describe the curve, and a parameter moved to
+ * its limit would hide that.
  */
 public final class Fits {
 
@@ -21,58 +22,69 @@ public final class Fits {
 	}
 
 	/**
-	 * The straight line through ln(stress) against ln(rate): the way most published power-law parameters were found.
+	 * Fits one model. Its sum of squares never exceeds that of a model that it contains: Herschel and Bulkley's and Sisko's
+	 * never that of the power law.
 	 *
-	 * <p>It minimises the sum of squares of ln(fitted / measured). Where the curve fits well, that is close to
-	 * {@link Objective#RELATIVE}, which the result's residual is therefore given in; {@link #powerLaw} may find a
-	 * smaller one.
-	 *
-	 * @throws IllegalArgumentException if all points have the same shear rate
-	 * @throws ParameterException       if the best flow index is out of its limits
+	 * @throws IllegalArgumentException if the curve has fewer different shear rates than the model has parameters
+	 * @throws ParameterException       if the best parameters are out of the model's limits
 	 */
-	public static Fit powerLawLogLog(FlowCurve curve) {
-		requireDifferentRates(curve, 2);
-		SimpleRegression line = new SimpleRegression();
-		for (int i = 0; i < curve.size(); i++) {
-			line.addData(Math.log(curve.shearRate(i)), Math.log(curve.stress(i)));
+	public static ModelFit one(ModelKind kind, FlowCurve curve, FitOptions options) {
+		requireDifferentRates(kind, curve);
+		Points points = points(curve, options.objective());
+		return one(kind, curve, options, options.robust() ? points.with(robust(kind, points, options).factors()) : points,
+				new Quantiles());
+	}
+
+	static ModelFit one(ModelKind kind, FlowCurve curve, FitOptions options, Points points, Quantiles quantiles) {
+		requireDifferentRates(kind, curve);
+		Search search = search(kind, points, options);
+		Search.Place best = search.best();
+		if (kind == ModelKind.HERSCHEL_BULKLEY || kind == ModelKind.SISKO) {
+			best = notWorse(search, best, search(ModelKind.POWER_LAW, points, options).best());
 		}
-		FluidModel model = new PowerLaw(Math.exp(line.getIntercept()), line.getSlope());
-		return Fit.of(model, curve, Objective.RELATIVE);
+		return Inference.of(kind, curve, options, points, search, best, quantiles);
 	}
 
 	/**
-	 * The power law with the smallest residual.
+	 * The best values of the other parameters when one is held.
 	 *
-	 * @throws IllegalArgumentException if all points have the same shear rate
-	 * @throws ParameterException       if the best flow index is out of its limits
+	 * @param values to start from, in the parameters' order and units
+	 * @param held   which one
+	 * @param at     its value
 	 */
-	public static Fit powerLaw(FlowCurve curve, Objective objective) {
-		requireDifferentRates(curve, 2);
-		Solution best = YieldPowerLawFit.withoutYield(linearPart(curve, objective));
-		return Fit.of(new PowerLaw(best.consistency(), best.flowIndex()), curve, objective);
+	static double[] with(ModelKind kind, FlowCurve curve, FitOptions options, double[] values, int held, double at) {
+		Scale[] scales = Shapes.of(kind).scales();
+		double[] start = new double[values.length];
+		Arrays.setAll(start, j -> scales[j].coordinate(j == held ? at : values[j]));
+		Points points = points(curve, options.objective());
+		double[] best = search(kind, options.robust() ? points.with(robust(kind, points, options).factors()) : points, options)
+				.from(start, held).at();
+		Arrays.setAll(best, j -> scales[j].parameter(best[j]));
+		return best;
 	}
 
-	/**
-	 * The Herschel-Bulkley model with the smallest residual. Its residual never exceeds that of {@link #powerLaw} under
-	 * the same objective; a yield stress of exactly 0 means that the power law fits best.
-	 *
-	 * @throws IllegalArgumentException if the points have fewer than three different shear rates
-	 * @throws ParameterException       if the best flow index is out of its limits, or the consistency is 0 because all
-	 *                                  stresses are equal
-	 */
-	public static Fit herschelBulkley(FlowCurve curve, Objective objective) {
-		requireDifferentRates(curve, 3);
-		Solution best = YieldPowerLawFit.withYield(linearPart(curve, objective));
-		FluidModel model = new HerschelBulkley(best.yieldStress(), best.consistency(), best.flowIndex());
-		return Fit.of(model, curve, objective);
+	/** The power law is what both models become when their first parameter is 0. */
+	private static Search.Place notWorse(Search search, Search.Place best, Search.Place powerLaw) {
+		double[] at = { 0, powerLaw.at()[0], powerLaw.at()[1] };
+		double sum = search.evaluate(at).sum();
+		return best != null && best.sum() < sum ? best : new Search.Place(at, new boolean[] { true, false, false }, sum);
 	}
 
-	private static LinearPart linearPart(FlowCurve curve, Objective objective) {
+	static Huber robust(ModelKind kind, Points points, FitOptions options) {
+		return Huber.of(Shapes.of(kind), points, Shapes.measure(options.objective()));
+	}
+
+	static Points points(FlowCurve curve, Objective objective) {
 		double[] stresses = curve.stresses();
-		return new LinearPart(curve.shearRates(), stresses, Arrays.stream(stresses).map(objective::weight).toArray());
+		return Points.of(curve.shearRates(), stresses, Arrays.stream(stresses).map(y -> objective.slope(y, y)).toArray());
 	}
 
-	private static void requireDifferentRates(FlowCurve curve, int needed) {
+	private static Search search(ModelKind kind, Points points, FitOptions options) {
+		return new Search(Shapes.of(kind), points, Shapes.measure(options.objective()));
+	}
+
+	static void requireDifferentRates(ModelKind kind, FlowCurve curve) {
+		int needed = kind.parameters().size();
 		int found = curve.differentShearRates();
 		if (found < needed) {
 			throw new IllegalArgumentException(

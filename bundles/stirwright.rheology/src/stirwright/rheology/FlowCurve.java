@@ -2,6 +2,7 @@ package stirwright.rheology;
 
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.List;
 import java.util.stream.DoubleStream;
 import java.util.stream.IntStream;
 
@@ -39,12 +40,34 @@ public final class FlowCurve {
 			check(i, "shear rate", shearRates[i], "1/s");
 			check(i, "stress", stresses[i], "Pa");
 		}
+		if (ascending(shearRates)) {
+			return new FlowCurve(shearRates.clone(), stresses.clone());
+		}
 		int[] order = IntStream.range(0, shearRates.length).boxed()
 				.sorted(Comparator.comparingDouble(i -> shearRates[i]))
 				.mapToInt(Integer::intValue).toArray();
 		return new FlowCurve(
 				Arrays.stream(order).mapToDouble(i -> shearRates[i]).toArray(),
 				Arrays.stream(order).mapToDouble(i -> stresses[i]).toArray());
+	}
+
+	/**
+	 * The points of several curves as one, for instance of replicates.
+	 *
+	 * @throws IllegalArgumentException when there is no curve
+	 */
+	public static FlowCurve pooled(List<FlowCurve> curves) {
+		return of(curves.stream().flatMapToDouble(c -> Arrays.stream(c.shearRates)).toArray(),
+				curves.stream().flatMapToDouble(c -> Arrays.stream(c.stresses)).toArray());
+	}
+
+	private static boolean ascending(double[] values) {
+		for (int i = 1; i < values.length; i++) {
+			if (values[i] < values[i - 1]) {
+				return false;
+			}
+		}
+		return true;
 	}
 
 	private static void check(int index, String what, double value, String unit) {

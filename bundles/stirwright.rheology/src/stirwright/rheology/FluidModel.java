@@ -6,7 +6,8 @@ package stirwright.rheology;
  * <p>All methods take a shear rate in 1/s and throw {@link IllegalArgumentException}, naming the value, when it is not
  * a finite number greater than 0. None of them allocates.
  */
-public sealed interface FluidModel permits Newtonian, PowerLaw, Bingham, HerschelBulkley, Casson, Cross, Carreau {
+public sealed interface FluidModel permits Newtonian, PowerLaw, Bingham, HerschelBulkley, Casson, Sisko, Cross,
+		Carreau {
 
 	/** The model's name in files, for example {@code power-law}; see {@link ModelKind}. */
 	default String id() {

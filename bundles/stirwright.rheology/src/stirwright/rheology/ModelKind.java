@@ -24,6 +24,7 @@ public enum ModelKind {
 	HERSCHEL_BULKLEY("herschel-bulkley", v -> new HerschelBulkley(v[0], v[1], v[2]),
 			YIELD_STRESS, CONSISTENCY, FLOW_INDEX),
 	CASSON("casson", v -> new Casson(v[0], v[1]), YIELD_STRESS, PLASTIC_VISCOSITY),
+	SISKO("sisko", v -> new Sisko(v[0], v[1], v[2]), INFINITE_SHEAR_VISCOSITY, CONSISTENCY, FLOW_INDEX),
 	CROSS("cross", v -> new Cross(v[0], v[1], v[2], v[3]),
 			ZERO_SHEAR_VISCOSITY, INFINITE_SHEAR_VISCOSITY, TIME_CONSTANT, FLOW_INDEX),
 	CARREAU("carreau", v -> new Carreau(v[0], v[1], v[2], v[3]),
@@ -78,6 +79,7 @@ public enum ModelKind {
 			case Bingham m -> BINGHAM;
 			case HerschelBulkley m -> HERSCHEL_BULKLEY;
 			case Casson m -> CASSON;
+			case Sisko m -> SISKO;
 			case Cross m -> CROSS;
 			case Carreau m -> CARREAU;
 		};
@@ -91,6 +93,7 @@ public enum ModelKind {
 			case Bingham(double ty, double mup) -> new double[] { ty, mup };
 			case HerschelBulkley(double ty, double k, double n) -> new double[] { ty, k, n };
 			case Casson(double ty, double mup) -> new double[] { ty, mup };
+			case Sisko(double mi, double k, double n) -> new double[] { mi, k, n };
 			case Cross(double m0, double mi, double t, double n) -> new double[] { m0, mi, t, n };
 			case Carreau(double m0, double mi, double t, double n) -> new double[] { m0, mi, t, n };
 		};

@@ -9,22 +9,30 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import stirwright.core.Status;
 import stirwright.exchange.CurveFits;
-import stirwright.exchange.FlowCurveFile;
+import stirwright.exchange.CurveImport;
+import stirwright.exchange.CurveSource;
+import stirwright.exchange.ImportChoice;
+import stirwright.exchange.MeasuredCurve;
 import stirwright.exchange.Origin;
 import stirwright.exchange.Output;
 import stirwright.exchange.Outputs;
+import stirwright.rheology.FitOptions;
+import stirwright.rheology.Objective;
 
 @Command(name = "fit",
-        description = "Fits a power law and a Herschel-Bulkley fluid to flow curves (columns shear rate and stress),"
-                + " by least squares of the relative error.")
+        description = "Fits every fluid model to flow curves by least squares of the relative error, ranks them and prints"
+                + " their parameters with 95 % intervals.")
 final class FitCommand implements Callable<Integer> {
     private final Desk desk;
 
-    @Parameters(paramLabel = "FILE", arity = "1..*", description = "a table of shear rate in 1/s and shear stress in Pa")
+    @Parameters(paramLabel = "FILE", arity = "1..*", description = "a text or workbook with one flow curve or many")
     private List<Path> files = new ArrayList<>();
 
     @Option(names = "--out", paramLabel = "FILE", description = "also write the fit table; .csv or .json; may be repeated")
     private List<Path> outputs = new ArrayList<>();
+
+    @Option(names = "--robust", description = "let points far off count less")
+    private boolean robust;
 
     FitCommand(Desk desk) {
         this.desk = desk;
@@ -32,12 +40,20 @@ final class FitCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        List<CurveFits> fits = new ArrayList<>();
+        List<MeasuredCurve> curves = new ArrayList<>();
         for (Path file : files) {
-            FlowCurveFile read = FlowCurveFile.read(file);
-            read.messages().forEach(desk.err()::println);
-            read.curves().forEach(curve -> fits.add(CurveFits.of(curve)));
+            CurveImport read = CurveImport.of(CurveSource.file(file), ImportChoice.DETECT);
+            read.report().forEach(desk.err()::println);
+            curves.addAll(read.requireCurves());
         }
+        FitOptions options = new FitOptions(Objective.RELATIVE, robust);
+        Progress progress = new Progress(desk.err(), "curves", curves.size());
+        List<CurveFits> fits = new ArrayList<>();
+        for (MeasuredCurve curve : curves) {
+            fits.add(CurveFits.of(curve, options));
+            progress.reached(fits.size());
+        }
+        progress.done();
         Outputs written = new Outputs(new Origin(desk.version(), ""), files);
         for (Path file : outputs) {
             try (Output<CurveFits> output = written.fits(file)) {

@@ -139,6 +139,7 @@ public final class Messages extends NLS {
     public static String Model_bingham;
     public static String Model_carreau;
     public static String Model_casson;
+    public static String Model_sisko;
     public static String Model_cross;
     public static String Model_herschelBulkley;
     public static String Model_newtonian;

@@ -128,6 +128,7 @@ final class CaseGroups {
             case BINGHAM -> Messages.Model_bingham;
             case HERSCHEL_BULKLEY -> Messages.Model_herschelBulkley;
             case CASSON -> Messages.Model_casson;
+            case SISKO -> Messages.Model_sisko;
             case CROSS -> Messages.Model_cross;
             case CARREAU -> Messages.Model_carreau;
         };

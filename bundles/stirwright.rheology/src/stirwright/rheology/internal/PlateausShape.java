@@ -1,0 +1,107 @@
+package stirwright.rheology.internal;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * Models with a plateau of the viscosity at each end: viscosity = infinite + (zero - infinite) * thinning(time constant *
+ * rate, n). Coordinates: logarithm of zero, infinite, logarithm of the time constant, n.
+ */
+public abstract class PlateausShape implements Shape {
+
+	private static final int ZERO = 0;
+	private static final int INFINITE = 1;
+	private static final int TIME = 2;
+	private static final int INDEX = 3;
+
+	/** Of the logarithm of the time constant; beyond it no plateau is ever seen. */
+	private static final double FARTHEST = 60;
+
+	private static final double[] INDICES = { 0.001, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 0.97 };
+
+	/** Natural logarithms: how far below the lowest rate, and above the highest, a bend is looked for; and in what steps. */
+	private static final double BELOW = 12;
+	private static final double ABOVE = 4;
+	private static final double STEP = 0.8;
+
+	private static final int VALLEYS = 3;
+
+	private record Place(double time, double n, TwoTerms terms) {
+	}
+
+	@Override
+	public final Scale[] scales() {
+		return new Scale[] { Scale.LOG, Scale.PLAIN, Scale.LOG, Scale.PLAIN };
+	}
+
+	@Override
+	public final double lower(int coordinate) {
+		return switch (coordinate) {
+			case INFINITE -> 0;
+			case TIME -> -FARTHEST;
+			case INDEX -> LeastIndex.VALUE;
+			default -> Double.NEGATIVE_INFINITY;
+		};
+	}
+
+	@Override
+	public final double upper(int coordinate) {
+		return switch (coordinate) {
+			case TIME -> FARTHEST;
+			case INDEX -> 1;
+			default -> Double.POSITIVE_INFINITY;
+		};
+	}
+
+	/**
+	 * What is left of the difference of the plateaus, from 1 to 0.
+	 *
+	 * @param log      natural logarithm of time constant * rate
+	 * @param gradient its elements {@code TIME} and {@code INDEX} are set to the derivatives
+	 */
+	abstract double thinning(double log, double n, double[] gradient);
+
+	@Override
+	public final double stress(double rate, double logRate, double[] at, double[] gradient) {
+		double zero = Math.exp(at[ZERO]);
+		double left = thinning(at[TIME] + logRate, at[INDEX], gradient);
+		double range = rate * (zero - at[INFINITE]);
+		gradient[ZERO] = rate * zero * left;
+		gradient[INFINITE] = rate * (1 - left);
+		gradient[TIME] *= range;
+		gradient[INDEX] *= range;
+		return rate * at[INFINITE] + range * left;
+	}
+
+	@Override
+	public final List<double[]> starts(Points points) {
+		List<Place> places = new ArrayList<>();
+		double from = -points.logRates()[points.size() - 1] - ABOVE;
+		double to = -points.logRates()[0] + BELOW;
+		double[] left = new double[points.size()];
+		double[] unused = new double[INDEX + 1];
+		for (double n : INDICES) {
+			for (double time = from; time <= to; time += STEP) {
+				for (int i = 0; i < left.length; i++) {
+					left[i] = points.rates()[i] * thinning(time + points.logRates()[i], n, unused);
+				}
+				places.add(new Place(time, n, TwoTerms.of(points, points.rates(), left)));
+			}
+		}
+		places.removeIf(p -> !(p.terms().second() > 0));
+		places.sort(Comparator.comparingDouble(p -> p.terms().residual()));
+		List<Place> chosen = new ArrayList<>();
+		for (Place place : places) {
+			if (chosen.size() < VALLEYS && chosen.stream().noneMatch(c -> near(c, place))) {
+				chosen.add(place);
+			}
+		}
+		return chosen.stream().map(p -> new double[] {
+				Math.log(p.terms().first() + p.terms().second()), p.terms().first(), p.time(), p.n() }).toList();
+	}
+
+	private static boolean near(Place one, Place other) {
+		return Math.abs(one.time() - other.time()) < 3 * STEP && Math.abs(one.n() - other.n()) < 0.25;
+	}
+}

@@ -1,0 +1,183 @@
+package stirwright.rheology.internal;
+
+import java.util.stream.IntStream;
+
+/**
+ * Bounded least squares of one model's stress against measured points. A coordinate that wants out of its bounds is held
+ * there, and let go again when the sum falls inwards.
+ */
+public final class Search {
+
+	/** More points than this are thinned for the scan and the first descent; the last descent is along all of them. */
+	private static final int MANY = 300;
+
+	private final Shape shape;
+	private final Points points;
+	private final Measure measure;
+	private final int size;
+
+	/**
+	 * Where the sum is least.
+	 *
+	 * @param at   coordinates
+	 * @param held which of them are held at a bound
+	 * @param sum  of the squared deviations
+	 */
+	public record Place(double[] at, boolean[] held, double sum) {
+	}
+
+	/** Nothing is searched yet. */
+	public Search(Shape shape, Points points, Measure measure) {
+		this.shape = shape;
+		this.points = points;
+		this.measure = measure;
+		this.size = shape.scales().length;
+	}
+
+	/** From every start of the shape; null where it has none. */
+	public Place best() {
+		if (points.size() > MANY) {
+			Place rough = new Search(shape, points.thinned(MANY), measure).best();
+			return rough == null ? null : toTheLastDigit(from(rough.at(), -1));
+		}
+		Place best = null;
+		for (double[] start : shape.starts(points)) {
+			Place here = from(start, -1);
+			best = best == null || here.sum() < best.sum() ? here : best;
+		}
+		return best == null ? null : toTheLastDigit(best);
+	}
+
+	/** From a start within the bounds, with one coordinate fixed, or -1 for none. */
+	public Place from(double[] start, int fixed) {
+		double[] at = start.clone();
+		boolean[] held = new boolean[size];
+		boolean[] released = new boolean[size];
+		Place best = null;
+		for (int round = 0; round < 2 * size + 1; round++) {
+			double[] next = LeastSquares.roughly(free(at, held, fixed), pick(at, held, fixed)).at();
+			double[] there = spread(next, at, held, fixed);
+			if (clamp(there, at, held, fixed)) {
+				continue;
+			}
+			at = there;
+			LeastSquares.Minimum here = evaluate(at);
+			if (best == null || here.sum() < best.sum()) {
+				best = new Place(at.clone(), held.clone(), here.sum());
+			}
+			if (!release(here, at, held, released)) {
+				break;
+			}
+		}
+		return best == null ? new Place(at, held, evaluate(at).sum()) : best;
+	}
+
+	private Place toTheLastDigit(Place place) {
+		double[] last = LeastSquares.toTheLastDigit(
+				free(place.at(), place.held(), -1), pick(place.at(), place.held(), -1)).at();
+		double[] at = spread(last, place.at(), place.held(), -1);
+		return IntStream.range(0, size).allMatch(j -> inside(j, at[j]))
+				? new Place(at, place.held(), evaluate(at).sum()) : place;
+	}
+
+	/** Moves what left its bounds back onto them, in the place that was started from; whether there was any. */
+	private boolean clamp(double[] there, double[] at, boolean[] held, int fixed) {
+		boolean any = false;
+		for (int j = 0; j < size; j++) {
+			if (j != fixed && !inside(j, there[j])) {
+				at[j] = there[j] < shape.lower(j) ? shape.lower(j) : shape.upper(j);
+				held[j] = true;
+				any = true;
+			}
+		}
+		return any;
+	}
+
+	private boolean inside(int j, double coordinate) {
+		return coordinate >= shape.lower(j) && coordinate <= shape.upper(j);
+	}
+
+	private boolean release(LeastSquares.Minimum here, double[] at, boolean[] held, boolean[] released) {
+		boolean any = false;
+		for (int j = 0; j < size; j++) {
+			if (held[j] && !released[j]) {
+				double downhill = 0;
+				for (int i = 0; i < here.deviations().length; i++) {
+					downhill -= here.deviations()[i] * here.jacobian()[i][j];
+				}
+				if (at[j] == shape.lower(j) ? downhill > 0 : downhill < 0) {
+					held[j] = false;
+					released[j] = true;
+					any = true;
+				}
+			}
+		}
+		return any;
+	}
+
+	/** Deviations and their derivatives with respect to every coordinate, held ones included. */
+	public LeastSquares.Minimum evaluate(double[] at) {
+		double[] deviations = new double[points.size()];
+		double[][] jacobian = new double[deviations.length][size];
+		boolean[] none = new boolean[size];
+		free(at, none, -1).evaluate(at, deviations, jacobian);
+		double sum = 0;
+		for (double deviation : deviations) {
+			sum += deviation * deviation;
+		}
+		return new LeastSquares.Minimum(at, sum, jacobian, deviations);
+	}
+
+	private LeastSquares.Deviations free(double[] at, boolean[] held, int fixed) {
+		int[] columns = IntStream.range(0, size).filter(j -> !held[j] && j != fixed).toArray();
+		double[] whole = at.clone();
+		double[] gradient = new double[size];
+		double[] measured = points.stresses();
+		return new LeastSquares.Deviations() {
+			@Override
+			public int size() {
+				return measured.length;
+			}
+
+			@Override
+			public void evaluate(double[] free, double[] deviations, double[][] jacobian) {
+				for (int k = 0; k < columns.length; k++) {
+					whole[columns[k]] = free[k];
+				}
+				for (int i = 0; i < measured.length; i++) {
+					double stress = shape.stress(points.rates()[i], points.logRates()[i], whole, gradient);
+					deviations[i] = points.factors()[i] * measure.deviation(stress, measured[i]);
+					double slope = points.factors()[i] * measure.slope(stress, measured[i]);
+					for (int k = 0; k < columns.length; k++) {
+						jacobian[i][k] = slope * gradient[columns[k]];
+					}
+				}
+			}
+		};
+	}
+
+	private double[] pick(double[] at, boolean[] held, int fixed) {
+		return IntStream.range(0, size).filter(j -> !held[j] && j != fixed).mapToDouble(j -> at[j]).toArray();
+	}
+
+	private double[] spread(double[] free, double[] at, boolean[] held, int fixed) {
+		double[] whole = at.clone();
+		int k = 0;
+		for (int j = 0; j < size; j++) {
+			if (!held[j] && j != fixed) {
+				whole[j] = free[k++];
+			}
+		}
+		return whole;
+	}
+
+	/** The least value of a coordinate. */
+	double lower(int j) {
+		return shape.lower(j);
+	}
+
+	/** The greatest value of a coordinate. */
+	double upper(int j) {
+		return shape.upper(j);
+	}
+}
