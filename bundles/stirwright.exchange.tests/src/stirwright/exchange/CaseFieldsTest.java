@@ -91,6 +91,15 @@ class CaseFieldsTest {
                 CaseFields.model(ModelKind.CROSS));
     }
 
+    @Test
+    void onlyAModelWithAYieldStressHasFieldsForItsBounds() {
+        for (ModelKind kind : ModelKind.values()) {
+            boolean yields = columns(CaseFields.model(kind)).contains("yield_stress_Pa");
+            assertEquals(yields ? List.of("yield_stress_low_Pa", "yield_stress_high_Pa") : List.of(),
+                    columns(CaseFields.yieldBounds(kind)), kind::id);
+        }
+    }
+
     /** A family may mean something of its own by it, but calls it as every other does. */
     @Test
     void eachColumnIsOneField() {

@@ -20,6 +20,7 @@ import stirwright.rheology.HerschelBulkley;
 import stirwright.rheology.MeasuredWindow;
 import stirwright.rheology.Newtonian;
 import stirwright.rheology.PowerLaw;
+import stirwright.rheology.YieldBounds;
 
 /** Every model of the contract with its parameters, and what is refused. */
 class FluidCellsTest {
@@ -111,5 +112,40 @@ class FluidCellsTest {
         assertRefused(Sheet.good().with("shear_rate_max_1_s", "-1").entry(folder), "shear_rate_max_1_s", "-1", "greater");
         assertRefused(Sheet.good().with("shear_rate_min_1_s", "100").with("shear_rate_max_1_s", "10").entry(folder),
                 "shear_rate_max_1_s", "10", "100");
+    }
+
+    private static Sheet yielding(String low, String high) {
+        return fluid("herschel-bulkley").with("consistency_Pa_sn", "2").with("flow_index", "0.5")
+                .with("yield_stress_Pa", "7").with("yield_stress_low_Pa", low).with("yield_stress_high_Pa", high);
+    }
+
+    @Test
+    void boundsOfTheYieldStress() {
+        assertEquals(new YieldBounds(5, 9), bounds(yielding("5", "9")));
+        assertEquals(new YieldBounds(7, 7), bounds(yielding("7", "7")));
+        assertEquals(new YieldBounds(0, Double.NaN), bounds(yielding("0", "")));
+        assertEquals(new YieldBounds(Double.NaN, 9), bounds(yielding("", "9")));
+        assertEquals(YieldBounds.UNKNOWN, bounds(yielding("", "")));
+    }
+
+    private YieldBounds bounds(Sheet sheet) {
+        return sheet.entry(folder).spec().orElseThrow().fluid().yieldBounds();
+    }
+
+    @Test
+    void boundsHoldTheYieldStress() {
+        assertRefused(yielding("7.5", "9").entry(folder), "yield_stress_low_Pa", "7.5", "must not be above the yield stress", "7");
+        assertRefused(yielding("5", "6.5").entry(folder), "yield_stress_high_Pa", "6.5", "must not be below the yield stress", "7");
+        assertRefused(yielding("9", "8").entry(folder), "yield_stress_high_Pa", "8", "below", "9");
+        assertRefused(yielding("-1", "").entry(folder), "yield_stress_low_Pa", "-1", "0 or greater");
+        assertRefused(yielding("much", "").entry(folder), "yield_stress_low_Pa", "much");
+    }
+
+    @Test
+    void boundsBesideAModelWithoutYieldStressAreRefused() {
+        assertRefused(Sheet.good().with("yield_stress_low_Pa", "1").entry(folder), "yield_stress_low_Pa", "1",
+                "newtonian has no yield stress");
+        assertRefused(fluid("power-law").with("consistency_Pa_sn", "2").with("flow_index", "0.5")
+                .with("yield_stress_high_Pa", "9").entry(folder), "yield_stress_high_Pa", "9", "power-law has no yield stress");
     }
 }

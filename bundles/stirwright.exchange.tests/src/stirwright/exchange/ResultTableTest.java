@@ -18,6 +18,7 @@ import stirwright.core.FluidState;
 import stirwright.core.Refusal;
 import stirwright.core.Role;
 import stirwright.core.Status;
+import stirwright.core.YieldEffect;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Verdict;
 
@@ -27,7 +28,8 @@ class ResultTableTest {
     private static final String CONTRACT = "case,family,correlation,role,verdict,failed_bounds,regime,speed_rev_s,"
             + "shear_rate_correlation,shear_rate_constant,shear_rate_1_s,apparent_viscosity_Pa_s,reynolds,power_number,"
             + "power_W,torque_N_m,power_per_volume_W_m3,flow_number_correlation,flow_kind,flow_number,pumping_m3_s,"
-            + "tip_speed_m_s,power_based_shear_rate_1_s,deviation_from_pick,spread,status,notes";
+            + "tip_speed_m_s,power_based_shear_rate_1_s,yield_stress_low_Pa,yield_stress_high_Pa,power_yield_low_W,"
+            + "power_yield_high_W,deviation_from_pick,spread,status,notes";
 
     @TempDir
     Path folder;
@@ -78,6 +80,22 @@ class ResultTableTest {
         near(Math.PI, pick, "tip_speed_m_s");
         near(0, pick, "deviation_from_pick");
         near(1, pick, "spread");
+    }
+
+    /** Np is 5 at every Reynolds number, so that the power stays whatever the yield stress. */
+    @Test
+    void boundsOfTheYieldStressAreCarriedOn() {
+        CaseResult result = Sheet.good().without("viscosity_Pa_s").with("model", "herschel-bulkley")
+                .with("consistency_Pa_sn", "2").with("flow_index", "0.5").with("yield_stress_Pa", "7")
+                .with("yield_stress_low_Pa", "5").with("yield_stress_high_Pa", "11.5").entry(folder).check(Invented.CROSS_CHECK);
+        List<NamedCsvRecord> rows = records(result);
+        assertTrue(rows.size() > 1);
+        rows.forEach(row -> near(5, row, "yield_stress_low_Pa"));
+        rows.forEach(row -> near(11.5, row, "yield_stress_high_Pa"));
+        near(Double.parseDouble(rows.get(0).getField("power_W")), rows.get(0), "power_yield_low_W");
+        near(Double.parseDouble(rows.get(0).getField("power_W")), rows.get(0), "power_yield_high_W");
+        assertEquals("", rows.get(1).getField("power_yield_low_W"));
+        assertEquals("", records(computed()).get(0).getField("yield_stress_low_Pa"));
     }
 
     private static void near(double expected, NamedCsvRecord row, String column) {
@@ -144,7 +162,7 @@ class ResultTableTest {
 
     private static CandidateResult candidate(String id, Optional<FluidState> state, double powerNumber, double power) {
         return new CandidateResult(id, Role.EXCLUDED, Verdict.NEAR, List.of("bound 1", "bound 2"), "why " + id,
-                Optional.empty(), state, "ks", powerNumber, power, 1, 1, 1, "", Optional.empty(), Double.NaN, Double.NaN, 0,
+                Optional.empty(), state, "ks", powerNumber, power, 1, 1, 1, YieldEffect.NONE, "", Optional.empty(), Double.NaN, Double.NaN, 0,
                 List.of("own " + id));
     }
 }

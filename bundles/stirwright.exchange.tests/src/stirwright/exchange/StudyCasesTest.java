@@ -16,6 +16,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import stirwright.core.CaseResult;
 import stirwright.core.CaseSpec;
+import stirwright.rheology.YieldBounds;
 import stirwright.study.Amounts;
 import stirwright.study.Case;
 import stirwright.study.Parts;
@@ -77,6 +78,18 @@ class StudyCasesTest {
         CaseResult result = invented.entry().check(Invented.CROSS_CHECK);
         assertEquals("impeller_diameter_m", result.refusal().orElseThrow().field());
         assertEquals("1.6", result.refusal().orElseThrow().value());
+    }
+
+    @Test
+    void aFluidsAmountsMayBoundItsYieldStress() {
+        invented.fluid.setModel("bingham");
+        Amounts.set(invented.fluid.getAmounts(), "yield_stress_Pa", 20);
+        Amounts.set(invented.fluid.getAmounts(), "plastic_viscosity_Pa_s", 1);
+        Amounts.set(invented.fluid.getAmounts(), "yield_stress_low_Pa", 12);
+        Amounts.set(invented.fluid.getAmounts(), "yield_stress_high_Pa", 31);
+        assertEquals(new YieldBounds(12, 31), spec().fluid().yieldBounds());
+        Amounts.set(invented.fluid.getAmounts(), "yield_stress_low_Pa", 25);
+        assertRefused(invented.entry(), "yield_stress_low_Pa", "25", "must not be above the yield stress");
     }
 
     @Test

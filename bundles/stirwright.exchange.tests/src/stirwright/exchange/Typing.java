@@ -20,6 +20,7 @@ final class Typing {
                     FAMILIES.stream().flatMap(f -> CaseFields.impeller(f).stream()),
                     Arrays.stream(ModelKind.values()).flatMap(k -> CaseFields.model(k).stream()),
                     CaseFields.SPEEDS.stream(), CaseFields.GIVEN.stream(), CaseFields.MEASURED_WINDOW.stream(),
+                    CaseFields.YIELD_BOUNDS.stream(),
                     Stream.of(CaseFields.DENSITY))
             .flatMap(s -> s).distinct().toList();
 

@@ -29,6 +29,10 @@ public final class CaseFields {
             new CaseField(CaseColumns.SHEAR_RATE_MIN, "least shear rate measured", "g min", "1/s");
     public static final CaseField SHEAR_RATE_MAX =
             new CaseField(CaseColumns.SHEAR_RATE_MAX, "greatest shear rate measured", "g max", "1/s");
+    public static final CaseField YIELD_STRESS_LOW =
+            new CaseField(CaseColumns.YIELD_STRESS_LOW, "least yield stress", "ty min", "Pa");
+    public static final CaseField YIELD_STRESS_HIGH =
+            new CaseField(CaseColumns.YIELD_STRESS_HIGH, "greatest yield stress", "ty max", "Pa");
 
     /** What settles the speed; a case gives exactly one. */
     public static final List<CaseField> SPEEDS =
@@ -39,6 +43,9 @@ public final class CaseFields {
 
     /** The shear rates between which the fluid was measured. */
     public static final List<CaseField> MEASURED_WINDOW = List.of(SHEAR_RATE_MIN, SHEAR_RATE_MAX);
+
+    /** Between what the yield stress may lie; only for models that have one, see {@link #yieldBounds}. */
+    public static final List<CaseField> YIELD_BOUNDS = List.of(YIELD_STRESS_LOW, YIELD_STRESS_HIGH);
 
     private static final List<GeometryParameter> OF_VESSEL = List.of(
             Dimensions.VESSEL_DIAMETER, Dimensions.LIQUID_HEIGHT, Dimensions.LIQUID_VOLUME, Dimensions.BAFFLE_COUNT,
@@ -59,6 +66,12 @@ public final class CaseFields {
     /** The parameters of a fluid model, in the order of {@link ModelKind#parameters}. */
     public static List<CaseField> model(ModelKind kind) {
         return kind.parameters().stream().map(p -> new CaseField(p.column(), p.title(), p.symbol(), p.unit())).toList();
+    }
+
+    /** {@link #YIELD_BOUNDS} for a model with a yield stress, else none. */
+    public static List<CaseField> yieldBounds(ModelKind kind) {
+        boolean yields = kind.parameters().stream().anyMatch(p -> p.name().equals("yield_stress"));
+        return yields ? YIELD_BOUNDS : List.of();
     }
 
     /** A dimension in the unit of its column, angles in degrees. */

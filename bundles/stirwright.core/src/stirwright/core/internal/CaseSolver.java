@@ -91,7 +91,8 @@ public final class CaseSolver {
                     everyQuantity && ranked == pick ? states.all(ranked.trial().candidate()) : constantsOf(ranked, tried),
                     ranked.trial().state().map(trials::flowsAt).orElse(Selection.NONE)));
         }
-        return new ResultAssembly(spec, catalogue, family, vessel, pick)
+        return new ResultAssembly(spec, catalogue, family, vessel, pick,
+                new YieldPowers(spec, vessel.get(Dimensions.IMPELLER_DIAMETER), trials))
                 .assemble(rows, everyQuantity ? quantities(selection, rows.get(0), pick) : List.of());
     }
 

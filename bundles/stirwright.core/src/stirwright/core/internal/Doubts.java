@@ -2,7 +2,6 @@ package stirwright.core.internal;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import stirwright.core.CaseSpec;
 import stirwright.core.FluidState;
 import stirwright.core.Point;
@@ -13,7 +12,6 @@ import stirwright.correlation.Dimensions;
 import stirwright.correlation.Figures;
 import stirwright.correlation.FluidClass;
 import stirwright.correlation.Quantity;
-import stirwright.rheology.MeasuredWindow;
 
 /** What a reader must know before using the pick: what flags the case, and what is worth a note. */
 final class Doubts {
@@ -85,15 +83,7 @@ final class Doubts {
     }
 
     private void outsideWindow(List<String> flags) {
-        MeasuredWindow window = spec.fluid().window();
-        double decades = window.decadesOutside(state.shearRate());
-        if (window.known() && decades > 0) {
-            flags.add(String.format(Locale.ROOT,
-                    "shear rate %s 1/s is %.1f decades outside the measured window %s", Figures.show(state.shearRate()), decades,
-                    Double.isNaN(window.min()) ? "up to " + Figures.show(window.max()) + " 1/s"
-                            : Double.isNaN(window.max()) ? "from " + Figures.show(window.min()) + " 1/s on"
-                            : Figures.show(window.min()) + " to " + Figures.show(window.max()) + " 1/s"));
-        }
+        WindowUse.outside(spec.fluid().window(), "shear rate", state.shearRate()).ifPresent(flags::add);
     }
 
     /** Common practice, no source: side loads grow once less than half a diameter of liquid covers a blade. */

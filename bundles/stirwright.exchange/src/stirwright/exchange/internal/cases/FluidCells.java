@@ -4,6 +4,8 @@ import static stirwright.exchange.internal.cases.CaseColumns.DENSITY;
 import static stirwright.exchange.internal.cases.CaseColumns.MODEL;
 import static stirwright.exchange.internal.cases.CaseColumns.SHEAR_RATE_MAX;
 import static stirwright.exchange.internal.cases.CaseColumns.SHEAR_RATE_MIN;
+import static stirwright.exchange.internal.cases.CaseColumns.YIELD_STRESS_HIGH;
+import static stirwright.exchange.internal.cases.CaseColumns.YIELD_STRESS_LOW;
 
 import java.util.Arrays;
 import java.util.List;
@@ -16,6 +18,7 @@ import stirwright.rheology.MeasuredWindow;
 import stirwright.rheology.ModelKind;
 import stirwright.rheology.Parameter;
 import stirwright.rheology.ParameterException;
+import stirwright.rheology.YieldBounds;
 
 /** The fluid of a row. */
 final class FluidCells {
@@ -36,12 +39,14 @@ final class FluidCells {
         double density = needed(cells, DENSITY, "; it is needed");
         double least = cells.positive(SHEAR_RATE_MIN);
         double most = cells.positive(SHEAR_RATE_MAX);
+        double low = cells.number(YIELD_STRESS_LOW);
+        double high = cells.number(YIELD_STRESS_HIGH);
         List<String> used = kind.parameters().stream().map(Parameter::column).toList();
         cells.given(PARAMETERS).stream().filter(c -> !used.contains(c)).forEach(c -> remarks.add(
                 c + " " + cells.shown(c) + " is not a parameter of model " + kind.id() + "; ignored"));
         try {
             FluidModel model = kind.create(values);
-            return new Fluid(model, density, new MeasuredWindow(least, most));
+            return new Fluid(model, density, new MeasuredWindow(least, most), new YieldBounds(low, high));
         } catch (ParameterException beyond) {
             throw cells.refusal(column(kind, beyond.parameter()), beyond.allowed());
         }
@@ -64,9 +69,10 @@ final class FluidCells {
     }
 
     private static String column(ModelKind kind, String parameter) {
+        Stream<String> others = Stream.of(DENSITY, SHEAR_RATE_MIN, SHEAR_RATE_MAX, YIELD_STRESS_LOW, YIELD_STRESS_HIGH);
         return Stream.concat(
                         kind.parameters().stream().filter(p -> p.name().equals(parameter)).map(Parameter::column),
-                        Stream.of(DENSITY, SHEAR_RATE_MIN, SHEAR_RATE_MAX).filter(c -> c.startsWith(parameter)))
+                        others.filter(c -> c.startsWith(parameter)))
                 .findFirst()
                 .orElse(parameter);
     }

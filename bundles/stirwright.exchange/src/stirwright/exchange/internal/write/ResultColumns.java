@@ -69,6 +69,10 @@ public final class ResultColumns {
                 c.number("pumping_m3_s", CandidateResult::pumping),
                 c.state("tip_speed_m_s", FluidState::tipSpeed),
                 c.number("power_based_shear_rate_1_s", CandidateResult::powerBasedShearRate),
+                c.number("yield_stress_low_Pa", r -> r.yieldEffect().low()),
+                c.number("yield_stress_high_Pa", r -> r.yieldEffect().high()),
+                c.number("power_yield_low_W", r -> r.yieldEffect().powerLow()),
+                c.number("power_yield_high_W", r -> r.yieldEffect().powerHigh()),
                 c.number("deviation_from_pick", CandidateResult::deviation));
     }
 

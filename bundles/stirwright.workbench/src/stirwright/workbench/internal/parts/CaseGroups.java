@@ -68,6 +68,7 @@ final class CaseGroups {
         form.choice(Messages.Case_model, kinds.stream().map(CaseGroups::title).toList(),
                 kind.map(kinds::indexOf).orElse(-1), i -> edits.model(fluid, kinds.get(i).id()));
         kind.ifPresent(k -> CaseFields.model(k).forEach(f -> fields.number(f, fluid.getAmounts())));
+        kind.ifPresent(k -> CaseFields.yieldBounds(k).forEach(f -> fields.number(f, fluid.getAmounts())));
         fields.number(CaseFields.DENSITY, fluid.getAmounts());
         fields.number(Messages.Case_measuredFrom, CaseFields.SHEAR_RATE_MIN, fluid.getAmounts());
         fields.number(Messages.Case_measuredTo, CaseFields.SHEAR_RATE_MAX, fluid.getAmounts());

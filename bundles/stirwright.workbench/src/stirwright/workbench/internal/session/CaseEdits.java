@@ -9,6 +9,8 @@ import java.util.function.Function;
 import org.eclipse.emf.common.util.EList;
 import stirwright.core.Choices;
 import stirwright.correlation.Quantity;
+import stirwright.exchange.CaseFields;
+import stirwright.rheology.ModelKind;
 import stirwright.study.Amount;
 import stirwright.study.Amounts;
 import stirwright.study.Case;
@@ -62,9 +64,16 @@ public final class CaseEdits {
         });
     }
 
+    /** Bounds of a yield stress go with the last model that had one: nothing would show them, and the case would be refused. */
     public void model(Fluid fluid, String modelId) {
         if (!modelId.equals(fluid.getModel())) {
-            session.editor().edit(Messages.Edit_model, () -> fluid.setModel(modelId));
+            boolean yields = ModelKind.byId(modelId).filter(k -> !CaseFields.yieldBounds(k).isEmpty()).isPresent();
+            session.editor().edit(Messages.Edit_model, () -> {
+                fluid.setModel(modelId);
+                if (!yields) {
+                    CaseFields.YIELD_BOUNDS.forEach(f -> Amounts.remove(fluid.getAmounts(), f.column()));
+                }
+            });
         }
     }
 

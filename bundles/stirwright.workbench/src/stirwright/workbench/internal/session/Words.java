@@ -26,6 +26,7 @@ public final class Words {
         List<CaseField> fields = new ArrayList<>(CaseFields.SPEEDS);
         fields.addAll(CaseFields.GIVEN);
         fields.addAll(CaseFields.MEASURED_WINDOW);
+        fields.addAll(CaseFields.YIELD_BOUNDS);
         fields.add(CaseFields.DENSITY);
         Stream.of(ModelKind.values()).map(CaseFields::model).forEach(fields::addAll);
         for (Family family : catalogue.families()) {
