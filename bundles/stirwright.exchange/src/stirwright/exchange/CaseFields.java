@@ -30,9 +30,9 @@ public final class CaseFields {
     public static final CaseField SHEAR_RATE_MAX =
             new CaseField(CaseColumns.SHEAR_RATE_MAX, "greatest shear rate measured", "g max", "1/s");
     public static final CaseField YIELD_STRESS_LOW =
-            new CaseField(CaseColumns.YIELD_STRESS_LOW, "least yield stress", "ty min", "Pa");
+            new CaseField(CaseColumns.YIELD_STRESS_LOW, "lowest yield stress", "ty min", "Pa");
     public static final CaseField YIELD_STRESS_HIGH =
-            new CaseField(CaseColumns.YIELD_STRESS_HIGH, "greatest yield stress", "ty max", "Pa");
+            new CaseField(CaseColumns.YIELD_STRESS_HIGH, "highest yield stress", "ty max", "Pa");
 
     /** What settles the speed; a case gives exactly one. */
     public static final List<CaseField> SPEEDS =
