@@ -8,19 +8,19 @@ from scipy.optimize import least_squares
 from curves import MODELS, RESOURCES, five
 
 HEADER = f"""\
-# Fits of the curves in open-rheograms.csv under absolute objectives, computed with SciPy {scipy.__version__} and NumPy independently of
-# this project's code (releng/fit-reference/absolute-fits.py). They agree with an earlier such fit to the six digits that
-# were kept of it; those of herschel-bulkley, found by iteration, are sure to about 1e-8.
+# Fits of the curves in open-rheograms.csv under absolute objectives, computed with SciPy {scipy.__version__} and NumPy
+# independently of this project's code (releng/fit-reference/absolute-fits.py). They agree with an earlier such fit to the
+# six digits that were kept of it; those of herschel-bulkley, found by iteration, are sure to about 1e-8.
 # Objectives: log-log: straight line through the logarithms; linear: least squares of the stress, a straight line;
 # square-root: straight line of the roots of stress and rate; absolute: least squares of the stress.
 # r_squared = 1 - residual/total sum of squares, both of the stress in Pa.
 rheogram,model,objective,yield_stress,consistency_or_plastic_viscosity,flow_index,r_squared
 """
 EMULSIONS = f"""\
-# Herschel and Bulkley's model, least squares of the stress, of the emulsions in castor-oil-emulsions.csv, computed with SciPy
-# {scipy.__version__} independently of this project's code (releng/fit-reference/absolute-fits.py). An earlier fit listed, to the digits
-# shown there, the rows with bound = lowest: it held the yield stress at or below the lowest measured stress. At 0.68, 0.66
-# and 0.65 the least squares without that bound (bound = none) have a yield stress above it. 0.66 was not listed.
+# Herschel and Bulkley's model, least squares of the stress, of the emulsions in castor-oil-emulsions.csv, computed with
+# SciPy {scipy.__version__} independently of this project's code (releng/fit-reference/absolute-fits.py). An earlier fit listed,
+# to three or four digits, the rows with bound = lowest: it held the yield stress at or below the lowest measured stress.
+# At 0.68, 0.66 and 0.65 the least squares without that bound (bound = none) lie above it. 0.66 was not listed.
 volume_fraction,bound,yield_stress,consistency,flow_index,r_squared
 """
 TIGHT = {"x_scale": "jac", "ftol": 1e-15, "xtol": 1e-15, "gtol": 1e-15}

@@ -47,14 +47,17 @@ def main():
                 step = 1e-30 * np.maximum(np.abs(b), 1e-300)
                 steps = np.diag(step) * 1j
                 return np.nan_to_num(np.array([-model(b + d).imag / h for d, h in zip(steps, step)]).T)
+
         words = []
         for column in ("start1", "start2"):
             begin = np.array([float(r[column]) for r in own])
-            end = least_squares(residual, begin, jac=jacobian, method="lm", x_scale="jac", ftol=1e-15, xtol=1e-15, gtol=1e-15, max_nfev=100_000)
+            end = least_squares(residual, begin, jac=jacobian, method="lm", x_scale="jac", ftol=1e-15, xtol=1e-15,
+                                gtol=1e-15, max_nfev=100_000)
             scale = 2 * end.cost / (len(y) - len(value))
             errors = np.sqrt(scale * np.diag(covariance(jacobian(end.x))))
-            words.append(f"{column} parameters {digits(end.x, value):4.1f} deviations {digits(errors, deviation):4.1f} residual "
-                         f"{digits(np.array([2 * end.cost]), float(s['residual_sum_of_squares'])):4.1f}")
+            residual_digits = digits(np.array([2 * end.cost]), float(s["residual_sum_of_squares"]))
+            words.append(f"{column} parameters {digits(end.x, value):4.1f} deviations {digits(errors, deviation):4.1f} "
+                         f"residual {residual_digits:4.1f}")
         print(f"{s['set']:9}", "; ".join(words))
 
 

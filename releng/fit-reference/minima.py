@@ -66,14 +66,14 @@ def by_projection(model, g, t):
     ii, rr = (m.ravel() for m in np.meshgrid(index, reduced))
     values, _, _ = projected(*basis(model, g, t, ii, rr))
     best = None
-    for at in np.argsort(values)[:: 1][:400:80]:
+    for at in np.argsort(values)[:400:80]:
         def value(v):
             n, x = min(max(v[0], low), high), min(10**v[1], LONGEST)
             return projected(*basis(model, g, t, n, x))[0]
         start = np.array([ii[at], np.log10(rr[at])])
+        simplex = np.array([[0, 0], [0.01 if start[0] < high - 0.02 else -0.01, 0], [0, 0.2 if two else 0.001]])
         found = optimize.minimize(value, start, method="Nelder-Mead", options={
-            "xatol": 1e-13, "fatol": 1e-17, "maxiter": 4000, "maxfev": 4000,
-            "initial_simplex": start + np.array([[0, 0], [0.01 if start[0] < high - 0.02 else -0.01, 0], [0, 0.2 if two else 0.001]])})
+            "xatol": 1e-13, "fatol": 1e-17, "maxiter": 4000, "maxfev": 4000, "initial_simplex": start + simplex})
         if best is None or found.fun < best.fun:
             best = found
     n, x = min(max(best.x[0], low), high), min(10**best.x[1], LONGEST)
