@@ -46,6 +46,12 @@ class ModelDefinitionTest {
 	}
 
 	@Test
+	void sisko() {
+		// 0.5 * 16 + 3 * 16^0.5 = 20; 20 / 16 = 1.25; (8 * 1 + 12 * 0.5) / 20 = 0.7
+		assertPoint(new Sisko(0.5, 3, 0.5), 16, 20, 1.25, 0.7);
+	}
+
+	@Test
 	void cross() {
 		// (0.25 * 36)^0.5 = 3; 2 + 8 / (1 + 3) = 4; 36 * 4 = 144.
 		// d ln(viscosity) / d ln(rate) = -8 * 0.5 * 3 / (1 + 3)^2 / 4 = -0.1875

@@ -22,6 +22,7 @@ class ModelKindTest {
 			"bingham, yield_stress_Pa plastic_viscosity_Pa_s",
 			"herschel-bulkley, yield_stress_Pa consistency_Pa_sn flow_index",
 			"casson, yield_stress_Pa plastic_viscosity_Pa_s",
+			"sisko, infinite_shear_viscosity_Pa_s consistency_Pa_sn flow_index",
 			"cross, zero_shear_viscosity_Pa_s infinite_shear_viscosity_Pa_s time_constant_s flow_index",
 			"carreau, zero_shear_viscosity_Pa_s infinite_shear_viscosity_Pa_s time_constant_s flow_index" })
 	void columns(String id, String columns) {
@@ -30,9 +31,9 @@ class ModelKindTest {
 	}
 
 	@Test
-	void everyKindIsNamedInTheContract() {
+	void everyKindOfTheContractAndSisko() {
 		assertEquals(
-				List.of("newtonian", "power-law", "bingham", "herschel-bulkley", "casson", "cross", "carreau"),
+				List.of("newtonian", "power-law", "bingham", "herschel-bulkley", "casson", "sisko", "cross", "carreau"),
 				Arrays.stream(ModelKind.values()).map(ModelKind::id).toList());
 	}
 

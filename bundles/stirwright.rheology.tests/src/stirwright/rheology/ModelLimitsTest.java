@@ -42,6 +42,12 @@ class ModelLimitsTest {
 	}
 
 	@Test
+	void withoutPlateauAtHighRates() {
+		assertSame(new PowerLaw(4, 0.3), new Sisko(0, 4, 0.3));
+		assertSame(new Newtonian(5), new Sisko(1, 4, 1));
+	}
+
+	@Test
 	void withoutTimeConstantOrWithEqualPlateaus() {
 		assertSame(new Newtonian(4), new Cross(4, 1, 0, 0.3));
 		assertSame(new Newtonian(4), new Carreau(4, 1, 0, 0.3));

@@ -21,6 +21,7 @@ final class RandomModels {
 				() -> new Bingham(between(1e-2, 1e3), between(1e-3, 1e1)),
 				() -> new HerschelBulkley(between(1e-2, 1e3), between(1e-2, 1e2), between(0.05, 2)),
 				() -> new Casson(between(1e-2, 1e3), between(1e-3, 1e1)),
+				() -> new Sisko(between(1e-4, 1), between(1e-2, 1e2), between(0.05, 1)),
 				() -> new Cross(between(1, 1e4), between(1e-4, 1), between(1e-4, 1e4), between(0.05, 1)),
 				() -> new Carreau(between(1, 1e4), between(1e-4, 1), between(1e-4, 1e4), between(0.05, 1)));
 		return kinds.flatMap(kind -> Stream.generate(kind).limit(count));

@@ -20,6 +20,10 @@ class SyntheticFitsTest {
 	/** 0.1 to 1000 1/s, five points a decade. */
 	private static final double[] RATES = IntStream.rangeClosed(-5, 15).mapToDouble(i -> Math.pow(10, i / 5.0)).toArray();
 
+	private static ModelFit fit(ModelKind kind, FlowCurve curve, Objective objective) {
+		return Fits.one(kind, curve, new FitOptions(objective, false));
+	}
+
 	@ParameterizedTest
 	@EnumSource
 	void herschelBulkleyIsRecovered(Objective objective) {
@@ -27,7 +31,7 @@ class SyntheticFitsTest {
 		for (int i = 0; i < 200; i++) {
 			double[] known = { random.between(0.1, 100), random.between(0.1, 20), random.between(0.15, 1.6) };
 			FluidModel model = ModelKind.HERSCHEL_BULKLEY.create(known);
-			assertParameters(known, Fits.herschelBulkley(curve(model), objective));
+			assertParameters(known, fit(ModelKind.HERSCHEL_BULKLEY, curve(model), objective));
 		}
 	}
 
@@ -38,15 +42,15 @@ class SyntheticFitsTest {
 		for (int i = 0; i < 200; i++) {
 			double[] known = { random.between(1e-3, 1e3), random.between(0.02, 2) };
 			FluidModel model = ModelKind.POWER_LAW.create(known);
-			assertParameters(known, Fits.powerLaw(curve(model), objective));
-			assertParameters(known, Fits.powerLawLogLog(curve(model)));
+			assertParameters(known, fit(ModelKind.POWER_LAW, curve(model), objective));
+			assertParameters(known, fit(ModelKind.POWER_LAW, curve(model), Objective.LOGARITHMIC));
 		}
 	}
 
 	@ParameterizedTest
 	@EnumSource
 	void binghamIsHerschelBulkleyWithFlowIndexOne(Objective objective) {
-		assertParameters(new double[] { 8, 0.2, 1 }, Fits.herschelBulkley(curve(new Bingham(8, 0.2)), objective));
+		assertParameters(new double[] { 8, 0.2, 1 }, fit(ModelKind.HERSCHEL_BULKLEY, curve(new Bingham(8, 0.2)), objective));
 	}
 
 	@ParameterizedTest
@@ -54,8 +58,8 @@ class SyntheticFitsTest {
 	void yieldStressStopsAtZeroWhereTheDataWantItNegative(Objective objective) {
 		double[] stresses = DoubleStream.of(RATES).map(rate -> 10 * Math.sqrt(rate) - 2).toArray();
 		FlowCurve curve = FlowCurve.of(RATES, stresses);
-		Fit fit = Fits.herschelBulkley(curve, objective);
-		Fit powerLaw = Fits.powerLaw(curve, objective);
+		ModelFit fit = fit(ModelKind.HERSCHEL_BULKLEY, curve, objective);
+		ModelFit powerLaw = fit(ModelKind.POWER_LAW, curve, objective);
 		assertEquals(0, fit.model().yieldStress());
 		double residual = powerLaw.residualSumOfSquares();
 		assertEquals(residual, fit.residualSumOfSquares(), 1e-12 * residual);
@@ -64,9 +68,9 @@ class SyntheticFitsTest {
 	@Test
 	void fallingStressHasNoPowerLaw() {
 		FlowCurve falling = curveOf(rate -> 5 * Math.pow(rate, -0.25));
-		assertRefused("flow_index", -0.25, () -> Fits.powerLawLogLog(falling));
-		assertRefused("flow_index", -0.25, () -> Fits.powerLaw(falling, Objective.RELATIVE));
-		assertRefused("flow_index", -0.25, () -> Fits.herschelBulkley(falling, Objective.RELATIVE));
+		assertRefused("flow_index", -0.25, () -> fit(ModelKind.POWER_LAW, falling, Objective.LOGARITHMIC));
+		assertRefused("flow_index", -0.25, () -> fit(ModelKind.POWER_LAW, falling, Objective.RELATIVE));
+		assertRefused("flow_index", -0.25, () -> fit(ModelKind.HERSCHEL_BULKLEY, falling, Objective.RELATIVE));
 	}
 
 	@Test
@@ -74,7 +78,7 @@ class SyntheticFitsTest {
 		// a straight fall would be met exactly by a yield stress of 2000 Pa and a consistency of -1 Pa s
 		FlowCurve falling = curveOf(rate -> 2000 - rate);
 		ParameterException refusal = assertThrows(ParameterException.class,
-				() -> Fits.herschelBulkley(falling, Objective.ABSOLUTE));
+				() -> fit(ModelKind.HERSCHEL_BULKLEY, falling, Objective.ABSOLUTE));
 		assertEquals("flow_index", refusal.parameter());
 		assertTrue(refusal.value() < 0, refusal.getMessage());
 	}
@@ -82,17 +86,17 @@ class SyntheticFitsTest {
 	@Test
 	void steepStressIsBeyondTheFlowIndex() {
 		FlowCurve steep = curveOf(rate -> 5 * Math.pow(rate, 2.5));
-		assertRefused("flow_index", 2.5, () -> Fits.powerLaw(steep, Objective.ABSOLUTE));
-		assertRefused("flow_index", 2.5, () -> Fits.herschelBulkley(steep, Objective.ABSOLUTE));
+		assertRefused("flow_index", 2.5, () -> fit(ModelKind.POWER_LAW, steep, Objective.ABSOLUTE));
+		assertRefused("flow_index", 2.5, () -> fit(ModelKind.HERSCHEL_BULKLEY, steep, Objective.ABSOLUTE));
 	}
 
 	@Test
 	void tooFewDifferentRates() {
 		FlowCurve oneRate = FlowCurve.of(new double[] { 5, 5, 5 }, new double[] { 1, 2, 3 });
-		assertNeeds(2, 1, () -> Fits.powerLawLogLog(oneRate));
-		assertNeeds(2, 1, () -> Fits.powerLaw(oneRate, Objective.RELATIVE));
+		assertNeeds(2, 1, () -> fit(ModelKind.POWER_LAW, oneRate, Objective.LOGARITHMIC));
+		assertNeeds(2, 1, () -> fit(ModelKind.POWER_LAW, oneRate, Objective.RELATIVE));
 		FlowCurve twoRates = FlowCurve.of(new double[] { 5, 5, 6 }, new double[] { 1, 2, 3 });
-		assertNeeds(3, 2, () -> Fits.herschelBulkley(twoRates, Objective.RELATIVE));
+		assertNeeds(3, 2, () -> fit(ModelKind.HERSCHEL_BULKLEY, twoRates, Objective.RELATIVE));
 	}
 
 	private static FlowCurve curve(FluidModel model) {
@@ -103,7 +107,7 @@ class SyntheticFitsTest {
 		return FlowCurve.of(RATES, DoubleStream.of(RATES).map(stress).toArray());
 	}
 
-	private static void assertParameters(double[] known, Fit fit) {
+	private static void assertParameters(double[] known, ModelFit fit) {
 		double[] ratios = ModelKind.values(fit.model());
 		double[] ones = new double[known.length];
 		for (int i = 0; i < known.length; i++) {

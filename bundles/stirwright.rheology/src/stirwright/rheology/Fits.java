@@ -63,11 +63,11 @@ public final class Fits {
 		return best;
 	}
 
-	/** The power law is what both models become when their first parameter is 0. */
+	/** The power law is what both models become when their first parameter is 0; what only rounding tells from it is it. */
 	private static Search.Place notWorse(Search search, Search.Place best, Search.Place powerLaw) {
 		double[] at = { 0, powerLaw.at()[0], powerLaw.at()[1] };
 		double sum = search.evaluate(at).sum();
-		return best != null && best.sum() < sum ? best : new Search.Place(at, new boolean[] { true, false, false }, sum);
+		return best != null && best.sum() < sum * (1 - 1e-12) ? best : new Search.Place(at, new boolean[] { true, false, false }, sum);
 	}
 
 	static Huber robust(ModelKind kind, Points points, FitOptions options) {

@@ -127,7 +127,9 @@ final class Inference {
 
 	private List<Estimate> estimates(Profile profile) {
 		List<Estimate> estimates = new ArrayList<>();
-		boolean byProfile = !options.robust() && worthAProfile();
+		boolean straight = shape.linear() && options.objective().linear() && IntStream.range(0, scales.length)
+				.noneMatch(j -> place.held()[j]);
+		boolean byProfile = !options.robust() && !straight && worthAProfile();
 		for (int j = 0; j < scales.length; j++) {
 			double at = place.at()[j];
 			boolean held = place.held()[j];

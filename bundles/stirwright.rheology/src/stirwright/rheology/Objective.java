@@ -61,6 +61,11 @@ public enum Objective {
 	/** The derivative of the deviation with respect to the fitted stress. */
 	public abstract double slope(double fitted, double measured);
 
+	/** Whether the deviation is a straight line over the fitted stress. */
+	boolean linear() {
+		return this == RELATIVE || this == ABSOLUTE;
+	}
+
 	/** The sum of squared deviations of a model from a curve. */
 	public double residualSumOfSquares(FluidModel model, FlowCurve curve) {
 		double sum = 0;

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 import stirwright.rheology.internal.Huber;
 import stirwright.rheology.internal.Points;
@@ -12,7 +13,8 @@ import stirwright.rheology.internal.Quantiles;
 
 /**
  * Every model fitted to one curve, in the order in which to consider them: first those whose parameters are all given by the
- * points, then the others; within each by Akaike's criterion.
+ * points, then the others; within each by Akaike's criterion, but of the models as well supported as the first the simplest
+ * leads.
  *
  * @param curve    the measured points
  * @param options  how the models were fitted
@@ -89,7 +91,9 @@ public record RankedFits(FlowCurve curve, FitOptions options, List<Attempt> atte
 				// Double.compare puts NaN, for want of points, behind every number.
 				.thenComparingDouble(a -> a.fit().map(ModelFit::aicc).orElse(Double.NaN))
 				.thenComparingInt(a -> a.kind().parameters().size())
-				.thenComparingDouble(a -> a.fit().map(ModelFit::rmsRelative).orElse(Double.NaN))).toList();
+				.thenComparingDouble(a -> a.fit().map(ModelFit::rmsRelative).orElse(Double.NaN)))
+				.collect(Collectors.toCollection(ArrayList::new));
+		simplestFirst(order);
 		List<Attempt> ranked = new ArrayList<>();
 		for (Attempt attempt : order) {
 			double delta = attempt.fit().map(f -> f.aicc() - least).orElse(Double.NaN);
@@ -97,6 +101,24 @@ public record RankedFits(FlowCurve curve, FitOptions options, List<Attempt> atte
 					attempt.notes()));
 		}
 		return ranked;
+	}
+
+	/** Of those as well supported as the first, the one with the fewest parameters goes to the front. */
+	private static void simplestFirst(List<Attempt> order) {
+		Attempt first = order.get(0);
+		if (first.fit().isEmpty()) {
+			return;
+		}
+		ModelFit lowest = first.fit().get();
+		order.stream().filter(a -> a.fit().filter(f -> f.determined() == lowest.determined()
+						&& f.aicc() - lowest.aicc() <= SOME).isPresent())
+				.min(Comparator.comparingInt((Attempt a) -> a.kind().parameters().size())
+						.thenComparingDouble(a -> a.fit().get().aicc()))
+				.filter(simplest -> simplest.kind().parameters().size() < first.kind().parameters().size())
+				.ifPresent(simplest -> {
+					order.remove(simplest);
+					order.add(0, simplest);
+				});
 	}
 
 	/** The fit to take when nothing speaks for another; empty when no model describes the curve. */
@@ -120,12 +142,15 @@ public record RankedFits(FlowCurve curve, FitOptions options, List<Attempt> atte
 		if (Double.isNaN(first.deltaAicc())) {
 			return name + ": too few points for Akaike's criterion, so the fewest parameters";
 		}
-		Optional<Attempt> better = rest.stream().filter(a -> a.deltaAicc() < first.deltaAicc()).findFirst();
 		String doubt = first.fit().get().determined() ? "" : ", though these points do not give all of its parameters";
+		Optional<Attempt> better = rest.stream().filter(a -> a.deltaAicc() < first.deltaAicc()).findFirst();
 		if (better.isPresent()) {
-			return String.format(Locale.ROOT,
-					"%s: the lowest criterion (AICc) of the models whose parameters these points give; %s is %.1f lower, but its"
-							+ " parameters are not given", name, better.get().kind().id(), first.deltaAicc() - better.get().deltaAicc());
+			double higher = first.deltaAicc() - better.get().deltaAicc();
+			return higher <= SOME && better.get().fit().get().determined() == first.fit().get().determined()
+					? String.format(Locale.ROOT, "%s: as well supported as %s (AICc %.1f higher), with fewer parameters%s",
+							name, better.get().kind().id(), higher, doubt)
+					: String.format(Locale.ROOT, "%s: the lowest criterion (AICc) of the models whose parameters these points give;"
+							+ " %s is %.1f lower, but its parameters are not given", name, better.get().kind().id(), higher);
 		}
 		return rest.stream().filter(a -> !Double.isNaN(a.deltaAicc())).findFirst()
 				.map(next -> String.format(Locale.ROOT, "%s: the lowest criterion (AICc)%s; the next, %s, is %.1f higher: %s",

@@ -4,12 +4,19 @@ package stirwright.rheology.internal;
 public final class CrossShape extends PlateausShape {
 
 	@Override
-	double thinning(double log, double n, double[] gradient) {
-		double z = Math.exp((1 - n) * log);
-		double left = 1 / (1 + z);
+	double bend(double log) {
+		return log;
+	}
+
+	@Override
+	double left(double bend, double n) {
+		return 1 / (1 + Math.exp((1 - n) * bend));
+	}
+
+	@Override
+	void derive(double log, double bend, double left, double n, double[] gradient) {
 		double slope = left * (1 - left);
-		gradient[2] = -(1 - n) * slope;
-		gradient[3] = log * slope;
-		return left;
+		gradient[TIME] = -(1 - n) * slope;
+		gradient[INDEX] = log * slope;
 	}
 }

@@ -21,14 +21,23 @@ public final class LeastSquares {
 
 	/** Relative, of sum and coordinates: at the end, and on the way, where another search goes on. */
 	private static final double TOLERANCE = 1e-11;
-	private static final double ROUGH_TOLERANCE = 1e-7;
-	private static final int MOST_ITERATIONS = 300;
-	private static final int MOST_ROUGH_ITERATIONS = 50;
+	private static final double ROUGH_TOLERANCE = 1e-6;
+	private static final int MOST_ITERATIONS = 1000;
+	private static final int MOST_ROUGH_ITERATIONS = 25;
 
 	/** Stands for a deviation that is no number: so large that the search turns back, with a square that is finite. */
 	private static final double HUGE = 1e100;
 
-	private static final int MOST_LAST_STEPS = 4;
+	/** Steps shrink by a steady factor where deviations stay large; each is a digit or so. */
+	private static final int MOST_LAST_STEPS = 50;
+	private static final int MOST_STALLED = 3;
+	private static final double LAST_DIGIT = 1e-14;
+
+	/** A last step shorter than this says that the steps went to a minimum. */
+	private static final double NEAR = 1e-10;
+
+	/** Of a sum of squares, relative: what rounding may do to it. */
+	private static final double NOISE = 1e-11;
 
 	/** What is made small: the sum of the squares of its deviations. */
 	public interface Deviations {
@@ -61,28 +70,29 @@ public final class LeastSquares {
 		this.function = function;
 	}
 
-	/** Searches from a start, to a relative 1e-7 or so of the sum; never returns a place above the start. */
+	/** Searches from a start, to a relative 1e-6 or so of the sum; never returns a place above the start. */
 	public static Minimum roughly(Deviations function, double[] start) {
 		LeastSquares search = new LeastSquares(function);
-		search.evaluate(start);
-		if (start.length > 0) {
-			search.search(start, ROUGH_TOLERANCE, MOST_ROUGH_ITERATIONS);
-		}
+		search.search(start, ROUGH_TOLERANCE, MOST_ROUGH_ITERATIONS);
 		return search.best;
 	}
 
-	/** Searches from a start, with steps of Gauss and Newton's at the end, which find the last digits. */
+	/** Searches from a start, which may be there already, with steps of Gauss and Newton's, which find the last digits. */
 	public static Minimum toTheLastDigit(Deviations function, double[] start) {
 		LeastSquares search = new LeastSquares(function);
 		search.evaluate(start);
-		if (start.length > 0) {
-			search.search(start, TOLERANCE, MOST_ITERATIONS);
+		if (!(search.lastSteps() <= NEAR)) {
+			search.search(search.best.at(), TOLERANCE, MOST_ITERATIONS);
 			search.lastSteps();
 		}
 		return search.best;
 	}
 
 	private void search(double[] start, double tolerance, int iterations) {
+		if (start.length == 0) {
+			evaluate(start);
+			return;
+		}
 		MultivariateJacobianFunction model = point -> {
 			Minimum here = evaluate(point.toArray());
 			return new Pair<RealVector, RealMatrix>(new ArrayRealVector(here.deviations(), false),
@@ -117,43 +127,49 @@ public final class LeastSquares {
 		return here;
 	}
 
-	private void lastSteps() {
-		double shorter = Double.POSITIVE_INFINITY;
-		for (int i = 0; i < MOST_LAST_STEPS; i++) {
+	/** How long the shortest of them was, relative to the coordinates. */
+	private double lastSteps() {
+		double shortest = Double.POSITIVE_INFINITY;
+		int stalled = 0;
+		for (int i = 0; i < MOST_LAST_STEPS && stalled < MOST_STALLED; i++) {
 			double[] step = step(best);
 			double length = relativeLength(step, best.at());
-			if (!(length < shorter / 2)) {
-				return;
+			stalled = length < 0.95 * shortest ? 0 : stalled + 1;
+			shortest = Math.min(shortest, length);
+			if (!(length > LAST_DIGIT)) {
+				return length;
 			}
-			shorter = length;
 			double[] next = best.at().clone();
 			Arrays.setAll(next, j -> next[j] - step[j]);
 			Minimum before = best;
 			Minimum there = evaluate(next);
 			// A step that only rounding makes worse goes to where the gradient is 0, closer than the sum can tell.
-			if (there.sum() > before.sum() * (1 + 1e-14)) {
-				return;
+			if (there.sum() > before.sum() * (1 + NOISE)) {
+				return shortest;
 			}
 			best = there;
 		}
+		return shortest;
 	}
 
+	/** To the minimum of the linearised sum; of NaN where the columns of the Jacobian cannot be told apart. */
 	private static double[] step(Minimum from) {
-		if (from.deviations().length < from.at().length) {
-			return new double[from.at().length];
+		double[] step = new double[from.at().length];
+		Arrays.fill(step, Double.NaN);
+		if (from.deviations().length < from.at().length || step.length == 0) {
+			return step;
 		}
 		double[] sizes = columnSizes(from.jacobian());
 		DecompositionSolver solver = new QRDecomposition(scaled(from.jacobian(), sizes)).getSolver();
-		if (!solver.isNonSingular()) {
-			return new double[from.at().length];
+		if (solver.isNonSingular()) {
+			RealVector solved = solver.solve(new ArrayRealVector(from.deviations(), false));
+			Arrays.setAll(step, j -> solved.getEntry(j) / sizes[j]);
 		}
-		double[] step = solver.solve(new ArrayRealVector(from.deviations(), false)).toArray();
-		Arrays.setAll(step, j -> step[j] / sizes[j]);
 		return step;
 	}
 
 	private static double relativeLength(double[] step, double[] at) {
-		double most = 0;
+		double most = step.length == 0 ? 0 : step[0];
 		for (int j = 0; j < step.length; j++) {
 			most = Math.max(most, Math.abs(step[j]) / (Math.abs(at[j]) + 1e-300));
 		}

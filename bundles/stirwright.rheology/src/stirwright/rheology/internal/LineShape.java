@@ -7,12 +7,23 @@ public final class LineShape implements Shape {
 
 	@Override
 	public Scale[] scales() {
-		return new Scale[] { Scale.LOG };
+		return new Scale[] { Scale.PLAIN };
+	}
+
+	@Override
+	public double lower(int coordinate) {
+		return 0;
 	}
 
 	@Override
 	public double stress(double rate, double logRate, double[] at, double[] gradient) {
-		return gradient[0] = Math.exp(at[0] + logRate);
+		gradient[0] = rate;
+		return at[0] * rate;
+	}
+
+	@Override
+	public boolean linear() {
+		return true;
 	}
 
 	@Override
@@ -24,6 +35,6 @@ public final class LineShape implements Shape {
 			overlap += weight * points.rates()[i] * points.stresses()[i];
 			square += weight * points.rates()[i] * points.rates()[i];
 		}
-		return List.of(new double[] { Math.log(overlap / square) });
+		return List.of(new double[] { overlap / square });
 	}
 }

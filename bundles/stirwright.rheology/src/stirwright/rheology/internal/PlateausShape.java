@@ -12,20 +12,20 @@ public abstract class PlateausShape implements Shape {
 
 	private static final int ZERO = 0;
 	private static final int INFINITE = 1;
-	private static final int TIME = 2;
-	private static final int INDEX = 3;
+	static final int TIME = 2;
+	static final int INDEX = 3;
 
 	/** Of the logarithm of the time constant; beyond it no plateau is ever seen. */
 	private static final double FARTHEST = 60;
 
-	private static final double[] INDICES = { 0.001, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 0.97 };
+	private static final double[] INDICES = { 0.001, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9 };
 
 	/** Natural logarithms: how far below the lowest rate, and above the highest, a bend is looked for; and in what steps. */
 	private static final double BELOW = 12;
 	private static final double ABOVE = 4;
-	private static final double STEP = 0.8;
+	private static final double STEP = 1;
 
-	private static final int VALLEYS = 3;
+	private static final int VALLEYS = 2;
 
 	private record Place(double time, double n, TwoTerms terms) {
 	}
@@ -54,18 +54,29 @@ public abstract class PlateausShape implements Shape {
 		};
 	}
 
+	/** What of the thinning depends on time constant * rate alone; of its natural logarithm. */
+	abstract double bend(double log);
+
+	/** What is left of the difference of the plateaus, from 1 to 0. */
+	abstract double left(double bend, double n);
+
 	/**
-	 * What is left of the difference of the plateaus, from 1 to 0.
+	 * The derivatives of {@link #left}.
 	 *
 	 * @param log      natural logarithm of time constant * rate
-	 * @param gradient its elements {@code TIME} and {@code INDEX} are set to the derivatives
+	 * @param bend     its {@link #bend}
+	 * @param left     its {@link #left}
+	 * @param gradient its elements {@code TIME} and {@code INDEX} are set: with respect to {@code log} and to {@code n}
 	 */
-	abstract double thinning(double log, double n, double[] gradient);
+	abstract void derive(double log, double bend, double left, double n, double[] gradient);
 
 	@Override
 	public final double stress(double rate, double logRate, double[] at, double[] gradient) {
 		double zero = Math.exp(at[ZERO]);
-		double left = thinning(at[TIME] + logRate, at[INDEX], gradient);
+		double log = at[TIME] + logRate;
+		double bend = bend(log);
+		double left = left(bend, at[INDEX]);
+		derive(log, bend, left, at[INDEX], gradient);
 		double range = rate * (zero - at[INFINITE]);
 		gradient[ZERO] = rate * zero * left;
 		gradient[INFINITE] = rate * (1 - left);
@@ -76,23 +87,32 @@ public abstract class PlateausShape implements Shape {
 
 	@Override
 	public final List<double[]> starts(Points points) {
-		List<Place> places = new ArrayList<>();
+		List<Place> lowest = new ArrayList<>();
 		double from = -points.logRates()[points.size() - 1] - ABOVE;
 		double to = -points.logRates()[0] + BELOW;
-		double[] left = new double[points.size()];
-		double[] unused = new double[INDEX + 1];
-		for (double n : INDICES) {
-			for (double time = from; time <= to; time += STEP) {
-				for (int i = 0; i < left.length; i++) {
-					left[i] = points.rates()[i] * thinning(time + points.logRates()[i], n, unused);
+		double[] bends = new double[points.size()];
+		double[] thinned = new double[points.size()];
+		for (double time = from; time <= to; time += STEP) {
+			for (int i = 0; i < bends.length; i++) {
+				bends[i] = bend(time + points.logRates()[i]);
+			}
+			Place best = null;
+			for (double n : INDICES) {
+				for (int i = 0; i < thinned.length; i++) {
+					thinned[i] = points.rates()[i] * left(bends[i], n);
 				}
-				places.add(new Place(time, n, TwoTerms.of(points, points.rates(), left)));
+				TwoTerms terms = TwoTerms.of(points, points.rates(), thinned);
+				if (terms.second() > 0 && (best == null || terms.residual() < best.terms().residual())) {
+					best = new Place(time, n, terms);
+				}
+			}
+			if (best != null) {
+				lowest.add(best);
 			}
 		}
-		places.removeIf(p -> !(p.terms().second() > 0));
-		places.sort(Comparator.comparingDouble(p -> p.terms().residual()));
+		lowest.sort(Comparator.comparingDouble(p -> p.terms().residual()));
 		List<Place> chosen = new ArrayList<>();
-		for (Place place : places) {
+		for (Place place : lowest) {
 			if (chosen.size() < VALLEYS && chosen.stream().noneMatch(c -> near(c, place))) {
 				chosen.add(place);
 			}
@@ -102,6 +122,6 @@ public abstract class PlateausShape implements Shape {
 	}
 
 	private static boolean near(Place one, Place other) {
-		return Math.abs(one.time() - other.time()) < 3 * STEP && Math.abs(one.n() - other.n()) < 0.25;
+		return Math.abs(one.time() - other.time()) < 3 * STEP;
 	}
 }

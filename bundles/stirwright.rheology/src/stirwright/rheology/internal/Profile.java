@@ -8,7 +8,7 @@ package stirwright.rheology.internal;
 public final class Profile {
 
 	/** Of the distance from the best place, relative. */
-	private static final double TOLERANCE = 1e-3;
+	private static final double TOLERANCE = 2e-3;
 	private static final int MOST_STEPS = 40;
 
 	/** A coordinate that went this many first steps without an end has none. */

@@ -55,17 +55,16 @@ public final class Search {
 		boolean[] released = new boolean[size];
 		Place best = null;
 		for (int round = 0; round < 2 * size + 1; round++) {
-			double[] next = LeastSquares.roughly(free(at, held, fixed), pick(at, held, fixed)).at();
-			double[] there = spread(next, at, held, fixed);
+			LeastSquares.Minimum next = LeastSquares.roughly(free(at, held, fixed), pick(at, held, fixed));
+			double[] there = spread(next.at(), at, held, fixed);
 			if (clamp(there, at, held, fixed)) {
 				continue;
 			}
 			at = there;
-			LeastSquares.Minimum here = evaluate(at);
-			if (best == null || here.sum() < best.sum()) {
-				best = new Place(at.clone(), held.clone(), here.sum());
+			if (best == null || next.sum() < best.sum()) {
+				best = new Place(at.clone(), held.clone(), next.sum());
 			}
-			if (!release(here, at, held, released)) {
+			if (!release(at, held, released)) {
 				break;
 			}
 		}
@@ -97,7 +96,12 @@ public final class Search {
 		return coordinate >= shape.lower(j) && coordinate <= shape.upper(j);
 	}
 
-	private boolean release(LeastSquares.Minimum here, double[] at, boolean[] held, boolean[] released) {
+	/** Lets each held coordinate go once if the sum falls inwards; whether there was any. */
+	private boolean release(double[] at, boolean[] held, boolean[] released) {
+		if (IntStream.range(0, size).noneMatch(j -> held[j] && !released[j])) {
+			return false;
+		}
+		LeastSquares.Minimum here = evaluate(at);
 		boolean any = false;
 		for (int j = 0; j < size; j++) {
 			if (held[j] && !released[j]) {

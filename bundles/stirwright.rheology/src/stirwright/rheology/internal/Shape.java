@@ -28,6 +28,11 @@ public interface Shape {
 	 */
 	double stress(double rate, double logRate, double[] at, double[] gradient);
 
+	/** Whether the stress is a sum of coordinates times known functions of the rate, so that every interval is straight. */
+	default boolean linear() {
+		return false;
+	}
+
 	/** Coordinates to start from, within the bounds, each in a valley of its own; the lowest valley is among them. */
 	List<double[]> starts(Points points);
 }

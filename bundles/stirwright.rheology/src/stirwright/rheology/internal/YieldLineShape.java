@@ -24,6 +24,11 @@ public final class YieldLineShape implements Shape {
 	}
 
 	@Override
+	public boolean linear() {
+		return true;
+	}
+
+	@Override
 	public List<double[]> starts(Points points) {
 		double[] ones = new double[points.size()];
 		Arrays.fill(ones, 1);
