@@ -1,5 +1,5 @@
 /**
- * Files in and out: {@link stirwright.exchange.CaseTable} and {@link stirwright.exchange.FlowCurveFile}
+ * Files in and out: {@link stirwright.exchange.CaseTable} and {@link stirwright.exchange.CurveImport}
  * read, {@link stirwright.exchange.Outputs} writes. The names of columns are a contract with
  * scripts. Units are converted here and nowhere further in.
  *

@@ -1,47 +1,133 @@
 package stirwright.exchange.internal.curves;
 
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
-import stirwright.exchange.BlockUse;
+import java.util.Set;
 import stirwright.exchange.CurveBlock;
 import stirwright.exchange.CurveImport;
 import stirwright.exchange.CurvePoint;
 import stirwright.exchange.CurveSource;
+import stirwright.exchange.DroppedPoint;
 import stirwright.exchange.Finding;
+import stirwright.exchange.Finding.Topic;
 import stirwright.exchange.ImportChoice;
-import stirwright.exchange.ImportCounts;
-import stirwright.exchange.ImportMessage;
 import stirwright.exchange.MeasuredCurve;
 import stirwright.exchange.Measurement;
-import stirwright.exchange.PointPlace;
-import stirwright.exchange.Ramp;
-import stirwright.exchange.internal.table.TextFile;
+import stirwright.exchange.internal.table.SourceRow;
+import stirwright.exchange.internal.table.SourceSheet;
 import stirwright.rheology.FlowCurve;
 
-/** From a source to its curves: for now a plain table of shear rate and stress, in UTF-8. */
+/** From a source to its curves, one step after the other. */
 public final class Importer {
+    private final CurveSource source;
+    private final ImportChoice choice;
+    private final List<WorkRow> rows = new ArrayList<>();
+    private final List<Layout> layouts = new ArrayList<>();
+    private final List<Stretch> stretches = new ArrayList<>();
+    private final Set<Finding> findings = new LinkedHashSet<>();
+    private final Messages messages = new Messages();
 
-    private Importer() {}
+    private Importer(CurveSource source, ImportChoice choice) {
+        this.source = source;
+        this.choice = choice;
+    }
 
     /** See {@link CurveImport#of}. */
     public static CurveImport read(CurveSource source, ImportChoice choice) {
-        String text = new String(source.bytes(), StandardCharsets.UTF_8);
-        CurveReader read = CurveReader.read(new TextFile(source.name(), Path.of(source.shown()), text));
-        FlowCurve curve = read.curve();
-        List<CurvePoint> points = new ArrayList<>();
-        for (int i = 0; i < curve.size(); i++) {
-            points.add(new CurvePoint(new PointPlace("", i + 1, 1), curve.shearRate(i), curve.stress(i), Double.NaN,
-                    Double.NaN, Double.NaN, Double.NaN, "", ""));
+        return new Importer(source, choice).run();
+    }
+
+    private CurveImport run() {
+        Sources sources = Sources.read(source, choice);
+        findings.addAll(sources.findings());
+        sort(sources);
+        SignVote vote = SignVote.of(stretches, choice);
+        findings.add(vote.finding());
+        vote.tie().ifPresent(messages::problem);
+        vote.doubts().forEach(messages::warning);
+        StatusWords statuses = StatusWords.of(stretches);
+        statuses.finding().ifPresent(findings::add);
+        PointReader reader = new PointReader(choice, vote.sign(), sources.separator());
+        List<Part> parts = stretches.stream().flatMap(s -> Part.of(s, reader.read(s)).stream()).toList();
+        List<CurveBlock> blocks = new Blocks(parts, choice, statuses).build(vote.tie().isEmpty());
+        List<DroppedPoint> dropped = new ArrayList<>();
+        List<MeasuredCurve> curves = curves(parts, blocks, dropped);
+        findings.add(new Finding(Topic.BLOCKS, blocks.size() + (blocks.size() == 1 ? " block, " : " blocks, ") + curves.size()
+                + " taken", "heads, numbers that start again, and turns of the shear rate part them", !choice.blocks().isEmpty()));
+        layouts.forEach(layout -> {
+            layout.problems().forEach(messages::problem);
+            layout.notes().forEach(messages::warning);
+        });
+        messages.blocks(blocks);
+        messages.dropped(dropped);
+        if (curves.isEmpty()) {
+            messages.none(blocks, dropped);
         }
-        CurveBlock block = new CurveBlock(1, "", "", 1, BlockUse.UNORDERED, BlockUse.UNORDERED, true, "the only one", 1,
-                Double.NaN, List.of(), points, List.of());
-        return new CurveImport(source, choice,
-                List.of(new Finding(Finding.Topic.FORM, "text", "a plain table", false)), List.of(), List.of(block),
-                List.of(), new ImportCounts(curve.size(), 0, curve.size(), 0, 0, 0, 0, 0),
-                read.messages().stream().map(m -> new ImportMessage(ImportMessage.Weight.NOTE, m)).toList(),
-                List.of(new MeasuredCurve(source.stem(), curve, new Measurement(source.name(), source.sha256(), "1",
-                        Ramp.NONE, 1, Double.NaN, List.of(), List.of()))));
+        return new CurveImport(source, choice, List.copyOf(findings), rows.stream().map(WorkRow::shown).toList(), blocks, dropped,
+                RowCounts.of(rows, blocks), messages.list(), curves);
+    }
+
+    private void sort(Sources sources) {
+        List<List<WorkRow>> sheets = new ArrayList<>();
+        for (SourceSheet sheet : sources.sheets()) {
+            List<WorkRow> all = new ArrayList<>(sheet.rows().size());
+            for (SourceRow row : sheet.rows()) {
+                all.add(new WorkRow(sheet.name(), row));
+            }
+            sheets.add(all);
+            rows.addAll(all);
+            SheetSorter sorter = new SheetSorter(sheet.name(), choice, all);
+            sorter.sort();
+            take(sorter);
+        }
+        String layout = "names of columns";
+        if (layouts.isEmpty()) {
+            layout = "no names of columns";
+            for (int i = 0; i < sheets.size(); i++) {
+                sheets.get(i).forEach(WorkRow::forget);
+                Nameless nameless = Nameless.sort(sources.sheets().get(i).name(), choice, sheets.get(i), sources.separator());
+                take(nameless.sorter());
+                if (!nameless.problem().isEmpty() && sheets.size() == 1) {
+                    messages.problem(nameless.problem());
+                }
+                layout = nameless.set() ? "a set of curves, each with its number and name" : layout;
+            }
+        }
+        findings.add(new Finding(Topic.LAYOUT, layout, layouts.size() + (layouts.size() == 1 ? " table" : " tables"), false));
+        for (Stretch stretch : stretches) {
+            stretch.group.columns().values().forEach(c -> findings.add(new Finding(Topic.COLUMN, c.words(), c.reason(),
+                    c.reason().startsWith(LayoutBuilder.BY_HAND))));
+        }
+    }
+
+    private void take(SheetSorter sorter) {
+        layouts.addAll(sorter.layouts);
+        stretches.addAll(sorter.stretches);
+    }
+
+    private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<DroppedPoint> dropped) {
+        CurveNames names = new CurveNames(source.stem(), blocks.stream().filter(CurveBlock::taken).count() > 1);
+        List<MeasuredCurve> curves = new ArrayList<>();
+        for (int i = 0; i < blocks.size(); i++) {
+            CurveBlock block = blocks.get(i);
+            List<DroppedPoint> here = new ArrayList<>();
+            for (ReadPoint point : parts.get(i).points()) {
+                point.row().block = point.row().block == 0 ? block.number() : point.row().block;
+                if (!point.taken()) {
+                    here.add(point.dropped(block.number()));
+                }
+            }
+            dropped.addAll(here);
+            if (block.taken()) {
+                List<CurvePoint> taken = block.points().stream().filter(CurvePoint::taken).toList();
+                curves.add(new MeasuredCurve(names.next(block, parts.get(i)),
+                        FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
+                                taken.stream().mapToDouble(CurvePoint::shearStress).toArray()),
+                        new Measurement(source.name(), source.sha256(), Messages.name(block), block.use().ramp(), block.replicate(),
+                                block.temperature(), here, block.warnings())));
+            }
+        }
+        return curves;
     }
 }

@@ -2,8 +2,11 @@ package stirwright.exchange.internal.table;
 
 import java.util.Optional;
 
-/** Tells what a file is that is not UTF-8 text, so that a message can name it. */
-final class FileSignature {
+/** Tells what a file is by its bytes, so that it can be read or named. */
+public final class FileSignature {
+
+    /** What a file of flow curves can be. */
+    public enum Kind { ZIP, OLD_WORKBOOK, PDF, TEXT }
 
     private FileSignature() {}
 
@@ -22,6 +25,15 @@ final class FileSignature {
             return Optional.of("a PDF document");
         }
         return zeros(bytes);
+    }
+
+    /** By its first bytes; text of any kind when nothing speaks against it. */
+    public static Kind of(byte[] bytes) {
+        if (starts(bytes, 'P', 'K', 3, 4) || starts(bytes, 'P', 'K', 5, 6)) {
+            return Kind.ZIP;
+        }
+        return starts(bytes, 0xD0, 0xCF, 0x11, 0xE0) ? Kind.OLD_WORKBOOK
+                : starts(bytes, '%', 'P', 'D', 'F') ? Kind.PDF : Kind.TEXT;
     }
 
     private static boolean starts(byte[] bytes, int... signature) {

@@ -15,7 +15,31 @@ public final class Numbers {
         if (!hasForm(text, sign)) {
             return Double.NaN;
         }
-        double value = Double.parseDouble(sign == DecimalSign.COMMA ? text.replace(',', '.') : text);
+        return checked(text, sign == DecimalSign.COMMA ? text.replace(',', '.') : text);
+    }
+
+    /**
+     * The value times a power of ten, rounded once, so that 166 dyn/cm2 are the very number that 16.6 Pa are; NaN where
+     * {@link #problem} has something to say.
+     */
+    public static double parse(String text, DecimalSign sign, int power) {
+        if (power == 0) {
+            return parse(text, sign);
+        }
+        if (!hasForm(text, sign)) {
+            return Double.NaN;
+        }
+        String plain = sign == DecimalSign.COMMA ? text.replace(',', '.') : text;
+        int exponent = Math.max(plain.indexOf('e'), plain.indexOf('E'));
+        if (exponent >= 0 && plain.length() - exponent > 6) {
+            return Double.NaN;
+        }
+        return checked(text, exponent < 0 ? plain + "e" + power
+                : plain.substring(0, exponent) + "e" + (Integer.parseInt(plain.substring(exponent + 1)) + power));
+    }
+
+    private static double checked(String text, String plain) {
+        double value = Double.parseDouble(plain);
         boolean lost = Double.isInfinite(value) || value == 0 && !isZero(text);
         return lost ? Double.NaN : value;
     }

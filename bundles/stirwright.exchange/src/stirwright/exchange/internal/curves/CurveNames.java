@@ -1,0 +1,51 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import stirwright.exchange.CurveBlock;
+import stirwright.exchange.Ramp;
+
+/** A label for each curve that no other one of its source has. */
+final class CurveNames {
+    private final String stem;
+    private final boolean several;
+    private final Map<String, Integer> used = new HashMap<>();
+
+    /** @param several whether the source has more than one curve */
+    CurveNames(String stem, boolean several) {
+        this.stem = stem;
+        this.several = several;
+    }
+
+    String next(CurveBlock block, Part part) {
+        String own = part.stretch().heads.own();
+        return unique(!own.isEmpty() ? own : several ? words(block, part) : stem);
+    }
+
+    private String words(CurveBlock block, Part part) {
+        List<String> words = new ArrayList<>(List.of(stem));
+        String sample = part.stretch().sample();
+        if (!sample.isEmpty()) {
+            words.add(sample);
+        } else if (block.sample() > 1 || part.stretch().layout.groups().size() > 1) {
+            words.add("sample " + block.sample());
+        }
+        if (!block.sheet().isEmpty()) {
+            words.add(block.sheet());
+        }
+        if (block.use().ramp() != Ramp.NONE) {
+            words.add(block.use().ramp().word());
+        }
+        if (block.replicate() > 1) {
+            words.add("replicate " + block.replicate());
+        }
+        return String.join(" ", words);
+    }
+
+    private String unique(String label) {
+        int count = used.merge(label, 1, Integer::sum);
+        return count == 1 ? label : unique(label + " (" + count + ")");
+    }
+}

@@ -1,0 +1,14 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.List;
+
+/**
+ * What stands where under a row of names.
+ *
+ * @param line of the names; 0 without any
+ * @param groups one for each sample, all complete
+ * @param width how many columns the row of names fills; 0 when any row may be wider
+ * @param problems what cannot be read, a sentence each
+ * @param notes what is doubtful, a sentence each
+ */
+record Layout(int line, List<Group> groups, int width, List<String> problems, List<String> notes) {}

@@ -1,0 +1,78 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import stirwright.exchange.CurveBlock;
+import stirwright.exchange.DroppedPoint;
+import stirwright.exchange.ImportMessage;
+import stirwright.exchange.ImportMessage.Weight;
+
+/** Gathers what a reader should see, each line once. */
+final class Messages {
+    private static final int MOST_NAMED = 5;
+    /** Of more blocks than these only those that are not taken are told. */
+    private static final int MOST_BLOCKS = 8;
+
+    private final Set<ImportMessage> all = new LinkedHashSet<>();
+
+    void problem(String words) {
+        all.add(new ImportMessage(Weight.PROBLEM, words));
+    }
+
+    void warning(String words) {
+        all.add(new ImportMessage(Weight.WARNING, words));
+    }
+
+    private void note(String words) {
+        all.add(new ImportMessage(Weight.NOTE, words));
+    }
+
+    List<ImportMessage> list() {
+        return List.copyOf(all);
+    }
+
+    /** Number and name of a block. */
+    static String name(CurveBlock block) {
+        String name = block.name() + (block.sheet().isEmpty() ? "" : (block.name().isEmpty() ? "" : ", ") + "sheet '" + block.sheet() + "'")
+                + (block.sample() > 1 ? ", sample " + block.sample() : "");
+        return block.number() + (name.isEmpty() ? "" : " (" + name + ")");
+    }
+
+    void blocks(List<CurveBlock> blocks) {
+        for (CurveBlock block : blocks) {
+            if (!block.taken() || blocks.size() > 1 && blocks.size() <= MOST_BLOCKS) {
+                note("block " + name(block) + ": " + block.use().words() + ", " + block.usable() + " of " + block.points().size()
+                        + " points, " + (block.taken() ? "taken" : "not taken") + " (" + block.reason() + ")");
+            }
+            block.warnings().forEach(w -> warning("block " + name(block) + ": " + w));
+        }
+    }
+
+    void dropped(List<DroppedPoint> dropped) {
+        if (!dropped.isEmpty()) {
+            note(dropped.size() + (dropped.size() == 1 ? " point is dropped: " : " points are dropped: ") + named(dropped));
+        }
+    }
+
+    private static String named(List<DroppedPoint> dropped) {
+        String first = String.join("; ", dropped.stream().limit(MOST_NAMED).map(d -> d.place().words() + ", " + d.reason()).toList());
+        return first + (dropped.size() > MOST_NAMED ? "; and " + (dropped.size() - MOST_NAMED) + " more" : "");
+    }
+
+    /** Says why there is no curve, unless something said so already. */
+    void none(List<CurveBlock> blocks, List<DroppedPoint> dropped) {
+        if (all.stream().anyMatch(m -> m.weight() == Weight.PROBLEM)) {
+            return;
+        }
+        if (blocks.isEmpty()) {
+            problem("has a header and no points; a shear rate and a shear stress are expected in each row");
+            return;
+        }
+        CurveBlock best = blocks.stream().reduce((a, b) -> b.usable() > a.usable() ? b : a).orElseThrow();
+        problem("holds no flow curve: block " + name(best) + " has the most points that can be used, " + best.usable() + " of "
+                + best.points().size() + ", but is " + best.use().words() + ", not taken (" + best.reason() + ")"
+                + (dropped.isEmpty() ? "" : "; dropped: " + named(dropped)));
+    }
+}

@@ -1,0 +1,99 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import stirwright.exchange.CurveQuantity;
+import stirwright.exchange.CurveSeparator;
+import stirwright.exchange.ImportChoice;
+import stirwright.exchange.RawRow.Kind;
+import stirwright.exchange.internal.table.Numbers;
+import stirwright.exchange.internal.table.SourceRow;
+
+/**
+ * Tables whose columns have no names that are known: a shear rate and a stress are the first two that hold numbers.
+ *
+ * @param problem why that cannot be said here; empty when it can
+ */
+record Nameless(SheetSorter sorter, boolean set, String problem) {
+
+    /** Sorts the rows when two columns hold numbers. */
+    static Nameless sort(String sheet, ImportChoice choice, List<WorkRow> rows, CurveSeparator separator) {
+        SheetSorter sorter = new SheetSorter(sheet, choice, rows);
+        List<WorkRow> filled = new ArrayList<>();
+        for (WorkRow row : rows) {
+            if (row.kind != Kind.BLANK && !row.row.cell(0).startsWith("#")) {
+                filled.add(row);
+            }
+        }
+        int first = firstNumbers(filled);
+        if (first < 0) {
+            return new Nameless(sorter, false, "no row holds two numbers; a shear rate and a shear stress are expected");
+        }
+        SetHeads heads = new SetHeads();
+        boolean set = first > 0 && heads.read(filled.get(first - 1).row, true).isPresent();
+        WorkRow above = first == 0 || set ? null : filled.get(first - 1);
+        boolean headed = above != null && SheetSorter.noNumbers(above.row) && above.row.filled() > 1;
+        SourceRow names = headed ? above.row : new SourceRow(0, List.of(), null);
+        SourceRow numbers = filled.get(first).row;
+        if (!choice.columns().isEmpty()) {
+            Layout chosen = new LayoutBuilder(sheet, choice).build(names, null, null);
+            return sorted(sorter, chosen, headed ? above : null, set ? heads : null);
+        }
+        if (separator == CurveSeparator.COMMA && !headed && numbers.cells().size() > 2 && noPoint(filled)) {
+            return new Nameless(sorter, false, "line " + numbers.line() + " has " + numbers.cells().size()
+                    + " cells between commas and no decimal point, so commas may be decimal signs; name the columns in a header,"
+                    + " choose the columns, or use another separator");
+        }
+        return sorted(sorter, byPosition(names, numbers), headed ? above : null, set ? heads : null);
+    }
+
+    private static Nameless sorted(SheetSorter sorter, Layout layout, WorkRow names, SetHeads heads) {
+        if (names != null) {
+            names.kind = Kind.NAMES;
+        }
+        sorter.sort(layout, heads);
+        return new Nameless(sorter, heads != null, "");
+    }
+
+    /** The first row with two numbers; the head of a set has two as well, but a name between them. */
+    private static int firstNumbers(List<WorkRow> filled) {
+        for (int i = 0; i < filled.size(); i++) {
+            SourceRow row = filled.get(i).row;
+            boolean head = row.filled() == 3 && Numbers.isNumber(row.cell(0)) && !Numbers.isNumber(row.cell(1))
+                    && i + 1 < filled.size() && filled.get(i + 1).row.filled() == 2;
+            if (!head && numbers(row).size() > 1) {
+                return i;
+            }
+        }
+        return -1;
+    }
+
+    private static List<Integer> numbers(SourceRow row) {
+        List<Integer> numbers = new ArrayList<>();
+        for (int i = 0; i < row.cells().size() && numbers.size() < 2; i++) {
+            if (row.isTyped(i) || Numbers.isNumber(row.cell(i))) {
+                numbers.add(i);
+            }
+        }
+        return numbers;
+    }
+
+    private static boolean noPoint(List<WorkRow> rows) {
+        return rows.stream().flatMap(r -> r.row.cells().stream()).noneMatch(c -> c.indexOf('.') >= 0 && Numbers.isNumber(c));
+    }
+
+    private static Layout byPosition(SourceRow names, SourceRow numbers) {
+        List<Integer> at = numbers(numbers);
+        Map<CurveQuantity, Column> columns = new EnumMap<>(CurveQuantity.class);
+        for (int i = 0; i < 2; i++) {
+            CurveQuantity quantity = i == 0 ? CurveQuantity.SHEAR_RATE : CurveQuantity.SHEAR_STRESS;
+            columns.put(quantity, new Column(at.get(i), names.cell(at.get(i)), quantity, UnitWords.own(quantity),
+                    "no name says so: it is the " + (i == 0 ? "first" : "second") + " column with numbers; no unit stands there, "
+                            + quantity.unit() + " is assumed"));
+        }
+        int width = names.line() == 0 ? numbers.cells().size() : names.cells().size();
+        return new Layout(names.line(), List.of(Group.of(1, "", columns)), width, List.of(), List.of());
+    }
+}

@@ -1,0 +1,176 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import stirwright.exchange.CurveQuantity;
+import stirwright.exchange.ImportChoice;
+import stirwright.exchange.RawRow.Kind;
+import stirwright.exchange.internal.curves.Stretch.Heads;
+import stirwright.exchange.internal.table.Numbers;
+import stirwright.exchange.internal.table.SourceRow;
+
+/** Goes once through the rows of a sheet, says what each is, and gathers the points under their heads. */
+final class SheetSorter {
+    final List<Layout> layouts = new ArrayList<>();
+    final List<Stretch> stretches = new ArrayList<>();
+
+    private final String sheet;
+    private final ImportChoice choice;
+    private final List<WorkRow> rows;
+    private Layout layout;
+    private SourceRow names;
+    private SourceRow above;
+    private boolean unitsMayFollow;
+    /** The open stretch of each sample. */
+    private Stretch[] open = {};
+    private Heads heads = Heads.NONE;
+
+    SheetSorter(String sheet, ImportChoice choice, List<WorkRow> rows) {
+        this.sheet = sheet;
+        this.choice = choice;
+        this.rows = rows;
+    }
+
+    /** By the names of columns; finds nothing where there are none. */
+    void sort() {
+        for (int i = 0; i < rows.size(); i++) {
+            WorkRow row = rows.get(i);
+            if (row.kind == Kind.BLANK) {
+                continue;
+            }
+            boolean words = noNumbers(row.row);
+            if (words && isNames(row.row)) {
+                takeNames(i);
+            } else if (words && unitsMayFollow && isUnits(row.row)) {
+                row.kind = Kind.UNITS;
+                relayout(new LayoutBuilder(sheet, choice).build(names, row.row, above));
+                unitsMayFollow = false;
+            } else {
+                sortOther(row);
+            }
+        }
+    }
+
+    /** By a layout that is known beforehand, in a set of curves or a table without names. */
+    void sort(Layout fixed, SetHeads set) {
+        use(fixed);
+        boolean blankBefore = true;
+        int lineBefore = 0;
+        for (WorkRow row : rows) {
+            boolean gap = blankBefore || row.row.line() > lineBefore + 1;
+            lineBefore = row.row.line();
+            blankBefore = row.kind == Kind.BLANK;
+            if (blankBefore || row.kind == Kind.NAMES) {
+                continue;
+            }
+            Optional<Heads> head = set == null ? Optional.empty() : set.read(row.row, gap);
+            if (head.isPresent()) {
+                row.kind = Kind.BLOCK;
+                close(head.get());
+            } else {
+                if (set != null && gap && open.length > 0 && open[0] != null) {
+                    close(Heads.NONE);
+                }
+                sortOther(row);
+            }
+        }
+    }
+
+    private void takeNames(int at) {
+        names = rows.get(at).row;
+        above = null;
+        rows.get(at).kind = Kind.NAMES;
+        WorkRow before = at == 0 ? null : rows.get(at - 1);
+        if (before != null && before.kind == Kind.NOTE) {
+            above = before.row;
+        }
+        Layout found = new LayoutBuilder(sheet, choice).build(names, null, above);
+        if (above != null && found.groups().size() > 1) {
+            before.kind = Kind.NAMES;
+        }
+        close(heads);
+        use(found);
+        unitsMayFollow = true;
+    }
+
+    private void use(Layout found) {
+        layout = found;
+        layouts.add(found);
+        open = new Stretch[found.groups().size()];
+    }
+
+    private void relayout(Layout found) {
+        layouts.removeLast();
+        use(found);
+    }
+
+    private void sortOther(WorkRow row) {
+        if (layout != null && takePoints(row)) {
+            unitsMayFollow = false;
+            return;
+        }
+        HeadWords.read(row.row, heads).ifPresent(head -> {
+            row.kind = Kind.BLOCK;
+            close(head);
+        });
+    }
+
+    private void close(Heads next) {
+        heads = next;
+        open = new Stretch[open.length];
+    }
+
+    private boolean takePoints(WorkRow row) {
+        for (int i = 0; i < open.length; i++) {
+            Group group = layout.groups().get(i);
+            if (PointRows.isPoint(row.row, group, open.length == 1)) {
+                if (open[i] == null) {
+                    open[i] = new Stretch(layout, group, sheet, heads);
+                    stretches.add(open[i]);
+                }
+                open[i].rows.add(row);
+                row.points++;
+                row.kind = Kind.POINT;
+            }
+        }
+        return row.points > 0;
+    }
+
+    static boolean noNumbers(SourceRow row) {
+        for (int i = 0; i < row.cells().size(); i++) {
+            if (row.isTyped(i) || Numbers.isNumber(row.cell(i))) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    /** At least two names that are known, one of them of a shear rate, a stress or a viscosity. */
+    static boolean isNames(SourceRow row) {
+        int known = 0;
+        boolean main = false;
+        for (String cell : row.cells()) {
+            Optional<HeaderCell> name = HeaderCell.read(cell);
+            known += name.isPresent() ? 1 : 0;
+            main |= name.filter(n -> n.quantity() == CurveQuantity.SHEAR_RATE || n.quantity() == CurveQuantity.SHEAR_STRESS
+                    || n.quantity() == CurveQuantity.VISCOSITY).isPresent();
+        }
+        return known > 1 && main;
+    }
+
+    private boolean isUnits(SourceRow row) {
+        boolean bracketed = true;
+        for (int i = 0; i < row.cells().size(); i++) {
+            String cell = row.cell(i);
+            bracketed &= cell.isEmpty() || cell.startsWith("[") || cell.startsWith("(");
+            String unit = LayoutBuilder.inside(cell);
+            Optional<CurveQuantity> quantity = HeaderCell.read(names.cell(i)).map(HeaderCell::quantity);
+            if (!unit.isEmpty() && quantity.isPresent() && (UnitWords.find(quantity.get(), unit).isPresent()
+                    || quantity.get() == CurveQuantity.TORQUE && unit.equals("%"))) {
+                return true;
+            }
+        }
+        return bracketed;
+    }
+}

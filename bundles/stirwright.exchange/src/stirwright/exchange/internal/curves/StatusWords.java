@@ -1,0 +1,51 @@
+package stirwright.exchange.internal.curves;
+
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import stirwright.exchange.CurveQuantity;
+import stirwright.exchange.Finding;
+import stirwright.exchange.internal.table.Texts;
+
+/**
+ * What instruments write beside points. What most points have is taken for the normal state; a word that says that a
+ * point is bad drops it; any other is told.
+ *
+ * @param normal the most frequent word; empty where most points have none
+ */
+record StatusWords(String normal, Optional<Finding> finding) {
+    private static final List<String> BAD = List.of("invalid", "error", "over", "under", "out of range", "fail", "bad", "unstable",
+            "not steady", "not reached", "limit", "ungultig", "fehler", "uber", "unter", "instabil", "nicht stationar", "erreur",
+            "depass", "instable", "hors", "invalide", "invalido", "fuera", "inestable", "errore", "nan");
+
+    static StatusWords of(List<Stretch> stretches) {
+        Map<String, Integer> counts = new HashMap<>();
+        for (Stretch stretch : stretches) {
+            Column column = stretch.group.column(CurveQuantity.STATUS);
+            for (WorkRow row : column == null ? List.<WorkRow>of() : stretch.rows) {
+                counts.merge(row.row.cell(column.position()), 1, Integer::sum);
+            }
+        }
+        if (counts.isEmpty() || counts.size() == 1 && counts.containsKey("")) {
+            return new StatusWords("", Optional.empty());
+        }
+        String normal = counts.entrySet().stream()
+                .max(Map.Entry.<String, Integer>comparingByValue().thenComparing(Map.Entry.comparingByKey())).orElseThrow().getKey();
+        return new StatusWords(normal, Optional.of(new Finding(Finding.Topic.STATUS,
+                normal.isEmpty() ? "no word is the normal state" : "'" + Texts.show(normal) + "' is the normal state",
+                "most points have it; " + (counts.size() - 1) + " other words", false)));
+    }
+
+    static boolean isBad(String status) {
+        if (status.isEmpty()) {
+            return false;
+        }
+        String folded = Folded.of(Texts.show(status)).text();
+        return BAD.stream().anyMatch(word -> folded.contains(" " + word));
+    }
+
+    boolean isNormal(String status) {
+        return status.isEmpty() || status.equals(normal);
+    }
+}

@@ -1,0 +1,31 @@
+package stirwright.exchange.internal.curves;
+
+import stirwright.exchange.RawRow;
+import stirwright.exchange.internal.table.SourceRow;
+
+/** A row while it is found out what it is. */
+final class WorkRow {
+    final String sheet;
+    final SourceRow row;
+    RawRow.Kind kind = RawRow.Kind.NOTE;
+    int block;
+    /** How many points it holds. */
+    int points;
+
+    WorkRow(String sheet, SourceRow row) {
+        this.sheet = sheet;
+        this.row = row;
+        forget();
+    }
+
+    /** As before anything was found out. */
+    void forget() {
+        kind = row.blank() ? RawRow.Kind.BLANK : RawRow.Kind.NOTE;
+        points = 0;
+        block = 0;
+    }
+
+    RawRow shown() {
+        return new RawRow(sheet, row.line(), row.cells(), kind, block);
+    }
+}
