@@ -128,7 +128,7 @@ final class LayoutBuilder {
                 coming.putIfAbsent(column.quantity(), column);
             } else if (rates > 1 || !labels.get(before).equals(labels.get(column))) {
                 groups.add(group(groups.size() + 1, now));
-                Map<CurveQuantity, Column> next = new EnumMap<>(rates > 1 ? Map.of() : shared(now));
+                Map<CurveQuantity, Column> next = rates > 1 ? new EnumMap<>(CurveQuantity.class) : shared(now);
                 next.putAll(coming);
                 next.put(column.quantity(), column);
                 now = next;

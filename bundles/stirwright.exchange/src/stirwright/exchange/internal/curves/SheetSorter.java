@@ -25,6 +25,7 @@ final class SheetSorter {
     /** The open stretch of each sample. */
     private Stretch[] open = {};
     private Heads heads = Heads.NONE;
+    private Heads headsBefore = Heads.NONE;
 
     SheetSorter(String sheet, ImportChoice choice, List<WorkRow> rows) {
         this.sheet = sheet;
@@ -82,11 +83,13 @@ final class SheetSorter {
         above = null;
         rows.get(at).kind = Kind.NAMES;
         WorkRow before = at == 0 ? null : rows.get(at - 1);
-        if (before != null && before.kind == Kind.NOTE) {
+        if (before != null && (before.kind == Kind.NOTE || before.kind == Kind.BLOCK)) {
             above = before.row;
         }
         Layout found = new LayoutBuilder(sheet, choice).build(names, null, above);
         if (above != null && found.groups().size() > 1) {
+            // What looked like the head of a sample names several that stand side by side.
+            heads = before.kind == Kind.BLOCK ? headsBefore : heads;
             before.kind = Kind.NAMES;
         }
         close(heads);
@@ -106,14 +109,26 @@ final class SheetSorter {
     }
 
     private void sortOther(WorkRow row) {
-        if (layout != null && takePoints(row)) {
-            unitsMayFollow = false;
-            return;
-        }
-        HeadWords.read(row.row, heads).ifPresent(head -> {
+        Optional<Heads> head = HeadWords.read(row.row, heads);
+        if (head.isPresent() && !holdsPoint(row.row)) {
             row.kind = Kind.BLOCK;
-            close(head);
-        });
+            headsBefore = heads;
+            close(head.get());
+        } else if (layout != null && takePoints(row)) {
+            unitsMayFollow = false;
+        }
+    }
+
+    /** A row that begins like a head is a point all the same when it has a rate, or words in two of its places. */
+    private boolean holdsPoint(SourceRow row) {
+        for (Group group : layout == null ? List.<Group>of() : layout.groups()) {
+            int rate = group.column(CurveQuantity.SHEAR_RATE).position();
+            long filled = group.main().stream().filter(c -> !row.cell(c.position()).isEmpty()).count();
+            if (row.isTyped(rate) || Numbers.isNumber(row.cell(rate)) || filled > 1 && row.filled() > 2) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private void close(Heads next) {
