@@ -59,6 +59,7 @@ public final class Importer {
             layout.problems().forEach(messages::problem);
             layout.notes().forEach(messages::warning);
         });
+        messages.outside(rows);
         messages.blocks(blocks);
         messages.dropped(dropped);
         if (curves.isEmpty()) {

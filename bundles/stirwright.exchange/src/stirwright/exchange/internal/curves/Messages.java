@@ -8,6 +8,8 @@ import stirwright.exchange.CurveBlock;
 import stirwright.exchange.DroppedPoint;
 import stirwright.exchange.ImportMessage;
 import stirwright.exchange.ImportMessage.Weight;
+import stirwright.exchange.PointPlace;
+import stirwright.exchange.RawRow.Kind;
 
 /** Gathers what a reader should see, each line once. */
 final class Messages {
@@ -47,6 +49,17 @@ final class Messages {
                         + " points, " + (block.taken() ? "taken" : "not taken") + " (" + block.reason() + ")");
             }
             block.warnings().forEach(w -> warning("block " + name(block) + ": " + w));
+        }
+    }
+
+    /** Rows with numbers that belong to no table may be points whose header is damaged. */
+    void outside(List<WorkRow> rows) {
+        List<WorkRow> outside = rows.stream().filter(r -> r.kind == Kind.NOTE && r.numbers() > 1).toList();
+        if (!outside.isEmpty()) {
+            WorkRow first = outside.get(0);
+            warning(outside.size() + (outside.size() == 1 ? " row" : " rows") + " with two or more numbers under no header that is known,"
+                    + " the first on " + new PointPlace(first.sheet, first.row.line(), 1).words() + ": not read; name the columns if"
+                    + " they are points");
         }
     }
 

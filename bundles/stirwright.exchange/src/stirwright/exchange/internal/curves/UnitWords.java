@@ -1,6 +1,7 @@
 package stirwright.exchange.internal.curves;
 
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.Map;
@@ -50,7 +51,8 @@ final class UnitWords {
     static Optional<String> other(CurveQuantity quantity, UnitScale than, int power) {
         return than.factor() != 1 ? Optional.empty() : ALL.get(quantity).values().stream()
                 .filter(u -> u.factor() == 1 && u.offset() == 0 && u.power() == than.power() + power)
-                .map(UnitScale::unit).sorted().findFirst();
+                .map(UnitScale::unit)
+                .min(Comparator.comparing((String u) -> !u.contains("Pa")).thenComparing(Comparator.naturalOrder()));
     }
 
     /** Without spaces, dots between symbols and carets; superscripts as digits. */

@@ -1,6 +1,7 @@
 package stirwright.exchange.internal.curves;
 
 import stirwright.exchange.RawRow;
+import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.SourceRow;
 
 /** A row while it is found out what it is. */
@@ -23,6 +24,15 @@ final class WorkRow {
         kind = row.blank() ? RawRow.Kind.BLANK : RawRow.Kind.NOTE;
         points = 0;
         block = 0;
+    }
+
+    /** How many cells are numbers. */
+    int numbers() {
+        int count = 0;
+        for (int i = 0; i < row.cells().size(); i++) {
+            count += row.isTyped(i) || Numbers.isNumber(row.cell(i)) ? 1 : 0;
+        }
+        return count;
     }
 
     RawRow shown() {

@@ -92,10 +92,17 @@ public final class CellSplitter {
         return cell;
     }
 
-    /** The closing quote of a cell, with {@link #at} moved behind it; -1 when there is none. */
+    /**
+     * The closing quote of a cell, with {@link #at} moved behind it; -1 when there is none. A cell that holds both a line
+     * break and a separator is no cell but rows that a stray quote would swallow.
+     */
     private int closing(int from) {
         int end = Math.min(text.length(), from + LONGEST_QUOTED);
-        for (int i = from; i < end; i++) {
+        boolean broken = false;
+        boolean parted = false;
+        for (int i = from; i < end && !(broken && parted); i++) {
+            broken |= text.charAt(i) == '\n' || text.charAt(i) == '\r';
+            parted |= text.charAt(i) == separator;
             if (text.charAt(i) != '"') {
                 continue;
             }
