@@ -20,11 +20,14 @@ final class HeadWords {
 
     private HeadWords() {}
 
-    /** What the heads are with this row; empty when it is no head. */
+    /** What the heads are with this row, which is not blank; empty when it is no head. */
     static Optional<Heads> read(SourceRow row, Heads before) {
         int first = 0;
         while (row.cell(first).isEmpty()) {
             first++;
+        }
+        if (!Character.isLetter(row.cell(first).charAt(0))) {
+            return Optional.empty();
         }
         String word = Folded.of(Texts.show(row.cell(first))).words().split(" ")[0];
         String name = words(row);

@@ -48,7 +48,7 @@ public final class Importer {
         vote.doubts().forEach(messages::warning);
         StatusWords statuses = StatusWords.of(stretches);
         statuses.finding().ifPresent(findings::add);
-        PointReader reader = new PointReader(choice, vote.sign(), sources.separator());
+        PointReader reader = new PointReader(choice, vote.sign(), statuses, sources.separator());
         List<Part> parts = stretches.stream().flatMap(s -> Part.of(s, reader.read(s)).stream()).toList();
         List<CurveBlock> blocks = new Blocks(parts, choice, statuses).build(vote.tie().isEmpty());
         List<DroppedPoint> dropped = new ArrayList<>();

@@ -14,12 +14,14 @@ import stirwright.exchange.internal.table.Numbers;
 final class PointReader {
     private final ImportChoice choice;
     private final DecimalSign sign;
+    private final StatusWords statuses;
     private final boolean commas;
 
     /** @param separator null for a workbook */
-    PointReader(ImportChoice choice, DecimalSign sign, CurveSeparator separator) {
+    PointReader(ImportChoice choice, DecimalSign sign, StatusWords statuses, CurveSeparator separator) {
         this.choice = choice;
         this.sign = sign;
+        this.statuses = statuses;
         this.commas = separator == CurveSeparator.COMMA;
     }
 
@@ -53,7 +55,7 @@ final class PointReader {
         String reason = choice.leftOut().contains(place) ? "left out by hand"
                 : usable && choice.putBack().contains(place) ? ""
                 : Reasons.of(row.row, stretch.layout, rateColumn, rate, stressColumn, stressed ? stress : viscosity,
-                        group, torque, status, sign, commas);
+                        group, torque, status, statuses.isBad(status), sign, commas);
         return new ReadPoint(row, new CurvePoint(place, rate, stress, viscosity, value(row, group.column(CurveQuantity.TEMPERATURE)),
                 value(row, group.column(CurveQuantity.TIME)), torque, status, reason),
                 row.row.cell(rateColumn.position()), row.row.cell(stressColumn.position()), usable);

@@ -21,7 +21,7 @@ final class Reasons {
 
     /** Empty when nothing speaks against it. */
     static String of(SourceRow row, Layout layout, Column rateColumn, double rate, Column stressColumn, double stress, Group group,
-            double torque, String status, DecimalSign sign, boolean commas) {
+            double torque, String status, boolean badStatus, DecimalSign sign, boolean commas) {
         String extra = commas ? extraCells(row, layout) : "";
         if (!extra.isEmpty()) {
             return extra;
@@ -33,7 +33,7 @@ final class Reasons {
         }
         for (Column column : group.main()) {
             String cell = row.cell(column.position());
-            if (column != rateColumn && FULL_SCALE.matcher(cell).matches()) {
+            if (column != rateColumn && cell.startsWith("9") && FULL_SCALE.matcher(cell).matches()) {
                 return column.name() + " '" + cell + "' is a full-scale number: over range";
             }
         }
@@ -41,10 +41,13 @@ final class Reasons {
             return group.column(CurveQuantity.TORQUE_PERCENT).name() + " " + Figures.show(torque) + " % of full scale: "
                     + (torque > 0 ? "over range" : "under range");
         }
-        return StatusWords.isBad(status) ? "status '" + Texts.show(status) + "'" : "";
+        return badStatus ? "status '" + Texts.show(status) + "'" : "";
     }
 
     private static String number(SourceRow row, Column column, double value, DecimalSign sign) {
+        if (value >= LEAST && value <= MOST) {
+            return "";
+        }
         String cell = row.cell(column.position());
         String name = column.name() + " '" + Texts.show(cell) + "' ";
         if (cell.isEmpty()) {
@@ -59,7 +62,7 @@ final class Reasons {
         if (value < 0) {
             return name + "is negative; values must be greater than 0";
         }
-        return value >= LEAST && value <= MOST ? "" : name + "is beyond what any rheometer measures";
+        return name + "is beyond what any rheometer measures";
     }
 
     private static String wrong(String cell, DecimalSign sign) {

@@ -4,6 +4,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.Finding;
 import stirwright.exchange.internal.table.Texts;
@@ -13,8 +15,9 @@ import stirwright.exchange.internal.table.Texts;
  * point is bad drops it; any other is told.
  *
  * @param normal the most frequent word; empty where most points have none
+ * @param bad those that say that a point is bad
  */
-record StatusWords(String normal, Optional<Finding> finding) {
+record StatusWords(String normal, Optional<Finding> finding, Set<String> bad) {
     private static final List<String> BAD = List.of("invalid", "error", "over", "under", "out of range", "fail", "bad", "unstable",
             "not steady", "not reached", "limit", "ungultig", "fehler", "uber", "unter", "instabil", "nicht stationar", "erreur",
             "depass", "instable", "hors", "invalide", "invalido", "fuera", "inestable", "errore", "nan");
@@ -28,16 +31,21 @@ record StatusWords(String normal, Optional<Finding> finding) {
             }
         }
         if (counts.isEmpty() || counts.size() == 1 && counts.containsKey("")) {
-            return new StatusWords("", Optional.empty());
+            return new StatusWords("", Optional.empty(), Set.of());
         }
         String normal = counts.entrySet().stream()
                 .max(Map.Entry.<String, Integer>comparingByValue().thenComparing(Map.Entry.comparingByKey())).orElseThrow().getKey();
         return new StatusWords(normal, Optional.of(new Finding(Finding.Topic.STATUS,
                 normal.isEmpty() ? "no word is the normal state" : "'" + Texts.show(normal) + "' is the normal state",
-                "most points have it; " + (counts.size() - 1) + " other words", false)));
+                "most points have it; " + (counts.size() - 1) + " other words", false)),
+                counts.keySet().stream().filter(StatusWords::saysBad).collect(Collectors.toSet()));
     }
 
-    static boolean isBad(String status) {
+    boolean isBad(String status) {
+        return bad.contains(status);
+    }
+
+    private static boolean saysBad(String status) {
         if (status.isEmpty()) {
             return false;
         }

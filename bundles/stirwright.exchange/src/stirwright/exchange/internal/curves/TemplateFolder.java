@@ -9,6 +9,7 @@ import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import stirwright.exchange.ImportChoice;
 import stirwright.exchange.UnusableFileException;
+import stirwright.exchange.internal.table.Texts;
 
 /** The folder in which named choices are kept. */
 public final class TemplateFolder {
@@ -65,7 +66,7 @@ public final class TemplateFolder {
 
     private Path file(String name) {
         if (!NAME.matcher(name).matches()) {
-            throw new UnusableFileException("template '" + name + "'",
+            throw new UnusableFileException("template '" + Texts.show(name) + "'",
                     "a name has letters, digits, spaces, hyphens and underscores, at most 60 of them");
         }
         return folder.resolve(name + ENDING);

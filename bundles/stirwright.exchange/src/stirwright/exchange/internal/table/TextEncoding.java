@@ -77,7 +77,7 @@ public record TextEncoding(String text, String name, String reason) {
         try {
             String text = StandardCharsets.UTF_8.newDecoder().onMalformedInput(CodingErrorAction.REPORT)
                     .decode(ByteBuffer.wrap(bytes)).toString();
-            boolean plain = text.chars().allMatch(c -> c < 0x80);
+            boolean plain = text.length() == bytes.length;
             return Optional.of(new TextEncoding(text, "UTF-8",
                     plain ? "plain ASCII, which most character sets read alike" : "the bytes are valid UTF-8"));
         } catch (CharacterCodingException other) {
@@ -91,8 +91,11 @@ public record TextEncoding(String text, String name, String reason) {
 
     /** A few stray bytes leave a text readable; more than one in fifty are no text. */
     private static void requireText(String shown, String text) {
-        long strange = text.chars().filter(c -> c < ' ' && c != '\t' && c != '\n' && c != '\r' && c != '\f' || c == '\uFFFD')
-                .count();
+        int strange = 0;
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
+            strange += c < ' ' && c != '\t' && c != '\n' && c != '\r' && c != '\f' || c == '\uFFFD' ? 1 : 0;
+        }
         if (strange > 20 && strange > text.length() / 50) {
             throw new UnusableFileException(shown, "is no text: " + strange + " of " + text.length()
                     + " characters cannot be read; save it as CSV in UTF-8 or as .xlsx, or name its encoding");

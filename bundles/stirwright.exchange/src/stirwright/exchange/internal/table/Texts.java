@@ -24,6 +24,9 @@ public final class Texts {
     }
 
     private static boolean isSpace(char c) {
+        if (c > ' ' && c < 0x7F) {
+            return false;
+        }
         return Character.isWhitespace(c) || Character.isSpaceChar(c) || c == '\uFEFF';
     }
 
