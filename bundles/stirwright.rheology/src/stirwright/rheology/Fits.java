@@ -25,7 +25,8 @@ public final class Fits {
 	 * Fits one model. Its sum of squares never exceeds that of a model that it contains: Herschel and Bulkley's and Sisko's
 	 * never that of the power law.
 	 *
-	 * @throws IllegalArgumentException if the curve has fewer different shear rates than the model has parameters
+	 * @throws IllegalArgumentException if the curve has fewer different shear rates than the model has parameters, or does
+	 *                                  not thin and the model knows nothing else
 	 * @throws ParameterException       if the best parameters are out of the model's limits
 	 */
 	public static ModelFit one(ModelKind kind, FlowCurve curve, FitOptions options) {
@@ -41,6 +42,9 @@ public final class Fits {
 		Search.Place best = search.best();
 		if (kind == ModelKind.HERSCHEL_BULKLEY || kind == ModelKind.SISKO) {
 			best = notWorse(search, best, search(ModelKind.POWER_LAW, points, options).best());
+		}
+		if (best == null) {
+			throw new IllegalArgumentException("does not describe this curve, whose viscosity does not fall as the shear rate rises");
 		}
 		return Inference.of(kind, curve, options, points, search, best, quantiles);
 	}
