@@ -146,6 +146,7 @@ class InvariantsTest {
             case POWER_LAW -> kind.create(logUniform(0.05, 100), n);
             case BINGHAM, CASSON -> kind.create(logUniform(0.1, 100), logUniform(1e-3, 10));
             case HERSCHEL_BULKLEY -> kind.create(logUniform(0.1, 100), logUniform(0.05, 50), n);
+            case SISKO -> kind.create(logUniform(1e-3, 0.1), logUniform(1, 100), n);
             case CROSS, CARREAU -> kind.create(logUniform(1, 100), logUniform(1e-3, 0.1), logUniform(0.01, 100), n);
         };
     }

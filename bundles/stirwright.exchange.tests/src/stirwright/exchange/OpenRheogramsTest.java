@@ -9,6 +9,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashSet;
 import org.junit.jupiter.api.Test;
+import stirwright.rheology.FitOptions;
+import stirwright.rheology.ModelKind;
+import stirwright.rheology.RankedFits;
 
 /**
  * The open set of 385 measured rheograms of drilling fluids (Open Source Drilling Community, YPLCalibrationFromRheometer,
@@ -19,7 +22,7 @@ class OpenRheogramsTest {
     private static final double[] STRESSES_73 = {4.51, 4.66, 4.81, 4.96, 5.12, 5.29, 5.48, 5.67, 5.87, 6.09, 6.33, 6.59, 6.87, 7.18, 7.52,
         7.89, 8.3, 8.76, 9.28, 9.86, 10.5};
 
-    private static Path set() {
+    static Path set() {
         for (Path folder = Path.of("").toAbsolutePath(); folder != null; folder = folder.getParent()) {
             Path set = folder.resolve("shared/data/open-rheograms/RheogramSet.txt");
             if (Files.isRegularFile(set)) {
@@ -48,5 +51,20 @@ class OpenRheogramsTest {
         assertEquals("49", first.label());
         assertEquals(10, first.measurement().temperature());
         assertTrue(first.measurement().block().contains("KCl/Polymer 1.75sg 10degC"), first.measurement().block());
+    }
+
+    @Test
+    void everyModelFitsEveryCurve() {
+        for (MeasuredCurve curve : CurveImport.of(CurveSource.file(set()), ImportChoice.DETECT).curves()) {
+            RankedFits fits = CurveFits.of(curve, FitOptions.DEFAULT).fits();
+            fits.attempts().forEach(a -> assertTrue(a.fit().isPresent(), () -> curve.label() + " " + a.kind() + ": " + a.notes()));
+            assertTrue(fits.recommended().orElseThrow().determined(), curve.label());
+            assertTrue(residual(fits, ModelKind.HERSCHEL_BULKLEY) <= residual(fits, ModelKind.POWER_LAW), curve.label());
+            assertTrue(residual(fits, ModelKind.SISKO) <= residual(fits, ModelKind.POWER_LAW), curve.label());
+        }
+    }
+
+    private static double residual(RankedFits fits, ModelKind kind) {
+        return fits.attempt(kind).fit().orElseThrow().residualSumOfSquares();
     }
 }

@@ -33,6 +33,15 @@ public final class ImportTemplates {
         return folder.load(name);
     }
 
+    /**
+     * A template from a file of its own, for instance a colleague's.
+     *
+     * @throws UnusableFileException when it cannot be read, or a line of it
+     */
+    public static ImportChoice read(Path file) {
+        return TemplateFolder.read(file);
+    }
+
     /** Does nothing when there is none. */
     public void remove(String name) {
         folder.remove(name);

@@ -13,6 +13,6 @@ public record MeasuredCurve(String label, FlowCurve points, Measurement measurem
     /** A curve that comes from no file. */
     public static MeasuredCurve of(String label, FlowCurve points) {
         return new MeasuredCurve(label, points,
-                new Measurement("", "", "", Ramp.NONE, 1, Double.NaN, List.of(), List.of()));
+                new Measurement("", "", "", "", Ramp.NONE, 1, Double.NaN, List.of(), List.of()));
     }
 }

@@ -3,7 +3,6 @@ package stirwright.rheology;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
-import java.util.stream.DoubleStream;
 import java.util.stream.IntStream;
 
 /** Measured points of shear stress against shear rate, sorted by shear rate; at least three. */
@@ -104,7 +103,11 @@ public final class FlowCurve {
 
 	/** How many different shear rates there are. */
 	public int differentShearRates() {
-		return (int) DoubleStream.of(shearRates).distinct().count();
+		int different = 1;
+		for (int i = 1; i < shearRates.length; i++) {
+			different += shearRates[i] == shearRates[i - 1] ? 0 : 1;
+		}
+		return different;
 	}
 
 	/** The span of the measured shear rates. */

@@ -23,6 +23,8 @@ final class Inference {
 
 	private static final int MOST_RESTARTS = 3;
 
+	private static final int MANY = 2000;
+
 	/** Of the logarithm of a factor: e^7 is about a thousand. */
 	private static final double HOPELESS = 7;
 
@@ -144,9 +146,12 @@ final class Inference {
 		return estimates;
 	}
 
-	/** A profile along which nothing changes is a long walk to nowhere: not where a factor is unknown by a thousand. */
+	/**
+	 * A profile along which nothing changes is a long walk to nowhere: not where a factor is unknown by a thousand. And of
+	 * many points a profile is straight.
+	 */
 	private boolean worthAProfile() {
-		boolean worth = degreesOfFreedom > 0;
+		boolean worth = degreesOfFreedom > 0 && points.size() <= MANY;
 		for (int j = 0; j < scales.length; j++) {
 			worth &= place.held()[j] || scales[j] != Scale.LOG || single * Math.sqrt(free[j][j]) < HOPELESS;
 		}

@@ -16,7 +16,8 @@ public final class ModelFit {
 	private final FluidModel model;
 	private final FlowCurve curve;
 	private final FitOptions options;
-	private final double sum;
+	private final double rmsRelative;
+	private final double aicc;
 	private final double[] at;
 	private final double[] factors;
 	private final double[][] covariance;
@@ -30,7 +31,8 @@ public final class ModelFit {
 		this.model = model;
 		this.curve = curve;
 		this.options = options;
-		this.sum = place.sum();
+		this.rmsRelative = Math.sqrt(Objective.RELATIVE.residualSumOfSquares(model, curve) / curve.size());
+		this.aicc = aicc(curve, options.objective(), place.sum(), estimates.size());
 		this.at = place.at();
 		this.factors = factors;
 		this.covariance = covariance;
@@ -99,7 +101,7 @@ public final class ModelFit {
 
 	/** Root mean square of (fitted - measured) / measured, whatever the objective. */
 	public double rmsRelative() {
-		return Math.sqrt(Objective.RELATIVE.residualSumOfSquares(model, curve) / curve.size());
+		return rmsRelative;
 	}
 
 	/** ln(measured / fitted) at each point, in the order of the curve. */
@@ -120,14 +122,18 @@ public final class ModelFit {
 	 * @return NaN with too few points
 	 */
 	public double aicc() {
+		return aicc;
+	}
+
+	private static double aicc(FlowCurve curve, Objective objective, double sum, int parameters) {
 		int n = curve.size();
-		int k = estimates.size() + 1;
+		int k = parameters + 1;
 		if (n - k - 1 <= 0) {
 			return Double.NaN;
 		}
 		double measured = 0;
 		for (int i = 0; i < n; i++) {
-			double size = options.objective().slope(curve.stress(i), curve.stress(i)) * curve.stress(i);
+			double size = objective.slope(curve.stress(i), curve.stress(i)) * curve.stress(i);
 			measured += size * size / n;
 		}
 		double meanSquare = Math.max(sum / n, EQUALLY_GOOD * EQUALLY_GOOD * measured);

@@ -1,11 +1,13 @@
 package stirwright.rheology;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 import stirwright.rheology.internal.Huber;
 import stirwright.rheology.internal.Points;
@@ -25,6 +27,9 @@ public record RankedFits(FlowCurve curve, FitOptions options, List<Attempt> atte
 	/** A difference in the criterion from which on the better model has clear support, and essentially all: by the same source. */
 	private static final double SOME = 2;
 	private static final double ALL = 10;
+
+	/** From so many points on it is worth its while to fit several models at the same time. */
+	private static final int MANY = 2000;
 
 	public RankedFits {
 		attempts = List.copyOf(attempts);
@@ -49,11 +54,10 @@ public record RankedFits(FlowCurve curve, FitOptions options, List<Attempt> atte
 			points = robust(curve, options, points);
 		}
 		Quantiles quantiles = new Quantiles();
-		List<Attempt> attempts = new ArrayList<>();
-		for (ModelKind kind : ModelKind.values()) {
-			attempts.add(attempt(kind, curve, options, points, quantiles));
-		}
-		return new RankedFits(curve, options, ranked(attempts));
+		Points weighted = points;
+		Stream<ModelKind> kinds = Arrays.stream(ModelKind.values());
+		return new RankedFits(curve, options, ranked((curve.size() > MANY ? kinds.parallel() : kinds)
+				.map(kind -> attempt(kind, curve, options, weighted, quantiles)).toList()));
 	}
 
 	private static Points robust(FlowCurve curve, FitOptions options, Points points) {

@@ -24,6 +24,7 @@ import stirwright.exchange.Demo;
 import stirwright.family.discturbine.DiscTurbine;
 import stirwright.family.pitchedblade.PitchedBlade;
 import stirwright.general.GeneralRelations;
+import stirwright.rheology.ModelKind;
 
 /** The command line as a script sees it: what goes to which stream, and the exit code. */
 class CommandLineTest {
@@ -183,12 +184,47 @@ class CommandLineTest {
     }
 
     @Test
-    void fitPrintsBothModels() throws IOException {
+    void fitPrintsEveryModelWithIntervals() throws IOException {
         Path curve = folder.resolve("slip.csv");
         Files.writeString(curve, "shear_rate_1_s,shear_stress_Pa\n1,5\n3,6.2\n10,8.7\n30,13\n100,22\n300,39\n");
         assertEquals(0, run("fit", curve.toString()), err::toString);
-        assertTrue(out.toString().contains("herschel-bulkley: "), out.toString());
-        assertTrue(out.toString().contains("power-law: "), out.toString());
+        for (ModelKind kind : ModelKind.values()) {
+            assertTrue(out.toString().contains("  " + kind.id() + " "), kind + " in\n" + out);
+        }
+        assertTrue(out.toString().contains("slip: 6 points, shear rate 1 to 300 1/s; relative error, intervals of 95 %"), out.toString());
+        assertTrue(out.toString().contains("yield stress from "), out.toString());
+    }
+
+    @Test
+    void fitComparesRampsAndPoolsReplicates() throws IOException {
+        Path curve = folder.resolve("paint.csv");
+        // invented: five points up, five down, two times; the rising stresses are a quarter higher
+        StringBuilder text = new StringBuilder("shear rate 1/s;shear stress Pa\n");
+        for (double replicate : new double[] {1.01, 0.99}) {
+            for (double rate : new double[] {1, 3, 10, 30, 100}) {
+                text.append(rate).append(';').append(5 * replicate * Math.sqrt(rate)).append('\n');
+            }
+            for (double rate : new double[] {100, 30, 10, 3, 1}) {
+                text.append(rate).append(';').append(4 * replicate * Math.sqrt(rate)).append('\n');
+            }
+        }
+        Files.writeString(curve, text.toString());
+        run("fit", curve.toString());
+        assertTrue(out.toString().contains("1 more, pooled: 10 points"), out.toString());
+        assertTrue(out.toString().replaceAll("\\s+", " ").contains("stress up over down 1.250 at 1, 1.250 at 10, 1.250 at 100 1/s"),
+                out.toString());
+    }
+
+    @Test
+    void fitReadsAsATemplateSays() throws IOException {
+        Path curve = folder.resolve("odd.csv");
+        Files.writeString(curve, "a;b;c\n1;10;5\n3;30;6,2\n10;100;8,7\n30;300;13\n100;1000;22\n300;3000;39\n");
+        Path template = folder.resolve("odd.import");
+        Files.writeString(template, "column = 2|shear-rate|1/s|\ncolumn = 3|shear-stress|Pa|\ncolumn = 1|not-read||\n");
+        assertEquals(0, run("fit", curve.toString(), "--template", template.toString()), err::toString);
+        assertTrue(out.toString().contains("shear rate 10 to 3000 1/s"), out.toString());
+        assertEquals(3, run("fit", curve.toString(), "--template", folder.resolve("none.import").toString()));
+        assertTrue(err.toString().contains("there is no such"), err.toString());
     }
 
     @Test

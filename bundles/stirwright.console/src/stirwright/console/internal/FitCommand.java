@@ -3,7 +3,10 @@ package stirwright.console.internal;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.concurrent.atomic.AtomicInteger;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -12,10 +15,12 @@ import stirwright.exchange.CurveFits;
 import stirwright.exchange.CurveImport;
 import stirwright.exchange.CurveSource;
 import stirwright.exchange.ImportChoice;
+import stirwright.exchange.ImportTemplates;
 import stirwright.exchange.MeasuredCurve;
 import stirwright.exchange.Origin;
 import stirwright.exchange.Output;
 import stirwright.exchange.Outputs;
+import stirwright.exchange.SampleFits;
 import stirwright.rheology.FitOptions;
 import stirwright.rheology.Objective;
 
@@ -31,8 +36,12 @@ final class FitCommand implements Callable<Integer> {
     @Option(names = "--out", paramLabel = "FILE", description = "also write the fit table; .csv or .json; may be repeated")
     private List<Path> outputs = new ArrayList<>();
 
-    @Option(names = "--robust", description = "let points far off count less")
+    @Option(names = "--robust", description = "let points far off count less (Huber's estimate)")
     private boolean robust;
+
+    @Option(names = "--template", paramLabel = "FILE",
+            description = "read the files as this import template says, as the window keeps it; without, all is detected")
+    private Path template;
 
     FitCommand(Desk desk) {
         this.desk = desk;
@@ -40,28 +49,39 @@ final class FitCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        ImportChoice choice = template == null ? ImportChoice.DETECT : ImportTemplates.read(template);
         List<MeasuredCurve> curves = new ArrayList<>();
         for (Path file : files) {
-            CurveImport read = CurveImport.of(CurveSource.file(file), ImportChoice.DETECT);
+            CurveImport read = CurveImport.of(CurveSource.file(file), choice);
             read.report().forEach(desk.err()::println);
             curves.addAll(read.requireCurves());
         }
         FitOptions options = new FitOptions(Objective.RELATIVE, robust);
-        Progress progress = new Progress(desk.err(), "curves", curves.size());
-        List<CurveFits> fits = new ArrayList<>();
-        for (MeasuredCurve curve : curves) {
-            fits.add(CurveFits.of(curve, options));
-            progress.reached(fits.size());
-        }
-        progress.done();
-        Outputs written = new Outputs(new Origin(desk.version(), ""), files);
+        List<CurveFits> fits = fit(curves, options);
+        List<SampleFits> samples = SampleFits.of(fits, options);
+        List<CurveFits> all = Stream.concat(fits.stream(), samples.stream().flatMap(s -> s.pooled().stream())).toList();
+        List<Path> inputs = new ArrayList<>(files);
+        Optional.ofNullable(template).ifPresent(inputs::add);
+        Outputs written = new Outputs(new Origin(desk.version(), ""), inputs);
         for (Path file : outputs) {
             try (Output<CurveFits> output = written.fits(file)) {
-                fits.forEach(output::add);
+                all.forEach(output::add);
                 output.finish();
             }
         }
-        new FitView(desk.out()).print(fits);
+        new FitView(desk.out()).print(all, samples);
         return ExitCode.of(fits.stream().map(CurveFits::status).reduce(Status.OK, Status::worseOf));
+    }
+
+    private List<CurveFits> fit(List<MeasuredCurve> curves, FitOptions options) {
+        Progress progress = new Progress(desk.err(), "curves", curves.size());
+        AtomicInteger done = new AtomicInteger();
+        List<CurveFits> fits = curves.parallelStream().map(curve -> {
+            CurveFits one = CurveFits.of(curve, options);
+            progress.reached(done.incrementAndGet());
+            return one;
+        }).toList();
+        progress.done();
+        return fits;
     }
 }

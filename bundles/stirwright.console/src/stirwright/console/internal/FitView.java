@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import stirwright.correlation.Figures;
 import stirwright.exchange.CurveFits;
+import stirwright.exchange.SampleFits;
 import stirwright.rheology.Estimate;
 import stirwright.rheology.Interval;
 import stirwright.rheology.ModelFit;
@@ -18,12 +19,14 @@ final class FitView {
         this.out = out;
     }
 
-    void print(List<CurveFits> fits) {
+    /** @param samples those of several curves are summed up below */
+    void print(List<CurveFits> fits, List<SampleFits> samples) {
         StringBuilder text = new StringBuilder();
         for (CurveFits curve : fits) {
             append(text, curve);
             text.append('\n');
         }
+        samples.forEach(sample -> SampleView.append(text, sample));
         out.print(text);
         out.flush();
     }

@@ -22,7 +22,8 @@ final class Progress {
         this.total = total;
     }
 
-    void reached(int count) {
+    /** May be called by several threads. */
+    synchronized void reached(int count) {
         if (watched && count < total && System.nanoTime() - start > AFTER_NANOS) {
             err.print("\r" + count + " of " + total + " " + things + " (Ctrl-C stops) ");
             err.flush();

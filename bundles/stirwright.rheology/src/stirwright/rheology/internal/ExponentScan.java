@@ -7,7 +7,7 @@ import java.util.List;
 /** Looks for the valleys of stress = first * f + second * rate^n over n. */
 final class ExponentScan {
 
-	private static final double STEP = 0.05;
+	private static final double STEP = 0.1;
 
 	/** Makes coordinates of an exponent and its two terms; the rates were divided by exp(reference). */
 	interface Coordinates {

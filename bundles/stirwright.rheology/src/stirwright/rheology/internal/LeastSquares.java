@@ -32,9 +32,11 @@ public final class LeastSquares {
 	private static final int MOST_LAST_STEPS = 50;
 	private static final int MOST_STALLED = 3;
 	private static final double LAST_DIGIT = 1e-14;
+	private static final double CLOSE = 1e-7;
 
-	/** A last step shorter than this says that the steps went to a minimum. */
+	/** A shortest step no longer than this says that the steps went to a minimum. */
 	private static final double NEAR = 1e-10;
+	private static final double CLOSE_ENOUGH = 1e-5;
 
 	/** Of a sum of squares, relative: what rounding may do to it. */
 	private static final double NOISE = 1e-11;
@@ -79,11 +81,20 @@ public final class LeastSquares {
 
 	/** Searches from a start, which may be there already, with steps of Gauss and Newton's, which find the last digits. */
 	public static Minimum toTheLastDigit(Deviations function, double[] start) {
+		return refined(function, start, LAST_DIGIT, NEAR);
+	}
+
+	/** The same to a relative 1e-7 of the coordinates. */
+	public static Minimum closely(Deviations function, double[] start) {
+		return refined(function, start, CLOSE, CLOSE_ENOUGH);
+	}
+
+	private static Minimum refined(Deviations function, double[] start, double wanted, double near) {
 		LeastSquares search = new LeastSquares(function);
 		search.evaluate(start);
-		if (!(search.lastSteps() <= NEAR)) {
+		if (!(search.lastSteps(wanted) <= near)) {
 			search.search(search.best.at(), TOLERANCE, MOST_ITERATIONS);
-			search.lastSteps();
+			search.lastSteps(wanted);
 		}
 		return search.best;
 	}
@@ -127,8 +138,8 @@ public final class LeastSquares {
 		return here;
 	}
 
-	/** How long the shortest of them was, relative to the coordinates. */
-	private double lastSteps() {
+	/** Steps until one is no longer than is wanted; how long the shortest was, relative to the coordinates. */
+	private double lastSteps(double wanted) {
 		double shortest = Double.POSITIVE_INFINITY;
 		int stalled = 0;
 		for (int i = 0; i < MOST_LAST_STEPS && stalled < MOST_STALLED; i++) {
@@ -136,7 +147,7 @@ public final class LeastSquares {
 			double length = relativeLength(step, best.at());
 			stalled = length < 0.95 * shortest ? 0 : stalled + 1;
 			shortest = Math.min(shortest, length);
-			if (!(length > LAST_DIGIT)) {
+			if (!(length > wanted)) {
 				return length;
 			}
 			double[] next = best.at().clone();

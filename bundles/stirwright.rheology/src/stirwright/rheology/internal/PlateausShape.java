@@ -18,14 +18,17 @@ public abstract class PlateausShape implements Shape {
 	/** Of the logarithm of the time constant; beyond it no plateau is ever seen. */
 	private static final double FARTHEST = 60;
 
-	private static final double[] INDICES = { 0.001, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9 };
+	private static final double[] INDICES = { 0.001, 0.15, 0.3, 0.45, 0.6, 0.75, 0.9 };
 
 	/** Natural logarithms: how far below the lowest rate, and above the highest, a bend is looked for; and in what steps. */
 	private static final double BELOW = 12;
 	private static final double ABOVE = 4;
-	private static final double STEP = 1;
+	private static final double STEP = 1.5;
 
 	private static final int VALLEYS = 2;
+
+	/** A valley of so many times the lowest sum in the scan does not become the lowest. */
+	private static final double HOPELESS = 4;
 
 	private record Place(double time, double n, TwoTerms terms) {
 	}
@@ -113,7 +116,8 @@ public abstract class PlateausShape implements Shape {
 		lowest.sort(Comparator.comparingDouble(p -> p.terms().residual()));
 		List<Place> chosen = new ArrayList<>();
 		for (Place place : lowest) {
-			if (chosen.size() < VALLEYS && chosen.stream().noneMatch(c -> near(c, place))) {
+			boolean hopeful = place.terms().residual() < HOPELESS * lowest.get(0).terms().residual() || place == lowest.get(0);
+			if (hopeful && chosen.size() < VALLEYS && chosen.stream().noneMatch(c -> near(c, place))) {
 				chosen.add(place);
 			}
 		}
@@ -122,6 +126,6 @@ public abstract class PlateausShape implements Shape {
 	}
 
 	private static boolean near(Place one, Place other) {
-		return Math.abs(one.time() - other.time()) < 3 * STEP;
+		return Math.abs(one.time() - other.time()) <= 2 * STEP;
 	}
 }

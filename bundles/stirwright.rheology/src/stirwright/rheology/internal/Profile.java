@@ -82,9 +82,17 @@ public final class Profile {
 				far = distance;
 				farHeight = height;
 			}
-			reach = next(near, nearHeight, far, farHeight, level);
+			double bent = i == 0 && error > 0 ? bent(distance, height, error, level) : Double.NaN;
+			reach = bent > near && !(bent >= far) ? bent : next(near, nearHeight, far, farHeight, level);
 		}
 		return centre + side * (near + reach) / 2;
+	}
+
+	/** Where the parabola through the first place, with the slope of the linearised model where it starts, reaches the level. */
+	private static double bent(double distance, double height, double error, double level) {
+		double slope = 1 / error;
+		double bend = (height - slope * distance) / (distance * distance);
+		return 2 * level / (slope + Math.sqrt(slope * slope + 4 * bend * level));
 	}
 
 	/** On the straight line between what is too near and what is too far; without the latter, farther. */

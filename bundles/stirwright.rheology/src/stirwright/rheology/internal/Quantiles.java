@@ -1,18 +1,18 @@
 package stirwright.rheology.internal;
 
-import java.util.HashMap;
 import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 
 import org.apache.commons.math3.distribution.FDistribution;
 import org.apache.commons.math3.distribution.TDistribution;
 
-/** Quantiles for intervals of 95 %, each computed once. Not thread-safe. */
+/** Quantiles for intervals of 95 %, each computed once. */
 public final class Quantiles {
 
 	private static final double CONFIDENCE = 0.95;
 
-	private final Map<Integer, Double> single = new HashMap<>();
-	private final Map<Long, Double> joint = new HashMap<>();
+	private final Map<Integer, Double> single = new ConcurrentHashMap<>();
+	private final Map<Long, Double> joint = new ConcurrentHashMap<>();
 
 	/** How many standard errors to each side hold one parameter: Student's t. */
 	public double single(int degreesOfFreedom) {

@@ -38,7 +38,7 @@ public final class Search {
 	public Place best() {
 		if (points.size() > MANY) {
 			Place rough = new Search(shape, points.thinned(MANY), measure).best();
-			return rough == null ? null : toTheLastDigit(from(rough.at(), -1));
+			return rough == null ? null : toTheLastDigit(rough);
 		}
 		Place best = null;
 		for (double[] start : shape.starts(points)) {
@@ -72,8 +72,10 @@ public final class Search {
 	}
 
 	private Place toTheLastDigit(Place place) {
-		double[] last = LeastSquares.toTheLastDigit(
-				free(place.at(), place.held(), -1), pick(place.at(), place.held(), -1)).at();
+		LeastSquares.Deviations free = free(place.at(), place.held(), -1);
+		double[] start = pick(place.at(), place.held(), -1);
+		// Against the errors of the points, which many of them shrink a hundredfold or so, more digits would say nothing.
+		double[] last = (points.size() > MANY ? LeastSquares.closely(free, start) : LeastSquares.toTheLastDigit(free, start)).at();
 		double[] at = spread(last, place.at(), place.held(), -1);
 		return IntStream.range(0, size).allMatch(j -> inside(j, at[j]))
 				? new Place(at, place.held(), evaluate(at).sum()) : place;

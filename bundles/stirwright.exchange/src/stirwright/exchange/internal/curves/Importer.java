@@ -125,8 +125,8 @@ public final class Importer {
                 curves.add(new MeasuredCurve(names.next(block, parts.get(i)),
                         FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
                                 taken.stream().mapToDouble(CurvePoint::shearStress).toArray()),
-                        new Measurement(source.name(), source.sha256(), Messages.name(block), block.use().ramp(), block.replicate(),
-                                block.temperature(), here, block.warnings())));
+                        new Measurement(source.name(), source.sha256(), Messages.name(block),
+                                parts.get(i).stretch().sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here, block.warnings())));
             }
         }
         return curves;

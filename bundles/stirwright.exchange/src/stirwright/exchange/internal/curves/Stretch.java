@@ -2,6 +2,8 @@ package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** Rows of points of one sample under one head. */
 final class Stretch {
@@ -38,5 +40,11 @@ final class Stretch {
     /** What its sample is called, by its head or by the header of its columns. */
     String sample() {
         return group.label().isEmpty() || layout.groups().size() == 1 ? heads.sample() : group.label();
+    }
+
+    /** What tells its sample from others of the source; empty where nothing does. Equal names are one sample. */
+    String sampleName() {
+        String place = sample().isEmpty() && layout.groups().size() > 1 ? "sample " + group.sample() : "";
+        return Stream.of(heads.own(), sample(), place).filter(w -> !w.isEmpty()).collect(Collectors.joining(" "));
     }
 }

@@ -45,7 +45,10 @@ public final class TemplateFolder {
     }
 
     public ImportChoice load(String name) {
-        Path file = file(name);
+        return read(file(name));
+    }
+
+    public static ImportChoice read(Path file) {
         try {
             return TemplateText.read(file, Files.readString(file));
         } catch (NoSuchFileException missing) {

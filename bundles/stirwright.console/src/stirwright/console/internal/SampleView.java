@@ -1,0 +1,68 @@
+package stirwright.console.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import stirwright.correlation.Figures;
+import stirwright.exchange.SampleFits;
+import stirwright.rheology.Hysteresis;
+import stirwright.rheology.MeasuredWindow;
+import stirwright.rheology.TemperatureLaw;
+import stirwright.rheology.YieldRange;
+
+/** What the curves of a sample say together, laid out for reading. */
+final class SampleView {
+    private static final String INDENT = "  ";
+
+    private SampleView() {}
+
+    /** Nothing for a sample that says no more than its one curve. */
+    static void append(StringBuilder text, SampleFits sample) {
+        List<String> lines = new ArrayList<>();
+        sample.loops().forEach(loop -> lines.add(loop(loop)));
+        sample.yieldStress().filter(range -> range.high() > 0).ifPresent(range -> lines.addAll(yieldStress(range)));
+        sample.law().ifPresent(law -> lines.addAll(law(law)));
+        if (lines.isEmpty()) {
+            return;
+        }
+        text.append("Sample ").append(sample.name()).append('\n');
+        lines.forEach(line -> Columns.appendWrapped(text, INDENT, line, CaseView.WIDTH));
+        text.append('\n');
+    }
+
+    private static String loop(SampleFits.Loop loop) {
+        Hysteresis between = loop.hysteresis();
+        MeasuredWindow common = between.common();
+        double middle = Math.sqrt(common.min() * common.max());
+        return String.format(Locale.ROOT, "up against down%s: area %s Pa/s, %.1f %% of that under the rising curve; stress up over"
+                + " down %.3f at %s, %.3f at %s, %.3f at %s 1/s",
+                Double.isNaN(loop.temperature()) ? "" : " at " + Figures.show(loop.temperature()) + " deg C",
+                Figures.show(between.area()), 100 * between.relativeArea(), between.ratioAt(common.min()), Figures.show(common.min()),
+                between.ratioAt(middle), Figures.show(middle), between.ratioAt(common.max()), Figures.show(common.max()));
+    }
+
+    private static List<String> yieldStress(YieldRange range) {
+        List<String> lines = new ArrayList<>(List.of("yield stress from " + Figures.show(range.low()) + " to "
+                + Figures.show(range.high()) + " Pa, by model and ramp, intervals of 95 % included"));
+        range.sources().stream().filter(s -> !s.counted())
+                .forEach(s -> lines.add("  left out: " + Figures.show(s.value()) + " Pa by " + s.name() + ", which " + s.why()));
+        return lines;
+    }
+
+    private static List<String> law(TemperatureLaw law) {
+        List<String> lines = new ArrayList<>(List.of(law.kind().id() + " from " + Figures.show(law.lowest()) + " to "
+                + Figures.show(law.highest()) + " deg C, one flow index, all else by Arrhenius's law:"));
+        for (TemperatureLaw.Line line : law.lines()) {
+            lines.add("  " + line.parameter().title() + (line.parameter().name().equals("flow_index")
+                    ? " " + Figures.show(line.intercept())
+                    : String.format(Locale.ROOT, ": activation energy %s kJ/mol%s, within %.1f %% of each temperature's own value",
+                            Figures.show(line.activationEnergy() / 1000), interval(line), 100 * line.worst())));
+        }
+        return lines;
+    }
+
+    private static String interval(TemperatureLaw.Line line) {
+        return line.interval().known() ? " (" + Figures.show(line.interval().low() / 1000) + " to "
+                + Figures.show(line.interval().high() / 1000) + ")" : "";
+    }
+}

@@ -1,0 +1,71 @@
+package stirwright.exchange;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.Arrays;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import stirwright.rheology.FitOptions;
+import stirwright.rheology.FlowCurve;
+import stirwright.rheology.FluidModel;
+import stirwright.rheology.HerschelBulkley;
+import stirwright.rheology.ModelKind;
+import stirwright.rheology.PowerLaw;
+
+/** What several curves of a sample say together; all invented, computed from known parameters. */
+class SampleFitsTest {
+    private static final double[] RATES = {0.1, 0.5, 1, 5, 10, 50, 100};
+
+    private static CurveFits curve(String sample, Ramp ramp, int replicate, double celsius, FluidModel model) {
+        FlowCurve points = FlowCurve.of(RATES, Arrays.stream(RATES).map(model::stress).toArray());
+        Measurement from = new Measurement("invented.txt", "", "", sample, ramp, replicate, celsius, List.of(), List.of());
+        return CurveFits.of(new MeasuredCurve(sample + " " + ramp.word() + " " + replicate + " " + celsius, points, from), FitOptions.DEFAULT);
+    }
+
+    private static List<SampleFits> samples(CurveFits... curves) {
+        return SampleFits.of(List.of(curves), FitOptions.DEFAULT);
+    }
+
+    @Test
+    void curvesOfDifferentSamplesAreNeverPooled() {
+        List<SampleFits> samples = samples(curve("A", Ramp.UP, 1, 25, new PowerLaw(8, 0.4)), curve("B", Ramp.UP, 1, 25, new PowerLaw(9, 0.4)));
+        assertEquals(List.of("A", "B"), samples.stream().map(SampleFits::name).toList());
+        assertTrue(samples.stream().allMatch(s -> s.pooled().isEmpty() && s.loops().isEmpty()));
+    }
+
+    @Test
+    void replicatesOfOneRampArePooledAndRampsNever() {
+        SampleFits sample = samples(
+                curve("", Ramp.UP, 1, 25, new PowerLaw(8.2, 0.4)), curve("", Ramp.UP, 2, 25.4, new PowerLaw(7.8, 0.4)),
+                curve("", Ramp.DOWN, 1, 25, new PowerLaw(4, 0.4))).get(0);
+        assertEquals("invented.txt", sample.name());
+        assertEquals(1, sample.pooled().size());
+        CurveFits pooled = sample.pooled().get(0);
+        assertEquals(2 * RATES.length, pooled.curve().points().size());
+        // two power laws of one index, by their relative deviations: K = (1/8.2 + 1/7.8) / (1/8.2^2 + 1/7.8^2)
+        double expected = (1 / 8.2 + 1 / 7.8) / (1 / (8.2 * 8.2) + 1 / (7.8 * 7.8));
+        assertEquals(expected, pooled.fits().attempt(ModelKind.POWER_LAW).fit().orElseThrow().estimate("consistency").value(), 1e-6);
+        // up over down: the geometric mean of 8.2 and 7.8 over 4
+        assertEquals(Math.sqrt(8.2 * 7.8) / 4, sample.loops().get(0).hysteresis().ratioAt(3), 1e-9);
+    }
+
+    @Test
+    void theYieldStressSpansRamps() {
+        SampleFits sample = samples(curve("", Ramp.UP, 1, 25, new HerschelBulkley(20, 5, 0.5)),
+                curve("", Ramp.DOWN, 1, 25, new HerschelBulkley(14, 5, 0.5))).get(0);
+        assertTrue(sample.yieldStress().orElseThrow().low() <= 14.001);
+        assertTrue(sample.yieldStress().orElseThrow().high() >= 19.999);
+    }
+
+    @Test
+    void severalTemperaturesMakeALaw() {
+        CurveFits[] curves = Stream.of(20.0, 40.0, 60.0).map(celsius -> curve("", Ramp.UP, 1, celsius,
+                new PowerLaw(8 * Math.exp(40e3 / 8.31446261815324 * (1 / (celsius + 273.15) - 1 / 313.15)), 0.4))).toArray(CurveFits[]::new);
+        SampleFits sample = samples(curves).get(0);
+        assertEquals(40e3, sample.law().orElseThrow().lines().get(0).activationEnergy(), 4);
+        assertTrue(sample.pooled().isEmpty(), "curves of different temperatures are no replicates");
+        assertTrue(samples(curves[0]).get(0).law().isEmpty());
+    }
+}
