@@ -28,7 +28,7 @@ class ImportSpeedTest {
         CurveSource source = CurveSource.clipboard(text);
         ThreadMXBean threads = ManagementFactory.getThreadMXBean();
         double best = Double.MAX_VALUE;
-        for (int i = 0; i < 5; i++) {
+        for (int i = 0; i < 5 && best >= MOST_SECONDS; i++) {
             long begin = threads.getCurrentThreadCpuTime();
             CurveImport read = CurveImport.of(source, ImportChoice.DETECT);
             best = Math.min(best, 1e-9 * (threads.getCurrentThreadCpuTime() - begin));

@@ -48,9 +48,13 @@ record Folded(String of, String text, int[] origins) {
         return Character.isLetterOrDigit(bare.charAt(0)) ? bare : " ";
     }
 
-    /** Where these words begin as whole words; -1 when they do not occur. */
+    /**
+     * Where these words begin as whole words; -1 when they do not occur.
+     *
+     * @param words with a space at both ends
+     */
     int find(String words) {
-        int at = text.indexOf(" " + words + " ");
+        int at = text.indexOf(words);
         return at < 0 ? -1 : at + 1;
     }
 
@@ -64,9 +68,10 @@ record Folded(String of, String text, int[] origins) {
         return of.substring(Math.min(of.length(), origins[at + length - 1] + 1));
     }
 
-    boolean has(Iterable<String> words) {
+    /** @param words each with a space at both ends */
+    boolean hasAny(Iterable<String> words) {
         for (String word : words) {
-            if (text.contains(" " + word + " ")) {
+            if (text.contains(word)) {
                 return true;
             }
         }

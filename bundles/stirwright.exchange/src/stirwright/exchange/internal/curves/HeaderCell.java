@@ -27,13 +27,13 @@ record HeaderCell(CurveQuantity quantity, String unit, String label) {
             return Optional.empty();
         }
         Folded folded = Folded.of(text);
-        if (folded.has(HeaderWords.OTHER_THINGS)) {
+        if (folded.hasAny(HeaderWords.OTHER_THINGS)) {
             return Optional.empty();
         }
         for (Map.Entry<String, CurveQuantity> phrase : HeaderWords.BY_LENGTH) {
             int at = folded.find(phrase.getKey());
             if (at >= 0) {
-                return Optional.of(named(phrase.getValue(), folded.before(at), folded.after(at, phrase.getKey().length())));
+                return Optional.of(named(phrase.getValue(), folded.before(at), folded.after(at, phrase.getKey().length() - 2)));
             }
         }
         return shortly(folded);
@@ -46,7 +46,7 @@ record HeaderCell(CurveQuantity quantity, String unit, String label) {
         if (candidates.isEmpty()) {
             return folded.of().strip().equals("%") ? Optional.of(new HeaderCell(CurveQuantity.TORQUE_PERCENT, "%", "")) : Optional.empty();
         }
-        int at = folded.find(first);
+        int at = folded.find(" " + first + " ");
         String rest = folded.after(at, first.length());
         for (CurveQuantity quantity : candidates) {
             HeaderCell cell = named(quantity, folded.before(at), rest);

@@ -17,7 +17,7 @@ import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
+import java.util.stream.Stream;
 import stirwright.exchange.CurveQuantity;
 
 /**
@@ -26,16 +26,16 @@ import stirwright.exchange.CurveQuantity;
  */
 final class HeaderWords {
 
-    /** Words that stand for a quantity wherever they occur in a header. */
+    /** Words that stand for a quantity wherever they occur in a header, between spaces. */
     private static final Map<String, CurveQuantity> PHRASES = new HashMap<>();
-    /** The same, the longest first, so that "vitesse de cisaillement" is no "vitesse". */
+    /** The same between spaces, the longest first, so that "vitesse de cisaillement" is no "vitesse". */
     static final List<Map.Entry<String, CurveQuantity>> BY_LENGTH;
     /** Words that do so only when a header begins with them and a unit or nothing follows. */
     static final Map<String, List<CurveQuantity>> SHORT = new HashMap<>();
-    /** A header with one of these is something else: a normal stress, a set value, a standard deviation. */
-    static final Set<String> OTHER_THINGS = Set.of("normal", "yield", "modulus", "complex", "kinematic", "intrinsic", "inherent",
+    /** A header with one of these is something else: a normal stress, a set value, a standard deviation; between spaces. */
+    static final List<String> OTHER_THINGS = Stream.of("normal", "yield", "modulus", "complex", "kinematic", "intrinsic", "inherent",
             "relative", "deviation", "error", "sd", "std", "stdev", "set", "setpoint", "target", "soll", "sollwert", "consigne",
-            "consigna", "modul", "normalspannung", "fliessgrenze", "komplexe", "abweichung", "ecart", "desviacion", "log", "ln");
+            "consigna", "modul", "normalspannung", "fliessgrenze", "komplexe", "abweichung", "ecart", "desviacion", "log", "ln").map(HeaderWords::between).toList();
 
     static {
         phrases(SHEAR_RATE, "shear rate", "shearrate", "rate of shear", "shear strain rate", "gamma dot", "gammadot", "gamma punkt",
@@ -75,9 +75,13 @@ final class HeaderWords {
 
     private HeaderWords() {}
 
+    private static String between(String words) {
+        return " " + words + " ";
+    }
+
     private static void phrases(CurveQuantity quantity, String... words) {
         for (String word : words) {
-            if (PHRASES.put(word, quantity) != null) {
+            if (PHRASES.put(between(word), quantity) != null) {
                 throw new IllegalStateException(word + " has two meanings");
             }
         }

@@ -70,6 +70,7 @@ public final class Importer {
     }
 
     private void sort(Sources sources) {
+        HeaderCells headers = new HeaderCells();
         List<List<WorkRow>> sheets = new ArrayList<>();
         for (SourceSheet sheet : sources.sheets()) {
             List<WorkRow> all = new ArrayList<>(sheet.rows().size());
@@ -78,7 +79,7 @@ public final class Importer {
             }
             sheets.add(all);
             rows.addAll(all);
-            SheetSorter sorter = new SheetSorter(sheet.name(), choice, all);
+            SheetSorter sorter = new SheetSorter(sheet.name(), choice, headers, all);
             sorter.sort();
             take(sorter);
         }
@@ -87,7 +88,7 @@ public final class Importer {
             layout = "no names of columns";
             for (int i = 0; i < sheets.size(); i++) {
                 sheets.get(i).forEach(WorkRow::forget);
-                Nameless nameless = Nameless.sort(sources.sheets().get(i).name(), choice, sheets.get(i), sources.separator());
+                Nameless nameless = Nameless.sort(sources.sheets().get(i).name(), choice, headers, sheets.get(i), sources.separator());
                 take(nameless.sorter());
                 if (!nameless.problem().isEmpty() && sheets.size() == 1) {
                     messages.problem(nameless.problem());

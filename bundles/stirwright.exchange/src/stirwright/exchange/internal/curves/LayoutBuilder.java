@@ -24,13 +24,15 @@ final class LayoutBuilder {
 
     private final String sheet;
     private final ImportChoice choice;
+    private final HeaderCells headers;
     private final List<String> problems = new ArrayList<>();
     private final List<String> notes = new ArrayList<>();
     private final Map<Column, String> labels = new IdentityHashMap<>();
 
-    LayoutBuilder(String sheet, ImportChoice choice) {
+    LayoutBuilder(String sheet, ImportChoice choice, HeaderCells headers) {
         this.sheet = sheet;
         this.choice = choice;
+        this.headers = headers;
     }
 
     /**
@@ -63,7 +65,7 @@ final class LayoutBuilder {
 
     private Column column(String name, String unitBelow, int position) {
         Optional<ColumnChoice> said = choice.columns().stream().filter(c -> c.speaksOf(sheet, position + 1)).findFirst();
-        Optional<HeaderCell> read = HeaderCell.read(name);
+        Optional<HeaderCell> read = headers.read(name);
         if (said.isPresent()) {
             CurveQuantity quantity = said.get().quantity().orElse(null);
             String unit = !said.get().unit().isEmpty() ? said.get().unit() : !unitBelow.isEmpty() ? inside(unitBelow)

@@ -19,8 +19,8 @@ import stirwright.exchange.internal.table.SourceRow;
 record Nameless(SheetSorter sorter, boolean set, String problem) {
 
     /** Sorts the rows when two columns hold numbers. */
-    static Nameless sort(String sheet, ImportChoice choice, List<WorkRow> rows, CurveSeparator separator) {
-        SheetSorter sorter = new SheetSorter(sheet, choice, rows);
+    static Nameless sort(String sheet, ImportChoice choice, HeaderCells cells, List<WorkRow> rows, CurveSeparator separator) {
+        SheetSorter sorter = new SheetSorter(sheet, choice, cells, rows);
         List<WorkRow> filled = new ArrayList<>();
         for (WorkRow row : rows) {
             if (row.kind != Kind.BLANK && !row.row.cell(0).startsWith("#")) {
@@ -38,7 +38,7 @@ record Nameless(SheetSorter sorter, boolean set, String problem) {
         SourceRow names = headed ? above.row : new SourceRow(0, List.of(), null);
         SourceRow numbers = filled.get(first).row;
         if (!choice.columns().isEmpty()) {
-            Layout chosen = new LayoutBuilder(sheet, choice).build(names, null, null);
+            Layout chosen = new LayoutBuilder(sheet, choice, cells).build(names, null, null);
             return sorted(sorter, chosen, headed ? above : null, set ? heads : null);
         }
         if (separator == CurveSeparator.COMMA && !headed && numbers.cells().size() > 2 && noPoint(filled)) {

@@ -17,6 +17,7 @@ final class SheetSorter {
 
     private final String sheet;
     private final ImportChoice choice;
+    private final HeaderCells headers;
     private final List<WorkRow> rows;
     private Layout layout;
     private SourceRow names;
@@ -27,9 +28,10 @@ final class SheetSorter {
     private Heads heads = Heads.NONE;
     private Heads headsBefore = Heads.NONE;
 
-    SheetSorter(String sheet, ImportChoice choice, List<WorkRow> rows) {
+    SheetSorter(String sheet, ImportChoice choice, HeaderCells headers, List<WorkRow> rows) {
         this.sheet = sheet;
         this.choice = choice;
+        this.headers = headers;
         this.rows = rows;
     }
 
@@ -41,11 +43,11 @@ final class SheetSorter {
                 continue;
             }
             boolean words = noNumbers(row.row);
-            if (words && isNames(row.row)) {
+            if (words && headers.areNames(row.row)) {
                 takeNames(i);
             } else if (words && unitsMayFollow && isUnits(row.row)) {
                 row.kind = Kind.UNITS;
-                relayout(new LayoutBuilder(sheet, choice).build(names, row.row, above));
+                relayout(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
                 unitsMayFollow = false;
             } else {
                 sortOther(row);
@@ -86,7 +88,7 @@ final class SheetSorter {
         if (before != null && (before.kind == Kind.NOTE || before.kind == Kind.BLOCK)) {
             above = before.row;
         }
-        Layout found = new LayoutBuilder(sheet, choice).build(names, null, above);
+        Layout found = new LayoutBuilder(sheet, choice, headers).build(names, null, above);
         if (above != null && found.groups().size() > 1) {
             // What looked like the head of a sample names several that stand side by side.
             heads = before.kind == Kind.BLOCK ? headsBefore : heads;
@@ -161,26 +163,13 @@ final class SheetSorter {
         return true;
     }
 
-    /** At least two names that are known, one of them of a shear rate, a stress or a viscosity. */
-    static boolean isNames(SourceRow row) {
-        int known = 0;
-        boolean main = false;
-        for (String cell : row.cells()) {
-            Optional<HeaderCell> name = HeaderCell.read(cell);
-            known += name.isPresent() ? 1 : 0;
-            main |= name.filter(n -> n.quantity() == CurveQuantity.SHEAR_RATE || n.quantity() == CurveQuantity.SHEAR_STRESS
-                    || n.quantity() == CurveQuantity.VISCOSITY).isPresent();
-        }
-        return known > 1 && main;
-    }
-
     private boolean isUnits(SourceRow row) {
         boolean bracketed = true;
         for (int i = 0; i < row.cells().size(); i++) {
             String cell = row.cell(i);
             bracketed &= cell.isEmpty() || cell.startsWith("[") || cell.startsWith("(");
             String unit = LayoutBuilder.inside(cell);
-            Optional<CurveQuantity> quantity = HeaderCell.read(names.cell(i)).map(HeaderCell::quantity);
+            Optional<CurveQuantity> quantity = headers.read(names.cell(i)).map(HeaderCell::quantity);
             if (!unit.isEmpty() && quantity.isPresent() && (UnitWords.find(quantity.get(), unit).isPresent()
                     || quantity.get() == CurveQuantity.TORQUE && unit.equals("%"))) {
                 return true;
