@@ -11,7 +11,6 @@ import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import stirwright.exchange.InventedCurve.Point;
 
 /** What is said of curves whose units, ranges or status words cannot be right. */
 class CurveChecksTest {
@@ -50,37 +49,6 @@ class CurveChecksTest {
         CurveImport read = read(table("shear rate [1/s]", "shear stress [kPa]", "viscosity [cP]", -3, 3));
         assertEquals(List.of(), read.requireCurves().get(0).measurement().warnings());
         assertArrayEquals(InventedCurve.curve(InventedCurve.up()).stresses(), read.curves().get(0).points().stresses());
-    }
-
-    @Test
-    void aPreShearIsNeverMergedAndNeverTaken() {
-        StringBuilder text = new StringBuilder("shear rate [1/s];shear stress [Pa]\n");
-        for (int i = 0; i < 12; i++) {
-            text.append("100;").append(40 - i).append(".5\n");
-        }
-        InventedCurve.up().forEach(p -> text.append(p.rate() + ";" + p.stress() + "\n"));
-        InventedCurve.down().forEach(p -> text.append(p.rate() + ";" + p.stress() + "\n"));
-        CurveImport read = read(text.toString());
-        assertEquals(List.of(BlockUse.PRE_SHEAR, BlockUse.UP, BlockUse.DOWN), read.blocks().stream().map(CurveBlock::use).toList());
-        assertEquals(List.of(false, true, true), read.blocks().stream().map(CurveBlock::taken).toList());
-        assertArrayEquals(InventedCurve.curve(InventedCurve.up()).stresses(), read.curves().get(0).points().stresses());
-        assertArrayEquals(InventedCurve.curve(InventedCurve.down()).stresses(), read.curves().get(1).points().stresses());
-        assertEquals(12, read.counts().left());
-    }
-
-    @Test
-    void replicatesAreCountedAndTemperaturesKeptApart() {
-        StringBuilder text = new StringBuilder("No;Rate [1/s];Stress [Pa];T [K]\n");
-        for (String kelvin : List.of("293.15", "293.25", "313.15")) {
-            int i = 0;
-            for (Point p : InventedCurve.up()) {
-                text.append(++i + ";" + p.rate() + ";" + p.stress() + ";" + kelvin + "\n");
-            }
-        }
-        CurveImport read = read(text.toString());
-        assertEquals(List.of(1, 2, 1), read.requireCurves().stream().map(c -> c.measurement().replicate()).toList());
-        assertEquals(40, read.curves().get(2).measurement().temperature(), 1e-9);
-        assertEquals(3, read.curves().stream().map(MeasuredCurve::label).distinct().count());
     }
 
     @Test

@@ -16,7 +16,9 @@ public enum CurveQuantity {
     POINT_NUMBER("point number", ""),
     SEGMENT_NUMBER("segment number", ""),
     /** Both in one cell, for instance 2|13. */
-    SEGMENT_AND_POINT("segment and point number", "");
+    SEGMENT_AND_POINT("segment and point number", ""),
+    /** The name of the sample that a row belongs to. */
+    SAMPLE("sample", "");
 
     private final String words;
     private final String unit;

@@ -26,7 +26,7 @@ final class CurveNames {
 
     private String words(CurveBlock block, Part part) {
         List<String> words = new ArrayList<>(List.of(stem));
-        String sample = part.stretch().sample();
+        String sample = part.sample();
         if (!sample.isEmpty()) {
             words.add(sample);
         } else if (block.sample() > 1 || part.stretch().layout.groups().size() > 1) {

@@ -1,6 +1,7 @@
 package stirwright.exchange.internal.curves;
 
 import static stirwright.exchange.CurveQuantity.POINT_NUMBER;
+import static stirwright.exchange.CurveQuantity.SAMPLE;
 import static stirwright.exchange.CurveQuantity.SEGMENT_AND_POINT;
 import static stirwright.exchange.CurveQuantity.SEGMENT_NUMBER;
 import static stirwright.exchange.CurveQuantity.SHEAR_RATE;
@@ -71,6 +72,7 @@ final class HeaderWords {
         shorts(List.of(POINT_NUMBER), "point", "points", "pt", "pts", "no", "nr", "number", "nummer", "punkt", "punto", "mp", "#");
         shorts(List.of(SEGMENT_NUMBER), "segment", "seg", "interval", "step", "section", "abschnitt", "intervall", "schritt",
                 "intervalle", "etape", "paso", "intervalo", "tramo", "block");
+        shorts(List.of(SAMPLE), "sample", "probe", "echantillon", "muestra", "batch", "charge", "lot", "product", "produkt", "fluid");
     }
 
     private HeaderWords() {}

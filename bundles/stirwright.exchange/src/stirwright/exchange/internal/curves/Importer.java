@@ -127,7 +127,7 @@ public final class Importer {
                         FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
                                 taken.stream().mapToDouble(CurvePoint::shearStress).toArray()),
                         new Measurement(source.name(), source.sha256(), Messages.name(block),
-                                parts.get(i).stretch().sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here, block.warnings())));
+                                parts.get(i).sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here, block.warnings())));
             }
         }
         return curves;

@@ -37,9 +37,10 @@ final class Messages {
 
     /** Number and name of a block. */
     static String name(CurveBlock block) {
-        String name = block.name() + (block.sheet().isEmpty() ? "" : (block.name().isEmpty() ? "" : ", ") + "sheet '" + block.sheet() + "'")
-                + (block.sample() > 1 ? ", sample " + block.sample() : "");
-        return block.number() + (name.isEmpty() ? "" : " (" + name + ")");
+        List<String> words = new ArrayList<>(List.of(block.name(), block.sheet().isEmpty() ? "" : "sheet '" + block.sheet() + "'",
+                block.sample() > 1 ? "sample " + block.sample() : ""));
+        words.removeIf(String::isEmpty);
+        return block.number() + (words.isEmpty() ? "" : " (" + String.join(", ", words) + ")");
     }
 
     void blocks(List<CurveBlock> blocks) {
@@ -65,13 +66,25 @@ final class Messages {
 
     void dropped(List<DroppedPoint> dropped) {
         if (!dropped.isEmpty()) {
-            note(dropped.size() + (dropped.size() == 1 ? " point is dropped: " : " points are dropped: ") + named(dropped));
+            note(dropped.size() + (dropped.size() == 1 ? " point is dropped: " : " points are dropped: ") + named(dropped, MOST_NAMED));
         }
     }
 
-    private static String named(List<DroppedPoint> dropped) {
-        String first = String.join("; ", dropped.stream().limit(MOST_NAMED).map(d -> d.place().words() + ", " + d.reason()).toList());
-        return first + (dropped.size() > MOST_NAMED ? "; and " + (dropped.size() - MOST_NAMED) + " more" : "");
+    /** The first few, those of one reason in one. */
+    private static String named(List<DroppedPoint> dropped, int most) {
+        List<String> named = new ArrayList<>();
+        int at = 0;
+        while (at < dropped.size() && named.size() < most) {
+            DroppedPoint first = dropped.get(at);
+            int last = at;
+            while (last + 1 < dropped.size() && dropped.get(last + 1).reason().equals(first.reason())
+                    && dropped.get(last + 1).block() == first.block()) {
+                last++;
+            }
+            named.add(first.place().words() + (last > at ? " to " + dropped.get(last).place().line() : "") + ", " + first.reason());
+            at = last + 1;
+        }
+        return String.join("; ", named) + (at < dropped.size() ? "; and " + (dropped.size() - at) + " more" : "");
     }
 
     /** Says why there is no curve, unless something said so already. */
@@ -86,6 +99,6 @@ final class Messages {
         CurveBlock best = blocks.stream().reduce((a, b) -> b.usable() > a.usable() ? b : a).orElseThrow();
         problem("holds no flow curve: block " + name(best) + " has the most points that can be used, " + best.usable() + " of "
                 + best.points().size() + ", but is " + best.use().words() + ", not taken (" + best.reason() + ")"
-                + (dropped.isEmpty() ? "" : "; dropped: " + named(dropped)));
+                + (dropped.isEmpty() ? "" : "; dropped: " + named(dropped, 1)));
     }
 }

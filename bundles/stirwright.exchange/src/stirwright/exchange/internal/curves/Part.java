@@ -4,15 +4,18 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import stirwright.exchange.BlockUse;
 import stirwright.exchange.CurveQuantity;
 
 /**
  * Points of one block, before it is known what the blocks around it are.
  *
+ * @param sample what its sample is called; may be empty
  * @param segment the number of its segment; may be empty
  */
-record Part(Stretch stretch, String segment, List<ReadPoint> points) {
+record Part(Stretch stretch, String sample, String segment, List<ReadPoint> points) {
     private static final List<String> PRE_SHEAR = List.of("pre shear", "preshear", "conditioning", "vorscher", "precisaill",
             "pre cisaill", "precizall", "pre cizall", "konditionier");
 
@@ -21,24 +24,27 @@ record Part(Stretch stretch, String segment, List<ReadPoint> points) {
         List<Part> parts = new ArrayList<>();
         int begin = 0;
         String segment = "";
+        String sample = "";
         int before = -1;
         for (int i = 0; i < points.size(); i++) {
             WorkRow row = points.get(i).row();
             String now = Numbering.segment(row.row, stretch.group);
+            String whose = stretch.sample(row.row);
             int number = Numbering.point(row.row, stretch.group);
             boolean again = number >= 0 && before >= 0 && number <= before;
-            if (i > begin && (again || !now.equals(segment))) {
-                split(parts, stretch, segment, points.subList(begin, i));
+            if (i > begin && (again || !now.equals(segment) || !whose.equals(sample))) {
+                split(parts, stretch, sample, segment, points.subList(begin, i));
                 begin = i;
             }
             segment = now;
+            sample = whose;
             before = number >= 0 ? number : again ? -1 : before;
         }
-        split(parts, stretch, segment, points.subList(begin, points.size()));
+        split(parts, stretch, sample, segment, points.subList(begin, points.size()));
         return parts;
     }
 
-    private static void split(List<Part> into, Stretch stretch, String segment, List<ReadPoint> points) {
+    private static void split(List<Part> into, Stretch stretch, String sample, String segment, List<ReadPoint> points) {
         int[] placed = new int[points.size()];
         int count = 0;
         for (int i = 0; i < points.size(); i++) {
@@ -55,17 +61,23 @@ record Part(Stretch stretch, String segment, List<ReadPoint> points) {
         for (int i = 0; i < ramps.size(); i++) {
             // Points without a rate stay with those before them.
             int to = i == ramps.size() - 1 ? points.size() : placed[ramps.get(i).end()];
-            into.add(new Part(stretch, segment, List.copyOf(points.subList(from, to))));
+            into.add(new Part(stretch, sample, segment, List.copyOf(points.subList(from, to))));
             from = to;
         }
         if (ramps.isEmpty()) {
-            into.add(new Part(stretch, segment, List.copyOf(points)));
+            into.add(new Part(stretch, sample, segment, List.copyOf(points)));
         }
+    }
+
+    /** What tells its sample from others of the source; empty where nothing does. Equal names are one sample. */
+    String sampleName() {
+        String place = sample.isEmpty() && stretch.layout.groups().size() > 1 ? "sample " + stretch.group.sample() : "";
+        return Stream.of(stretch.heads.own(), sample, place).filter(w -> !w.isEmpty()).collect(Collectors.joining(" "));
     }
 
     /** As the source calls it. */
     String name() {
-        String head = stretch.heads.words();
+        String head = stretch.group.column(CurveQuantity.SAMPLE) == null ? stretch.heads.words() : sample;
         return segment.isEmpty() || head.contains(segment) ? head : head + (head.isEmpty() ? "segment " : ", segment ") + segment;
     }
 
@@ -105,6 +117,6 @@ record Part(Stretch stretch, String segment, List<ReadPoint> points) {
     double temperature() {
         double[] measured = taken(CurveQuantity.TEMPERATURE);
         return measured.length > 0 ? Arrays.stream(measured).average().orElseThrow()
-                : TemperatureInName.of(stretch.sample() + " " + stretch.heads.words() + " " + stretch.sheet);
+                : TemperatureInName.of(sample + " " + stretch.heads.words() + " " + stretch.sheet);
     }
 }

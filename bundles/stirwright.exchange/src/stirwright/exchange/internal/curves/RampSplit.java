@@ -3,6 +3,7 @@ package stirwright.exchange.internal.curves;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.DoubleStream;
 
 /**
  * Parts of a run of shear rates: stretches of constant rate, and ramps between the turns. Rates within 2 % are one
@@ -30,17 +31,40 @@ final class RampSplit {
         List<Part> steps = steps(rates);
         int usual = steps.stream().mapToInt(s -> s.end - s.begin).sorted().skip(steps.size() / 2).findFirst().orElse(0);
         List<Part> parts = new ArrayList<>();
-        int from = 0;
-        for (int i = 0; i < steps.size() && steps.size() > 1; i++) {
-            Part step = steps.get(i);
-            if (step.end - step.begin >= Math.max(LEAST_CONSTANT, 4 * usual) && !trending(rates, step)) {
-                parts.addAll(ramps(rates, steps.subList(from, i)));
-                parts.add(step);
-                from = i + 1;
+        List<Part> ramp = new ArrayList<>();
+        for (Part step : steps) {
+            if (steps.size() > 1 && step.end - step.begin >= Math.max(LEAST_CONSTANT, 4 * usual) && !trending(rates, step)) {
+                Part hold = trimmed(rates, step);
+                ramp.add(new Part(step.begin, hold.begin));
+                parts.addAll(ramps(rates, ramp));
+                parts.add(hold);
+                ramp = new ArrayList<>(List.of(new Part(hold.end, step.end)));
+            } else {
+                ramp.add(step);
             }
         }
-        parts.addAll(ramps(rates, steps.subList(from, steps.size())));
+        parts.addAll(ramps(rates, ramp));
         return parts;
+    }
+
+    /** Without the last points of a dense ramp on the way to the hold, and the first ones on the way from it. */
+    private static Part trimmed(double[] rates, Part step) {
+        double median = median(Arrays.stream(rates, step.begin, step.end));
+        double scatter = 4 * median(Arrays.stream(rates, step.begin, step.end).map(r -> Math.abs(r - median))) + 1e-3 * median;
+        int begin = step.begin;
+        int end = step.end;
+        while (Math.abs(rates[begin] - median) > scatter) {
+            begin++;
+        }
+        while (Math.abs(rates[end - 1] - median) > scatter) {
+            end--;
+        }
+        return new Part(begin, end);
+    }
+
+    private static double median(DoubleStream values) {
+        double[] sorted = values.sorted().toArray();
+        return sorted[sorted.length / 2];
     }
 
     /** Whether all rates are one. */
@@ -100,16 +124,17 @@ final class RampSplit {
         return Math.abs(net) > (step.end - step.begin - 1) / 2;
     }
 
-    private static List<Part> ramps(double[] rates, List<Part> steps) {
+    private static List<Part> ramps(double[] rates, List<Part> all) {
+        List<Part> steps = all.stream().filter(s -> s.end > s.begin).toList();
         if (steps.isEmpty()) {
             return List.of();
         }
-        List<int[]> runs = joined(turns(rates, steps));
+        List<Run> runs = joined(rates, steps, turns(rates, steps));
         List<Part> parts = new ArrayList<>();
         for (int i = 0; i < runs.size(); i++) {
+            Part last = steps.get(runs.get(i).last);
             int begin = i == 0 ? steps.get(0).begin : parts.get(i - 1).end;
-            int end = i == runs.size() - 1 ? steps.getLast().end : middle(steps.get(runs.get(i)[1]));
-            parts.add(new Part(begin, end));
+            parts.add(new Part(begin, i == runs.size() - 1 || runs.get(i).jump ? last.end : middle(last)));
         }
         boolean steady = parts.stream().allMatch(p -> direction(Arrays.copyOfRange(rates, p.begin, p.end)) != 0);
         return steady ? parts : List.of(new Part(steps.get(0).begin, steps.getLast().end));
@@ -121,7 +146,7 @@ final class RampSplit {
     }
 
     /** First and last step of each run between turns; neighbours share the step at the turn. */
-    private static List<int[]> turns(double[] rates, List<Part> steps) {
+    private static List<Run> turns(double[] rates, List<Part> steps) {
         double least = Double.MAX_VALUE;
         double most = 0;
         for (Part step : steps) {
@@ -129,7 +154,7 @@ final class RampSplit {
             most = Math.max(most, rates[step.begin]);
         }
         double back = Math.max(LEAST_TURN, TURN * Math.log(most / least));
-        List<int[]> runs = new ArrayList<>();
+        List<Run> runs = new ArrayList<>();
         int start = 0;
         int high = 0;
         int low = 0;
@@ -143,7 +168,7 @@ final class RampSplit {
             if (down || up) {
                 int turn = down ? high : low;
                 if (direction != 0) {
-                    runs.add(new int[] {start, turn});
+                    runs.add(new Run(start, turn, false));
                     start = turn;
                 }
                 direction = down ? -1 : 1;
@@ -151,24 +176,49 @@ final class RampSplit {
                 low = i;
             }
         }
-        runs.add(new int[] {start, steps.size() - 1});
+        runs.add(new Run(start, steps.size() - 1, false));
         return runs;
     }
 
-    /** Runs that are too short join the one before, and so does the one behind them, which goes the same way. */
-    private static List<int[]> joined(List<int[]> runs) {
-        List<int[]> joined = new ArrayList<>();
+    /**
+     * Steps between two turns; neighbours share the step at the turn.
+     *
+     * @param jump whether the rates start anew behind it
+     */
+    private record Run(int first, int last, boolean jump) {}
+
+    /**
+     * Runs that are too short join the one before, and so does the one behind them, which goes the same way; but one jump
+     * back to where the run before began starts a new ramp.
+     */
+    private static List<Run> joined(double[] rates, List<Part> steps, List<Run> runs) {
+        List<Run> joined = new ArrayList<>();
         boolean swallow = false;
-        for (int[] run : runs) {
-            boolean shorty = run[1] - run[0] + 1 < LEAST_STEPS;
-            if (joined.isEmpty() || !shorty && !swallow) {
-                joined.add(run.clone());
-                swallow = shorty;
+        for (int i = 0; i < runs.size(); i++) {
+            Run run = runs.get(i);
+            boolean brief = run.last - run.first + 1 < LEAST_STEPS;
+            Run before = joined.isEmpty() ? null : joined.getLast();
+            if (before == null || !brief && !swallow) {
+                joined.add(run);
+                swallow = brief;
+            } else if (brief && !swallow && i + 1 < runs.size() && isJump(rates, steps, before, run)) {
+                joined.set(joined.size() - 1, new Run(before.first, before.last, true));
             } else {
-                joined.getLast()[1] = run[1];
-                swallow = shorty;
+                joined.set(joined.size() - 1, new Run(before.first, run.last, false));
+                swallow = brief;
             }
         }
         return joined;
+    }
+
+    /** A stray point is left for a rate near the one before it; a new ramp begins near the start of the last one. */
+    private static boolean isJump(double[] rates, List<Part> steps, Run before, Run run) {
+        if (run.last - run.first != 1 || before.last - before.first + 1 < LEAST_STEPS) {
+            return false;
+        }
+        double start = Math.log(rates[steps.get(before.first).begin]);
+        double usualEnd = Math.log(rates[steps.get(before.last - 1).begin]);
+        double now = Math.log(rates[steps.get(run.last).begin]);
+        return Math.abs(now - start) < Math.abs(now - usualEnd);
     }
 }

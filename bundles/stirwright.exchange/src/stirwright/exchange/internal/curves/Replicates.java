@@ -19,7 +19,7 @@ final class Replicates {
     }
 
     int next(Part part, BlockUse use, double temperature) {
-        List<Object> sample = List.of(part.stretch().sampleName(), use.ramp());
+        List<Object> sample = List.of(part.sampleName(), use.ramp());
         List<Seen> all = seen.computeIfAbsent(sample, s -> new ArrayList<>());
         Seen same = all.stream().filter(s -> Double.isNaN(s.temperature) == Double.isNaN(temperature)
                 && !(Math.abs(s.temperature - temperature) > SAME_TEMPERATURE)).findFirst().orElse(null);

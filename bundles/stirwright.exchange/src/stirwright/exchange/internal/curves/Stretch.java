@@ -2,8 +2,9 @@ package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
+import stirwright.exchange.CurveQuantity;
+import stirwright.exchange.internal.table.SourceRow;
+import stirwright.exchange.internal.table.Texts;
 
 /** Rows of points of one sample under one head. */
 final class Stretch {
@@ -37,14 +38,10 @@ final class Stretch {
         }
     }
 
-    /** What its sample is called, by its head or by the header of its columns. */
-    String sample() {
-        return group.label().isEmpty() || layout.groups().size() == 1 ? heads.sample() : group.label();
-    }
-
-    /** What tells its sample from others of the source; empty where nothing does. Equal names are one sample. */
-    String sampleName() {
-        String place = sample().isEmpty() && layout.groups().size() > 1 ? "sample " + group.sample() : "";
-        return Stream.of(heads.own(), sample(), place).filter(w -> !w.isEmpty()).collect(Collectors.joining(" "));
+    /** What the sample of a row is called, by its own cell, by the header of its columns or by the head above. */
+    String sample(SourceRow row) {
+        Column column = group.column(CurveQuantity.SAMPLE);
+        return column != null ? Texts.show(row.cell(column.position()))
+                : group.label().isEmpty() || layout.groups().size() == 1 ? heads.sample() : group.label();
     }
 }
