@@ -90,6 +90,32 @@ class BlocksTest {
         assertEquals(List.of(1, 1), read.curves().stream().map(c -> c.measurement().replicate()).toList());
     }
 
+    /** Numbers go on behind a header that comes again; where they start again, so does a block. */
+    @Test
+    void repeatedHeaders() {
+        String header = "Point;Rate;Stress\n;1/s;Pa\n";
+        String[] lines = UPWARDS.split("\n");
+        StringBuilder text = new StringBuilder(header);
+        for (int i = 0; i < lines.length; i++) {
+            text.append(i == 5 ? "\n" + header : "").append(i + 1).append(';').append(lines[i]).append('\n');
+        }
+        CurveImport once = read(text.toString());
+        assertArrayEquals(InventedCurve.curve(InventedCurve.up()).stresses(), once.requireCurves().get(0).points().stresses());
+        assertEquals(1, once.blocks().size());
+        assertEquals(2, read(text + text.toString()).blocks().size());
+    }
+
+    @Test
+    void numbersJoinedUnderNoName() {
+        StringBuilder text = new StringBuilder(";rate;stress\n");
+        int i = 0;
+        for (Point p : InventedCurve.up()) {
+            text.append(i < 6 ? "1-" : "2-").append(++i).append(';').append(p.rate()).append(';').append(p.stress()).append('\n');
+        }
+        CurveImport read = read(text.toString());
+        assertEquals(List.of("segment 1", "segment 2"), read.blocks().stream().map(CurveBlock::name).toList());
+    }
+
     @Test
     void headsOfSamplesAndIntervals() {
         CurveImport read = read("Sample: paste 20 \u00B0C\nInterval 1 pre-shear\n" + HEADER + UPWARDS + "Interval 2\n" + HEADER + UPWARDS

@@ -163,7 +163,7 @@ final class LayoutBuilder {
 
     private static String missing(SourceRow names, Group group) {
         boolean rate = group.column(CurveQuantity.SHEAR_RATE) != null;
-        return "the header on line " + names.line() + " has no column for the shear " + (rate
+        return (names.line() > 0 ? "the header on line " + names.line() : "a table without a header") + " has no column for the shear " + (rate
                 ? "stress (nor a viscosity), for instance shear_stress_Pa" : "rate, for instance shear_rate_1_s")
                 + "; choose the column that holds it" + (!rate && group.column(CurveQuantity.SPEED) != null
                 ? ". A speed gives no shear rate without the instrument's geometry" : "");

@@ -81,7 +81,8 @@ final class Messages {
                     && dropped.get(last + 1).block() == first.block()) {
                 last++;
             }
-            named.add(first.place().words() + (last > at ? " to " + dropped.get(last).place().line() : "") + ", " + first.reason());
+            named.add(first.place().words() + (last > at ? " and on to line " + dropped.get(last).place().line() : "") + ", "
+                    + first.reason());
             at = last + 1;
         }
         return String.join("; ", named) + (at < dropped.size() ? "; and " + (dropped.size() - at) + " more" : "");

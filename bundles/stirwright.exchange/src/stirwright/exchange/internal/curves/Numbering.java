@@ -1,5 +1,7 @@
 package stirwright.exchange.internal.curves;
 
+import java.util.EnumMap;
+import java.util.Map;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.internal.table.SourceRow;
 
@@ -21,6 +23,20 @@ final class Numbering {
         }
         return sign > 0 && rest > sign && rest - sign < 4 && rest < cell.length() && digits(cell, rest) == cell.length()
                 && (said || ".,".indexOf(cell.charAt(sign)) < 0);
+    }
+
+    /** The columns of a stretch; without a number by its name, the first cell counts if it joins two numbers in every row. */
+    static Group found(Stretch stretch) {
+        Map<CurveQuantity, Column> columns = stretch.group.columns();
+        boolean named = columns.containsKey(CurveQuantity.POINT_NUMBER) || columns.containsKey(CurveQuantity.SEGMENT_NUMBER)
+                || columns.containsKey(CurveQuantity.SEGMENT_AND_POINT) || columns.values().stream().anyMatch(c -> c.position() == 0);
+        Column first = new Column(0, "", CurveQuantity.POINT_NUMBER, UnitWords.own(CurveQuantity.POINT_NUMBER), "");
+        if (named || !stretch.rows.stream().allMatch(r -> isJoined(r.row.cell(0), first))) {
+            return stretch.group;
+        }
+        Map<CurveQuantity, Column> more = new EnumMap<>(columns);
+        more.put(CurveQuantity.POINT_NUMBER, first);
+        return Group.of(stretch.group.sample(), stretch.group.label(), more);
     }
 
     /** The number of the segment; empty when the row has none. */

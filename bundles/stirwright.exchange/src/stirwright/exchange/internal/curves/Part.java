@@ -22,15 +22,16 @@ record Part(Stretch stretch, String sample, String segment, List<ReadPoint> poin
     /** Parts of a stretch: at numbers that start again, and where the shear rate turns or stands still. */
     static List<Part> of(Stretch stretch, List<ReadPoint> points) {
         List<Part> parts = new ArrayList<>();
+        Group group = Numbering.found(stretch);
         int begin = 0;
         String segment = "";
         String sample = "";
         int before = -1;
         for (int i = 0; i < points.size(); i++) {
             WorkRow row = points.get(i).row();
-            String now = Numbering.segment(row.row, stretch.group);
+            String now = Numbering.segment(row.row, group);
             String whose = stretch.sample(row.row);
-            int number = Numbering.point(row.row, stretch.group);
+            int number = Numbering.point(row.row, group);
             boolean again = number >= 0 && before >= 0 && number <= before;
             if (i > begin && (again || !now.equals(segment) || !whose.equals(sample))) {
                 split(parts, stretch, sample, segment, points.subList(begin, i));
@@ -116,7 +117,8 @@ record Part(Stretch stretch, String sample, String segment, List<ReadPoint> poin
     /** Mean in deg C of the points that are taken, else what its names say; NaN for neither. */
     double temperature() {
         double[] measured = taken(CurveQuantity.TEMPERATURE);
-        return measured.length > 0 ? Arrays.stream(measured).average().orElseThrow()
+        // Differences, so that the mean of equal readings is that reading.
+        return measured.length > 0 ? measured[0] + Arrays.stream(measured).map(t -> t - measured[0]).average().orElseThrow()
                 : TemperatureInName.of(sample + " " + stretch.heads.words() + " " + stretch.sheet);
     }
 }

@@ -3,6 +3,7 @@ package stirwright.exchange.internal.curves;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.ImportChoice;
 import stirwright.exchange.RawRow.Kind;
@@ -21,6 +22,7 @@ final class SheetSorter {
     private final List<WorkRow> rows;
     private Layout layout;
     private SourceRow names;
+    private List<String> units = List.of();
     private SourceRow above;
     private boolean unitsMayFollow;
     /** The open stretch of each sample. */
@@ -47,7 +49,10 @@ final class SheetSorter {
                 takeNames(i);
             } else if (words && unitsMayFollow && isUnits(row.row)) {
                 row.kind = Kind.UNITS;
-                relayout(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
+                if (!row.row.cells().equals(units)) {
+                    units = row.row.cells();
+                    relayout(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
+                }
                 unitsMayFollow = false;
             } else {
                 sortOther(row);
@@ -81,9 +86,14 @@ final class SheetSorter {
     }
 
     private void takeNames(int at) {
-        names = rows.get(at).row;
-        above = null;
         rows.get(at).kind = Kind.NAMES;
+        unitsMayFollow = true;
+        if (isRepeated(rows.get(at).row)) {
+            return;
+        }
+        names = rows.get(at).row;
+        units = List.of();
+        above = null;
         WorkRow before = at == 0 ? null : rows.get(at - 1);
         if (before != null && (before.kind == Kind.NOTE || before.kind == Kind.BLOCK)) {
             above = before.row;
@@ -96,7 +106,12 @@ final class SheetSorter {
         }
         close(heads);
         use(found);
-        unitsMayFollow = true;
+    }
+
+    /** A header that comes again on each page parts nothing as long as points have numbers, which then go on. */
+    private boolean isRepeated(SourceRow row) {
+        return names != null && row.cells().equals(names.cells()) && layout.groups().size() == 1 && Stream.of(
+                CurveQuantity.POINT_NUMBER, CurveQuantity.SEGMENT_AND_POINT).anyMatch(layout.groups().get(0).columns()::containsKey);
     }
 
     private void use(Layout found) {
