@@ -86,14 +86,16 @@ public final class Importer {
         String layout = "names of columns";
         if (layouts.isEmpty()) {
             layout = "no names of columns";
+            List<String> refused = new ArrayList<>();
             for (int i = 0; i < sheets.size(); i++) {
                 sheets.get(i).forEach(WorkRow::forget);
                 Nameless nameless = Nameless.sort(sources.sheets().get(i).name(), choice, headers, sheets.get(i), sources.separator());
                 take(nameless.sorter());
-                if (!nameless.problem().isEmpty() && sheets.size() == 1) {
-                    messages.problem(nameless.problem());
-                }
+                refused.add(nameless.problem());
                 layout = nameless.set() ? "a set of curves, each with its number and name" : layout;
+            }
+            if (stretches.isEmpty()) {
+                refused.stream().filter(p -> !p.isEmpty()).findFirst().ifPresent(messages::problem);
             }
         }
         findings.add(new Finding(Topic.LAYOUT, layout, layouts.size() + (layouts.size() == 1 ? " table" : " tables"), false));

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import stirwright.exchange.BlockUse;
 import stirwright.exchange.CurveBlock;
 import stirwright.exchange.DroppedPoint;
 import stirwright.exchange.ImportMessage;
@@ -45,7 +46,7 @@ final class Messages {
 
     void blocks(List<CurveBlock> blocks) {
         for (CurveBlock block : blocks) {
-            if (!block.taken() || blocks.size() > 1 && blocks.size() <= MOST_BLOCKS) {
+            if (!block.taken() || block.use() == BlockUse.UNORDERED || blocks.size() > 1 && blocks.size() <= MOST_BLOCKS) {
                 note("block " + name(block) + ": " + block.use().words() + ", " + block.usable() + " of " + block.points().size()
                         + " points, " + (block.taken() ? "taken" : "not taken") + " (" + block.reason() + ")");
             }
