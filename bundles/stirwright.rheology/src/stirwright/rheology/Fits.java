@@ -62,7 +62,7 @@ public final class Fits {
 		Arrays.setAll(start, j -> scales[j].coordinate(j == held ? at : values[j]));
 		Points points = points(curve, options.objective());
 		double[] best = search(kind, options.robust() ? points.with(robust(kind, points, options).factors()) : points, options)
-				.from(start, held).at();
+				.best(start, held).at();
 		Arrays.setAll(best, j -> scales[j].parameter(best[j]));
 		return best;
 	}

@@ -51,7 +51,8 @@ final class Inference {
 		this.options = options;
 		this.search = search;
 		this.place = place;
-		int[] loose = IntStream.range(0, scales.length).filter(j -> !place.held()[j]).toArray();
+		// A factor at the end of the world is no limit of the model, but one that the points do not give.
+		int[] loose = IntStream.range(0, scales.length).filter(j -> !place.held()[j] || scales[j] == Scale.LOG).toArray();
 		this.degreesOfFreedom = points.size() - loose.length;
 		LeastSquares.Minimum here = search.evaluate(place.at());
 		this.meanSquare = meanSquare(here);
@@ -134,7 +135,7 @@ final class Inference {
 		boolean byProfile = !options.robust() && !straight && worthAProfile();
 		for (int j = 0; j < scales.length; j++) {
 			double at = place.at()[j];
-			boolean held = place.held()[j];
+			boolean held = place.held()[j] && scales[j] != Scale.LOG;
 			double error = held || degreesOfFreedom == 0 ? Double.NaN : Math.sqrt(free[j][j]);
 			Interval jointly = linear(j, joint * error);
 			Interval alone = byProfile ? profiled(profile, j) : linear(j, single * error);
@@ -153,7 +154,7 @@ final class Inference {
 	private boolean worthAProfile() {
 		boolean worth = degreesOfFreedom > 0 && points.size() <= MANY;
 		for (int j = 0; j < scales.length; j++) {
-			worth &= place.held()[j] || scales[j] != Scale.LOG || single * Math.sqrt(free[j][j]) < HOPELESS;
+			worth &= scales[j] != Scale.LOG || single * Math.sqrt(free[j][j]) < HOPELESS;
 		}
 		return worth;
 	}

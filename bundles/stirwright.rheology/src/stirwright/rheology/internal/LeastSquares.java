@@ -24,6 +24,7 @@ public final class LeastSquares {
 	private static final double ROUGH_TOLERANCE = 1e-6;
 	private static final int MOST_ITERATIONS = 1000;
 	private static final int MOST_ROUGH_ITERATIONS = 25;
+	private static final int MOST_SHORT_STEPS = 8;
 
 	/** Stands for a deviation that is no number: so large that the search turns back, with a square that is finite. */
 	private static final double HUGE = 1e100;
@@ -75,7 +76,9 @@ public final class LeastSquares {
 	/** Searches from a start, to a relative 1e-6 or so of the sum; never returns a place above the start. */
 	public static Minimum roughly(Deviations function, double[] start) {
 		LeastSquares search = new LeastSquares(function);
-		search.search(start, ROUGH_TOLERANCE, MOST_ROUGH_ITERATIONS);
+		if (!search.shortWay(start)) {
+			search.search(search.best.at(), ROUGH_TOLERANCE, MOST_ROUGH_ITERATIONS);
+		}
 		return search.best;
 	}
 
@@ -92,18 +95,36 @@ public final class LeastSquares {
 	private static Minimum refined(Deviations function, double[] start, double wanted, double near) {
 		LeastSquares search = new LeastSquares(function);
 		search.evaluate(start);
-		if (!(search.lastSteps(wanted) <= near)) {
+		if (start.length > 0 && !(search.lastSteps(wanted) <= near)) {
 			search.search(search.best.at(), TOLERANCE, MOST_ITERATIONS);
 			search.lastSteps(wanted);
 		}
 		return search.best;
 	}
 
-	private void search(double[] start, double tolerance, int iterations) {
-		if (start.length == 0) {
-			evaluate(start);
-			return;
+	/** Gauss and Newton's steps by the normal equations, while each descends; whether they came to the bottom. */
+	private boolean shortWay(double[] start) {
+		Minimum here = evaluate(start);
+		for (int i = 0; i < MOST_SHORT_STEPS && start.length > 0; i++) {
+			double[] step = NormalEquations.step(here.jacobian(), here.deviations());
+			if (step == null) {
+				return false;
+			}
+			if (step[start.length] <= ROUGH_TOLERANCE * here.sum()) {
+				return true;
+			}
+			double[] next = here.at().clone();
+			Arrays.setAll(next, j -> next[j] - step[j]);
+			Minimum there = evaluate(next);
+			if (!(there.sum() < here.sum())) {
+				return false;
+			}
+			here = there;
 		}
+		return start.length == 0;
+	}
+
+	private void search(double[] start, double tolerance, int iterations) {
 		MultivariateJacobianFunction model = point -> {
 			Minimum here = evaluate(point.toArray());
 			return new Pair<RealVector, RealMatrix>(new ArrayRealVector(here.deviations(), false),

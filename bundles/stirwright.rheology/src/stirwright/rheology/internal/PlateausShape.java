@@ -15,8 +15,8 @@ public abstract class PlateausShape implements Shape {
 	static final int TIME = 2;
 	static final int INDEX = 3;
 
-	/** Of the logarithm of the time constant; beyond it no plateau is ever seen. */
-	private static final double FARTHEST = 60;
+	/** Of the logarithm of the time constant in s: beyond it nobody sees a plateau. */
+	private static final double FARTHEST = 30;
 
 	private static final double[] INDICES = { 0.001, 0.15, 0.3, 0.45, 0.6, 0.75, 0.9 };
 
@@ -121,8 +121,21 @@ public abstract class PlateausShape implements Shape {
 				chosen.add(place);
 			}
 		}
-		return chosen.stream().map(p -> new double[] {
-				Math.log(p.terms().first() + p.terms().second()), p.terms().first(), p.time(), p.n() }).toList();
+		return chosen.stream().map(place -> start(place, place.time() > to - 2 * STEP)).toList();
+	}
+
+	/**
+	 * Where the points want the bend as far below them as it can be, they are a power law there, and the valley is one without a
+	 * bottom: it starts at its far end, with the same power law.
+	 */
+	private static double[] start(Place place, boolean withoutBottom) {
+		double range = Math.log(place.terms().second());
+		double time = place.time();
+		if (withoutBottom) {
+			range += (1 - place.n()) * (FARTHEST - time);
+			time = FARTHEST;
+		}
+		return new double[] { Math.log(place.terms().first() + Math.exp(range)), place.terms().first(), time, place.n() };
 	}
 
 	private static boolean near(Place one, Place other) {

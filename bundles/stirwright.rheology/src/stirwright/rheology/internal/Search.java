@@ -11,7 +11,11 @@ public final class Search {
 	/** More points than this are thinned for the scan and the first descent; the last descent is along all of them. */
 	private static final int MANY = 300;
 
+	/** By how much the sum would have to fall, relative. */
+	private static final double WORTH = 1e-4;
+
 	private final Shape shape;
+	private final Scale[] scales;
 	private final Points points;
 	private final Measure measure;
 	private final int size;
@@ -31,27 +35,36 @@ public final class Search {
 		this.shape = shape;
 		this.points = points;
 		this.measure = measure;
-		this.size = shape.scales().length;
+		this.scales = shape.scales();
+		this.size = scales.length;
 	}
 
 	/** From every start of the shape; null where it has none. */
 	public Place best() {
 		if (points.size() > MANY) {
 			Place rough = new Search(shape, points.thinned(MANY), measure).best();
-			return rough == null ? null : toTheLastDigit(rough);
+			return rough == null ? null : toTheLastDigit(rough, -1);
 		}
 		Place best = null;
 		for (double[] start : shape.starts(points)) {
 			Place here = from(start, -1);
 			best = best == null || here.sum() < best.sum() ? here : best;
 		}
-		return best == null ? null : toTheLastDigit(best);
+		return best == null ? null : toTheLastDigit(best, -1);
 	}
 
-	/** From a start within the bounds, with one coordinate fixed, or -1 for none. */
+	/** From a start within the bounds with one coordinate fixed, to the last digit. */
+	public Place best(double[] start, int fixed) {
+		return toTheLastDigit(from(start, fixed), fixed);
+	}
+
+	/** From a start within the bounds, with one coordinate fixed, or -1 for none, to a millionth of the sum or so. What starts at a bound is held there at first. */
 	public Place from(double[] start, int fixed) {
 		double[] at = start.clone();
 		boolean[] held = new boolean[size];
+		for (int j = 0; j < size; j++) {
+			held[j] = j != fixed && (at[j] == shape.lower(j) || at[j] == shape.upper(j));
+		}
 		boolean[] released = new boolean[size];
 		Place best = null;
 		for (int round = 0; round < 2 * size + 1; round++) {
@@ -71,12 +84,12 @@ public final class Search {
 		return best == null ? new Place(at, held, evaluate(at).sum()) : best;
 	}
 
-	private Place toTheLastDigit(Place place) {
-		LeastSquares.Deviations free = free(place.at(), place.held(), -1);
-		double[] start = pick(place.at(), place.held(), -1);
+	private Place toTheLastDigit(Place place, int fixed) {
+		LeastSquares.Deviations free = free(place.at(), place.held(), fixed);
+		double[] start = pick(place.at(), place.held(), fixed);
 		// Against the errors of the points, which many of them shrink a hundredfold or so, more digits would say nothing.
 		double[] last = (points.size() > MANY ? LeastSquares.closely(free, start) : LeastSquares.toTheLastDigit(free, start)).at();
-		double[] at = spread(last, place.at(), place.held(), -1);
+		double[] at = spread(last, place.at(), place.held(), fixed);
 		return IntStream.range(0, size).allMatch(j -> inside(j, at[j]))
 				? new Place(at, place.held(), evaluate(at).sum()) : place;
 	}
@@ -108,10 +121,15 @@ public final class Search {
 		for (int j = 0; j < size; j++) {
 			if (held[j] && !released[j]) {
 				double downhill = 0;
+				double square = 0;
 				for (int i = 0; i < here.deviations().length; i++) {
 					downhill -= here.deviations()[i] * here.jacobian()[i][j];
+					square += here.jacobian()[i][j] * here.jacobian()[i][j];
 				}
-				if (at[j] == shape.lower(j) ? downhill > 0 : downhill < 0) {
+				boolean inwards = at[j] == shape.lower(j) ? downhill > 0 : downhill < 0;
+				// A factor at the end of the world hardly matters there, and noise alone would send the search for its valley.
+				boolean worth = scales[j] != Scale.LOG || downhill * downhill > WORTH * square * here.sum();
+				if (inwards && worth) {
 					held[j] = false;
 					released[j] = true;
 					any = true;
