@@ -77,6 +77,15 @@ class DamagedStudyTest {
     }
 
     @Test
+    void wrongPoints() throws IOException {
+        for (String point : new String[] {"1", "1 2 3", "1 NaN", "1,5 2", "one two", ""}) {
+            refused(with("<points>1 3<", "<points>" + point + "<"), line("<points>1 3<"), "'" + point + "' as points", "0.25 3.1");
+        }
+        refused(with("used=\"false\"", "used=\"no\""), line("used="), "'no' as used", "true or false");
+        refused(with("replicate=\"1\"", "replicate=\"one\""), line("replicate="), "'one' as replicate", "number");
+    }
+
+    @Test
     void danglingReferences() throws IOException {
         refused(with("fluid=\"fluid-1\"", "fluid=\"fluid-7\""), "fluid-7", "not in the study", "line ");
         refused(with("fluid=\"fluid-1\"", "fluid=\"vessel-1\""), "vessel 'kettle' as fluid", "a fluid belongs");

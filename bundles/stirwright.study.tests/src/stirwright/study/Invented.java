@@ -15,6 +15,8 @@ final class Invented {
         Amounts.set(broth.getAmounts(), "density_kg_m3", 1035);
         Amounts.set(broth.getAmounts(), "consistency_Pa_sn", 0.1 + 0.2);
         Amounts.set(broth.getAmounts(), "flow_index", 0.61);
+        broth.setModelReason("fits best & \"looks\" right");
+        broth.getCurves().add(curve());
         Vessel kettle = StudyFactory.eINSTANCE.createVessel();
         kettle.setName("kettle");
         Amounts.set(kettle.getAmounts(), "vessel_diameter_m", 1.5);
@@ -28,6 +30,21 @@ final class Invented {
         study.getImpellers().add(blades);
         study.getCases().add(newCase("simmer", broth, kettle, blades));
         return study;
+    }
+
+    private static Curve curve() {
+        Curve curve = Curves.of("first up", new double[] {0.1, 1, 1e-7}, new double[] {0.1 + 0.2, 3, 0});
+        curve.setSource("broth <25>.txt");
+        curve.setSha256("00ff".repeat(16));
+        curve.setBlock("2 of 3");
+        curve.setRamp("up");
+        curve.setReplicate(1);
+        curve.setTemperature(0);
+        curve.setUsed(false);
+        curve.getDropped().add("line 7: no stress");
+        curve.getDropped().add("line 7: no stress");
+        curve.getReadAs().add("viscosity in mPa s");
+        return curve;
     }
 
     private static Case newCase(String name, Fluid fluid, Vessel vessel, Impeller impeller) {

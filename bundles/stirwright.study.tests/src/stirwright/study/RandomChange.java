@@ -22,7 +22,7 @@ final class RandomChange implements Runnable {
     }
 
     private void changeOnce() {
-        switch (random.nextInt(12)) {
+        switch (random.nextInt(13)) {
             case 0 -> study.setNotes("note " + random.nextInt(5));
             case 1 -> part(study.getFluids()).setName("name " + random.nextInt(5));
             case 2 -> add(study.getVessels(), StudyFactory.eINSTANCE.createVessel());
@@ -34,6 +34,7 @@ final class RandomChange implements Runnable {
             case 8 -> picks(part(study.getCases()));
             case 9 -> use(part(study.getCases()));
             case 10 -> correlations(part(study.getCases()));
+            case 11 -> curves(part(study.getFluids()));
             default -> shorten(study.getCases());
         }
     }
@@ -82,6 +83,16 @@ final class RandomChange implements Runnable {
             case 1 -> OwnConstants.remove(one, "np." + random.nextInt(2), name);
             case 2 -> one.getLeftOut().remove("effect " + random.nextInt(2));
             default -> one.getLeftOut().add("effect " + random.nextInt(2));
+        }
+    }
+
+    private void curves(Fluid fluid) {
+        EList<Curve> curves = fluid.getCurves();
+        switch (random.nextInt(4)) {
+            case 0 -> add(curves, Curves.of("curve " + random.nextInt(3), new double[] {1, 2}, new double[] {3, random.nextInt(9)}));
+            case 1 -> curves.stream().skip(random.nextInt(3)).findFirst().ifPresent(c -> c.setUsed(!c.isUsed()));
+            case 2 -> curves.stream().findFirst().ifPresent(c -> c.getPoints().add(new MeasuredPoint(random.nextInt(3), 1)));
+            default -> shorten(curves);
         }
     }
 

@@ -53,6 +53,8 @@ class StudyFilesTest {
                 "<amounts column=\"density_kg_m3\" value=\"1035\"/>", "value=\"0.30000000000000004\"",
                 "<amounts column=\"baffle_count\" value=\"0\"/>", "fluid=\"fluid-1\"", "<compared>propeller</compared>",
                 "<leftOut>clearance</leftOut>",
+                "<points>0.1 0.30000000000000004</points>\n", "<points>1 3</points>\n", "<points>1e-7 0</points>\n", " used=\"false\"",
+                " temperature=\"0\"",
                 "<constants correlation=\"blades.np.narrow\" name=\"a\" value=\"0.30000000000000004\"/>")) {
             assertTrue(text.contains(part), () -> part + " is not in\n" + text);
         }
@@ -115,6 +117,9 @@ class StudyFilesTest {
         study.getCases().get(0).getConstants().getLast().setValue(Double.POSITIVE_INFINITY);
         refused(study, file, "constant 'k' of 'invented.np.a' in case 'simmer'", "Infinity");
         study.getCases().get(0).getConstants().clear();
+        study.getFluids().get(0).getCurves().get(0).getPoints().add(new MeasuredPoint(1, Double.NaN));
+        refused(study, file, "curve 'first up' of fluid 'broth'", "1.0 1/s, NaN Pa");
+        study.getFluids().get(0).getCurves().clear();
         study.getFluids().remove(0);
         refused(study, file, "case 'simmer'", "fluid 'broth'", "not in the study");
         assertArrayEquals(before, Files.readAllBytes(file));

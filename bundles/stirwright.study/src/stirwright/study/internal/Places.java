@@ -5,6 +5,7 @@ import org.eclipse.emf.ecore.EObject;
 import stirwright.study.Amount;
 import stirwright.study.Case;
 import stirwright.study.Constant;
+import stirwright.study.Curve;
 import stirwright.study.Part;
 import stirwright.study.Pick;
 
@@ -23,6 +24,7 @@ final class Places {
             case Pick pick -> "pick " + quote(pick.getQuantity()) + " of " + of(pick.eContainer());
             case Constant constant -> "constant " + quote(constant.getName()) + " of " + quote(constant.getCorrelation()) + " in "
                     + of(constant.eContainer());
+            case Curve curve -> "curve " + quote(curve.getLabel()) + " of " + of(curve.eContainer());
             default -> "the study";
         };
     }

@@ -3,9 +3,11 @@ package stirwright.study.internal;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
+import org.eclipse.emf.ecore.EClassifier;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.ecore.EStructuralFeature;
+import org.eclipse.emf.ecore.EcorePackage;
 import org.eclipse.emf.ecore.resource.Resource.Diagnostic;
 import org.eclipse.emf.ecore.xmi.ClassNotFoundException;
 import org.eclipse.emf.ecore.xmi.FeatureNotFoundException;
@@ -74,9 +76,15 @@ final class ReadProblems {
 
     private static String value(EStructuralFeature feature, Object value) {
         String allowed = feature instanceof EReference ? withArticle(feature.getEType().getName().toLowerCase(Locale.ROOT))
-                : "a plain number such as " + (feature.getEType() == StudyPackage.Literals.NUMBER ? "0.25" : "1");
+                : form(feature.getEType());
         String shown = value instanceof EObject object ? Places.of(object) : Places.quote(String.valueOf(value));
         return "has " + shown + " as " + feature.getName() + ", where " + allowed + " belongs; write one";
+    }
+
+    private static String form(EClassifier type) {
+        return type == StudyPackage.Literals.MEASURED_POINT ? "a rate and a stress such as 0.25 3.1"
+                : type == EcorePackage.Literals.EBOOLEAN ? "true or false"
+                : "a plain number such as " + (type == StudyPackage.Literals.NUMBER ? "0.25" : "1");
     }
 
     private static String withArticle(String noun) {

@@ -5,6 +5,7 @@ import java.util.List;
 import org.eclipse.emf.ecore.EAttribute;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.util.EcoreUtil;
+import stirwright.study.MeasuredPoint;
 
 /** Whether a file can hold the texts and numbers of a study. */
 final class Texts {
@@ -28,6 +29,10 @@ final class Texts {
         if (value instanceof Double number && !Double.isFinite(number)) {
             throw new NoStudyException(Places.of(object) + " has the " + attribute.getName() + " " + number
                     + ", which is no number; give one");
+        }
+        if (value instanceof MeasuredPoint point && !(Double.isFinite(point.rate()) && Double.isFinite(point.stress()))) {
+            throw new NoStudyException(Places.of(object) + " has the point " + point.rate() + " 1/s, " + point.stress()
+                    + " Pa, which is none; give two numbers");
         }
         if (value instanceof String text) {
             int odd = text.codePoints().filter(c -> !isWritable(c)).findFirst().orElse(-1);
