@@ -60,4 +60,22 @@ public final class CurveStyle {
         gc.setBackground(background);
         gc.setLineAttributes(line);
     }
+
+    /**
+     * Paints the mark of measured points in the middle of a rectangle, for instance as a legend in a table. Leaves the GC as
+     * it was.
+     */
+    public static void paintMark(GC gc, Rectangle area, int style, boolean used, Palette palette) {
+        LineAttributes line = gc.getLineAttributes();
+        Color foreground = gc.getForeground();
+        Color background = gc.getBackground();
+        int antialias = gc.getAntialias();
+        gc.setAntialias(SWT.ON);
+        Strokes.toMarks(gc, used, palette);
+        Strokes.marker(style).draw(gc, area.x + area.width / 2, area.y + area.height / 2);
+        gc.setAntialias(antialias);
+        gc.setForeground(foreground);
+        gc.setBackground(background);
+        gc.setLineAttributes(line);
+    }
 }

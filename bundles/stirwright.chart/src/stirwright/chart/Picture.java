@@ -11,14 +11,25 @@ import java.util.Optional;
  * @param curves in the order of drawing; the pick is always drawn last
  * @param bands vertical bands behind the curves
  * @param operatingPoint the operating point, if there is one
- * @param emptyMessage what is said when no curve has a point to show: one sentence that says what to do next
+ * @param points measured points, behind the curves
+ * @param envelopes how far curves are known, behind the points
+ * @param rules named places on the x axis
+ * @param emptyMessage what is said when there is neither a curve nor a point to show: one sentence that says what to do next
  */
 public record Picture(Axis x, Axis y, List<Curve> curves, List<Band> bands, Optional<Mark> operatingPoint,
-        String emptyMessage) {
+        List<Points> points, List<Envelope> envelopes, List<Rule> rules, String emptyMessage) {
     /** Keeps copies of the lists. */
     public Picture {
         curves = List.copyOf(curves);
         bands = List.copyOf(bands);
+        points = List.copyOf(points);
+        envelopes = List.copyOf(envelopes);
+        rules = List.copyOf(rules);
+    }
+
+    /** Curves alone. */
+    public Picture(Axis x, Axis y, List<Curve> curves, List<Band> bands, Optional<Mark> operatingPoint, String emptyMessage) {
+        this(x, y, curves, bands, operatingPoint, List.of(), List.of(), List.of(), emptyMessage);
     }
 
     /** A picture with nothing in it but a message. */

@@ -66,12 +66,12 @@ class SpanTest {
     void anAxisWithoutEndsTakesThoseOfTheCurves() {
         Curve curve = new Curve("a", "a", new double[] {-1, 0, 10, 1000, Double.POSITIVE_INFINITY}, new double[5],
                 new boolean[5], 0, false);
-        Span asked = Fit.of(new Axis("x", "", true, 2, 50), List.of(curve), Curve::x);
+        Span asked = Fit.of(new Axis("x", "", true, 2, 50), List.of(curve.x()));
         assertEquals(new Span(true, 2, 50), asked);
-        Span found = Fit.of(new Axis("x", "", true, 0, 0), List.of(curve), Curve::x);
+        Span found = Fit.of(new Axis("x", "", true, 0, 0), List.of(curve.x()));
         assertTrue(found.least() < 10 && found.least() > 8 && found.most() > 1000 && found.most() < 1300, () -> "" + found);
-        assertEquals(new Span(true, 1, 10), Fit.of(new Axis("x", "", true, 5, 5), List.of(), Curve::x));
-        Span level = Fit.of(new Axis("y", "", false, 1, 1), List.of(curve), Curve::y);
+        assertEquals(new Span(true, 1, 10), Fit.of(new Axis("x", "", true, 5, 5), List.of()));
+        Span level = Fit.of(new Axis("y", "", false, 1, 1), List.of(curve.y()));
         assertTrue(level.least() < 0 && level.most() > 0, () -> "" + level);
     }
 }

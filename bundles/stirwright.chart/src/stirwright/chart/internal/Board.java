@@ -4,6 +4,8 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Set;
 import java.util.function.Consumer;
+import java.util.function.Function;
+import java.util.stream.Stream;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.GC;
@@ -19,6 +21,7 @@ import org.eclipse.swtchart.ICustomPaintListener;
 import stirwright.chart.Curve;
 import stirwright.chart.Palette;
 import stirwright.chart.Picture;
+import stirwright.chart.Points;
 import stirwright.chart.Reading;
 
 /** The state of a chart view and what changes it. The scene is made anew when it must be, painting only paints. */
@@ -111,9 +114,13 @@ public final class Board {
     /** Shows everything. */
     public void fit() {
         zoomed = false;
-        spanX = Fit.of(picture.x(), picture.curves(), Curve::x);
-        spanY = Fit.of(picture.y(), picture.curves(), Curve::y);
+        spanX = Fit.of(picture.x(), values(Curve::x, Points::x));
+        spanY = Fit.of(picture.y(), values(Curve::y, Points::y));
         rebuild();
+    }
+
+    private List<double[]> values(Function<Curve, double[]> ofCurve, Function<Points, double[]> ofPoints) {
+        return Stream.concat(picture.curves().stream().map(ofCurve), picture.points().stream().map(ofPoints)).toList();
     }
 
     /** Shows other parts of the axes. */

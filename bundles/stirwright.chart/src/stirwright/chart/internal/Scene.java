@@ -28,6 +28,9 @@ public final class Scene {
     final List<Ticks.Tick> xTicks;
     final List<Ticks.Tick> yTicks;
     final List<Trace> traces = new ArrayList<>();
+    final List<PointTrace> points = new ArrayList<>();
+    final List<EnvelopeTrace> envelopes = new ArrayList<>();
+    final List<PlacedRule> rules;
     final List<Hint> hints = new ArrayList<>();
     final Column column;
     final boolean empty;
@@ -43,7 +46,7 @@ public final class Scene {
         this.size = size;
         gc.setFont(type.plain());
         List<Curve> visible = visible(picture, hidden);
-        empty = !Fit.anything(picture.curves(), spanX, spanY);
+        empty = !Fit.anything(picture, spanX, spanY);
         int top = EDGE + type.height() + GAP + (picture.bands().isEmpty() ? 0 : type.height() + GAP / 2);
         int bottom = Math.max(top + 1, size.y - EDGE - 2 * type.height() - GAP - GAP / 2);
         y = new Scale(spanY, bottom, top);
@@ -59,6 +62,10 @@ public final class Scene {
         for (Curve curve : visible) {
             traces.add(new Trace(gc.getDevice(), curve, x, y, clip));
         }
+        picture.points().stream().filter(p -> !hidden.contains(p.id())).forEach(p -> points.add(new PointTrace(p, x, y, plot)));
+        picture.envelopes().stream().filter(e -> !hidden.contains(e.curveId()))
+                .forEach(e -> visible.stream().filter(c -> c.id().equals(e.curveId())).findFirst()
+                        .ifPresent(c -> envelopes.add(new EnvelopeTrace(gc.getDevice(), e, c, x, y))));
         column = new Column(gc, this, named ? traces : List.of(), size.x - EDGE - right);
         yTitle = title(gc, picture.y().words(), EDGE, EDGE, size.x - 2 * EDGE);
         xTitle = title(gc, picture.x().words(), left, size.y - EDGE - type.height(), right - left);
@@ -66,6 +73,7 @@ public final class Scene {
             BandPainter.hint(gc, this, picture.bands().get(i));
         }
         mark = picture.operatingPoint().map(point -> MarkPainter.at(this, point)).orElse(null);
+        rules = RulePainter.place(gc, this);
         markWords = mark == null ? null : MarkPainter.place(gc, this, picture.operatingPoint().orElseThrow());
     }
 
@@ -154,5 +162,6 @@ public final class Scene {
     /** Gives back what the system lent. */
     public void dispose() {
         traces.forEach(Trace::dispose);
+        envelopes.forEach(EnvelopeTrace::dispose);
     }
 }

@@ -38,7 +38,11 @@ public final class ScenePainter {
         if (cursor != null) {
             AxisPainter.minor(gc, scene, palette, cursor.reading().x(), scene.y.value(cursor.y()));
         }
+        PointPainter.envelopes(gc, scene, palette);
+        RulePainter.lines(gc, scene, palette);
+        PointPainter.points(gc, scene, palette);
         CurvePainter.paint(gc, scene, palette, highlighted);
+        RulePainter.words(gc, scene, palette);
         if (scene.mark != null) {
             MarkPainter.paint(gc, scene, palette);
         }

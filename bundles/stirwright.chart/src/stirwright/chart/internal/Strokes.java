@@ -2,6 +2,7 @@ package stirwright.chart.internal;
 
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.Color;
+import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.LineAttributes;
 import stirwright.chart.Palette;
 
@@ -17,9 +18,13 @@ public final class Strokes {
     public static final int OUTSIDE_ALPHA = 89;
     /** Opacity of 255 for the rectangle that a zoom is drawn with: 15 %. */
     public static final int RUBBER_ALPHA = 38;
+    /** Opacity of 255 for how far a curve is known: 15 %. */
+    public static final int ENVELOPE_ALPHA = 38;
     /** Opacity of 255 for bands behind the curves: 6 %, so that they stay behind them. */
     public static final int BAND_ALPHA = 15;
 
+    /** How much of a measured point is ink, so that the curve that goes through it is seen. */
+    private static final double MARK_SHARE = 0.75;
     /** Finer than the dashes of any style. */
     private static final float[] OUTSIDE = {2, 2.5f};
     private static final float[][] DASHES = {null, {9, 3}, {12, 3, 2, 3}, {5, 3}, {18, 4}, {10, 3, 2, 3, 2, 3}, {6, 3, 2, 3},
@@ -49,6 +54,24 @@ public final class Strokes {
         float[] dash = inside ? dash(style, pick) : OUTSIDE;
         return new LineAttributes((pick ? PICK : THIN) + (strong ? THIN : 0), SWT.CAP_FLAT, SWT.JOIN_ROUND,
                 dash == null ? SWT.LINE_SOLID : SWT.LINE_CUSTOM, dash, 0, 10);
+    }
+
+    /** Makes the GC ready for the filled marks of measured points: in the colour of text, since the colours are the curves'. */
+    public static void toMarks(GC gc, boolean used, Palette palette) {
+        gc.setLineAttributes(new LineAttributes(THIN));
+        // Mixed and not transparent: where the outline lies on the filling it would be darker.
+        Color mixed = mixed(palette.text(), palette.page(), used ? MARK_SHARE : OUTSIDE_ALPHA / 255.0);
+        gc.setForeground(mixed);
+        gc.setBackground(mixed);
+    }
+
+    private static Color mixed(Color ink, Color page, double share) {
+        return new Color(mixed(ink.getRed(), page.getRed(), share), mixed(ink.getGreen(), page.getGreen(), share),
+                mixed(ink.getBlue(), page.getBlue(), share));
+    }
+
+    private static int mixed(int ink, int page, double share) {
+        return (int) Math.round(share * ink + (1 - share) * page);
     }
 
     private static Color[] colours(int... hex) {

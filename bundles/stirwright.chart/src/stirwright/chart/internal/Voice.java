@@ -1,5 +1,6 @@
 package stirwright.chart.internal;
 
+import java.util.stream.Collectors;
 import org.eclipse.swt.accessibility.ACC;
 import org.eclipse.swt.accessibility.Accessible;
 import org.eclipse.swt.accessibility.AccessibleAdapter;
@@ -55,6 +56,9 @@ public final class Voice {
         if (board.cursor() != null) {
             return board.cursor().words(board.scene());
         }
-        return Wording.of("curves", board.scene().traces().size());
+        int points = board.scene().points.stream().mapToInt(p -> p.points().x().length).sum();
+        return (points > 0 ? Wording.of("points", points) : "")
+                + board.picture().rules().stream().map(RulePainter::inWords).collect(Collectors.joining())
+                + Wording.of("curves", board.scene().traces().size());
     }
 }
