@@ -22,6 +22,7 @@ import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Sash;
 import org.eclipse.swt.widgets.ScrollBar;
+import org.eclipse.swt.widgets.Shell;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.Text;
 import org.junit.jupiter.api.Test;
@@ -233,16 +234,20 @@ class LooksTest {
     }
 
     /** Keeps what the window shows, one dot for a dot of the screen. */
-    private static void picture(OpenWindow window, String name) throws Exception {
+    static void picture(OpenWindow window, String name) throws Exception {
         window.settle();
+        picture(window, window.shell(), name);
+    }
+
+    static void picture(OpenWindow window, Shell shell, String name) throws Exception {
         Files.createDirectories(PICTURES);
         // Whatever the new numbers still have to draw is drawn first.
         for (int i = 0; i < 10; i++) {
-            window.run(() -> window.shell().update());
+            window.run(() -> shell.update());
             Thread.sleep(20);
         }
         window.run(() -> {
-            Rectangle area = window.display().map(window.shell(), null, window.shell().getClientArea());
+            Rectangle area = window.display().map(shell, null, shell.getClientArea());
             GC screen = new GC(window.display());
             Image image = new Image(window.display(), area.width, area.height);
             screen.copyArea(image, area.x, area.y);

@@ -147,6 +147,9 @@ public final class Messages extends NLS {
     public static String Notice_name;
     public static String Notice_putAway;
     public static String Opening_noDemo;
+    public static String Page_case;
+    public static String Page_flowCurve;
+    public static String Page_selector;
     public static String Regime_laminar;
     public static String Regime_transitional;
     public static String Regime_turbulent;

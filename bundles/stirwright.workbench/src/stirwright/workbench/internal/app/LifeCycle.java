@@ -10,6 +10,9 @@ import org.eclipse.e4.ui.workbench.modeling.EModelService;
 import org.eclipse.equinox.app.IApplicationContext;
 import org.eclipse.swt.widgets.Display;
 import stirwright.core.Library;
+import stirwright.workbench.internal.flow.FlowCurves;
+import stirwright.workbench.internal.importing.CurveImports;
+import stirwright.workbench.internal.session.Pages;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
@@ -27,10 +30,18 @@ public final class LifeCycle {
         context.set(Notices.class, notices);
         context.set(Problems.class, new Problems());
         context.set(Session.class, session);
+        Pages pages = new Pages();
+        FlowCurves flow = new FlowCurves(session, pages, task -> later(display, task));
+        context.set(Pages.class, pages);
+        context.set(FlowCurves.class, flow);
         context.set(Documents.class, ContextInjectionFactory.make(Documents.class, context));
         context.set(CardsWindow.class, ContextInjectionFactory.make(CardsWindow.class, context));
         context.set(DropInNotices.class, ContextInjectionFactory.make(DropInNotices.class, context));
-        display.disposeExec(session::close);
+        context.set(CurveImports.class, ContextInjectionFactory.make(CurveImports.class, context));
+        display.disposeExec(() -> {
+            flow.close();
+            session.close();
+        });
     }
 
     /** Families go on arriving while the window closes. */

@@ -8,12 +8,12 @@ import java.util.List;
  * @param key one notice takes the place of another with the same key
  * @param action the verb of the button that settles it; the bar adds one that puts the notice away
  */
-record Notice(String key, String words, List<Action> actions) {
+public record Notice(String key, String words, List<Action> actions) {
 
     /** @param deed called on the user interface's thread; the notice goes */
-    record Action(String verb, Runnable deed) {}
+    public record Action(String verb, Runnable deed) {}
 
-    Notice {
+    public Notice {
         actions = List.copyOf(actions);
     }
 }

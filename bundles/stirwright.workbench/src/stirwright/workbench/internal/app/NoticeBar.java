@@ -4,7 +4,6 @@ import jakarta.annotation.PostConstruct;
 import jakarta.inject.Inject;
 import java.util.Iterator;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
@@ -26,7 +25,7 @@ public final class NoticeBar {
 
     @PostConstruct
     void create(Composite parent) {
-        bar = Names.name(new WindowWide(parent), Messages.Notice_name);
+        bar = Names.name(new Wide(parent), Messages.Notice_name);
         bar.setBackground(looks.palette().surface());
         bar.setBackgroundMode(SWT.INHERIT_FORCE);
         GridLayout layout = new GridLayout(2, false);
@@ -71,22 +70,6 @@ public final class NoticeBar {
         }
         if (notice.actions().isEmpty()) {
             looks.button(buttons, Messages.Notice_putAway, () -> notices.remove(notice.key()));
-        }
-    }
-
-    /** As high as its words need at the width of the window, which is what a trim gives it. */
-    private static final class WindowWide extends Composite {
-        WindowWide(Composite parent) {
-            super(parent, SWT.NONE);
-        }
-
-        @Override
-        public Point computeSize(int widthHint, int heightHint, boolean changed) {
-            if (getChildren().length == 0) {
-                return new Point(1, 0);
-            }
-            int width = getShell().getClientArea().width;
-            return new Point(width, super.computeSize(width, heightHint, changed).y);
         }
     }
 }

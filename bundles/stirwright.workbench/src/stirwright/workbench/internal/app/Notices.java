@@ -8,17 +8,17 @@ import java.util.Map;
 import java.util.function.Predicate;
 
 /** What the window has to say at the moment, oldest first. On the user interface's thread. */
-final class Notices {
+public final class Notices {
     private final Map<String, Notice> notices = new LinkedHashMap<>();
     private final List<Runnable> listeners = new ArrayList<>();
 
-    void put(Notice notice) {
+    public void put(Notice notice) {
         if (!notice.equals(notices.put(notice.key(), notice))) {
             tell();
         }
     }
 
-    void remove(String key) {
+    public void remove(String key) {
         if (notices.remove(key) != null) {
             tell();
         }

@@ -11,6 +11,7 @@ import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
 import stirwright.core.CaseResult;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.flow.FlowCurves;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
@@ -22,6 +23,9 @@ public final class StandingLine {
 
     @Inject
     private Session session;
+
+    @Inject
+    private FlowCurves flow;
 
     @Inject
     private Problems problems;
@@ -51,19 +55,27 @@ public final class StandingLine {
         state.addListener(SWT.Selection, e -> act());
         problems.listen(this::show);
         session.onRequest(() -> watch(line.getDisplay()));
-        session.onOutcome(() -> {
-            slow = false;
-            show();
-        });
+        session.onOutcome(this::arrived);
+        flow.onRequest(() -> watch(line.getDisplay()));
+        flow.onSheet(this::arrived);
         show();
+    }
+
+    private void arrived() {
+        slow &= busy();
+        show();
+    }
+
+    private boolean busy() {
+        return session.busy() || flow.busy();
     }
 
     /** Once work takes long, it is told, with the way to stop it. */
     private void watch(Display display) {
-        slow &= session.busy();
+        slow &= busy();
         show();
         display.timerExec(LONG_MILLIS, () -> {
-            if (!state.isDisposed() && session.busy()) {
+            if (!state.isDisposed() && busy()) {
                 slow = true;
                 show();
             }
@@ -72,11 +84,22 @@ public final class StandingLine {
 
     private void act() {
         if (slow) {
-            session.stop();
+            stop();
         } else if (session.stopped()) {
             session.recalculate();
+        } else if (flow.stopped()) {
+            flow.again();
         } else {
             problems.jump();
+        }
+    }
+
+    private void stop() {
+        if (session.busy()) {
+            session.stop();
+        }
+        if (flow.busy()) {
+            flow.stop();
         }
     }
 
@@ -95,14 +118,15 @@ public final class StandingLine {
         if (slow) {
             return Messages.Standing_busy + " <a>" + Messages.Standing_stop + "</a>";
         }
-        if (session.stopped()) {
+        if (session.stopped() || flow.stopped()) {
             return Messages.Standing_stopped + " <a>" + Messages.Standing_again + "</a>";
         }
         if (problems.count() > 0) {
             return "<a>" + Messages.bind(Messages.Standing_problems, problems.count()) + "</a>";
         }
-        if (session.defect() != null) {
-            return plain(Messages.bind(Messages.Standing_defect, String.valueOf(session.defect())));
+        Throwable defect = session.defect() == null ? flow.defect() : session.defect();
+        if (defect != null) {
+            return plain(Messages.bind(Messages.Standing_defect, String.valueOf(defect)));
         }
         return session.outcome().map(o -> status(o.main().result())).orElse("");
     }

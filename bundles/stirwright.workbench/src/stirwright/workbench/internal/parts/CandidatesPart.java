@@ -5,15 +5,19 @@ import jakarta.inject.Inject;
 import org.eclipse.e4.ui.di.Focus;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.SashForm;
-import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.custom.StackLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import stirwright.workbench.internal.app.CardsWindow;
+import stirwright.workbench.internal.flow.FlowCurves;
+import stirwright.workbench.internal.flowpage.FlowBelow;
+import stirwright.workbench.internal.session.Page;
+import stirwright.workbench.internal.session.Pages;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 
-/** The candidates for the quantity on the chart, and the card of the selected one beside them. */
+/** Below the chart: of a case its candidates with the card of the selected one, of a flow curve its models. */
 public final class CandidatesPart {
     private static final int[] SHARES = {68, 32};
 
@@ -29,18 +33,39 @@ public final class CandidatesPart {
     @Inject
     private Problems problems;
 
+    @Inject
+    private Pages pages;
+
+    @Inject
+    private FlowCurves flow;
+
     private Composite area;
+    private final StackLayout onTop = new StackLayout();
+    private Composite halves;
     private CandidateTable table;
+    /** Made when its page is shown first. */
+    private FlowBelow flowBelow;
 
     @PostConstruct
     void create(Composite parent) {
         area = parent;
-        parent.setLayout(new FillLayout());
-        SashForm halves = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
-        halves.setSashWidth(Looks.STEP);
-        table = new CandidateTable(halves, looks, session);
-        new CardView(halves, looks, session, cards, problems);
-        halves.setWeights(SHARES);
+        parent.setLayout(onTop);
+        SashForm sash = looks.onPage(new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH));
+        sash.setSashWidth(Looks.STEP);
+        table = new CandidateTable(sash, looks, session);
+        new CardView(sash, looks, session, cards, problems);
+        sash.setWeights(SHARES);
+        halves = sash;
+        onTop.topControl = halves;
+        pages.onTurn(this::turn);
+    }
+
+    private void turn() {
+        if (flowBelow == null && pages.current() == Page.FLOW_CURVE) {
+            flowBelow = new FlowBelow(area, looks, session, flow);
+        }
+        onTop.topControl = pages.current() == Page.FLOW_CURVE ? flowBelow : halves;
+        area.layout(true, true);
     }
 
     /** The table, unless somebody went for another control in here. */
@@ -51,6 +76,10 @@ public final class CandidatesPart {
                 return;
             }
         }
-        table.setFocus();
+        if (onTop.topControl == halves) {
+            table.setFocus();
+        } else {
+            flowBelow.setFocus();
+        }
     }
 }

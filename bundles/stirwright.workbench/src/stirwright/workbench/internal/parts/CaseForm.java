@@ -28,6 +28,8 @@ import stirwright.study.Amounts;
 import stirwright.study.Case;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.session.CaseEdits;
+import stirwright.workbench.internal.session.Page;
+import stirwright.workbench.internal.session.Pages;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Form;
@@ -40,15 +42,17 @@ final class CaseForm extends Composite {
     private final Session session;
     private final CaseEdits edits;
     private final Problems problems;
+    private final Pages pages;
     private final List<NumberField> fields = new ArrayList<>();
     private final List<Runnable> refreshers = new ArrayList<>();
     private final List<Object> shape;
     private final Form form;
 
-    CaseForm(Composite parent, Looks looks, Session session, Problems problems) {
+    CaseForm(Composite parent, Looks looks, Session session, Problems problems, Pages pages) {
         super(parent, SWT.NONE);
         this.session = session;
         this.problems = problems;
+        this.pages = pages;
         this.edits = new CaseEdits(session);
         this.shape = shape();
         setLayout(new FillLayout());
@@ -60,6 +64,7 @@ final class CaseForm extends Composite {
     private List<Object> shape() {
         List<Object> all = new ArrayList<>();
         all.add(session.current());
+        all.add(pages.current());
         session.current().ifPresent(c -> {
             all.add(Optional.ofNullable(c.getFluid()));
             all.add(c.getFluid() == null ? "" : String.valueOf(c.getFluid().getModel()));
@@ -67,6 +72,7 @@ final class CaseForm extends Composite {
             all.add(Optional.ofNullable(c.getImpeller()));
             all.add(session.familyId());
             all.add(List.copyOf(c.getCompared()));
+            all.add(pages.current() == Page.FLOW_CURVE && c.getFluid() != null ? List.copyOf(c.getFluid().getCurves()) : List.of());
             all.add(c.getDemand() == null ? "" : c.getDemand().getColumn());
             all.add(List.copyOf(session.editor().study().getCases()));
             all.add(List.copyOf(session.editor().study().getFluids()));
@@ -83,6 +89,12 @@ final class CaseForm extends Composite {
 
     private void build(Case c) {
         CaseGroups groups = new CaseGroups(this, form, session, edits);
+        if (pages.current() == Page.FLOW_CURVE) {
+            groups.caseOfFluid(c);
+            groups.fluid(c);
+            groups.curves(c);
+            return;
+        }
         groups.theCase(c);
         groups.speed(c);
         groups.fluid(c);
@@ -90,6 +102,11 @@ final class CaseForm extends Composite {
         groups.impeller(c, families());
         groups.compare(c, families());
         groups.given(c);
+    }
+
+    /** Something else that shows the study as it is. */
+    void refreshed(Runnable refresher) {
+        refreshers.add(refresher);
     }
 
     /** A field for an amount. */

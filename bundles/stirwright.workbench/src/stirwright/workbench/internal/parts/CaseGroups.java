@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.widgets.Composite;
 import stirwright.correlation.Family;
 import stirwright.exchange.CaseField;
@@ -15,8 +16,12 @@ import stirwright.study.Impeller;
 import stirwright.study.Part;
 import stirwright.study.Vessel;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.flow.FluidEdits;
+import stirwright.workbench.internal.flowpage.CurveList;
+import stirwright.workbench.internal.flowpage.PageWords;
 import stirwright.workbench.internal.session.CaseEdits;
 import stirwright.workbench.internal.session.Demands;
+import stirwright.workbench.internal.session.ModelTitles;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Form;
 
@@ -44,6 +49,30 @@ final class CaseGroups {
         fields.text(Messages.Case_nameOfCase, c::getName, name -> edits.rename(c, name));
     }
 
+    /** Whose fluid it is, where the page is about the fluid. */
+    void caseOfFluid(Case c) {
+        fields.choice(Messages.Case_case, session.editor().study().getCases(), c, Case::getName, session::turnTo);
+    }
+
+    /** The measured curves of the fluid. */
+    void curves(Case c) {
+        Fluid fluid = c.getFluid();
+        if (fluid == null) {
+            return;
+        }
+        Composite head = form.heading(PageWords.Curves_heading);
+        if (fluid.getCurves().isEmpty()) {
+            form.sentence(PageWords.Curves_none);
+            return;
+        }
+        CurveList list = new CurveList(form, form.looks(), fluid, new FluidEdits(session));
+        GridData data = Form.wholeLine();
+        data.heightHint = list.height();
+        list.control().setLayoutData(data);
+        form.looks().link(head, PageWords.Curves_remove, list::remove).setToolTipText(PageWords.Curves_removeTip);
+        fields.refreshed(list::refresh);
+    }
+
     void speed(Case c) {
         form.heading(Messages.Case_speed);
         List<CaseField> kinds = CaseFields.SPEEDS;
@@ -65,7 +94,7 @@ final class CaseGroups {
         fields.text(Messages.Case_nameOfFluid, fluid::getName, name -> edits.rename(Messages.Edit_name, fluid, name));
         List<ModelKind> kinds = Arrays.asList(ModelKind.values());
         Optional<ModelKind> kind = Optional.ofNullable(fluid.getModel()).flatMap(ModelKind::byId);
-        form.choice(Messages.Case_model, kinds.stream().map(CaseGroups::title).toList(),
+        form.choice(Messages.Case_model, kinds.stream().map(ModelTitles::of).toList(),
                 kind.map(kinds::indexOf).orElse(-1), i -> edits.model(fluid, kinds.get(i).id()));
         kind.ifPresent(k -> CaseFields.model(k).forEach(f -> fields.number(f, fluid.getAmounts())));
         kind.ifPresent(k -> CaseFields.yieldBounds(k).forEach(f -> fields.number(f, fluid.getAmounts())));
@@ -120,18 +149,5 @@ final class CaseGroups {
 
     private Optional<Family> family() {
         return session.catalogue().family(session.familyId());
-    }
-
-    private static String title(ModelKind kind) {
-        return switch (kind) {
-            case NEWTONIAN -> Messages.Model_newtonian;
-            case POWER_LAW -> Messages.Model_powerLaw;
-            case BINGHAM -> Messages.Model_bingham;
-            case HERSCHEL_BULKLEY -> Messages.Model_herschelBulkley;
-            case CASSON -> Messages.Model_casson;
-            case SISKO -> Messages.Model_sisko;
-            case CROSS -> Messages.Model_cross;
-            case CARREAU -> Messages.Model_carreau;
-        };
     }
 }

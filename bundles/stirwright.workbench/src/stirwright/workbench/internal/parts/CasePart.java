@@ -11,11 +11,12 @@ import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
+import stirwright.workbench.internal.session.Pages;
 import stirwright.workbench.internal.session.Problems;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 
-/** The case: fluid, vessel, impeller, speed or target, as fields that recalculate while one types. */
+/** The case: fluid, vessel, impeller, speed or target, as fields that recalculate while one types; or its fluid alone. */
 public final class CasePart {
     @Inject
     private Session session;
@@ -25,6 +26,9 @@ public final class CasePart {
 
     @Inject
     private Problems problems;
+
+    @Inject
+    private Pages pages;
 
     private ScrolledComposite scroller;
     private CaseForm form;
@@ -39,6 +43,7 @@ public final class CasePart {
         scroller.addListener(SWT.Resize, e -> fit());
         rebuild();
         session.onStudy(this::showStudy);
+        pages.onTurn(this::showStudy);
         session.onOutcome(this::showOutcome);
     }
 
@@ -71,7 +76,7 @@ public final class CasePart {
             form.dropProblems();
             form.dispose();
         }
-        form = new CaseForm(scroller, looks, session, problems);
+        form = new CaseForm(scroller, looks, session, problems, pages);
         form.addListener(SWT.Resize, this::resized);
         scroller.setContent(form);
         fit();

@@ -2,24 +2,26 @@ package stirwright.workbench.internal.parts;
 
 import jakarta.annotation.PostConstruct;
 import jakarta.inject.Inject;
-import java.util.Arrays;
 import org.eclipse.e4.ui.di.Focus;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Link;
+import org.eclipse.swt.widgets.Control;
 import stirwright.chart.ChartView;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.flow.FlowCurves;
+import stirwright.workbench.internal.flowpage.FlowChart;
+import stirwright.workbench.internal.importing.CurveImports;
 import stirwright.workbench.internal.session.Outcome;
+import stirwright.workbench.internal.session.Page;
+import stirwright.workbench.internal.session.Pages;
 import stirwright.workbench.internal.session.Row;
 import stirwright.workbench.internal.session.Session;
-import stirwright.workbench.internal.session.View;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
-import stirwright.workbench.internal.widgets.WordBar;
 
-/** The numbers of the pick, and every candidate as a curve. */
+/** The one chart of the window, with the head that belongs to the page. */
 public final class ChartPart {
     @Inject
     private Session session;
@@ -27,34 +29,35 @@ public final class ChartPart {
     @Inject
     private Looks looks;
 
-    private ResultStrip strip;
-    private WordBar views;
+    @Inject
+    private Pages pages;
+
+    @Inject
+    private FlowCurves flow;
+
+    @Inject
+    private CurveImports imports;
+
+    private Composite area;
+    private CaseHead head;
     private ChartView chart;
+    /** Made when its page is shown first. */
+    private FlowChart flowChart;
 
     @PostConstruct
     void create(Composite parent) {
-        Composite area = looks.area(parent);
+        area = looks.area(parent);
         area.setLayout(layout(1));
-        strip = new ResultStrip(area, looks);
-        strip.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        Composite head = looks.area(area);
+        head = new CaseHead(area, looks, session, () -> chart.reset());
         head.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        GridLayout headLayout = new GridLayout(2, false);
-        headLayout.marginWidth = 0;
-        headLayout.marginHeight = 0;
-        head.setLayout(headLayout);
-        views = new WordBar(head, looks, Messages.Chart_selector,
-                Arrays.stream(View.values()).map(View::title).toList(), i -> session.show(View.values()[i]));
-        views.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        Link whole = looks.link(head, Messages.Chart_reset, () -> chart.reset());
-        whole.setToolTipText(Messages.Chart_resetTip);
         chart = new ChartView(area, looks.palette());
         chart.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         Names.name(chart, Messages.Chart_name);
         chart.setLegend(false);
-        chart.onSelected(session::select);
+        chart.onSelected(this::select);
         session.onOutcome(this::showOutcome);
         session.onSelection(this::showSelection);
+        pages.onTurn(this::turn);
         session.outcome().ifPresent(o -> showOutcome());
     }
 
@@ -67,17 +70,54 @@ public final class ChartPart {
         return layout;
     }
 
+    private boolean ofCase() {
+        return pages.current() == Page.CASE;
+    }
+
+    private void select(String id) {
+        if (ofCase()) {
+            session.select(id);
+        } else if (flow.sheet().filter(s -> s.rows().stream().anyMatch(r -> r.key().equals(id))).isPresent()) {
+            flow.select(id);
+        }
+    }
+
+    /** Puts the head and the chart of the page in place of those of the other. */
+    private void turn() {
+        if (flowChart == null && !ofCase()) {
+            flowChart = new FlowChart(area, chart, looks, flow, () -> imports.choose(area.getShell()));
+        }
+        shown(head, ofCase());
+        if (flowChart != null) {
+            flowChart.setShown(!ofCase());
+        }
+        if (ofCase()) {
+            shown(chart, true);
+            Names.name(chart, Messages.Chart_name);
+            session.outcome().ifPresent(o -> showOutcome());
+        }
+        area.layout(true, true);
+    }
+
+    private static void shown(Control control, boolean wanted) {
+        ((GridData) control.getLayoutData()).exclude = !wanted;
+        control.setVisible(wanted);
+    }
+
     private void showOutcome() {
         Outcome outcome = session.outcome().orElseThrow();
-        strip.show(outcome);
-        views.setCurrent(outcome.view().ordinal());
-        chart.show(outcome.picture());
-        showSelection();
+        head.show(outcome);
+        if (ofCase()) {
+            chart.show(outcome.picture());
+            showSelection();
+        }
     }
 
     private void showSelection() {
-        chart.setHidden(session.hidden());
-        chart.highlight(session.selected().map(Row::key).orElse(null));
+        if (ofCase()) {
+            chart.setHidden(session.hidden());
+            chart.highlight(session.selected().map(Row::key).orElse(null));
+        }
     }
 
     @Focus

@@ -21,7 +21,7 @@ import stirwright.study.StudyEditor;
  */
 public final class Session implements AutoCloseable {
     private final Library library;
-    private final Recalculator recalculator;
+    private final Recalculator<Outcome> recalculator;
     private final Library.Listening arrivals;
     private final List<Runnable> onStudy = new CopyOnWriteArrayList<>();
     private final List<Runnable> onOutcome = new CopyOnWriteArrayList<>();
@@ -39,7 +39,7 @@ public final class Session implements AutoCloseable {
     /** @param ui runs what touches widgets, later and in order */
     public Session(Library library, Executor ui, Study study, Optional<Path> file) {
         this.library = library;
-        this.recalculator = new Recalculator(ui, this::take, () -> onRequest.forEach(Runnable::run));
+        this.recalculator = new Recalculator<>("stirwright-cases", ui, this::take, () -> onRequest.forEach(Runnable::run));
         this.arrivals = library.listen(() -> ui.execute(this::recalculate));
         open(study, file);
     }
@@ -83,7 +83,8 @@ public final class Session implements AutoCloseable {
                 entries.add(new Request.Entry(other, StudyCases.entry(current, catalogue, other)));
             }
         }
-        recalculator.request(new Request(catalogue, entries, view));
+        Request request = new Request(catalogue, entries, view);
+        recalculator.request(stale -> Calculation.of(request, stale));
         onRequest.forEach(Runnable::run);
     }
 

@@ -77,6 +77,25 @@ public final class Form extends Composite {
         return label;
     }
 
+    /** A caption alone; what belongs to it fills the two places behind it. */
+    public void captioned(String title, String meaning) {
+        FittedLabel caption = new FittedLabel(this, looks);
+        caption.label().setAlignment(SWT.RIGHT);
+        caption.setText(title, meaning);
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, false, false, 2, 1);
+        data.widthHint = labelWidth;
+        caption.label().setLayoutData(data);
+    }
+
+    /** A line of words that cannot be changed. */
+    public void readOnly(String title, String words) {
+        caption(title, "");
+        Label label = looks.label(this, SWT.WRAP, Looks.literal(words));
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
+        data.widthHint = FIELD_WIDTH;
+        label.setLayoutData(data);
+    }
+
     /** A choice among words; the unit's column stays empty. */
     public Combo choice(String title, List<String> words, int current, IntConsumer chosen) {
         caption(title, "");

@@ -2,6 +2,7 @@ package stirwright.workbench.internal.widgets;
 
 import java.util.HashMap;
 import java.util.Map;
+import java.util.function.Consumer;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Image;
 import org.eclipse.swt.graphics.ImageDataProvider;
@@ -20,7 +21,10 @@ import stirwright.chart.Palette;
 public final class Swatches {
     private static final Rectangle PLACE = new Rectangle(0, 0, 40, 14);
 
+    private static final Rectangle MARK = new Rectangle(0, 0, 14, 14);
+
     private final Map<Integer, Image> images = new HashMap<>();
+    private final Map<Integer, Image> marks = new HashMap<>();
     private final Control owner;
     private final Palette palette;
 
@@ -28,7 +32,10 @@ public final class Swatches {
     public Swatches(Control owner, Palette palette) {
         this.owner = owner;
         this.palette = palette;
-        owner.addDisposeListener(e -> images.values().forEach(Image::dispose));
+        owner.addDisposeListener(e -> {
+            images.values().forEach(Image::dispose);
+            marks.values().forEach(Image::dispose);
+        });
     }
 
     public Image of(int style, boolean pick) {
@@ -36,9 +43,19 @@ public final class Swatches {
                 key -> new Image(owner.getDisplay(), (ImageDataProvider) zoom -> painted(style, pick, zoom)));
     }
 
+    /** The mark of measured points. */
+    public Image mark(int style, boolean used) {
+        return marks.computeIfAbsent(used ? style : -1 - style, key -> new Image(owner.getDisplay(), (ImageDataProvider) zoom ->
+                painted(zoom, gc -> CurveStyle.paintMark(gc, MARK, style, used, palette), MARK)));
+    }
+
     private ImageData painted(int style, boolean pick, int zoom) {
-        int width = PLACE.width * zoom / 100;
-        int height = PLACE.height * zoom / 100;
+        return painted(zoom, gc -> CurveStyle.paintSwatch(gc, PLACE, style, pick, palette), PLACE);
+    }
+
+    private ImageData painted(int zoom, Consumer<GC> paint, Rectangle place) {
+        int width = place.width * zoom / 100;
+        int height = place.height * zoom / 100;
         ImageData blank = new ImageData(width, height, 24, new PaletteData(0xFF0000, 0xFF00, 0xFF));
         blank.alphaData = new byte[width * height];
         Image image = new Image(owner.getDisplay(), blank);
@@ -46,7 +63,7 @@ public final class Swatches {
         Transform larger = new Transform(owner.getDisplay());
         larger.scale(zoom / 100f, zoom / 100f);
         gc.setTransform(larger);
-        CurveStyle.paintSwatch(gc, PLACE, style, pick, palette);
+        paint.accept(gc);
         larger.dispose();
         gc.dispose();
         ImageData data = image.getImageData();
