@@ -173,10 +173,11 @@ class ImportTest {
 
     @Test
     void aFileWithoutAnythingToShowIsTold() throws Exception {
-        Path file = Files.write(folder.resolve("picture.png"), new byte[] {(byte) 0x89, 'P', 'N', 'G', 13, 10, 26, 10, 0, 0, 0});
+        Path file = Files.createFile(folder.resolve("nothing.csv"));
         OpenWindow.use(DEMO, window -> {
             ImportWindow dialog = open(window, file);
-            assertTrue(dialog.words("what to look at before taking anything").contains("picture.png"));
+            String words = dialog.words("what to look at before taking anything");
+            assertTrue(words.contains("nothing.csv"), words);
             assertFalse(dialog.canPress("Take these curves"));
             dialog.press("Cancel");
             dialog.awaitEnd();

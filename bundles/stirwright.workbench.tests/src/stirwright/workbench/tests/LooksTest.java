@@ -31,10 +31,10 @@ import stirwright.workbench.internal.widgets.Names;
 
 /** How the window looks and is reached: pictures to look at, no text cut, names for those who hear it, the order of the keys. */
 class LooksTest {
-    private static final List<String> DEMO = List.of("demo", "--window");
+    static final List<String> DEMO = List.of("demo", "--window");
     private static final Path PICTURES = Path.of(System.getProperty("stirwright.pictures"));
     static final Point NORMAL = new Point(1280, 800);
-    private static final Point SMALL = new Point(1280, 720);
+    static final Point SMALL = new Point(1280, 720);
 
     @Test
     void pictures() throws Exception {
@@ -84,9 +84,13 @@ class LooksTest {
     }
 
     /** Labels, links and buttons that are narrower than their words. */
-    private static List<String> cut(OpenWindow window) {
+    static List<String> cut(OpenWindow window) {
+        return cut(window.all(Control.class, c -> true));
+    }
+
+    static List<String> cut(List<Control> controls) {
         List<String> cut = new ArrayList<>();
-        for (Control control : window.all(Control.class, LooksTest::hasWords)) {
+        for (Control control : controls.stream().filter(LooksTest::hasWords).toList()) {
             boolean wraps = (control.getStyle() & SWT.WRAP) != 0;
             Point needed = control.computeSize(wraps ? control.getSize().x : SWT.DEFAULT, SWT.DEFAULT);
             if (needed.x > control.getSize().x + 1 || needed.y > control.getSize().y + 1) {
@@ -123,7 +127,7 @@ class LooksTest {
         return cut;
     }
 
-    private static String words(Control control) {
+    static String words(Control control) {
         return switch (control) {
             case Label label -> label.getText();
             case Link link -> link.getText();
@@ -133,7 +137,7 @@ class LooksTest {
     }
 
     /** Neighbours in one composite that lie upon each other. */
-    private static List<String> overlapping(OpenWindow window) {
+    static List<String> overlapping(OpenWindow window) {
         List<String> found = new ArrayList<>();
         for (Composite composite : window.all(Composite.class, Composite::isVisible)) {
             Control[] children = composite.getChildren();
@@ -184,7 +188,7 @@ class LooksTest {
         }));
     }
 
-    private static boolean takesKeys(Control control) {
+    static boolean takesKeys(Control control) {
         return control instanceof Text || control instanceof Combo || control instanceof Button || control instanceof Table
                 || control instanceof Link || control.getClass().getSimpleName().equals("StyledText")
                 || control.getClass().getSimpleName().equals("WordBar") || control.getClass().getSimpleName().equals("ChartView");

@@ -50,6 +50,13 @@ public final class Documents {
         }
     }
 
+    /** Asks about unsaved changes first. */
+    void openDropped(Shell shell, Path file) {
+        if (mayDrop(shell)) {
+            open(file);
+        }
+    }
+
     void open(Path file) {
         try {
             session.open(StudyFiles.read(file), Optional.of(file));

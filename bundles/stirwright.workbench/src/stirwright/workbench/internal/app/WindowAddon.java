@@ -12,6 +12,7 @@ import org.eclipse.e4.ui.workbench.modeling.IWindowCloseHandler;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Shell;
 import stirwright.workbench.internal.Messages;
+import stirwright.workbench.internal.importing.CurveImports;
 import stirwright.workbench.internal.session.Session;
 import stirwright.workbench.internal.widgets.Looks;
 
@@ -20,6 +21,7 @@ public final class WindowAddon {
     /** What the zones need to show every digit. In points. */
     private static final int LEAST_WIDTH = 1180;
     private static final int LEAST_HEIGHT = 640;
+    private static final int AFTER_START = 400;
 
     @Inject
     private Session session;
@@ -29,6 +31,9 @@ public final class WindowAddon {
 
     @Inject
     private Looks looks;
+
+    @Inject
+    private CurveImports imports;
 
     /** The window is made after its addons and before the first event; that is when the rest is done. */
     @PostConstruct
@@ -43,8 +48,16 @@ public final class WindowAddon {
         looks.onPage(shell);
         shell.setMinimumSize(LEAST_WIDTH, LEAST_HEIGHT);
         window.getContext().set(IWindowCloseHandler.class, w -> mayClose(shell, models, window));
+        shell.getDisplay().timerExec(AFTER_START, () -> takeDrops(shell));
         session.onStudy(() -> name(shell, window));
         name(shell, window);
+    }
+
+    /** Once the window is there, since nobody drops a file on it before. */
+    private void takeDrops(Shell shell) {
+        if (!shell.isDisposed()) {
+            new FileDrops(shell, documents, imports);
+        }
     }
 
     private boolean mayClose(Shell shell, EModelService models, MWindow window) {

@@ -18,7 +18,9 @@ public final class ModelCard {
     /** The sections of the card of a row, those of all models after its own. */
     public static List<Section> of(FlowSheet sheet, ModelRow row) {
         List<Section> sections = new ArrayList<>();
-        sections.add(new Section(row.title(), parameters(row)));
+        List<String> first = new ArrayList<>(quality(row));
+        first.addAll(parameters(row));
+        sections.add(new Section(row.title(), first));
         if (row.recommended()) {
             sections.add(new Section(FlowWords.Row_why, List.of(sheet.reason())));
         }
@@ -31,6 +33,7 @@ public final class ModelCard {
 
     private static List<String> parameters(ModelRow row) {
         List<String> lines = new ArrayList<>();
+        row.fit().ifPresent(f -> lines.add(FlowWords.Parameter_heading));
         row.fit().ifPresentOrElse(f -> f.estimates().forEach(e -> lines.add(parameter(e))), () -> row.model().ifPresent(m -> {
             double[] values = ModelKind.values(m);
             for (int i = 0; i < values.length; i++) {
@@ -38,14 +41,17 @@ public final class ModelCard {
                         + ModelRow.unit(row.kind().parameters().get(i).unit()));
             }
         }));
-        if (!Double.isNaN(row.rms())) {
-            lines.add(Messages.bind(FlowWords.Row_rms, String.format(Locale.ROOT, "%.2f", 100 * row.rms())));
-        }
-        if (!Double.isNaN(row.deltaAicc())) {
-            lines.add(Messages.bind(FlowWords.Row_delta, String.format(Locale.ROOT, "%.1f", row.deltaAicc()),
-                    RankedFits.meaning(row.deltaAicc())));
-        }
         return lines;
+    }
+
+    /** How well it fits, in one line; none without a model. */
+    private static List<String> quality(ModelRow row) {
+        if (Double.isNaN(row.rms())) {
+            return List.of();
+        }
+        String rms = Messages.bind(FlowWords.Row_rms, String.format(Locale.ROOT, "%.2f", 100 * row.rms()));
+        return List.of(Double.isNaN(row.deltaAicc()) ? rms : rms + ", " + Messages.bind(FlowWords.Row_delta,
+                String.format(Locale.ROOT, "%.1f", row.deltaAicc()), RankedFits.meaning(row.deltaAicc())));
     }
 
     private static String parameter(Estimate estimate) {
@@ -57,8 +63,8 @@ public final class ModelCard {
         if (Double.isNaN(estimate.interval().low()) && Double.isNaN(estimate.interval().high())) {
             return FlowWords.Parameter_none;
         }
-        String own = interval(FlowWords.Parameter_interval, estimate.interval());
-        return estimate.joint().known() ? own + "; " + interval(FlowWords.Parameter_joint, estimate.joint()) : own;
+        String own = interval(FlowWords.Interval, estimate.interval());
+        return estimate.joint().known() ? Messages.bind(FlowWords.Parameter_joint, own, interval(FlowWords.Interval, estimate.joint())) : own;
     }
 
     private static String interval(String words, Interval interval) {

@@ -12,7 +12,7 @@ import stirwright.workbench.internal.widgets.Looks;
 
 /** Below the chart: the models, and the card of the selected one beside them. */
 public final class FlowBelow extends Composite {
-    private static final int[] SHARES = {66, 34};
+    private static final int[] SHARES = {70, 30};
 
     private final SashForm halves;
     private final ModelTable table;

@@ -7,20 +7,22 @@ import stirwright.workbench.internal.flow.ModelRow;
 
 /** The columns of the models. */
 enum ModelColumn {
-    RANK(PageWords.Column_rank, 0, r -> r.rank() > 0 ? String.valueOf(r.rank()) : ""),
-    MODEL(PageWords.Column_model, 28, ModelRow::title),
-    PARAMETERS(PageWords.Column_parameters, 72, ModelRow::parameters),
-    RMS(PageWords.Column_rms, 0, r -> number("%.2f", 100 * r.rms())),
-    DELTA(PageWords.Column_delta, 0, r -> number("%.1f", r.deltaAicc())),
-    WARNINGS(PageWords.Column_warnings, 0, r -> r.notes().isEmpty() || r.rank() == 0 ? "" : String.valueOf(r.notes().size()));
+    RANK(PageWords.Column_rank, 0, true, r -> r.rank() > 0 ? String.valueOf(r.rank()) : ""),
+    MODEL(PageWords.Column_model, 0, false, ModelRow::title),
+    PARAMETERS(PageWords.Column_parameters, 1, false, ModelRow::parameters),
+    RMS(PageWords.Column_rms, 0, true, r -> number("%.2f", 100 * r.rms())),
+    DELTA(PageWords.Column_delta, 0, true, r -> number("%.1f", r.deltaAicc())),
+    WARNINGS(PageWords.Column_warnings, 0, true, r -> r.notes().isEmpty() || r.rank() == 0 ? "" : String.valueOf(r.notes().size()));
 
     private final String title;
     private final int share;
+    private final boolean number;
     private final Function<ModelRow, String> text;
 
-    ModelColumn(String title, int share, Function<ModelRow, String> text) {
+    ModelColumn(String title, int share, boolean number, Function<ModelRow, String> text) {
         this.title = title;
         this.share = share;
+        this.number = number;
         this.text = text;
     }
 
@@ -43,13 +45,13 @@ enum ModelColumn {
         };
     }
 
-    /** Its share of the width that numbers leave to words; 0 for numbers. */
+    /** Its share of the width that the others leave; 0 for one that gets what it needs. */
     int share() {
         return share;
     }
 
     boolean number() {
-        return share == 0;
+        return number;
     }
 
     String text(ModelRow row) {

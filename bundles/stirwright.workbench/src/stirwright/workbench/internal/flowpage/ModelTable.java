@@ -26,6 +26,8 @@ final class ModelTable extends Composite {
     private static final int SWATCH_WIDTH = 70;
     private static final int CELL_MARGIN = 12;
     private static final int HEAD_MARGIN = 16;
+    /** The title of a model in use is cut rather than the parameters of all. */
+    private static final int MOST_NEEDED = 132;
 
     private final Looks looks;
     private final FlowCurves flow;
@@ -110,11 +112,12 @@ final class ModelTable extends Composite {
         GC gc = new GC(table);
         gc.setFont(looks.smallStrong());
         for (ModelColumn column : ModelColumn.values()) {
-            if (column.number()) {
+            if (column.share() == 0) {
                 int width = gc.textExtent(column.title()).x + HEAD_MARGIN;
                 for (String number : Aligned.atDecimalSign(rows.stream().map(column::text).toList())) {
                     width = Math.max(width, gc.textExtent(number).x + CELL_MARGIN);
                 }
+                width = Math.min(width, MOST_NEEDED);
                 table.getColumn(column.ordinal() + 1).setWidth(width);
                 left -= width;
             }
@@ -122,7 +125,7 @@ final class ModelTable extends Composite {
         }
         gc.dispose();
         for (ModelColumn column : ModelColumn.values()) {
-            if (!column.number()) {
+            if (column.share() > 0) {
                 table.getColumn(column.ordinal() + 1).setWidth(Math.max(0, left * column.share() / shares));
             }
         }

@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Combo;
@@ -19,11 +20,19 @@ import stirwright.exchange.CurveBlock;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
+import stirwright.workbench.internal.widgets.Shortened;
 
 /** The blocks of the source: the check mark takes one as a curve, the list below says what the selected one is. */
 final class BlockList extends Composite {
     private static final int POINTS_WIDTH = 60;
+    /** Of what the points leave, in per cent. */
+    private static final int NAME_SHARE = 52;
 
+    /** What a cell keeps free beside its text, without and with a check mark. */
+    private static final int CELL_MARGIN = 12;
+    private static final int CHECK_WIDTH = 34;
+
+    private final Shortened shortened = new Shortened();
     private final Looks looks;
     private final ImportSession session;
     private final Table table;
@@ -83,18 +92,26 @@ final class BlockList extends Composite {
 
     private void fill(TableItem item, int index) {
         CurveBlock block = blocks.get(index);
-        String name = block.name().isEmpty() ? String.valueOf(block.number()) : block.number() + " " + block.name();
-        item.setText(new String[] {name, block.use().words(), block.usable() + "/" + block.points().size()});
+        GC gc = new GC(table);
+        gc.setFont(table.getFont());
+        item.setText(new String[] {shortened.fit(gc, name(block), table.getColumn(0).getWidth() - CHECK_WIDTH),
+            shortened.fit(gc, block.use().words(), table.getColumn(1).getWidth() - CELL_MARGIN), block.usable() + "/" + block.points().size()});
+        gc.dispose();
         item.setChecked(block.taken());
         item.setForeground(block.taken() ? looks.palette().text() : looks.palette().quiet());
+    }
+
+    private static String name(CurveBlock block) {
+        return block.name().isEmpty() ? String.valueOf(block.number()) : block.name();
     }
 
     private void fit() {
         int left = table.getClientArea().width - POINTS_WIDTH;
         if (left > 0) {
-            table.getColumn(0).setWidth(left * 45 / 100);
-            table.getColumn(1).setWidth(left - left * 45 / 100);
+            table.getColumn(0).setWidth(left * NAME_SHARE / 100);
+            table.getColumn(1).setWidth(left - left * NAME_SHARE / 100);
             table.getColumn(2).setWidth(POINTS_WIDTH);
+            table.clearAll();
         }
     }
 

@@ -30,7 +30,7 @@ final class ImportDialog {
     private static final int HEIGHT = 660;
     private static final int LEAST_WIDTH = 960;
     private static final int LEAST_HEIGHT = 520;
-    private static final int[] SHARES = {32, 34, 34};
+    private static final int[] SHARES = {30, 29, 41};
 
     private final Shell parent;
     private final Looks looks;

@@ -28,8 +28,8 @@ import stirwright.workbench.internal.widgets.Names;
 
 /** What comes of the source: the points of all blocks in SI units. The check mark takes a point, or drops it. */
 final class PointRows extends Composite {
-    private static final int[] WIDTHS = {66, 40, 78, 78, 78, 52};
-    private static final int LEAST_REASON = 90;
+    private static final int[] WIDTHS = {64, 34, 64, 66, 72, 46};
+    private static final int LEAST_REASON = 60;
 
     private final Looks looks;
     private final ImportSession session;

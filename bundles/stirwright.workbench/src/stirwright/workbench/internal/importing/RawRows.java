@@ -3,6 +3,7 @@ package stirwright.workbench.internal.importing;
 import java.util.List;
 import java.util.function.Consumer;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
@@ -18,7 +19,10 @@ import stirwright.workbench.internal.widgets.Names;
 /** The source as it is, row by row; what is no point recedes. */
 final class RawRows extends Composite {
     private static final int MOST_COLUMNS = 24;
-    private static final int CELL_WIDTH = 76;
+    private static final int LOOKED_AT = 100;
+    private static final int CELL_MARGIN = 14;
+    private static final int LEAST_WIDTH = 36;
+    private static final int MOST_WIDTH = 160;
     private static final int LINE_WIDTH = 52;
 
     private final Looks looks;
@@ -68,10 +72,24 @@ final class RawRows extends Composite {
             table.getColumn(table.getColumnCount() - 1).dispose();
         }
         while (table.getColumnCount() - 1 < columns) {
-            column(String.valueOf(table.getColumnCount()), CELL_WIDTH, SWT.LEFT);
+            column(String.valueOf(table.getColumnCount()), LEAST_WIDTH, SWT.LEFT);
         }
+        fit();
         table.setItemCount(rows.size());
         table.clearAll();
+    }
+
+    /** Columns are as wide as the cells of points in them need, as far as a look at the first ones tells. */
+    private void fit() {
+        GC gc = new GC(table);
+        gc.setFont(table.getFont());
+        for (int c = 1; c < table.getColumnCount(); c++) {
+            int at = c - 1;
+            int width = rows.stream().filter(r -> r.kind() != RawRow.Kind.NOTE && r.kind() != RawRow.Kind.BLOCK).limit(LOOKED_AT)
+                    .mapToInt(r -> gc.textExtent(r.cell(at)).x).max().orElse(0);
+            table.getColumn(c).setWidth(Math.clamp(width + CELL_MARGIN, LEAST_WIDTH, MOST_WIDTH));
+        }
+        gc.dispose();
     }
 
     private void fill(TableItem item, int index) {
