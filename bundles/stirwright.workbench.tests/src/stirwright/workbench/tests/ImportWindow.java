@@ -139,6 +139,9 @@ final class ImportWindow {
     }
 
     void picture(String name) throws Exception {
+        if (!canPress("Take these curves")) {
+            throw new AssertionError("nothing can be taken yet");
+        }
         LooksTest.picture(window, shell, name);
     }
 

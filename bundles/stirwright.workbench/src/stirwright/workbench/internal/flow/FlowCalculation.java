@@ -141,7 +141,7 @@ final class FlowCalculation {
 
     private static boolean same(FluidModel fitted, Optional<FluidModel> inUse) {
         return inUse.filter(m -> ModelKind.of(m) == ModelKind.of(fitted)
-                && Arrays.equals(ModelKind.values(m), ModelKind.values(fitted))).isPresent();
+                && Arrays.equals(ModelKind.values(m), ModelKind.values(FluidEdits.kept(fitted)))).isPresent();
     }
 
     /** The model of the study, typed by hand or picked from other points, beside those of these points. */

@@ -108,8 +108,12 @@ final class FlowPicture {
         }
         List<Points> points = request.target().get().curves().stream().map(c -> residuals(c, row.model().get())).toList();
         double size = points.stream().flatMapToDouble(p -> DoubleStream.of(p.y())).map(Math::abs).filter(Double::isFinite).max().orElse(0.1);
-        double[] ends = {least, most};
-        Curve zero = new Curve(row.key(), row.title(), ends, new double[2], new boolean[] {true, true}, row.style(), row.pick());
+        double[] x = logarithmic();
+        boolean[] inside = new boolean[x.length];
+        for (int i = 0; i < x.length; i++) {
+            inside[i] = window.known() && window.contains(x[i]);
+        }
+        Curve zero = new Curve(row.key(), row.title(), x, new double[x.length], inside, row.style(), row.pick());
         double reach = Math.max(0.01, ROOM * size);
         return new Picture(axis(), new Axis(FlowWords.Axis_residual, "", false, -reach, reach), List.of(zero), measured(), Optional.empty(),
                 points, List.of(), rules(), "");

@@ -42,6 +42,7 @@ final class FlowWords extends NLS {
     public static String Law_twoTemperatures;
     public static String Parameter;
     public static String Parameter_heading;
+    public static String Parameter_inUse;
     public static String Parameter_interval;
     public static String Parameter_joint;
     public static String Parameter_none;

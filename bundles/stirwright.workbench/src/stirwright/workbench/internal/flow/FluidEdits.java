@@ -1,5 +1,7 @@
 package stirwright.workbench.internal.flow;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -24,6 +26,8 @@ import stirwright.workbench.internal.session.Session;
 public final class FluidEdits {
     private static final String YIELD_LOW = CaseFields.YIELD_STRESS_LOW.column();
     private static final String YIELD_HIGH = CaseFields.YIELD_STRESS_HIGH.column();
+
+    private static final MathContext SIX = new MathContext(6);
 
     private final Session session;
 
@@ -57,9 +61,10 @@ public final class FluidEdits {
 
     /**
      * Makes a fitted model that of the fluid: its parameters in place of those of the model before, the shear rates between
-     * which it was measured, and the range of the yield stress, or none where there is none.
+     * which it was measured, and the range of the yield stress, or none where there is none. All of them in six digits.
      */
-    public void pick(Fluid fluid, FluidModel model, MeasuredWindow window, Optional<YieldRange> yield, String reason) {
+    public void pick(Fluid fluid, FluidModel fitted, MeasuredWindow window, Optional<YieldRange> yield, String reason) {
+        FluidModel model = kept(fitted);
         ModelKind kind = ModelKind.of(model);
         session.editor().edit(Messages.bind(FlowWords.Edit_pick, ModelTitles.of(kind)), () -> {
             Arrays.stream(ModelKind.values()).flatMap(k -> CaseFields.model(k).stream()).map(CaseField::column)
@@ -69,17 +74,26 @@ public final class FluidEdits {
             for (int i = 0; i < values.length; i++) {
                 Amounts.set(fluid.getAmounts(), kind.parameters().get(i).column(), values[i]);
             }
-            Amounts.set(fluid.getAmounts(), CaseFields.SHEAR_RATE_MIN.column(), window.min());
-            Amounts.set(fluid.getAmounts(), CaseFields.SHEAR_RATE_MAX.column(), window.max());
+            Amounts.set(fluid.getAmounts(), CaseFields.SHEAR_RATE_MIN.column(), kept(window.min()));
+            Amounts.set(fluid.getAmounts(), CaseFields.SHEAR_RATE_MAX.column(), kept(window.max()));
             Amounts.remove(fluid.getAmounts(), YIELD_LOW);
             Amounts.remove(fluid.getAmounts(), YIELD_HIGH);
             // A range beside a model without a yield stress, or one that leaves its own out, would be refused.
             yield.filter(y -> !CaseFields.yieldBounds(kind).isEmpty()).ifPresent(y -> {
-                Amounts.set(fluid.getAmounts(), YIELD_LOW, Math.min(y.low(), model.yieldStress()));
-                Amounts.set(fluid.getAmounts(), YIELD_HIGH, Math.max(y.high(), model.yieldStress()));
+                Amounts.set(fluid.getAmounts(), YIELD_LOW, Math.min(kept(y.low()), model.yieldStress()));
+                Amounts.set(fluid.getAmounts(), YIELD_HIGH, Math.max(kept(y.high()), model.yieldStress()));
             });
             fluid.setModelReason(reason);
         });
+    }
+
+    /** A fitted model as a fluid keeps it: six digits are far beyond every interval, and a field shows them all. */
+    static FluidModel kept(FluidModel fitted) {
+        return ModelKind.of(fitted).create(Arrays.stream(ModelKind.values(fitted)).map(FluidEdits::kept).toArray());
+    }
+
+    private static double kept(double value) {
+        return new BigDecimal(value).round(SIX).doubleValue();
     }
 
     /** The model that a fluid has in the study; empty where a parameter is missing or out of its limits. */

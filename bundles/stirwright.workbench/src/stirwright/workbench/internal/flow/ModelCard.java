@@ -18,14 +18,15 @@ public final class ModelCard {
     /** The sections of the card of a row, those of all models after its own. */
     public static List<Section> of(FlowSheet sheet, ModelRow row) {
         List<Section> sections = new ArrayList<>();
-        List<String> first = new ArrayList<>(quality(row));
-        first.addAll(parameters(row));
-        sections.add(new Section(row.title(), first));
+        sections.add(new Section(row.title(), quality(row)));
         if (row.recommended()) {
             sections.add(new Section(FlowWords.Row_why, List.of(sheet.reason())));
         }
         if (!row.notes().isEmpty()) {
             sections.add(new Section(row.model().isEmpty() ? FlowWords.Row_noFit : FlowWords.Row_warnings, row.notes()));
+        }
+        if (row.model().isPresent()) {
+            sections.add(new Section(row.fit().isPresent() ? FlowWords.Parameter_heading : FlowWords.Parameter_inUse, parameters(row)));
         }
         sections.addAll(sheet.about());
         return sections;
@@ -33,7 +34,6 @@ public final class ModelCard {
 
     private static List<String> parameters(ModelRow row) {
         List<String> lines = new ArrayList<>();
-        row.fit().ifPresent(f -> lines.add(FlowWords.Parameter_heading));
         row.fit().ifPresentOrElse(f -> f.estimates().forEach(e -> lines.add(parameter(e))), () -> row.model().ifPresent(m -> {
             double[] values = ModelKind.values(m);
             for (int i = 0; i < values.length; i++) {
