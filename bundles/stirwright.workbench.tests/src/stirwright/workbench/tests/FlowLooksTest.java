@@ -101,9 +101,13 @@ class FlowLooksTest {
     @Test
     void theImportHasNamesAndCutsNoWords() throws Exception {
         OpenWindow.use(LooksTest.DEMO, window -> {
-            Path file = Files.createTempFile("broth", ".csv");
+            Path file = Files.createTempDirectory("broth").resolve("broth.csv");
             Files.writeString(file, ImportTest.rheometer());
+            LooksTest.size(window, LooksTest.NORMAL);
             ImportWindow dialog = ImportTest.open(window, file);
+            dialog.picture("import-preview");
+            dialog.choose("unit of Viscosity", "Pa s");
+            dialog.picture("import-slip");
             window.run(() -> {
                 for (Control control : dialog.all(Control.class).stream().filter(c -> c.isVisible() && LooksTest.takesKeys(c)).toList()) {
                     String name = Names.of(control) == null ? LooksTest.words(control) : Names.of(control);

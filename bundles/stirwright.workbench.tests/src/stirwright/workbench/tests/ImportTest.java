@@ -70,7 +70,6 @@ class ImportTest {
         OpenWindow.use(DEMO, window -> {
             byte[] before = window.on(() -> StudyFiles.bytes(window.session().editor().study()));
             ImportWindow dialog = open(window, file);
-            dialog.picture("import-preview");
             dialog.press("Cancel");
             dialog.awaitEnd();
             assertArrayEquals(before, window.on(() -> StudyFiles.bytes(window.session().editor().study())));

@@ -61,6 +61,7 @@ final class FlowWords extends NLS {
     public static String Row_delta;
     public static String Row_inUse;
     public static String Row_inUseNote;
+    public static String Row_least;
     public static String Row_noFit;
     public static String Row_rms;
     public static String Row_warnings;

@@ -50,6 +50,9 @@ public final class ModelCard {
             return List.of();
         }
         String rms = Messages.bind(FlowWords.Row_rms, String.format(Locale.ROOT, "%.2f", 100 * row.rms()));
+        if (row.deltaAicc() == 0) {
+            return List.of(rms + ", " + FlowWords.Row_least);
+        }
         return List.of(Double.isNaN(row.deltaAicc()) ? rms : rms + ", " + Messages.bind(FlowWords.Row_delta,
                 String.format(Locale.ROOT, "%.1f", row.deltaAicc()), RankedFits.meaning(row.deltaAicc())));
     }

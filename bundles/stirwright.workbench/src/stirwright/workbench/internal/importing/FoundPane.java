@@ -83,6 +83,8 @@ final class FoundPane extends Composite {
     }
 
     private void build(Form form, CurveImport found) {
+        form.heading(ImportWords.Columns_heading);
+        new ColumnControls(form, session).build(ImportColumns.of(found));
         form.heading(ImportWords.Found_heading);
         ImportChoice choice = session.choice();
         for (Finding finding : found.findings()) {
@@ -96,7 +98,7 @@ final class FoundPane extends Composite {
                 case SHEETS -> choice(form, finding, sheets(found), Function.identity(), choice.sheets().stream().findFirst(),
                         said -> session.choose(choice.withSheets(said.map(List::of).orElse(List.of()))));
                 case COLUMN, BLOCKS -> {
-                    // Each has controls of its own below.
+                    // Each has controls of its own.
                 }
                 default -> {
                     form.readOnly(capital(finding.topic().words()), finding.value());
@@ -104,9 +106,6 @@ final class FoundPane extends Composite {
                 }
             }
         }
-        form.heading(ImportWords.Columns_heading);
-        new ColumnControls(form, session).build(ImportColumns.of(found));
-        found.findings().stream().filter(f -> f.topic() == Finding.Topic.COLUMN).forEach(f -> reason(form, f.words()));
     }
 
     private static List<String> sheets(CurveImport found) {

@@ -26,11 +26,11 @@ import stirwright.workbench.internal.widgets.Looks;
  * before somebody says so.
  */
 final class ImportDialog {
-    private static final int WIDTH = 1180;
-    private static final int HEIGHT = 660;
+    private static final int WIDTH = 1240;
+    private static final int HEIGHT = 700;
     private static final int LEAST_WIDTH = 960;
     private static final int LEAST_HEIGHT = 520;
-    private static final int[] SHARES = {30, 29, 41};
+    private static final int[] SHARES = {31, 27, 42};
 
     private final Shell parent;
     private final Looks looks;
@@ -145,7 +145,6 @@ final class ImportDialog {
         progress.setLayoutData(new GridData(SWT.RIGHT, SWT.CENTER, false, false));
         looks.button(foot, ImportWords.Dialog_cancel, () -> shell.close());
         take = looks.button(foot, ImportWords.Dialog_take, this::take);
-        shell.setDefaultButton(take);
         enable();
     }
 

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.function.Consumer;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
@@ -25,12 +26,15 @@ import stirwright.exchange.PointPlace;
 import stirwright.workbench.internal.Messages;
 import stirwright.workbench.internal.widgets.Looks;
 import stirwright.workbench.internal.widgets.Names;
+import stirwright.workbench.internal.widgets.Shortened;
 
 /** What comes of the source: the points of all blocks in SI units. The check mark takes a point, or drops it. */
 final class PointRows extends Composite {
     private static final int[] WIDTHS = {64, 34, 64, 66, 72, 46};
+    private static final int CELL_MARGIN = 12;
     private static final int LEAST_REASON = 60;
 
+    private final Shortened shortened = new Shortened();
     private final Looks looks;
     private final ImportSession session;
     private final Table table;
@@ -71,7 +75,10 @@ final class PointRows extends Composite {
         table.addListener(SWT.SetData, e -> fill((TableItem) e.item, table.indexOf((TableItem) e.item)));
         table.addListener(SWT.Selection, this::selected);
         table.addListener(SWT.MouseHover, this::tip);
-        table.addListener(SWT.Resize, e -> fit());
+        table.addListener(SWT.Resize, e -> {
+            fit();
+            table.clearAll();
+        });
     }
 
     void show() {
@@ -106,8 +113,12 @@ final class PointRows extends Composite {
     private void fill(TableItem item, int index) {
         Line line = lines.get(index);
         CurvePoint point = line.point();
+        GC gc = new GC(table);
+        gc.setFont(table.getFont());
+        String reason = shortened.fit(gc, reason(line), table.getColumn(WIDTHS.length).getWidth() - CELL_MARGIN);
+        gc.dispose();
         item.setText(new String[] {String.valueOf(point.place().line()), String.valueOf(line.block().number()), number(point.shearRate()),
-            number(point.shearStress()), number(point.viscosity()), number(point.temperature()), reason(line)});
+            number(point.shearStress()), number(point.viscosity()), number(point.temperature()), reason});
         item.setChecked(point.taken());
         item.setForeground(point.taken() && line.block().taken() ? looks.palette().text() : looks.palette().quiet());
     }
