@@ -205,7 +205,7 @@ class FlowPageTest {
             double beyond = window.outcome().main().result().pick().orElseThrow().state().orElseThrow().shearRate();
             assertTrue(beyond > InventedCurves.MOST && beyond > 5 * rate, beyond + " 1/s");
             assertEquals(beyond, fast.picture().rules().get(0).x(), 1e-9 * beyond);
-            assertEquals(String.format(Locale.ROOT, "%.1f decades above what was measured", Math.log10(beyond / InventedCurves.MOST)),
+            assertEquals(String.format(Locale.ROOT, "%.1f decades above", Math.log10(beyond / InventedCurves.MOST)),
                     fast.picture().rules().get(0).doubt());
             LooksTest.picture(window, "flow-extrapolated");
         });
@@ -255,6 +255,19 @@ class FlowPageTest {
             assertEquals(1, settle(window).curves().size());
             window.run(() -> window.session().undo());
             assertEquals(2, settle(window).curves().size());
+        });
+    }
+
+    @Test
+    void theDemoHasAnInventedFlowCurve() throws Exception {
+        OpenWindow.use(DEMO, window -> {
+            window.run(() -> window.session().turnTo(window.session().editor().study().getCases().get(1)));
+            turnTo(window, Page.FLOW_CURVE);
+            FlowSheet sheet = settle(window);
+            assertEquals(2, sheet.curves().size());
+            assertTrue(sheet.curves().stream().allMatch(c -> c.label().contains("invented")));
+            LooksTest.size(window, LooksTest.NORMAL);
+            LooksTest.picture(window, "flow-demo");
         });
     }
 

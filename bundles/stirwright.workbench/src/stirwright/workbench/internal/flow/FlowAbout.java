@@ -87,7 +87,7 @@ final class FlowAbout {
     private String rate(NamedRate rate) {
         String beyond = FlowPicture.beyond(rate, window);
         return Messages.bind(FlowWords.Rate_line, new Object[] {rate.name(), Figures.show(rate.rate()),
-            !window.known() ? FlowWords.Rate_unknown : beyond.isEmpty() ? FlowWords.Rate_inside : beyond});
+            !window.known() ? FlowWords.Rate_unknown : beyond.isEmpty() ? FlowWords.Rate_inside : Messages.bind(FlowWords.Rate_outside, beyond)});
     }
 
     /** Each file once with its hash, its curves below it. */
@@ -96,7 +96,7 @@ final class FlowAbout {
         Map<List<String>, List<CurveData>> files = request.curves().stream().filter(c -> !c.source().isEmpty())
                 .collect(Collectors.groupingBy(c -> List.of(c.source(), c.sha256()), LinkedHashMap::new, Collectors.toList()));
         files.forEach((file, curves) -> {
-            lines.add(Messages.bind(FlowWords.Source_file, file.get(0), file.get(1)));
+            lines.add(file.get(1).isEmpty() ? file.get(0) : Messages.bind(FlowWords.Source_file, file.get(0), file.get(1)));
             curves.forEach(c -> lines.add(Messages.bind(FlowWords.Source_curve, new Object[] {c.label(), c.rates().length,
                 c.block().isEmpty() ? "" : Messages.bind(FlowWords.Source_block, c.block()), temperature(c.temperature())})));
         });

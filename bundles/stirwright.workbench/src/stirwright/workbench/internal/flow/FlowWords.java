@@ -55,6 +55,7 @@ final class FlowWords extends NLS {
     public static String Rate_impeller;
     public static String Rate_inside;
     public static String Rate_line;
+    public static String Rate_outside;
     public static String Rate_powerBased;
     public static String Rate_unknown;
     public static String Residuals_none;

@@ -30,7 +30,7 @@ final class ImportDialog {
     private static final int HEIGHT = 700;
     private static final int LEAST_WIDTH = 960;
     private static final int LEAST_HEIGHT = 520;
-    private static final int[] SHARES = {31, 27, 42};
+    private static final int[] SHARES = {34, 26, 40};
 
     private final Shell parent;
     private final Looks looks;
