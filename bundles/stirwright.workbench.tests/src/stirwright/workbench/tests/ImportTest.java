@@ -140,6 +140,12 @@ class ImportTest {
             ImportWindow dialog = open(window, file);
             dialog.check("blocks; a check mark takes one as a curve", 2, false);
             dialog.check("points; a check mark takes one", 8, false);
+            dialog.check("points; a check mark takes one", 9, false);
+            assertFalse(dialog.checked("points; a check mark takes one", 9));
+            dialog.check("points; a check mark takes one", 9, true);
+            assertTrue(dialog.checked("points; a check mark takes one", 9), "it is put back");
+            dialog.check("points; a check mark takes one", 6, true);
+            assertFalse(dialog.checked("points; a check mark takes one", 6), "a stress below 0 is no point");
             dialog.press("Take this curve");
             dialog.awaitEnd();
             FlowPageTest.settle(window);

@@ -130,6 +130,14 @@ final class ImportWindow {
         settle();
     }
 
+    boolean checked(String table, int row) throws Exception {
+        return window.on(() -> {
+            TableItem item = find(Table.class, table).getItem(row);
+            item.getText(0);
+            return item.getChecked();
+        });
+    }
+
     double number(String table, int row, int column) throws Exception {
         return window.on(() -> Double.parseDouble(find(Table.class, table).getItem(row).getText(column)));
     }

@@ -83,13 +83,18 @@ final class ImportDialog {
         place();
         shell.open();
         session.choose(ImportChoice.DETECT);
-        Display display = shell.getDisplay();
-        while (!shell.isDisposed()) {
-            if (!display.readAndDispatch()) {
-                display.sleep();
+        try {
+            Display display = shell.getDisplay();
+            while (!shell.isDisposed()) {
+                if (!display.readAndDispatch()) {
+                    display.sleep();
+                }
             }
+        } finally {
+            // Whatever a listener threw, the window behind it must be usable again.
+            shell.dispose();
+            session.close();
         }
-        session.close();
         return Optional.ofNullable(taken);
     }
 
