@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.time.Duration;
 import java.util.List;
 import java.util.Locale;
 import org.eclipse.e4.ui.internal.workbench.swt.AbstractPartRenderer;
@@ -42,6 +43,8 @@ import stirwright.workbench.internal.widgets.WordBar;
 /** The flow-curve page in a real window: what it shows of invented curves, and the pick. */
 class FlowPageTest {
     private static final List<String> DEMO = List.of("demo", "--window");
+    /** Of a hundred thousand points on a busy machine. */
+    private static final Duration PATIENCE = Duration.ofSeconds(60);
     private static final String REASON = "reason for picking the selected model";
 
     /** On the window's thread. */
@@ -57,7 +60,7 @@ class FlowPageTest {
     static FlowSheet settle(OpenWindow window) throws Exception {
         window.settle();
         FlowCurves flow = window.on(() -> of(window, FlowCurves.class));
-        OpenWindow.await("the fits", () -> {
+        OpenWindow.await("the fits", PATIENCE, () -> {
             boolean[] settled = new boolean[1];
             window.display().syncExec(() -> settled[0] = flow.fresh());
             return settled[0];

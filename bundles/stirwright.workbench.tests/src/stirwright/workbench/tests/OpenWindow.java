@@ -105,7 +105,12 @@ final class OpenWindow {
 
     /** Waits until something holds; fails with words for it. */
     static void await(String what, BooleanSupplier holds) throws InterruptedException {
-        long end = System.nanoTime() + PATIENCE.toNanos();
+        await(what, PATIENCE, holds);
+    }
+
+    /** The same for what takes longer. */
+    static void await(String what, Duration patience, BooleanSupplier holds) throws InterruptedException {
+        long end = System.nanoTime() + patience.toNanos();
         while (!holds.getAsBoolean()) {
             if (System.nanoTime() > end) {
                 throw new AssertionError("waited in vain for " + what);

@@ -8,6 +8,7 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableItem;
+import stirwright.chart.CurveStyle;
 import stirwright.correlation.Figures;
 import stirwright.study.Curve;
 import stirwright.study.Curves;
@@ -72,7 +73,7 @@ public final class CurveList {
             Curve curve = curves.get(i);
             item.setData(curve);
             item.setChecked(curve.isUsed());
-            item.setImage(swatches.mark(i, curve.isUsed()));
+            item.setImage(swatches.mark(i % CurveStyle.COLOURS, curve.isUsed()));
             item.setText(shortened.fit(gc, words(curve), table.getClientArea().width - BESIDE_WORDS));
         }
         gc.dispose();

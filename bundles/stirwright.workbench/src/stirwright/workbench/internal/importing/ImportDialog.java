@@ -126,7 +126,7 @@ final class ImportDialog {
         left.setSashWidth(2 * Looks.STEP);
         found = new FoundPane(left, looks, session);
         blocks = new BlockList(left, looks, session);
-        left.setWeights(60, 40);
+        left.setWeights(66, 34);
         raw = new RawRows(panes, looks);
         points = new PointRows(panes, looks, session);
         raw.onSelected(points::reveal);
