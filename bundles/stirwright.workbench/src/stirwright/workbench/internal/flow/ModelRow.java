@@ -1,7 +1,5 @@
 package stirwright.workbench.internal.flow;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -35,8 +33,6 @@ public record ModelRow(
     /** The key of the model of the study that no fit gave. */
     static final String IN_USE = "in use";
 
-    private static final MathContext THREE = new MathContext(3);
-
     public ModelRow {
         notes = List.copyOf(notes);
     }
@@ -60,13 +56,8 @@ public record ModelRow(
 
     private static String brief(Estimate estimate) {
         String interval = estimate.interval().known()
-                ? " (" + brief(estimate.interval().low()) + "\u2013" + brief(estimate.interval().high()) + ")" : " (?)";
+                ? " (" + Figures.show(estimate.interval().low()) + "\u2013" + Figures.show(estimate.interval().high()) + ")" : " (?)";
         return Units.symbol(estimate.parameter().symbol()) + " " + Figures.show(estimate.value()) + interval + unit(estimate.parameter().unit());
-    }
-
-    /** Three digits: the ends of an interval are not known better. */
-    private static String brief(double value) {
-        return Figures.show(new BigDecimal(value).round(THREE).doubleValue());
     }
 
     static String unit(String unit) {
