@@ -98,7 +98,8 @@ final class FlowCalculation {
     /** Of the recommended model over the temperatures of the used curves whose ramps are those of the target. */
     private Optional<TemperatureLaw> law(FlowRequest request, Optional<RankedFits> fits, BooleanSupplier stale) {
         Set<String> ramps = request.target().stream().flatMap(t -> t.curves().stream()).map(CurveData::ramp).collect(Collectors.toSet());
-        List<CurveData> curves = request.curves().stream().filter(c -> c.used() && ramps.contains(c.ramp()) && !Double.isNaN(c.temperature())).toList();
+        List<CurveData> curves = request.curves().stream()
+                .filter(c -> c.used() && ramps.contains(c.ramp()) && !Double.isNaN(c.temperature())).toList();
         Optional<ModelKind> kind = fits.flatMap(RankedFits::recommended).map(ModelFit::kind);
         if (kind.isEmpty() || FitTarget.temperatures(curves).size() < 2) {
             return Optional.empty();

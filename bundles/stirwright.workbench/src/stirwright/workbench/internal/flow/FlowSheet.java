@@ -34,7 +34,7 @@ public record FlowSheet(
         about = List.copyOf(about);
     }
 
-    /** Whether there is anything to fit. */
+    /** Whether the fluid has no curve. */
     public boolean empty() {
         return curves.isEmpty();
     }

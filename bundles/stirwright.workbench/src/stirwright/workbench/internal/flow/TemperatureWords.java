@@ -16,7 +16,8 @@ final class TemperatureWords {
 
     static List<String> of(TemperatureLaw law) {
         List<String> lines = new ArrayList<>();
-        lines.add(Messages.bind(FlowWords.Law_range, new Object[] {ModelTitles.of(law.kind()), Figures.show(law.lowest()), Figures.show(law.highest())}));
+        lines.add(Messages.bind(FlowWords.Law_range,
+                new Object[] {ModelTitles.of(law.kind()), Figures.show(law.lowest()), Figures.show(law.highest())}));
         for (TemperatureLaw.Line line : law.lines()) {
             lines.add(line.activationEnergy() == 0
                     ? Messages.bind(FlowWords.Law_common, line.parameter().title(), Figures.show(line.intercept()))
@@ -28,6 +29,7 @@ final class TemperatureWords {
 
     private static String interval(TemperatureLaw.Line line) {
         return !line.interval().known() ? FlowWords.Law_twoTemperatures
-                : Messages.bind(FlowWords.Parameter_interval, Figures.show(line.interval().low() / KILO), Figures.show(line.interval().high() / KILO));
+                : Messages.bind(FlowWords.Parameter_interval, Figures.show(line.interval().low() / KILO),
+                        Figures.show(line.interval().high() / KILO));
     }
 }

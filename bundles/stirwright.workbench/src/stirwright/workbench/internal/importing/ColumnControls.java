@@ -43,7 +43,8 @@ final class ColumnControls {
 
     private void line(ImportColumns.One column) {
         String title = column.header().isEmpty() ? Messages.bind(ImportWords.Column_number, column.position()) : column.header();
-        form.captioned(title, Messages.bind(ImportWords.Column_tip, column.position(), column.read().map(CurveColumn::reason).orElse(ImportWords.Column_notRead)));
+        form.captioned(title, Messages.bind(ImportWords.Column_tip, column.position(),
+                column.read().map(CurveColumn::reason).orElse(ImportWords.Column_notRead)));
         List<CurveQuantity> quantities = List.of(CurveQuantity.values());
         List<String> words = new ArrayList<>(List.of(ImportWords.Column_not));
         quantities.forEach(q -> words.add(q.words()));
