@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import stirwright.rheology.FitOptions;
@@ -13,6 +14,7 @@ import stirwright.rheology.FluidModel;
 import stirwright.rheology.HerschelBulkley;
 import stirwright.rheology.ModelKind;
 import stirwright.rheology.PowerLaw;
+import stirwright.rheology.YieldRange;
 
 /** What several curves of a sample say together; all invented, computed from known parameters. */
 class SampleFitsTest {
@@ -25,14 +27,14 @@ class SampleFitsTest {
     }
 
     private static List<SampleFits> samples(CurveFits... curves) {
-        return SampleFits.of(List.of(curves), FitOptions.DEFAULT);
+        return SampleFits.of(List.of(curves), FitOptions.DEFAULT, OptionalDouble.empty());
     }
 
     @Test
     void curvesOfDifferentSamplesAreNeverPooled() {
         List<SampleFits> samples = samples(curve("A", Ramp.UP, 1, 25, new PowerLaw(8, 0.4)), curve("B", Ramp.UP, 1, 25, new PowerLaw(9, 0.4)));
-        assertEquals(List.of("A", "B"), samples.stream().map(SampleFits::name).toList());
-        assertTrue(samples.stream().allMatch(s -> s.pooled().isEmpty() && s.loops().isEmpty()));
+        assertEquals(List.of("invented.txt A", "invented.txt B"), samples.stream().map(SampleFits::name).toList());
+        assertTrue(samples.stream().allMatch(s -> s.temperatures().get(0).pooled().isEmpty() && s.temperatures().get(0).loop().isEmpty()));
     }
 
     @Test
@@ -41,22 +43,32 @@ class SampleFitsTest {
                 curve("", Ramp.UP, 1, 25, new PowerLaw(8.2, 0.4)), curve("", Ramp.UP, 2, 25.4, new PowerLaw(7.8, 0.4)),
                 curve("", Ramp.DOWN, 1, 25, new PowerLaw(4, 0.4))).get(0);
         assertEquals("invented.txt", sample.name());
-        assertEquals(1, sample.pooled().size());
-        CurveFits pooled = sample.pooled().get(0);
+        SampleFits.AtTemperature at = sample.temperatures().get(0);
+        assertEquals(1, at.pooled().size());
+        CurveFits pooled = at.pooled().get(0);
         assertEquals(2 * RATES.length, pooled.curve().points().size());
         // two power laws of one index, by their relative deviations: K = (1/8.2 + 1/7.8) / (1/8.2^2 + 1/7.8^2)
         double expected = (1 / 8.2 + 1 / 7.8) / (1 / (8.2 * 8.2) + 1 / (7.8 * 7.8));
         assertEquals(expected, pooled.fits().attempt(ModelKind.POWER_LAW).fit().orElseThrow().estimate("consistency").value(), 1e-6);
         // up over down: the geometric mean of 8.2 and 7.8 over 4
-        assertEquals(Math.sqrt(8.2 * 7.8) / 4, sample.loops().get(0).hysteresis().ratioAt(3), 1e-9);
+        assertEquals(Math.sqrt(8.2 * 7.8) / 4, at.loop().orElseThrow().ratioAt(3), 1e-9);
     }
 
     @Test
-    void theYieldStressSpansRamps() {
-        SampleFits sample = samples(curve("", Ramp.UP, 1, 25, new HerschelBulkley(20, 5, 0.5)),
-                curve("", Ramp.DOWN, 1, 25, new HerschelBulkley(14, 5, 0.5))).get(0);
-        assertTrue(sample.yieldStress().orElseThrow().low() <= 14.001);
-        assertTrue(sample.yieldStress().orElseThrow().high() >= 19.999);
+    void theYieldStressSpansRampsAndTheVane() {
+        CurveFits[] curves = {curve("", Ramp.UP, 1, 25, new HerschelBulkley(20, 5, 0.5)), curve("", Ramp.DOWN, 1, 25, new HerschelBulkley(14, 5, 0.5))};
+        YieldRange range = samples(curves).get(0).temperatures().get(0).yieldStress().orElseThrow();
+        assertTrue(range.low() <= 14.001 && range.high() >= 19.999 && range.high() < 41, range::toString);
+        assertEquals(41, SampleFits.of(List.of(curves), FitOptions.DEFAULT, OptionalDouble.of(41)).get(0).temperatures().get(0)
+                .yieldStress().orElseThrow().high());
+    }
+
+    @Test
+    void aColdYieldStressSaysNothingOfAWarmOne() {
+        SampleFits sample = samples(curve("", Ramp.UP, 1, 10, new HerschelBulkley(60, 5, 0.5)), curve("", Ramp.UP, 1, 50, new HerschelBulkley(14, 5, 0.5))).get(0);
+        assertEquals(List.of(10.0, 50.0), sample.temperatures().stream().map(SampleFits.AtTemperature::celsius).toList());
+        assertTrue(sample.temperatures().get(1).yieldStress().orElseThrow().high() < 30);
+        assertTrue(sample.temperatures().get(0).yieldStress().orElseThrow().low() > 30);
     }
 
     @Test
@@ -65,7 +77,7 @@ class SampleFitsTest {
                 new PowerLaw(8 * Math.exp(40e3 / 8.31446261815324 * (1 / (celsius + 273.15) - 1 / 313.15)), 0.4))).toArray(CurveFits[]::new);
         SampleFits sample = samples(curves).get(0);
         assertEquals(40e3, sample.law().orElseThrow().lines().get(0).activationEnergy(), 4);
-        assertTrue(sample.pooled().isEmpty(), "curves of different temperatures are no replicates");
+        assertTrue(sample.temperatures().stream().allMatch(t -> t.pooled().isEmpty()), "curves of different temperatures are no replicates");
         assertTrue(samples(curves[0]).get(0).law().isEmpty());
     }
 }

@@ -18,8 +18,16 @@ public record Measurement(
         String source, String sha256, String block, String sample, Ramp ramp, int replicate, double temperature,
         List<DroppedPoint> dropped, List<String> warnings) {
 
+    /** In K: curves that are closer were measured at one temperature, others on purpose apart; common practice, no source. */
+    public static final double SAME_TEMPERATURE = 2;
+
     public Measurement {
         dropped = List.copyOf(dropped);
         warnings = List.copyOf(warnings);
+    }
+
+    /** Whether two temperatures in deg C count as one; two that are not known do. */
+    public static boolean sameTemperature(double one, double other) {
+        return Double.isNaN(one) ? Double.isNaN(other) : Math.abs(one - other) <= SAME_TEMPERATURE;
     }
 }

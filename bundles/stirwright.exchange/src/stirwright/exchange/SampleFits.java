@@ -1,11 +1,13 @@
 package stirwright.exchange;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 import stirwright.rheology.FitOptions;
 import stirwright.rheology.FlowCurve;
 import stirwright.rheology.Hysteresis;
@@ -17,71 +19,60 @@ import stirwright.rheology.TemperatureLaw;
 import stirwright.rheology.YieldRange;
 
 /**
- * What the curves of one sample say: each by itself, replicates together, up against down, the range of the yield stress, and
- * a law over the temperatures.
+ * What the curves of one sample say together.
  *
- * @param name of the sample; the source's name where it has but one
- * @param curves each as it was measured
- * @param pooled the replicates of one ramp and temperature as one curve; empty without replicates
- * @param loops up against down, for each temperature that has both
- * @param yieldStress over all curves and models; empty when no model with a yield stress describes one
+ * @param name of the sample, with the source's where several were read; the source's alone where it has but one
+ * @param temperatures in the order of their first curve
  * @param law the model that leads most curves over the temperatures; empty with one temperature
  */
-public record SampleFits(
-        String name, List<CurveFits> curves, List<CurveFits> pooled, List<Loop> loops, Optional<YieldRange> yieldStress,
-        Optional<TemperatureLaw> law) {
-
-    /** In K; curves farther apart are measured at different temperatures on purpose. */
-    private static final double SAME_TEMPERATURE = 2;
+public record SampleFits(String name, List<AtTemperature> temperatures, Optional<TemperatureLaw> law) {
 
     public SampleFits {
-        curves = List.copyOf(curves);
-        pooled = List.copyOf(pooled);
-        loops = List.copyOf(loops);
+        temperatures = List.copyOf(temperatures);
     }
 
     /**
-     * Up against down.
+     * Curves of one sample at one temperature.
      *
-     * @param temperature in deg C; NaN when not known
+     * @param celsius deg C; NaN when not known
+     * @param curves each as it was measured
+     * @param pooled the replicates of one ramp as one curve; empty without replicates
+     * @param loop up against down; empty without both
+     * @param yieldStress over models and ramps; empty when no model with a yield stress describes a curve
      */
-    public record Loop(double temperature, Hysteresis hysteresis) {}
+    public record AtTemperature(double celsius, List<CurveFits> curves, List<CurveFits> pooled, Optional<Hysteresis> loop,
+            Optional<YieldRange> yieldStress) {
+        public AtTemperature {
+            curves = List.copyOf(curves);
+            pooled = List.copyOf(pooled);
+        }
+    }
 
-    /** Groups fitted curves by sample, in the order of their first curve. */
-    public static List<SampleFits> of(List<CurveFits> fits, FitOptions options) {
+    /**
+     * Groups fitted curves by sample, in the order of their first curve.
+     *
+     * @param staticYield Pa, as a vane measured it on all of them; empty when nobody did
+     */
+    public static List<SampleFits> of(List<CurveFits> fits, FitOptions options, OptionalDouble staticYield) {
         Map<List<String>, List<CurveFits>> samples = new LinkedHashMap<>();
         for (CurveFits one : fits) {
             Measurement from = one.curve().measurement();
             samples.computeIfAbsent(List.of(from.source(), from.sha256(), from.sample()), k -> new ArrayList<>()).add(one);
         }
-        return samples.values().stream().map(curves -> sample(curves, options)).toList();
+        return samples.values().stream().map(curves -> sample(curves, options, staticYield)).toList();
     }
 
-    private static SampleFits sample(List<CurveFits> curves, FitOptions options) {
+    private static SampleFits sample(List<CurveFits> curves, FitOptions options, OptionalDouble staticYield) {
         Measurement first = curves.get(0).curve().measurement();
-        List<CurveFits> pooled = new ArrayList<>();
-        List<Loop> loops = new ArrayList<>();
-        for (List<CurveFits> alike : byTemperature(curves)) {
-            Map<Ramp, List<CurveFits>> ramps = new LinkedHashMap<>();
-            alike.forEach(c -> ramps.computeIfAbsent(c.curve().measurement().ramp(), r -> new ArrayList<>()).add(c));
-            ramps.values().stream().filter(replicates -> replicates.size() > 1)
-                    .forEach(replicates -> pooled.add(CurveFits.of(pool(replicates), options)));
-            if (ramps.containsKey(Ramp.UP) && ramps.containsKey(Ramp.DOWN)) {
-                Hysteresis.between(points(ramps.get(Ramp.UP)), points(ramps.get(Ramp.DOWN)))
-                        .ifPresent(h -> loops.add(new Loop(alike.get(0).curve().measurement().temperature(), h)));
-            }
-        }
-        Map<String, RankedFits> byLabel = new LinkedHashMap<>();
-        curves.forEach(c -> byLabel.put(c.curve().label(), c.fits()));
-        return new SampleFits(first.sample().isEmpty() ? first.source() : first.sample(), curves, pooled, loops,
-                YieldRange.of(byLabel, OptionalDouble.empty()), law(curves, options));
+        List<AtTemperature> temperatures = byTemperature(curves).stream().map(alike -> at(alike, options, staticYield)).toList();
+        return new SampleFits(first.sample().isEmpty() ? first.source() : first.source() + " " + first.sample(), temperatures,
+                law(curves, options));
     }
 
     private static List<List<CurveFits>> byTemperature(List<CurveFits> curves) {
         List<List<CurveFits>> groups = new ArrayList<>();
         for (CurveFits one : curves) {
-            double temperature = one.curve().measurement().temperature();
-            groups.stream().filter(g -> same(g.get(0).curve().measurement().temperature(), temperature)).findFirst()
+            groups.stream().filter(g -> Measurement.sameTemperature(celsius(g.get(0)), celsius(one))).findFirst()
                     .orElseGet(() -> {
                         groups.add(new ArrayList<>());
                         return groups.getLast();
@@ -90,8 +81,25 @@ public record SampleFits(
         return groups;
     }
 
-    private static boolean same(double one, double other) {
-        return Double.isNaN(one) ? Double.isNaN(other) : Math.abs(one - other) <= SAME_TEMPERATURE;
+    private static double celsius(CurveFits one) {
+        return one.curve().measurement().temperature();
+    }
+
+    private static AtTemperature at(List<CurveFits> alike, FitOptions options, OptionalDouble staticYield) {
+        Map<Ramp, List<CurveFits>> ramps = new LinkedHashMap<>();
+        alike.forEach(c -> ramps.computeIfAbsent(c.curve().measurement().ramp(), r -> new ArrayList<>()).add(c));
+        List<CurveFits> pooled = new ArrayList<>();
+        Map<String, RankedFits> whole = new LinkedHashMap<>();
+        for (List<CurveFits> replicates : ramps.values()) {
+            CurveFits together = replicates.size() == 1 ? replicates.get(0) : CurveFits.of(pool(replicates), options);
+            if (replicates.size() > 1) {
+                pooled.add(together);
+            }
+            whole.put(together.curve().label(), together.fits());
+        }
+        Optional<Hysteresis> loop = ramps.containsKey(Ramp.UP) && ramps.containsKey(Ramp.DOWN)
+                ? Hysteresis.between(points(ramps.get(Ramp.UP)), points(ramps.get(Ramp.DOWN))) : Optional.empty();
+        return new AtTemperature(celsius(alike.get(0)), alike, pooled, loop, YieldRange.of(whole, staticYield));
     }
 
     private static FlowCurve points(List<CurveFits> replicates) {
@@ -106,19 +114,21 @@ public record SampleFits(
                         List.of(), List.of()));
     }
 
+    /** Over one ramp alone, the rising one if there is one, since ramps are never averaged. */
     private static Optional<TemperatureLaw> law(List<CurveFits> curves, FitOptions options) {
-        List<CurveFits> warm = curves.stream().filter(c -> !Double.isNaN(c.curve().measurement().temperature())).toList();
-        if (byTemperature(warm).size() < 2) {
+        List<CurveFits> warm = curves.stream().filter(c -> !Double.isNaN(celsius(c))).toList();
+        Optional<List<CurveFits>> ramp = Stream.of(Ramp.UP, Ramp.NONE, Ramp.DOWN)
+                .map(r -> warm.stream().filter(c -> c.curve().measurement().ramp() == r).toList())
+                .filter(of -> byTemperature(of).size() > 1).findFirst();
+        if (ramp.isEmpty()) {
             return Optional.empty();
         }
-        List<TemperatureLaw.Measured> measured = new ArrayList<>();
-        for (List<CurveFits> alike : byTemperature(warm)) {
-            double mean = alike.stream().mapToDouble(c -> c.curve().measurement().temperature()).average().orElseThrow();
-            measured.add(new TemperatureLaw.Measured(mean, points(alike)));
-        }
+        List<TemperatureLaw.Measured> measured = byTemperature(ramp.get()).stream()
+                .map(alike -> new TemperatureLaw.Measured(alike.stream().mapToDouble(SampleFits::celsius).average().orElseThrow(),
+                        points(alike))).toList();
         Map<ModelKind, Integer> leading = new LinkedHashMap<>();
-        warm.forEach(c -> c.fits().recommended().map(ModelFit::kind).ifPresent(k -> leading.merge(k, 1, Integer::sum)));
-        return leading.entrySet().stream().max(Map.Entry.comparingByValue()).flatMap(most -> {
+        ramp.get().forEach(c -> c.fits().recommended().map(ModelFit::kind).ifPresent(k -> leading.merge(k, 1, Integer::sum)));
+        return leading.entrySet().stream().max(Comparator.comparingInt(Map.Entry::getValue)).flatMap(most -> {
             try {
                 return TemperatureLaw.of(most.getKey(), measured, options);
             } catch (ParameterException | IllegalArgumentException noLaw) {

@@ -17,6 +17,9 @@ import java.util.OptionalDouble;
  */
 public record YieldRange(double low, double high, List<Source> sources) {
 
+	/** The name of a source that is no fit. */
+	public static final String STATIC = "static";
+
 	/** A model whose relative deviation is larger on average does not tell a yield stress; our choice, no source. */
 	private static final double DESCRIBES = 0.10;
 
@@ -45,7 +48,7 @@ public record YieldRange(double low, double high, List<Source> sources) {
 		List<Source> sources = new ArrayList<>();
 		fits.forEach((name, ranked) -> ranked.attempts().stream().flatMap(a -> a.fit().stream())
 				.filter(YieldRange::hasYieldStress).forEach(fit -> sources.add(source(name, fit))));
-		staticYield.ifPresent(value -> sources.add(new Source("static", value, Interval.NONE, true, "")));
+		staticYield.ifPresent(value -> sources.add(new Source(STATIC, value, Interval.NONE, true, "")));
 		List<Source> counted = sources.stream().filter(Source::counted).toList();
 		if (counted.isEmpty()) {
 			return Optional.empty();

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.Stream;
@@ -21,6 +22,7 @@ import stirwright.exchange.Origin;
 import stirwright.exchange.Output;
 import stirwright.exchange.Outputs;
 import stirwright.exchange.SampleFits;
+import stirwright.exchange.UnusableFileException;
 import stirwright.rheology.FitOptions;
 import stirwright.rheology.Objective;
 
@@ -43,12 +45,19 @@ final class FitCommand implements Callable<Integer> {
             description = "read the files as this import template says, as the window keeps it; without, all is detected")
     private Path template;
 
+    @Option(names = "--static-yield", paramLabel = "PA",
+            description = "static yield stress in Pa, from a vane or a stress ramp after rest; widens the range of the yield stress")
+    private Double staticYield;
+
     FitCommand(Desk desk) {
         this.desk = desk;
     }
 
     @Override
     public Integer call() {
+        if (staticYield != null && !(staticYield >= 0 && Double.isFinite(staticYield))) {
+            throw new UnusableFileException("--static-yield " + staticYield, "must be a finite number, 0 or greater, in Pa");
+        }
         ImportChoice choice = template == null ? ImportChoice.DETECT : ImportTemplates.read(template);
         List<MeasuredCurve> curves = new ArrayList<>();
         for (Path file : files) {
@@ -58,8 +67,10 @@ final class FitCommand implements Callable<Integer> {
         }
         FitOptions options = new FitOptions(Objective.RELATIVE, robust);
         List<CurveFits> fits = fit(curves, options);
-        List<SampleFits> samples = SampleFits.of(fits, options);
-        List<CurveFits> all = Stream.concat(fits.stream(), samples.stream().flatMap(s -> s.pooled().stream())).toList();
+        List<SampleFits> samples = SampleFits.of(fits, options,
+                staticYield == null ? OptionalDouble.empty() : OptionalDouble.of(staticYield));
+        List<CurveFits> all = Stream.concat(fits.stream(), samples.stream().flatMap(s -> s.temperatures().stream())
+                .flatMap(t -> t.pooled().stream())).toList();
         List<Path> inputs = new ArrayList<>(files);
         Optional.ofNullable(template).ifPresent(inputs::add);
         Outputs written = new Outputs(new Origin(desk.version(), ""), inputs);

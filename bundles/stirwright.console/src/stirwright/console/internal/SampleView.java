@@ -16,11 +16,14 @@ final class SampleView {
 
     private SampleView() {}
 
-    /** Nothing for a sample that says no more than its one curve. */
+    /** Nothing for a sample that says no more than its curves do. */
     static void append(StringBuilder text, SampleFits sample) {
         List<String> lines = new ArrayList<>();
-        sample.loops().forEach(loop -> lines.add(loop(loop)));
-        sample.yieldStress().filter(range -> range.high() > 0).ifPresent(range -> lines.addAll(yieldStress(range)));
+        for (SampleFits.AtTemperature at : sample.temperatures()) {
+            String where = Double.isNaN(at.celsius()) ? "" : " at " + Figures.show(at.celsius()) + " deg C";
+            at.loop().ifPresent(loop -> lines.add(loop(where, loop)));
+            at.yieldStress().filter(range -> range.high() > 0).ifPresent(range -> lines.addAll(yieldStress(where, range)));
+        }
         sample.law().ifPresent(law -> lines.addAll(law(law)));
         if (lines.isEmpty()) {
             return;
@@ -30,23 +33,26 @@ final class SampleView {
         text.append('\n');
     }
 
-    private static String loop(SampleFits.Loop loop) {
-        Hysteresis between = loop.hysteresis();
+    private static String loop(String where, Hysteresis between) {
         MeasuredWindow common = between.common();
         double middle = Math.sqrt(common.min() * common.max());
         return String.format(Locale.ROOT, "up against down%s: area %s Pa/s, %.1f %% of that under the rising curve; stress up over"
-                + " down %.3f at %s, %.3f at %s, %.3f at %s 1/s",
-                Double.isNaN(loop.temperature()) ? "" : " at " + Figures.show(loop.temperature()) + " deg C",
+                + " down %.3f at %s, %.3f at %s, %.3f at %s 1/s", where,
                 Figures.show(between.area()), 100 * between.relativeArea(), between.ratioAt(common.min()), Figures.show(common.min()),
                 between.ratioAt(middle), Figures.show(middle), between.ratioAt(common.max()), Figures.show(common.max()));
     }
 
-    private static List<String> yieldStress(YieldRange range) {
-        List<String> lines = new ArrayList<>(List.of("yield stress from " + Figures.show(range.low()) + " to "
-                + Figures.show(range.high()) + " Pa, by model and ramp, intervals of 95 % included"));
+    private static List<String> yieldStress(String where, YieldRange range) {
+        List<String> lines = new ArrayList<>(List.of("yield stress" + where + " from " + Figures.show(range.low()) + " to "
+                + Figures.show(range.high()) + " Pa, by model and ramp" + (hasStatic(range) ? " and as the vane gave it" : "")
+                + ", intervals of 95 % included"));
         range.sources().stream().filter(s -> !s.counted())
                 .forEach(s -> lines.add("  left out: " + Figures.show(s.value()) + " Pa by " + s.name() + ", which " + s.why()));
         return lines;
+    }
+
+    private static boolean hasStatic(YieldRange range) {
+        return range.sources().stream().anyMatch(s -> s.name().equals(YieldRange.STATIC));
     }
 
     private static List<String> law(TemperatureLaw law) {
