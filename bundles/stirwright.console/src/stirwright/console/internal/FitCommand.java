@@ -28,7 +28,7 @@ import stirwright.rheology.Objective;
 
 @Command(name = "fit",
         description = "Fits every fluid model to flow curves by least squares of the relative error, ranks them and prints"
-                + " their parameters with 95 % intervals.")
+                + " their parameters with 95 %% intervals.")
 final class FitCommand implements Callable<Integer> {
     private final Desk desk;
 

@@ -5,18 +5,22 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import stirwright.exchange.CurveBlock;
+import stirwright.exchange.Measurement;
 import stirwright.exchange.Ramp;
 
 /** A label for each curve that no other one of its source has. */
 final class CurveNames {
     private final String stem;
     private final boolean several;
+    private final boolean severalTemperatures;
     private final Map<String, Integer> used = new HashMap<>();
 
-    /** @param several whether the source has more than one curve */
-    CurveNames(String stem, boolean several) {
+    /** @param taken the blocks that become curves */
+    CurveNames(String stem, List<CurveBlock> taken) {
         this.stem = stem;
-        this.several = several;
+        this.several = taken.size() > 1;
+        this.severalTemperatures = taken.stream()
+                .anyMatch(b -> !Measurement.sameTemperature(b.temperature(), taken.get(0).temperature()));
     }
 
     String next(CurveBlock block, Part part) {
@@ -34,6 +38,9 @@ final class CurveNames {
         }
         if (!block.sheet().isEmpty()) {
             words.add(block.sheet());
+        }
+        if (severalTemperatures && !Double.isNaN(block.temperature())) {
+            words.add(Math.round(block.temperature()) + " degC");
         }
         if (block.use().ramp() != Ramp.NONE) {
             words.add(block.use().ramp().word());

@@ -111,7 +111,7 @@ public final class Importer {
     }
 
     private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<DroppedPoint> dropped) {
-        CurveNames names = new CurveNames(source.stem(), blocks.stream().filter(CurveBlock::taken).count() > 1);
+        CurveNames names = new CurveNames(source.stem(), blocks.stream().filter(CurveBlock::taken).toList());
         List<MeasuredCurve> curves = new ArrayList<>();
         for (int i = 0; i < blocks.size(); i++) {
             CurveBlock block = blocks.get(i);
