@@ -64,6 +64,8 @@ final class FitWarnings {
 			boolean index = estimate.parameter().name().equals("flow_index");
 			if (estimate.parameter().name().equals("yield_stress") && estimate.interval().low() == 0) {
 				warnings.add("the yield stress is not told apart from 0 by these points");
+			} else if (estimate.parameter().name().equals("infinite_shear_viscosity") && estimate.interval().low() == 0) {
+				warnings.add("no plateau at high shear rates is told apart from 0 by these points");
 			} else if (index && estimate.atLimit()) {
 				warnings.add("the flow index is at its limit: the points want it beyond what the model allows");
 			} else if (fit.points() > fit.estimates().size() && !given(estimate)) {

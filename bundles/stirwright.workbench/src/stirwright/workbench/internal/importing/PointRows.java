@@ -120,6 +120,7 @@ final class PointRows extends Composite {
         item.setText(new String[] {String.valueOf(point.place().line()), String.valueOf(line.block().number()), number(point.shearRate()),
             number(point.shearStress()), number(point.viscosity()), number(point.temperature()), reason});
         item.setChecked(point.taken());
+        item.setGrayed(!line.block().taken());
         item.setForeground(point.taken() && line.block().taken() ? looks.palette().text() : looks.palette().quiet());
     }
 
