@@ -1,5 +1,6 @@
 package stirwright.exchange;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Stream;
 import stirwright.exchange.internal.curves.Importer;
@@ -50,9 +51,10 @@ public record CurveImport(
         return curves;
     }
 
-    /** Findings and messages, a line each, the file's name before them. */
+    /** Findings and messages, a line each with the file's name before it; what weighs most comes last, marked by a word. */
     public List<String> report() {
-        return Stream.concat(findings.stream().map(Finding::words), messages.stream().map(ImportMessage::words))
+        return Stream.concat(findings.stream().map(Finding::words),
+                        messages.stream().sorted(Comparator.comparing(ImportMessage::weight)).map(ImportMessage::marked))
                 .map(line -> source.name() + ": " + line).toList();
     }
 }

@@ -16,4 +16,13 @@ public record ImportMessage(Weight weight, String words) {
         /** Something could not be read at all. */
         PROBLEM
     }
+
+    /** The words, after "warning" or "problem" where it is one. */
+    String marked() {
+        return switch (weight) {
+            case NOTE -> words;
+            case WARNING -> "warning: " + words;
+            case PROBLEM -> "problem: " + words;
+        };
+    }
 }

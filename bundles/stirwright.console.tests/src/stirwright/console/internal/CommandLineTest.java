@@ -216,6 +216,31 @@ class CommandLineTest {
     }
 
     @Test
+    void fitTellsFilesOfOneNameApartAndGoesOnWithoutABadOne() throws IOException {
+        String points = "shear_rate_1_s,shear_stress_Pa\n1,5\n3,6.2\n10,8.7\n30,13\n100,22\n300,39\n";
+        Path first = Files.writeString(Files.createDirectory(folder.resolve("a")).resolve("run.csv"), points);
+        Path second = Files.writeString(Files.createDirectory(folder.resolve("b")).resolve("run.csv"), points.replace(",39", ",38"));
+        Path empty = Files.writeString(folder.resolve("empty.csv"), "");
+        Path table = folder.resolve("out.csv");
+        assertEquals(3, run("fit", first.toString(), empty.toString(), second.toString(), "--out", table.toString()));
+        assertTrue(err.toString().contains("empty.csv: is empty"), err.toString());
+        List<String> curves = Files.readAllLines(table).stream().skip(1).map(line -> line.split(",")[0]).distinct().toList();
+        assertEquals(List.of("run", "run of " + second), curves);
+        assertEquals(3, run("fit", first.toString(), "--out", folder.resolve("new.csv").toString(), "--out", "new.doc"));
+        assertFalse(Files.exists(folder.resolve("new.csv")), "nothing is written when an output cannot be");
+    }
+
+    @Test
+    void fitSaysWarningsLast() throws IOException {
+        Path curve = folder.resolve("slip.csv");
+        Files.writeString(curve, "shear rate 1/s;shear stress Pa;viscosity Pa s\n1;5;5000\n3;6,2;2067\n10;8,7;870\n30;13;433\n100;22;220\n300;39;130\n");
+        assertEquals(1, run("fit", curve.toString()));
+        List<String> lines = err.toString().lines().toList();
+        assertTrue(lines.getLast().startsWith("slip.csv: warning: "), err.toString());
+        assertTrue(lines.getLast().contains("1000 times"), err.toString());
+    }
+
+    @Test
     void fitReadsAsATemplateSays() throws IOException {
         Path curve = folder.resolve("odd.csv");
         Files.writeString(curve, "a;b;c\n1;10;5\n3;30;6,2\n10;100;8,7\n30;300;13\n100;1000;22\n300;3000;39\n");

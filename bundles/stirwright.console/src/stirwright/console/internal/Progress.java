@@ -7,12 +7,13 @@ import java.io.PrintWriter;
  * when a person watches, which the start script knows and says by a system property.
  */
 final class Progress {
+    static final boolean WATCHED = Boolean.getBoolean("stirwright.watched");
+
     private static final long AFTER_NANOS = 500_000_000L;
 
     private final PrintWriter err;
     private final String things;
     private final int total;
-    private final boolean watched = Boolean.getBoolean("stirwright.watched");
     private final long start = System.nanoTime();
     private boolean shown;
 
@@ -24,7 +25,7 @@ final class Progress {
 
     /** May be called by several threads. */
     synchronized void reached(int count) {
-        if (watched && count < total && System.nanoTime() - start > AFTER_NANOS) {
+        if (WATCHED && count < total && System.nanoTime() - start > AFTER_NANOS) {
             err.print("\r" + count + " of " + total + " " + things + " (Ctrl-C stops) ");
             err.flush();
             shown = true;

@@ -23,8 +23,8 @@ import stirwright.exchange.internal.workbook.Workbook;
  * @param separator null for a workbook
  */
 record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding> findings) {
-    /** Room for 100,000 rows of 20 columns and more; bounds the memory. */
-    private static final int MOST_CELLS = 3_000_000;
+    /** Room for 100,000 rows of 12 columns; what the 320 MB that the start script gives can hold. */
+    private static final int MOST_CELLS = 1_200_000;
 
     /** @throws UnusableFileException when it is neither text nor a workbook that can be read */
     static Sources read(CurveSource source, ImportChoice choice) {
