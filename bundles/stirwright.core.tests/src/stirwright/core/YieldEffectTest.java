@@ -15,6 +15,7 @@ import stirwright.rheology.Fluid;
 import stirwright.rheology.FluidModel;
 import stirwright.rheology.HerschelBulkley;
 import stirwright.rheology.MeasuredWindow;
+import stirwright.rheology.PowerLaw;
 import stirwright.rheology.YieldBounds;
 
 /** What the bounds of the yield stress do to the pick's power, worked out by hand. */
@@ -84,6 +85,45 @@ class YieldEffectTest {
         CaseResult result = check(new SpeedDemand.At(2), new Bingham(20, 1), YieldBounds.UNKNOWN, MeasuredWindow.UNKNOWN);
         assertEquals(YieldEffect.NONE, result.pick().orElseThrow().yieldEffect());
         assertFalse(result.notes().stream().anyMatch(n -> n.startsWith("yield stress given")));
+    }
+
+    /** 30 W for each Pa s: 10 + 20 = 30 Pa and 200 + 20 = 220 Pa at 20 1/s give 45 and 330 W; 20 + 20 = 40 Pa give 60 W. */
+    @Test
+    void theStaticYieldStressIsTheHigherEndAndChangesNoRunningPower() {
+        YieldBounds bounds = new YieldBounds(10, 25, 200);
+        CaseResult result = check(new SpeedDemand.At(2), new Bingham(20, 1), bounds, MeasuredWindow.UNKNOWN);
+        CandidateResult pick = result.pick().orElseThrow();
+        near(60, pick.power());
+        assertEquals(200, pick.yieldEffect().high());
+        near(45, pick.yieldEffect().powerLow());
+        near(330, pick.yieldEffect().powerHigh());
+        assertEquals(List.of("yield stress given as 10 to 200 Pa, the higher end after rest; with that, at the same speed and with"
+                + " the other parameters as they are, the pick's power is 45 to 330 W",
+                "static yield stress 200 Pa: start-up after rest needs its own check with the drive's maker"), about(result));
+        assertEquals(check(new SpeedDemand.At(2), new Bingham(20, 1), new YieldBounds(10, 25), MeasuredWindow.UNKNOWN).status(),
+                result.status());
+    }
+
+    @Test
+    void aGelThatIsBrokenToALiquidHasNoPowerAtItsStaticYieldStress() {
+        CaseResult result = check(new SpeedDemand.At(2), new PowerLaw(2, 0.5), new YieldBounds(Double.NaN, Double.NaN, 30),
+                MeasuredWindow.UNKNOWN);
+        assertEquals(new YieldEffect(Double.NaN, 30, Double.NaN, Double.NaN), result.pick().orElseThrow().yieldEffect());
+        assertEquals(List.of("static yield stress 30 Pa: start-up after rest needs its own check with the drive's maker"), about(result));
+    }
+
+    @Test
+    void aStaticYieldStressBelowTheModelsIsDoubted() {
+        CaseResult result = check(new SpeedDemand.At(2), new Bingham(20, 1), new YieldBounds(Double.NaN, Double.NaN, 5),
+                MeasuredWindow.UNKNOWN);
+        assertEquals(YieldEffect.NONE, result.pick().orElseThrow().yieldEffect());
+        assertEquals(List.of("static yield stress 5 Pa, which is below the model's 20 Pa, so check both: start-up after rest needs"
+                + " its own check with the drive's maker"), about(result));
+    }
+
+    /** Without the caution that every fluid with a yield stress has. */
+    private static List<String> about(CaseResult result) {
+        return result.notes().stream().filter(n -> !n.startsWith("yield stress: ") && n.contains("yield stress")).toList();
     }
 
     private static void near(double expected, double actual) {

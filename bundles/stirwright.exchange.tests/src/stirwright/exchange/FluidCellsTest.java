@@ -128,6 +128,22 @@ class FluidCellsTest {
         assertEquals(YieldBounds.UNKNOWN, bounds(yielding("", "")));
     }
 
+    @Test
+    void theStaticYieldStressGoesWithAnyModel() {
+        assertEquals(new YieldBounds(5, 9, 60), bounds(yielding("5", "9").with("static_yield_stress_Pa", "60")));
+        assertEquals(new YieldBounds(Double.NaN, Double.NaN, 3), bounds(yielding("", "").with("static_yield_stress_Pa", "3")));
+        assertEquals(new YieldBounds(Double.NaN, Double.NaN, 0), bounds(Sheet.good().with("static_yield_stress_Pa", "0")));
+    }
+
+    @Test
+    void theStaticYieldStressIsNotNegative() {
+        assertRefused(Sheet.good().with("static_yield_stress_Pa", "-2").entry(folder), "static_yield_stress_Pa", "-2",
+                "must be a finite number, 0 or greater");
+        assertRefused(yielding("5", "9").with("static_yield_stress_Pa", "-0.1").entry(folder), "static_yield_stress_Pa", "-0.1");
+        assertRefused(Sheet.good().with("static_yield_stress_Pa", "1e400").entry(folder), "static_yield_stress_Pa", "1e400");
+        assertRefused(Sheet.good().with("static_yield_stress_Pa", "stiff").entry(folder), "static_yield_stress_Pa", "stiff");
+    }
+
     private YieldBounds bounds(Sheet sheet) {
         return sheet.entry(folder).spec().orElseThrow().fluid().yieldBounds();
     }

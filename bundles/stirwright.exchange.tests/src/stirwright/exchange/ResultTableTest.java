@@ -98,6 +98,22 @@ class ResultTableTest {
         assertEquals("", records(computed()).get(0).getField("yield_stress_low_Pa"));
     }
 
+    @Test
+    void theStaticYieldStressWidensTheRangeAndLeavesThePower() {
+        Sheet sheet = Sheet.good().without("viscosity_Pa_s").with("model", "herschel-bulkley")
+                .with("consistency_Pa_sn", "2").with("flow_index", "0.5").with("yield_stress_Pa", "7")
+                .with("yield_stress_low_Pa", "5").with("yield_stress_high_Pa", "11.5");
+        NamedCsvRecord without = records(sheet.entry(folder).check(Invented.CROSS_CHECK)).get(0);
+        NamedCsvRecord with = records(sheet.with("static_yield_stress_Pa", "40").entry(folder).check(Invented.CROSS_CHECK)).get(0);
+        near(5, with, "yield_stress_low_Pa");
+        near(40, with, "yield_stress_high_Pa");
+        assertEquals(without.getField("power_W"), with.getField("power_W"));
+        assertTrue(with.getField("notes").contains("static yield stress 40 Pa: start-up after rest needs its own check with the"
+                + " drive's maker"), with.getField("notes"));
+        NamedCsvRecord lower = records(sheet.with("static_yield_stress_Pa", "8").entry(folder).check(Invented.CROSS_CHECK)).get(0);
+        near(11.5, lower, "yield_stress_high_Pa");
+    }
+
     private static void near(double expected, NamedCsvRecord row, String column) {
         assertEquals(expected, Double.parseDouble(row.getField(column)), 1e-12 * Math.abs(expected), column);
     }

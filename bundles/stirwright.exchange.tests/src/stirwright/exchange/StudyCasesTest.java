@@ -93,6 +93,15 @@ class StudyCasesTest {
     }
 
     @Test
+    void aFluidMayHaveAStaticYieldStress() {
+        Amounts.set(invented.fluid.getAmounts(), "static_yield_stress_Pa", 45);
+        assertEquals(new YieldBounds(Double.NaN, Double.NaN, 45), spec().fluid().yieldBounds());
+        assertEquals(List.of(), spec().remarks());
+        Amounts.set(invented.fluid.getAmounts(), "static_yield_stress_Pa", -1);
+        assertRefused(invented.entry(), "static_yield_stress_Pa", "-1", "0 or greater");
+    }
+
+    @Test
     void demands() {
         invented.good.setDemand(null);
         assertRefused(invented.entry(), "speed_rpm", "", "exactly one");

@@ -21,7 +21,7 @@ final class Typing {
                     Arrays.stream(ModelKind.values()).flatMap(k -> CaseFields.model(k).stream()),
                     CaseFields.SPEEDS.stream(), CaseFields.GIVEN.stream(), CaseFields.MEASURED_WINDOW.stream(),
                     CaseFields.YIELD_BOUNDS.stream(),
-                    Stream.of(CaseFields.DENSITY))
+                    Stream.of(CaseFields.STATIC_YIELD_STRESS, CaseFields.DENSITY))
             .flatMap(s -> s).distinct().toList();
 
     private Typing() {}

@@ -33,6 +33,9 @@ public final class CaseFields {
             new CaseField(CaseColumns.YIELD_STRESS_LOW, "lowest yield stress", "ty min", "Pa");
     public static final CaseField YIELD_STRESS_HIGH =
             new CaseField(CaseColumns.YIELD_STRESS_HIGH, "highest yield stress", "ty max", "Pa");
+    public static final CaseField STATIC_YIELD_STRESS =
+            new CaseField(CaseColumns.STATIC_YIELD_STRESS, "static yield stress", "ty static", "Pa",
+                    "stress at which the product starts to flow after rest; measured with a vane or a stress ramp");
 
     /** What settles the speed; a case gives exactly one. */
     public static final List<CaseField> SPEEDS =
@@ -70,8 +73,7 @@ public final class CaseFields {
 
     /** {@link #YIELD_BOUNDS} for a model with a yield stress, else none. */
     public static List<CaseField> yieldBounds(ModelKind kind) {
-        boolean yields = kind.parameters().stream().anyMatch(p -> p.name().equals("yield_stress"));
-        return yields ? YIELD_BOUNDS : List.of();
+        return kind.yields() ? YIELD_BOUNDS : List.of();
     }
 
     /** A dimension in the unit of its column, angles in degrees. */

@@ -51,6 +51,32 @@ class YieldBoundsTest {
 		assertFalse(fluid.yieldBounds().known());
 	}
 
+	@ParameterizedTest
+	@CsvSource({
+			"5, 9, 60, 5, 60",
+			"5, 9, 8, 5, 9",
+			"5, NaN, 60, 5, 60",
+			"NaN, NaN, 7, NaN, 7",
+			"NaN, NaN, 6, NaN, NaN",
+			"5, 9, NaN, 5, 9" })
+	void theStaticOneIsTheHigherEndWhereItIsTheHighest(double low, double high, double atRest, double least, double most) {
+		YieldBounds bounds = new YieldBounds(low, high, atRest);
+		Fluid fluid = new Fluid(YIELDING, 1000, MeasuredWindow.UNKNOWN, bounds);
+		assertEquals(bounds, fluid.yieldBounds(), "as given");
+		assertEquals(new YieldBounds(least, most, atRest), fluid.yieldRange());
+	}
+
+	@Test
+	void aStaticOneGoesWithAnyModelAndIsNotNegative() {
+		YieldBounds gel = new YieldBounds(Double.NaN, Double.NaN, 30);
+		assertFalse(gel.known(), "no end of the running product's range");
+		assertEquals(30, new Fluid(new PowerLaw(2, 0.5), 1000, MeasuredWindow.UNKNOWN, gel).yieldRange().high());
+		for (double wrong : new double[] { -1, Double.POSITIVE_INFINITY }) {
+			assertEquals("static_yield_stress = " + wrong + ": must be a finite number, 0 or greater",
+					assertThrows(ParameterException.class, () -> new YieldBounds(5, 9, wrong)).getMessage());
+		}
+	}
+
 	@Test
 	void anotherYieldStressLeavesTheRest() {
 		MeasuredWindow window = new MeasuredWindow(1, 100);

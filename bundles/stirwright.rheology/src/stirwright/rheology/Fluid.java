@@ -8,7 +8,7 @@ import java.util.Objects;
  * @param model       stress as a function of shear rate
  * @param density     kg/m3, from 50 to 25000
  * @param window      shear rates between which the model was measured
- * @param yieldBounds between what its yield stress may lie
+ * @param yieldBounds between what its yield stress may lie, and what it is after rest
  */
 public record Fluid(FluidModel model, double density, MeasuredWindow window, YieldBounds yieldBounds) {
 
@@ -38,6 +38,11 @@ public record Fluid(FluidModel model, double density, MeasuredWindow window, Yie
 	/** A fluid of which no more is known about its yield stress than the model says. */
 	public Fluid(FluidModel model, double density, MeasuredWindow window) {
 		this(model, density, window, YieldBounds.UNKNOWN);
+	}
+
+	/** Between what its yield stress may lie, the static one included. */
+	public YieldBounds yieldRange() {
+		return yieldBounds.reachingRest(model.yieldStress());
 	}
 
 	/**

@@ -50,6 +50,11 @@ public enum ModelKind {
 		return parameters;
 	}
 
+	/** Whether it has a yield stress, which may be 0. */
+	public boolean yields() {
+		return parameters.contains(YIELD_STRESS);
+	}
+
 	/**
 	 * Builds a model of this kind.
 	 *

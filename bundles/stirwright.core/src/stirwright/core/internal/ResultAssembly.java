@@ -68,7 +68,7 @@ final class ResultAssembly {
         notes.addAll(DriveCautions.of(rows));
         new ShearRateUse(first, results.get(0)).note().ifPresent(notes::add);
         powerBasedOutside(results.get(0).powerBasedShearRate()).ifPresent(notes::add);
-        YieldPowers.note(results.get(0).yieldEffect()).ifPresent(notes::add);
+        notes.addAll(yields.notes(results.get(0).yieldEffect()));
         List<QuantityResult> quantities = listed.stream()
                 .flatMap(s -> s.ranked().stream()).map(ResultAssembly::quantity).toList();
         List<String> flags = doubts.flags();

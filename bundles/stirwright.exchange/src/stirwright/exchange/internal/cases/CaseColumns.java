@@ -35,6 +35,7 @@ public final class CaseColumns {
     public static final String SHEAR_RATE_MAX = "shear_rate_max_1_s";
     public static final String YIELD_STRESS_LOW = "yield_stress_low_Pa";
     public static final String YIELD_STRESS_HIGH = "yield_stress_high_Pa";
+    public static final String STATIC_YIELD_STRESS = "static_yield_stress_Pa";
 
     public static final String EFFECTS_LEFT_OUT = Choices.EFFECTS_LEFT_OUT;
     public static final String CONSTANTS = Choices.CONSTANTS;
@@ -55,8 +56,8 @@ public final class CaseColumns {
 
     static final List<String> REQUIRED = List.of(CASE, FAMILY, IMPELLER_DIAMETER, DENSITY, MODEL);
 
-    private static final List<String> OTHER_NUMBERS =
-            columns(List.of(CaseFields.DENSITY), CaseFields.GIVEN, CaseFields.MEASURED_WINDOW, CaseFields.YIELD_BOUNDS);
+    private static final List<String> OTHER_NUMBERS = columns(List.of(CaseFields.DENSITY), CaseFields.GIVEN,
+            CaseFields.MEASURED_WINDOW, CaseFields.YIELD_BOUNDS, List.of(CaseFields.STATIC_YIELD_STRESS));
 
     private final Set<String> dimensions = new LinkedHashSet<>(DIMENSIONS);
     private final Set<String> numeric = new LinkedHashSet<>();

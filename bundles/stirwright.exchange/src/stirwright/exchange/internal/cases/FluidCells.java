@@ -4,6 +4,7 @@ import static stirwright.exchange.internal.cases.CaseColumns.DENSITY;
 import static stirwright.exchange.internal.cases.CaseColumns.MODEL;
 import static stirwright.exchange.internal.cases.CaseColumns.SHEAR_RATE_MAX;
 import static stirwright.exchange.internal.cases.CaseColumns.SHEAR_RATE_MIN;
+import static stirwright.exchange.internal.cases.CaseColumns.STATIC_YIELD_STRESS;
 import static stirwright.exchange.internal.cases.CaseColumns.YIELD_STRESS_HIGH;
 import static stirwright.exchange.internal.cases.CaseColumns.YIELD_STRESS_LOW;
 
@@ -41,12 +42,13 @@ final class FluidCells {
         double most = cells.positive(SHEAR_RATE_MAX);
         double low = cells.number(YIELD_STRESS_LOW);
         double high = cells.number(YIELD_STRESS_HIGH);
+        double atRest = cells.number(STATIC_YIELD_STRESS);
         List<String> used = kind.parameters().stream().map(Parameter::column).toList();
         cells.given(PARAMETERS).stream().filter(c -> !used.contains(c)).forEach(c -> remarks.add(
                 c + " " + cells.shown(c) + " is not a parameter of model " + kind.id() + "; ignored"));
         try {
             FluidModel model = kind.create(values);
-            return new Fluid(model, density, new MeasuredWindow(least, most), new YieldBounds(low, high));
+            return new Fluid(model, density, new MeasuredWindow(least, most), new YieldBounds(low, high, atRest));
         } catch (ParameterException beyond) {
             throw cells.refusal(column(kind, beyond.parameter()), beyond.allowed());
         }
@@ -69,7 +71,8 @@ final class FluidCells {
     }
 
     private static String column(ModelKind kind, String parameter) {
-        Stream<String> others = Stream.of(DENSITY, SHEAR_RATE_MIN, SHEAR_RATE_MAX, YIELD_STRESS_LOW, YIELD_STRESS_HIGH);
+        Stream<String> others = Stream.of(
+                DENSITY, SHEAR_RATE_MIN, SHEAR_RATE_MAX, YIELD_STRESS_LOW, YIELD_STRESS_HIGH, STATIC_YIELD_STRESS);
         return Stream.concat(
                         kind.parameters().stream().filter(p -> p.name().equals(parameter)).map(Parameter::column),
                         others.filter(c -> c.startsWith(parameter)))
