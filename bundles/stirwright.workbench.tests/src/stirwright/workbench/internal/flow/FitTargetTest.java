@@ -35,6 +35,28 @@ class FitTargetTest {
                 curve("set aside", "up", 25, false)));
     }
 
+    /** 2 K, as on the command line and in the import. */
+    @Test
+    void whatCountsAsOneTemperatureDoesSoEverywhere() {
+        assertEquals(List.of("all used curves together", "only a", "only b"),
+                titles(curve("a", "up", 25, true), curve("b", "up", 27, true)));
+        assertEquals(List.of("up ramps, 25 \u00B0C", "up ramps, 27.1 \u00B0C"),
+                titles(curve("a", "up", 25, true), curve("b", "up", 27.1, true)).subList(0, 2));
+    }
+
+    /** 22 is within 2 K of 20 and of 23, and belongs to the colder one alone. */
+    @Test
+    void eachCurveHasOneTemperature() {
+        List<CurveData> curves = List.of(curve("c", "up", 23, true), curve("?", "up", Double.NaN, true), curve("a", "up", 20, true),
+                curve("b", "up", 22, true), curve("!", "down", Double.NaN, true));
+        assertEquals(List.of(List.of("a", "b"), List.of("c"), List.of("?", "!")),
+                FitTarget.byTemperature(curves).stream().map(here -> here.stream().map(CurveData::label).toList()).toList());
+        assertEquals(List.of(20.0, 23.0, Double.NaN), FitTarget.temperatures(curves));
+        FitTarget cold = FitTarget.of(curves).stream().filter(t -> t.title().equals("up ramps, 20 \u00B0C")).findFirst().orElseThrow();
+        assertEquals(List.of("a", "b"), cold.curves().stream().map(CurveData::label).toList());
+        assertFalse(cold.mixesTemperatures());
+    }
+
     @Test
     void rampsAndTemperaturesAreNotMixedUnlessAskedFor() {
         assertEquals(List.of("up ramps", "curves without a ramp", "down ramps", "all used curves together", "only d", "only n", "only u"),

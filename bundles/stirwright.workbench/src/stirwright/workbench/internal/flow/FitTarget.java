@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import stirwright.correlation.Figures;
+import stirwright.exchange.Measurement;
 import stirwright.workbench.internal.Messages;
 
 /**
@@ -15,9 +16,6 @@ import stirwright.workbench.internal.Messages;
  * @param title as it stands in the list
  */
 public record FitTarget(String key, String title, List<CurveData> curves) {
-    /** Curves whose temperatures differ by less were measured at one temperature; common practice, no source. */
-    static final double SAME_TEMPERATURE = 0.5;
-
     public FitTarget {
         curves = List.copyOf(curves);
     }
@@ -62,23 +60,29 @@ public record FitTarget(String key, String title, List<CurveData> curves) {
             return ramp;
         }
         return Double.isNaN(curve.temperature()) ? Messages.bind(FlowWords.Target_unknownTemperature, ramp)
-                : Messages.bind(FlowWords.Target_atTemperature, ramp, Figures.show(nearest(curve.temperature(), temperatures)));
+                : Messages.bind(FlowWords.Target_atTemperature, ramp, Figures.show(coldest(curve.temperature(), temperatures)));
     }
 
-    /** One of each group of temperatures that count as one, from cold to hot; NaN stands for those not known. */
-    static List<Double> temperatures(List<CurveData> curves) {
-        List<Double> distinct = new ArrayList<>();
-        curves.stream().map(CurveData::temperature).sorted().forEach(t -> {
-            boolean known = distinct.stream().anyMatch(d -> Math.abs(d - t) <= SAME_TEMPERATURE || d.isNaN() && t.isNaN());
-            if (!known) {
-                distinct.add(t);
+    /** Each curve once, with those whose temperature counts as that of the coldest among them; cold first, unknown last. */
+    static List<List<CurveData>> byTemperature(List<CurveData> curves) {
+        List<List<CurveData>> groups = new ArrayList<>();
+        curves.stream().sorted(Comparator.comparingDouble(CurveData::temperature)).forEach(c -> {
+            if (groups.isEmpty() || !Measurement.sameTemperature(groups.getLast().get(0).temperature(), c.temperature())) {
+                groups.add(new ArrayList<>());
             }
+            groups.getLast().add(c);
         });
-        return distinct;
+        return groups;
     }
 
-    private static double nearest(double temperature, List<Double> temperatures) {
-        return temperatures.stream().filter(t -> Math.abs(t - temperature) <= SAME_TEMPERATURE).findFirst().orElse(temperature);
+    /** The coldest of each group of temperatures that count as one, from cold to hot; NaN stands for those not known. */
+    static List<Double> temperatures(List<CurveData> curves) {
+        return byTemperature(curves).stream().map(here -> here.get(0).temperature()).toList();
+    }
+
+    /** Of the group that a temperature is in. */
+    private static double coldest(double temperature, List<Double> temperatures) {
+        return temperatures.stream().filter(t -> t <= temperature).reduce((colder, warmer) -> warmer).orElse(temperature);
     }
 
     /** Whether it pools what was measured at different temperatures. */

@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.concurrent.CopyOnWriteArrayList;
 import java.util.concurrent.Executor;
 import stirwright.rheology.FitOptions;
@@ -76,7 +77,8 @@ public final class FlowCurves implements AutoCloseable {
         Optional<FitTarget> fitted = targets.stream().filter(t -> t.key().equals(target)).findFirst().or(() -> targets.stream().findFirst());
         return new FlowRequest(fluid().map(Fluid::getName).orElse(""), curves, targets, fitted,
                 new FitOptions(FitOptions.DEFAULT.objective(), robust), view, fluid().flatMap(FluidEdits::model),
-                fluid().map(Fluid::getModelReason).orElse(""), session.outcome().map(NamedRate::of).orElse(List.of()), selected, shown);
+                fluid().map(Fluid::getModelReason).orElse(""), fluid().map(FluidEdits::staticYield).orElse(OptionalDouble.empty()),
+                session.outcome().map(NamedRate::of).orElse(List.of()), selected, shown);
     }
 
     private List<CurveData> curves() {

@@ -18,7 +18,7 @@ import stirwright.rheology.YieldRange;
  * @param selected the key of the row whose card is open; empty without rows
  * @param hidden the keys of the rows that are not drawn
  * @param window the shear rates that were measured of the target
- * @param yield the range of the yield stress over models and ramps; empty where there is none
+ * @param yield the range of the yield stress over models, ramps and what was measured after rest; empty where there is none
  * @param reason why the recommended model is; empty without one
  * @param about what is to be said of the curves, whichever model is selected
  */

@@ -84,7 +84,10 @@ final class FlowWords extends NLS {
     public static String View_viscosity;
     public static String Yield_leftOut;
     public static String Yield_range;
+    public static String Yield_rangeStatic;
     public static String Yield_source;
+    public static String Yield_static;
+    public static String Yield_staticAlone;
 
     static {
         NLS.initializeMessages(FlowWords.class.getName(), FlowWords.class);

@@ -61,7 +61,8 @@ public final class FluidEdits {
 
     /**
      * Makes a fitted model that of the fluid: its parameters in place of those of the model before, the shear rates between
-     * which it was measured, and the range of the yield stress, or none where there is none. All of them in six digits.
+     * which it was measured, and the range of the yield stress, or none where there is none. All of them in six digits. What
+     * was measured after rest stays, since it is of the product and not of a model.
      */
     public void pick(Fluid fluid, FluidModel fitted, MeasuredWindow window, Optional<YieldRange> yield, String reason) {
         FluidModel model = kept(fitted);
@@ -79,7 +80,7 @@ public final class FluidEdits {
             Amounts.remove(fluid.getAmounts(), YIELD_LOW);
             Amounts.remove(fluid.getAmounts(), YIELD_HIGH);
             // A range beside a model without a yield stress, or one that leaves its own out, would be refused.
-            yield.filter(y -> !CaseFields.yieldBounds(kind).isEmpty()).ifPresent(y -> {
+            yield.filter(y -> kind.yields()).ifPresent(y -> {
                 Amounts.set(fluid.getAmounts(), YIELD_LOW, Math.min(kept(y.low()), model.yieldStress()));
                 Amounts.set(fluid.getAmounts(), YIELD_HIGH, Math.max(kept(y.high()), model.yieldStress()));
             });
@@ -94,6 +95,13 @@ public final class FluidEdits {
 
     private static double kept(double value) {
         return new BigDecimal(value).round(SIX).doubleValue();
+    }
+
+    /** Pa; empty where it is not given or out of its limits, which the case says beside its field. */
+    static OptionalDouble staticYield(Fluid fluid) {
+        OptionalDouble value = Amounts.get(fluid.getAmounts(), CaseFields.STATIC_YIELD_STRESS.column());
+        boolean known = value.isPresent() && value.getAsDouble() >= 0 && value.getAsDouble() < Double.POSITIVE_INFINITY;
+        return known ? value : OptionalDouble.empty();
     }
 
     /** The model that a fluid has in the study; empty where a parameter is missing or out of its limits. */

@@ -15,7 +15,7 @@ final class Laws {
 
     /** Empty where the model does not describe every temperature, or one of its parameters is 0 there. */
     static Optional<TemperatureLaw> of(ModelKind kind, List<CurveData> curves, FitOptions options) {
-        List<TemperatureLaw.Measured> measured = FitTarget.temperatures(curves).stream().flatMap(t -> at(t, curves)).toList();
+        List<TemperatureLaw.Measured> measured = FitTarget.byTemperature(curves).stream().flatMap(Laws::at).toList();
         try {
             return TemperatureLaw.of(kind, measured, options);
         } catch (IllegalArgumentException | ParameterException tooFewOrBeyond) {
@@ -23,9 +23,8 @@ final class Laws {
         }
     }
 
-    private static Stream<TemperatureLaw.Measured> at(double temperature, List<CurveData> curves) {
-        List<CurveData> here = curves.stream().filter(c -> Math.abs(c.temperature() - temperature) <= FitTarget.SAME_TEMPERATURE).toList();
-        double mean = here.stream().mapToDouble(CurveData::temperature).average().orElse(temperature);
+    private static Stream<TemperatureLaw.Measured> at(List<CurveData> here) {
+        double mean = here.stream().mapToDouble(CurveData::temperature).average().orElseThrow();
         return FlowCalculation.pooled(here).map(c -> new TemperatureLaw.Measured(mean, c)).stream();
     }
 }

@@ -5,7 +5,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.function.BooleanSupplier;
 import stirwright.rheology.FlowCurve;
 import stirwright.rheology.RankedFits;
@@ -30,13 +29,11 @@ final class Ramps {
     List<Pair> pairs() {
         List<CurveData> used = request.curves().stream().filter(CurveData::used).toList();
         List<Pair> pairs = new ArrayList<>();
-        for (double temperature : FitTarget.temperatures(used)) {
-            List<CurveData> here = used.stream().filter(c -> Double.isNaN(temperature) ? Double.isNaN(c.temperature())
-                    : Math.abs(c.temperature() - temperature) <= FitTarget.SAME_TEMPERATURE).toList();
+        for (List<CurveData> here : FitTarget.byTemperature(used)) {
             Optional<FlowCurve> up = ramp(here, CurveData.UP);
             Optional<FlowCurve> down = ramp(here, CurveData.DOWN);
             if (up.isPresent() && down.isPresent()) {
-                pairs.add(new Pair(FlowAbout.temperature(temperature), up.get(), down.get()));
+                pairs.add(new Pair(FlowAbout.temperature(here.get(0).temperature()), up.get(), down.get()));
             }
         }
         return pairs;
@@ -47,7 +44,8 @@ final class Ramps {
     }
 
     /**
-     * The range over models and ramps; empty where no model with a yield stress describes the points. Other ramps of the same
+     * The range over models, ramps and what was measured after rest; empty where no model with a yield stress describes the
+     * points and nothing was. Other ramps of the same
      * temperature count too: which of them a vessel sees depends on what was done to the product before.
      */
     Optional<YieldRange> yield(Optional<RankedFits> fits) {
@@ -56,7 +54,7 @@ final class Ramps {
         request.target().ifPresent(t -> request.targets().stream().filter(other -> other.key().startsWith("group "))
                 .filter(other -> sameTemperature(other, t))
                 .forEach(other -> calculation.fits(other.curves(), request.options(), stale).ifPresent(f -> all.put(other.title(), f))));
-        return YieldRange.of(all, OptionalDouble.empty());
+        return YieldRange.of(all, request.staticYield());
     }
 
     private static boolean sameTemperature(FitTarget one, FitTarget other) {

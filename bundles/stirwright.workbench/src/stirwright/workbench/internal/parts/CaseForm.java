@@ -91,13 +91,13 @@ final class CaseForm extends Composite {
         CaseGroups groups = new CaseGroups(this, form, session, edits);
         if (pages.current() == Page.FLOW_CURVE) {
             groups.caseOfFluid(c);
-            groups.fluid(c);
+            groups.fluid(c, true);
             groups.curves(c);
             return;
         }
         groups.theCase(c);
         groups.speed(c);
-        groups.fluid(c);
+        groups.fluid(c, false);
         groups.vessel(c);
         groups.impeller(c, families());
         groups.compare(c, families());

@@ -83,7 +83,8 @@ final class CaseGroups {
                 () -> Demands.value(c), value -> edits.demand(c, now.column(), value));
     }
 
-    void fluid(Case c) {
+    /** @param measured whether the page is about what was measured of the fluid, by whichever model it is described */
+    void fluid(Case c, boolean measured) {
         Fluid fluid = c.getFluid();
         Composite head = form.heading(Messages.Case_fluid);
         part(Messages.Case_fluid, session.editor().study().getFluids(), fluid, f -> edits.use(c, f));
@@ -98,6 +99,9 @@ final class CaseGroups {
                 kind.map(kinds::indexOf).orElse(-1), i -> edits.model(fluid, kinds.get(i).id()));
         kind.ifPresent(k -> CaseFields.model(k).forEach(f -> fields.number(f, fluid.getAmounts())));
         kind.ifPresent(k -> CaseFields.yieldBounds(k).forEach(f -> fields.number(f, fluid.getAmounts())));
+        if (measured || kind.filter(ModelKind::yields).isPresent()) {
+            fields.number(CaseFields.STATIC_YIELD_STRESS, fluid.getAmounts());
+        }
         fields.number(CaseFields.DENSITY, fluid.getAmounts());
         fields.number(Messages.Case_measuredFrom, CaseFields.SHEAR_RATE_MIN, fluid.getAmounts());
         fields.number(Messages.Case_measuredTo, CaseFields.SHEAR_RATE_MAX, fluid.getAmounts());

@@ -67,7 +67,7 @@ public final class CaseEdits {
     /** Bounds of a yield stress go with the last model that had one: nothing would show them, and the case would be refused. */
     public void model(Fluid fluid, String modelId) {
         if (!modelId.equals(fluid.getModel())) {
-            boolean yields = ModelKind.byId(modelId).filter(k -> !CaseFields.yieldBounds(k).isEmpty()).isPresent();
+            boolean yields = ModelKind.byId(modelId).filter(ModelKind::yields).isPresent();
             session.editor().edit(Messages.Edit_model, () -> {
                 fluid.setModel(modelId);
                 if (!yields) {

@@ -27,6 +27,7 @@ public final class Words {
         fields.addAll(CaseFields.GIVEN);
         fields.addAll(CaseFields.MEASURED_WINDOW);
         fields.addAll(CaseFields.YIELD_BOUNDS);
+        fields.add(CaseFields.STATIC_YIELD_STRESS);
         fields.add(CaseFields.DENSITY);
         Stream.of(ModelKind.values()).map(CaseFields::model).forEach(fields::addAll);
         for (Family family : catalogue.families()) {
