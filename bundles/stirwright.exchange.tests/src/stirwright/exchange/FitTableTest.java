@@ -62,7 +62,7 @@ class FitTableTest {
         assertEquals("0.1", first.getField("rate_min_1_s"));
         assertEquals("100.0", first.getField("rate_max_1_s"));
         assertEquals("ok", first.getField("status"));
-        assertEquals("relative", first.getField("objective"));
+        assertEquals("relative error", first.getField("objective"));
         assertTrue(number(rows.get(3), "rms_relative") > 0.01);
         assertTrue(number(rows.get(3), "aicc") > number(first, "aicc"));
         assertEquals(number(rows.get(3), "aicc") - number(first, "aicc"), number(rows.get(3), "aicc_above_best"), 1e-9);

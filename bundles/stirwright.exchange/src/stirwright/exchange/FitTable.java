@@ -6,10 +6,7 @@ import stirwright.exchange.internal.write.Column;
 import stirwright.exchange.internal.write.FitColumns;
 import stirwright.exchange.internal.write.TableOutput;
 
-/**
- * The fit table as CSV: one row a curve, model and parameter. The columns for intervals and for the
- * information criterion stay empty until fits come with them.
- */
+/** The fit table as CSV: one row a curve, model and parameter. */
 public final class FitTable {
 
     private FitTable() {}

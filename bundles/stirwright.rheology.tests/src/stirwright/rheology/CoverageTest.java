@@ -23,6 +23,13 @@ class CoverageTest {
 	private static final int DRAWS = 2000;
 	private static final double NOISE = 0.03;
 
+	/** Noise and points that pull a fit of relative deviations down by several standard errors. */
+	private static final double MUCH_NOISE = 0.1;
+	private static final double[] MANY = IntStream.range(0, 100).mapToDouble(i -> Math.pow(10, 4 * i / 99.0 - 1)).toArray();
+
+	/** 1 to 100 1/s, ten points a decade: too narrow for a flow index near 0 to be told well. */
+	private static final double[] NARROW = IntStream.rangeClosed(0, 20).mapToDouble(i -> Math.pow(10, i / 10.0)).toArray();
+
 	/** 0.1 to 1000 1/s, five points a decade. */
 	private static final double[] RATES = IntStream.rangeClosed(-5, 15).mapToDouble(i -> Math.pow(10, i / 5.0)).toArray();
 
@@ -32,7 +39,7 @@ class CoverageTest {
 	@ParameterizedTest
 	@MethodSource
 	void awayFromEveryLimit(FluidModel truth, double[] rates) {
-		Coverage coverage = new Coverage(truth, rates);
+		Coverage coverage = new Coverage(truth, rates, NOISE);
 		assertAll(Stream.concat(
 				IntStream.range(0, coverage.held.length).mapToObj(j -> between(0.92, coverage.held[j], 0.98, coverage.name(j))),
 				Stream.of(between(0.92, coverage.band, 0.98, "the stress at 3 1/s"),
@@ -51,16 +58,34 @@ class CoverageTest {
 				new Object[] { new Carreau(20, 0.02, 2, 0.4), WIDE });
 	}
 
-	/** At a limit an interval cannot miss to one side, so that it may hold more often, never less. */
+	/** The estimate itself lies low by the pull of relative deviations; what is held is the truth, by an end moved up by it. */
+	@ParameterizedTest
+	@MethodSource
+	void muchNoise(FluidModel truth) {
+		Coverage coverage = new Coverage(truth, MANY, MUCH_NOISE);
+		assertAll(Stream.concat(
+				IntStream.range(0, coverage.held.length).mapToObj(j -> between(0.92, coverage.held[j], 1, coverage.name(j))),
+				Stream.of(between(0.92, coverage.band, 1, "the stress at 3 1/s"))));
+	}
+
+	static Stream<FluidModel> muchNoise() {
+		return Stream.of(new Newtonian(0.5), new PowerLaw(8, 0.4), new HerschelBulkley(6, 3, 0.5), new Casson(6, 0.08));
+	}
+
+	/**
+	 * At a limit an interval cannot miss to one side, so that it may hold more often, never less. The first reaches to the limit
+	 * too: its joint intervals, by linearising, hold in 86 % of draws alone.
+	 */
 	@ParameterizedTest
 	@MethodSource
 	void atALimit(FluidModel truth, double[] rates) {
-		Coverage coverage = new Coverage(truth, rates);
+		Coverage coverage = new Coverage(truth, rates, NOISE);
 		assertAll(IntStream.range(0, coverage.held.length).mapToObj(j -> between(0.92, coverage.held[j], 1, coverage.name(j))));
 	}
 
 	static Stream<Object[]> atALimit() {
 		return Stream.of(
+				new Object[] { new HerschelBulkley(6, 3, 0.2), NARROW },
 				new Object[] { new HerschelBulkley(0, 3, 0.5), RATES },
 				new Object[] { new HerschelBulkley(0.05, 3, 0.5), RATES },
 				new Object[] { new Bingham(0, 0.08), RATES },
@@ -81,7 +106,7 @@ class CoverageTest {
 		private double allHeld;
 		private double band;
 
-		Coverage(FluidModel truth, double[] rates) {
+		Coverage(FluidModel truth, double[] rates, double noise) {
 			ModelKind kind = ModelKind.of(truth);
 			double[] known = ModelKind.values(truth);
 			this.parameters = kind.parameters();
@@ -89,7 +114,7 @@ class CoverageTest {
 			Random random = new Random(SEED);
 			for (int draw = 0; draw < DRAWS; draw++) {
 				double[] stresses = IntStream.range(0, rates.length)
-						.mapToDouble(i -> truth.stress(rates[i]) * (1 + NOISE * random.nextGaussian())).toArray();
+						.mapToDouble(i -> truth.stress(rates[i]) * (1 + noise * random.nextGaussian())).toArray();
 				count(Fits.one(kind, FlowCurve.of(rates, stresses), FitOptions.DEFAULT), truth, known);
 			}
 		}

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Arrays;
+import java.util.List;
 import java.util.Set;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Consumer;
@@ -46,6 +47,13 @@ class FitPropertiesTest {
 			ModelFit herschelBulkley = fit(ModelKind.HERSCHEL_BULKLEY, curve, objective);
 			assertTrue(herschelBulkley.residualSumOfSquares() <= powerLaw, herschelBulkley + " against " + powerLaw);
 			assertTrue(herschelBulkley.residualSumOfSquares() <= bingham * (1 + 1e-9), herschelBulkley + " against " + bingham);
+			if (fit(ModelKind.POWER_LAW, curve, objective).estimate("flow_index").value() < 0.8) {
+				// a power law is what both become as the time constant grows
+				for (ModelKind kind : List.of(ModelKind.CROSS, ModelKind.CARREAU)) {
+					double plateaus = fit(kind, curve, objective).residualSumOfSquares();
+					assertTrue(plateaus <= powerLaw * 1.001, kind + ": " + plateaus + " against " + powerLaw);
+				}
+			}
 			assertTrue(powerLaw <= newtonian * (1 + 1e-9), powerLaw + " against " + newtonian);
 			assertTrue(bingham <= newtonian * (1 + 1e-9), bingham + " against " + newtonian);
 		});

@@ -70,6 +70,7 @@ class RampsAndTemperaturesTest {
 		YieldRange range = YieldRange.of(Map.of("", RankedFits.of(curve(new PowerLaw(8, 0.4)), FitOptions.DEFAULT)),
 				OptionalDouble.empty()).orElseThrow();
 		assertEquals(0, range.low());
+		assertTrue(range.high() < 1e-3 * curve(new PowerLaw(8, 0.4)).stress(0), range::toString);
 	}
 
 	@Test
@@ -90,6 +91,7 @@ class RampsAndTemperaturesTest {
 			assertEquals(8, ((PowerLaw) law.at(40)).consistency(), 1e-6);
 			assertEquals(0.4, ((PowerLaw) law.at(33)).flowIndex(), 1e-9);
 			assertTrue(law.lines().get(0).interval().known());
+			assertEquals(0, law.worst(), 1e-6);
 			assertEquals(0, law.outside(20));
 			assertEquals(5, law.outside(15));
 			assertEquals(2, law.outside(62));
@@ -104,6 +106,9 @@ class RampsAndTemperaturesTest {
 		assertEquals(0.40, ((PowerLaw) law.at(20)).flowIndex(), 1e-9);
 		assertEquals(0.40, ((PowerLaw) law.at(50)).flowIndex(), 1e-9);
 		assertFalse(law.lines().get(0).interval().known(), "two temperatures leave nothing to judge by");
+		// the common index turns each curve by 0.02 of a decade in a decade; at the ends, 1.5 decades off, by about 8 %
+		assertTrue(law.worst() > 0.05 && law.worst() < 0.12, "worst " + law.worst());
+		assertTrue(law.rmsRelative() > 0.02 && law.rmsRelative() < law.worst(), "rms " + law.rmsRelative());
 	}
 
 	@Test

@@ -99,10 +99,12 @@ class RankedFitsTest {
 
 	@Test
 	void aFallingCurveIsDescribedByNone() {
-		RankedFits fits = ranked(FlowCurve.of(new double[] { 1, 10, 100, 1000 }, new double[] { 9, 5, 2, 1 }));
-		ModelFit newtonian = fits.recommended().orElseThrow();
-		assertTrue(newtonian.doubtful(), "no model falls: " + newtonian);
+		RankedFits fits = ranked(noisy(rate -> 9 * Math.pow(rate, -0.25), rates(1, 1000, 21)));
+		ModelFit first = fits.recommended().orElseThrow();
+		assertTrue(first.doubtful(), "no model falls: " + first);
+		assertTrue(first.warnings().stream().anyMatch(w -> w.startsWith("misses the points by ")), first.warnings()::toString);
 		assertTrue(fits.attempt(ModelKind.POWER_LAW).notes().get(0).startsWith("does not describe this curve: the best flow_index = -"));
+		assertFalse(ranked(noisy(rate -> 9 * rate, rates(1, 1000, 21))).recommended().orElseThrow().doubtful());
 	}
 
 	@Test

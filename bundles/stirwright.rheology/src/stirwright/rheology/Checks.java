@@ -7,7 +7,7 @@ final class Checks {
 	 * Largest flow index of the power law and its relatives. A guard against swapped columns, wide enough for
 	 * shear-thickening suspensions; common practice, no source.
 	 */
-	private static final double MAX_FLOW_INDEX = 2;
+	static final double MAX_FLOW_INDEX = 2;
 
 	private Checks() {
 	}

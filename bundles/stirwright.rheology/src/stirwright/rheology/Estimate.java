@@ -7,7 +7,8 @@ package stirwright.rheology;
  * @param value         in the parameter's unit
  * @param standardError in the same unit, by linearising the model at its best place; NaN where the points do not give it,
  *                      and for a parameter that is held at its limit
- * @param interval      of 95 %, for this parameter alone
+ * @param interval      of 95 %, for this parameter alone. Under the relative objective the upper end of what is proportional
+ *                      to a stress is moved up by twice the mean square deviation, by which such a fit is too low
  * @param joint         of 95 %, for all parameters of the model at once (Scheffé), by linearising; NONE where
  *                      {@code standardError} is NaN
  * @param method        where {@code interval} comes from

@@ -18,8 +18,8 @@ public record FitOptions(Objective objective, boolean robust) {
 		Objects.requireNonNull(objective, "objective");
 	}
 
-	/** What was done, for reading: "relative" or "relative, robust". */
+	/** What was done, for reading: "relative error" or "relative error, robust". */
 	public String words() {
-		return objective.name().toLowerCase(Locale.ROOT).replace('_', ' ') + (robust ? ", robust" : "");
+		return objective.name().toLowerCase(Locale.ROOT).replace('_', ' ') + " error" + (robust ? ", robust" : "");
 	}
 }

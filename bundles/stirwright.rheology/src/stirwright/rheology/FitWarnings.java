@@ -12,6 +12,7 @@ final class FitWarnings {
 	private static final double PLATEAU_REACHED = 0.9;
 	private static final double HARDLY_APART = 0.99;
 	private static final int ENOUGH_FOR_RUNS = 10;
+	private static final int ENOUGH_FOR_ROBUST = 15;
 
 	/** Of a standard normal variable; one in forty falls below by chance. */
 	private static final double FEW_RUNS = -1.96;
@@ -55,6 +56,12 @@ final class FitWarnings {
 		}
 		if (fit.points() <= fit.estimates().size()) {
 			warnings.add("as many parameters as points: no interval can be given");
+		}
+		if (!fit.describes()) {
+			warnings.add(String.format(Locale.ROOT, "misses the points by %.0f %% (root mean square)", 100 * fit.rmsRelative()));
+		}
+		if (fit.options().robust() && fit.points() < ENOUGH_FOR_ROBUST) {
+			warnings.add("robust intervals of fewer than " + ENOUGH_FOR_ROBUST + " points are too narrow");
 		}
 	}
 

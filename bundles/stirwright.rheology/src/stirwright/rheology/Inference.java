@@ -23,7 +23,7 @@ final class Inference {
 
 	private static final int MOST_RESTARTS = 3;
 
-	private static final int MANY = 2000;
+	private static final int MANY = 500;
 
 	/** Of the logarithm of a factor: e^7 is about a thousand. */
 	private static final double HOPELESS = 7;
@@ -53,7 +53,8 @@ final class Inference {
 		this.place = place;
 		// A factor at the end of the world is no limit of the model, but one that the points do not give.
 		int[] loose = IntStream.range(0, scales.length).filter(j -> !place.held()[j] || scales[j] == Scale.LOG).toArray();
-		this.degreesOfFreedom = points.size() - loose.length;
+		// With no more points than parameters one at its limit frees no point for a judgement.
+		this.degreesOfFreedom = points.size() > scales.length ? points.size() - loose.length : 0;
 		LeastSquares.Minimum here = search.evaluate(place.at());
 		this.meanSquare = meanSquare(here);
 		this.all = scaled(LeastSquares.inverseNormal(unweighted(here.jacobian())), IntStream.range(0, scales.length).toArray());
@@ -72,7 +73,7 @@ final class Inference {
 			List<Estimate> estimates = inference.estimates(profile);
 			if (profile.lowerPlace() == null || i == MOST_RESTARTS) {
 				return new ModelFit(kind, inference.model(), curve, options, place, points.factors(), inference.free,
-						inference.single, estimates);
+						inference.single, inference.pull(), estimates);
 			}
 			place = search.from(profile.lowerPlace().at(), -1);
 		}
@@ -137,8 +138,9 @@ final class Inference {
 			double at = place.at()[j];
 			boolean held = place.held()[j] && scales[j] != Scale.LOG;
 			double error = held || degreesOfFreedom == 0 ? Double.NaN : Math.sqrt(free[j][j]);
-			Interval jointly = linear(j, joint * error);
-			Interval alone = byProfile ? profiled(profile, j) : linear(j, single * error);
+			double reach = held && degreesOfFreedom > 0 ? Math.sqrt(all[j][j]) : error;
+			Interval jointly = widened(j, linear(j, joint * error));
+			Interval alone = widened(j, byProfile ? profiled(profile, j) : linear(j, single * reach));
 			Method method = Double.isNaN(alone.low()) && Double.isNaN(alone.high()) ? Method.NONE
 					: byProfile ? Method.PROFILE : Method.LINEAR;
 			estimates.add(new Estimate(kind.parameters().get(j), scales[j].parameter(at), scales[j].slope(at) * error,
@@ -159,18 +161,42 @@ final class Inference {
 		return worth;
 	}
 
+	/**
+	 * Deviations relative to the measured stress pull the fitted one down by twice their mean square: with y = f (1 + e) the
+	 * least sum of (g/y - 1)^2 has g = f (1 - 2 E e^2) to second order. All that is proportional to a stress shares that factor,
+	 * so that its upper end is moved by it; the lower one stays, since the estimate is not moved.
+	 */
+	private Interval widened(int j, Interval interval) {
+		boolean ofStress = !kind.parameters().get(j).equals(ModelParameters.FLOW_INDEX)
+				&& !kind.parameters().get(j).equals(ModelParameters.TIME_CONSTANT);
+		return ofStress ? new Interval(interval.low(), interval.high() * pull()) : interval;
+	}
+
+	private double pull() {
+		return options.objective() == Objective.RELATIVE ? 1 + 2 * meanSquare : 1;
+	}
+
 	private Interval linear(int j, double distance) {
 		if (Double.isNaN(distance)) {
 			return Interval.NONE;
 		}
 		double at = place.at()[j];
-		return new Interval(end(j, Math.max(at - distance, shape.lower(j))), end(j, Math.min(at + distance, shape.upper(j))));
+		return limited(j, new Interval(end(j, Math.max(at - distance, shape.lower(j))), end(j, Math.min(at + distance, shape.upper(j)))));
 	}
 
 	private Interval profiled(Profile profile, int j) {
 		double low = profile.end(j, -1, single);
 		double high = profile.lowerPlace() == null ? profile.end(j, 1, single) : Double.NaN;
-		return new Interval(end(j, low), end(j, high));
+		return limited(j, new Interval(end(j, low), end(j, high)));
+	}
+
+	/** A flow index is between 0 and 2; one that may be anything is not given. */
+	private Interval limited(int j, Interval interval) {
+		if (!kind.parameters().get(j).equals(ModelParameters.FLOW_INDEX)) {
+			return interval;
+		}
+		return interval.low() < 0 && interval.high() > Checks.MAX_FLOW_INDEX ? Interval.NONE
+				: new Interval(Math.max(interval.low(), 0), Math.min(interval.high(), Checks.MAX_FLOW_INDEX));
 	}
 
 	/** A coordinate's parameter; NaN where the interval does not end. */

@@ -12,6 +12,8 @@ public final class ModelFit {
 	/** A root mean square deviation below this share of the measured values is no better than another: no instrument tells. */
 	private static final double EQUALLY_GOOD = 1e-6;
 
+	private static final double DESCRIBES = 0.10;
+
 	private final ModelKind kind;
 	private final FluidModel model;
 	private final FlowCurve curve;
@@ -22,11 +24,12 @@ public final class ModelFit {
 	private final double[] factors;
 	private final double[][] covariance;
 	private final double level;
+	private final double pull;
 	private final List<Estimate> estimates;
 	private final List<String> warnings;
 
 	ModelFit(ModelKind kind, FluidModel model, FlowCurve curve, FitOptions options, Search.Place place, double[] factors,
-			double[][] covariance, double level, List<Estimate> estimates) {
+			double[][] covariance, double level, double pull, List<Estimate> estimates) {
 		this.kind = kind;
 		this.model = model;
 		this.curve = curve;
@@ -37,6 +40,7 @@ public final class ModelFit {
 		this.factors = factors;
 		this.covariance = covariance;
 		this.level = level;
+		this.pull = pull;
 		this.estimates = List.copyOf(estimates);
 		this.warnings = FitWarnings.of(this);
 	}
@@ -89,9 +93,17 @@ public final class ModelFit {
 		return estimates.stream().allMatch(FitWarnings::given);
 	}
 
-	/** Whether nothing should hang on it: not all is given, or the points are fewer than six or span less than a decade. */
+	/**
+	 * Whether nothing should hang on it: not all is given, the points are fewer than six or span less than a decade, or the
+	 * model misses them by more than a tenth.
+	 */
 	public boolean doubtful() {
-		return !determined() || FitWarnings.fewPoints(this);
+		return !determined() || FitWarnings.fewPoints(this) || !describes();
+	}
+
+	/** Whether the root mean square of the relative deviations is at most 0.1; our choice, no source. */
+	public boolean describes() {
+		return rmsRelative <= DESCRIBES;
 	}
 
 	/** What the objective sums, over points that count in full: Pa^2, Pa, or dimensionless. */
@@ -168,7 +180,7 @@ public final class ModelFit {
 		}
 		double relative = level * Math.sqrt(variance) / stress;
 		return relative >= 0 && Double.isFinite(relative)
-				? new Interval(stress * Math.exp(-relative), stress * Math.exp(relative)) : Interval.NONE;
+				? new Interval(stress * Math.exp(-relative), stress * pull * Math.exp(relative)) : Interval.NONE;
 	}
 
 	/**

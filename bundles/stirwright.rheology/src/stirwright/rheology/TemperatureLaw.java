@@ -3,6 +3,7 @@ package stirwright.rheology;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 
@@ -28,6 +29,8 @@ public final class TemperatureLaw {
 	private final double lowest;
 	private final double highest;
 	private final List<Line> lines;
+	private final double rmsRelative;
+	private final double worst;
 
 	/**
 	 * A measured curve.
@@ -45,9 +48,8 @@ public final class TemperatureLaw {
 	 * @param activationEnergy E in J/mol; 0 for a flow index
 	 * @param interval         of E, 95 %; NONE with two temperatures
 	 * @param intercept        a, for the parameter in its unit; the value itself for a flow index
-	 * @param worst            largest relative deviation of the law from a temperature's own value
 	 */
-	public record Line(Parameter parameter, double activationEnergy, Interval interval, double intercept, double worst) {
+	public record Line(Parameter parameter, double activationEnergy, Interval interval, double intercept) {
 
 		private double at(double kelvin) {
 			return activationEnergy == 0 && parameter.equals(ModelParameters.FLOW_INDEX) ? intercept
@@ -55,11 +57,25 @@ public final class TemperatureLaw {
 		}
 	}
 
-	private TemperatureLaw(ModelKind kind, double lowest, double highest, List<Line> lines) {
+	private TemperatureLaw(ModelKind kind, TreeMap<Double, FlowCurve> curves, List<Line> lines) {
 		this.kind = kind;
-		this.lowest = lowest;
-		this.highest = highest;
+		this.lowest = curves.firstKey();
+		this.highest = curves.lastKey();
 		this.lines = List.copyOf(lines);
+		double sum = 0;
+		double most = 0;
+		int points = 0;
+		for (Map.Entry<Double, FlowCurve> one : curves.entrySet()) {
+			FluidModel model = at(one.getKey());
+			for (int i = 0; i < one.getValue().size(); i++) {
+				double miss = model.stress(one.getValue().shearRate(i)) / one.getValue().stress(i) - 1;
+				sum += miss * miss;
+				most = Math.max(most, Math.abs(miss));
+				points++;
+			}
+		}
+		this.rmsRelative = Math.sqrt(sum / points);
+		this.worst = most;
 	}
 
 	/**
@@ -96,10 +112,10 @@ public final class TemperatureLaw {
 			if (Arrays.stream(ofParameter).anyMatch(v -> v <= 0)) {
 				return Optional.empty();
 			}
-			lines.add(j == index ? new Line(kind.parameters().get(j), 0, Interval.NONE, ofParameter[0], 0)
+			lines.add(j == index ? new Line(kind.parameters().get(j), 0, Interval.NONE, ofParameter[0])
 					: line(kind.parameters().get(j), inverse, ofParameter));
 		}
-		return Optional.of(new TemperatureLaw(kind, curves.firstKey(), curves.lastKey(), lines));
+		return Optional.of(new TemperatureLaw(kind, curves, lines));
 	}
 
 	private static Line line(Parameter parameter, double[] inverse, double[] values) {
@@ -108,16 +124,12 @@ public final class TemperatureLaw {
 			line.addData(inverse[i], Math.log(values[i]));
 		}
 		double energy = line.getSlope();
-		double worst = 0;
-		for (int i = 0; i < values.length; i++) {
-			worst = Math.max(worst, Math.abs(Math.exp(line.predict(inverse[i])) / values[i] - 1));
-		}
 		Interval interval = Interval.NONE;
 		if (values.length > 2) {
 			double half = new TDistribution(null, values.length - 2).inverseCumulativeProbability(0.975) * line.getSlopeStdErr();
 			interval = new Interval(energy - half, energy + half);
 		}
-		return new Line(parameter, energy, interval, line.getIntercept(), worst);
+		return new Line(parameter, energy, interval, line.getIntercept());
 	}
 
 	/** The kind of model. */
@@ -138,6 +150,16 @@ public final class TemperatureLaw {
 	/** A line for each parameter, in the order of the model's parameters. */
 	public List<Line> lines() {
 		return lines;
+	}
+
+	/** Root mean square of (law - measured) / measured over the stresses of all temperatures. */
+	public double rmsRelative() {
+		return rmsRelative;
+	}
+
+	/** The largest of these deviations. */
+	public double worst() {
+		return worst;
 	}
 
 	/** How many K a temperature in deg C lies outside the measured ones; 0 within. */

@@ -20,9 +20,6 @@ public record YieldRange(double low, double high, List<Source> sources) {
 	/** The name of a source that is no fit. */
 	public static final String STATIC = "static";
 
-	/** A model whose relative deviation is larger on average does not tell a yield stress; our choice, no source. */
-	private static final double DESCRIBES = 0.10;
-
 	public YieldRange {
 		sources = List.copyOf(sources);
 	}
@@ -64,8 +61,8 @@ public record YieldRange(double low, double high, List<Source> sources) {
 
 	private static Source source(String curve, ModelFit fit) {
 		Estimate estimate = fit.estimate(ModelParameters.YIELD_STRESS.name());
-		boolean counted = fit.rmsRelative() <= DESCRIBES;
-		String why = counted ? "" : String.format(Locale.ROOT, "misses the curve by %.0f %% on average", 100 * fit.rmsRelative());
+		boolean counted = fit.describes();
+		String why = counted ? "" : String.format(Locale.ROOT, "misses the curve by %.0f %% (root mean square)", 100 * fit.rmsRelative());
 		return new Source(fit.kind().id() + ", " + curve, estimate.value(), estimate.interval(), counted, why);
 	}
 

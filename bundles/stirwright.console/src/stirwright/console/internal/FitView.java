@@ -35,7 +35,7 @@ final class FitView {
         Columns.appendWrapped(text, "", fits.curve().label() + ": " + fits.curve().points().size()
                 + " points, shear rate " + Figures.show(fits.curve().points().window().min()) + " to "
                 + Figures.show(fits.curve().points().window().max()) + " 1/s; " + fits.fits().options().words()
-                + " error, intervals of 95 %", CaseView.WIDTH);
+                + ", intervals of 95 %", CaseView.WIDTH);
         Columns.appendWrapped(text, "  ", fits.fits().reason(), CaseView.WIDTH);
         Columns table = new Columns("rllrlrl");
         for (RankedFits.Attempt attempt : fits.fits().attempts()) {

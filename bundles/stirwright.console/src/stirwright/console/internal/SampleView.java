@@ -56,19 +56,19 @@ final class SampleView {
     }
 
     private static List<String> law(TemperatureLaw law) {
-        List<String> lines = new ArrayList<>(List.of(law.kind().id() + " from " + Figures.show(law.lowest()) + " to "
-                + Figures.show(law.highest()) + " deg C, one flow index, all else by Arrhenius's law:"));
+        List<String> lines = new ArrayList<>(List.of(String.format(Locale.ROOT, "%s from %s to %s deg C, one flow index, all else by"
+                + " Arrhenius's law; misses the stresses by %.1f %% (root mean square), at most by %.0f %%:", law.kind().id(),
+                Figures.show(law.lowest()), Figures.show(law.highest()), 100 * law.rmsRelative(), 100 * law.worst())));
         for (TemperatureLaw.Line line : law.lines()) {
             lines.add("  " + line.parameter().title() + (line.parameter().name().equals("flow_index")
                     ? " " + Figures.show(line.intercept())
-                    : String.format(Locale.ROOT, ": activation energy %s kJ/mol%s, within %.1f %% of each temperature's own value",
-                            Figures.show(line.activationEnergy() / 1000), interval(line), 100 * line.worst())));
+                    : ": activation energy " + Figures.show(line.activationEnergy() / 1000) + " kJ/mol" + interval(line)));
         }
         return lines;
     }
 
     private static String interval(TemperatureLaw.Line line) {
         return line.interval().known() ? " (" + Figures.show(line.interval().low() / 1000) + " to "
-                + Figures.show(line.interval().high() / 1000) + ")" : "";
+                + Figures.show(line.interval().high() / 1000) + ")" : ", without an interval: two temperatures leave nothing to judge by";
     }
 }

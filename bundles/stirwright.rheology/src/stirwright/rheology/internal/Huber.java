@@ -19,20 +19,30 @@ public record Huber(double[] factors, double scatter) {
 
 	private static final int MOST_ROUNDS = 30;
 	private static final double SETTLED = 1e-4;
+	private static final int ENOUGH = 1000;
 
-	/** Null where the shape has no start. */
+	/** Null where the shape has no start. Of very many points some settle where the model lies, and all are weighed by it. */
 	public static Huber of(Shape shape, Points points, Measure measure) {
+		Points few = points.thinned(ENOUGH);
+		Search.Place place = settled(shape, few, measure);
+		if (place == null) {
+			return null;
+		}
+		double[] deviations = new Search(shape, points, measure).evaluate(place.at()).deviations();
+		double scatter = scatter(deviations);
+		return new Huber(factors(deviations, scatter), scatter);
+	}
+
+	private static Search.Place settled(Shape shape, Points points, Measure measure) {
 		double[] factors = points.factors();
 		Search.Place place = new Search(shape, points, measure).best();
 		if (place == null) {
 			return null;
 		}
 		Search plain = new Search(shape, points, measure);
-		double scatter = 0;
 		for (int round = 0; round < MOST_ROUNDS; round++) {
 			double[] deviations = plain.evaluate(place.at()).deviations();
-			scatter = scatter(deviations);
-			double[] next = factors(deviations, scatter);
+			double[] next = factors(deviations, scatter(deviations));
 			double change = 0;
 			for (int i = 0; i < next.length; i++) {
 				change = Math.max(change, Math.abs(next[i] - factors[i]));
@@ -43,7 +53,7 @@ public record Huber(double[] factors, double scatter) {
 			}
 			place = new Search(shape, points.with(factors), measure).from(place.at(), -1);
 		}
-		return new Huber(factors, scatter);
+		return place;
 	}
 
 	private static double scatter(double[] deviations) {

@@ -64,7 +64,6 @@ public final class Profile {
 				lower = there;
 				return Double.NaN;
 			}
-			follow = there.at();
 			double height = Math.sqrt(Math.max(0, there.sum() - best.sum()) / unit);
 			if (Math.abs(height - level) <= TOLERANCE * level) {
 				return centre + side * distance;
@@ -78,6 +77,8 @@ public final class Profile {
 				}
 				near = distance;
 				nearHeight = height;
+				// Only from here: beyond the end the others may have gone to where nothing leads back.
+				follow = there.at();
 			} else {
 				far = distance;
 				farHeight = height;
@@ -85,7 +86,7 @@ public final class Profile {
 			double bent = i == 0 && error > 0 ? bent(distance, height, error, level) : Double.NaN;
 			reach = bent > near && !(bent >= far) ? bent : next(near, nearHeight, far, farHeight, level);
 		}
-		return centre + side * (near + reach) / 2;
+		return Double.isNaN(far) ? side * Double.POSITIVE_INFINITY : centre + side * (near + far) / 2;
 	}
 
 	/** Where the parabola through the first place, with the slope of the linearised model where it starts, reaches the level. */

@@ -66,7 +66,7 @@ public final class Search {
 			held[j] = j != fixed && (at[j] == shape.lower(j) || at[j] == shape.upper(j));
 		}
 		boolean[] released = new boolean[size];
-		Place best = null;
+		Place best = new Place(at.clone(), held.clone(), evaluate(at).sum());
 		for (int round = 0; round < 2 * size + 1; round++) {
 			LeastSquares.Minimum next = LeastSquares.roughly(free(at, held, fixed), pick(at, held, fixed));
 			double[] there = spread(next.at(), at, held, fixed);
@@ -74,14 +74,14 @@ public final class Search {
 				continue;
 			}
 			at = there;
-			if (best == null || next.sum() < best.sum()) {
+			if (next.sum() < best.sum()) {
 				best = new Place(at.clone(), held.clone(), next.sum());
 			}
 			if (!release(at, held, released)) {
 				break;
 			}
 		}
-		return best == null ? new Place(at, held, evaluate(at).sum()) : best;
+		return best;
 	}
 
 	private Place toTheLastDigit(Place place, int fixed) {

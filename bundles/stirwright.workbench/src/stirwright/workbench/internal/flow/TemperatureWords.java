@@ -17,12 +17,13 @@ final class TemperatureWords {
     static List<String> of(TemperatureLaw law) {
         List<String> lines = new ArrayList<>();
         lines.add(Messages.bind(FlowWords.Law_range,
-                new Object[] {ModelTitles.of(law.kind()), Figures.show(law.lowest()), Figures.show(law.highest())}));
+                new Object[] {ModelTitles.of(law.kind()), Figures.show(law.lowest()), Figures.show(law.highest()),
+                    String.format(Locale.ROOT, "%.1f", 100 * law.rmsRelative()), String.format(Locale.ROOT, "%.0f", 100 * law.worst())}));
         for (TemperatureLaw.Line line : law.lines()) {
-            lines.add(line.activationEnergy() == 0
+            lines.add(line.parameter().name().equals("flow_index")
                     ? Messages.bind(FlowWords.Law_common, line.parameter().title(), Figures.show(line.intercept()))
                     : Messages.bind(FlowWords.Law_energy, new Object[] {line.parameter().title(), Figures.show(line.activationEnergy() / KILO),
-                        interval(line), String.format(Locale.ROOT, "%.0f", 100 * line.worst())}));
+                        interval(line)}));
         }
         return lines;
     }
