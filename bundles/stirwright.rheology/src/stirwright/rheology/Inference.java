@@ -25,6 +25,9 @@ final class Inference {
 
 	private static final int MANY = 500;
 
+	/** Beyond a scatter of a third deviations are no noise, and the second order of anything says nothing. */
+	private static final double MOST_PULL = 0.25;
+
 	/** Of the logarithm of a factor: e^7 is about a thousand. */
 	private static final double HOPELESS = 7;
 
@@ -173,7 +176,7 @@ final class Inference {
 	}
 
 	private double pull() {
-		return options.objective() == Objective.RELATIVE ? 1 + 2 * meanSquare : 1;
+		return options.objective() == Objective.RELATIVE ? 1 + Math.min(2 * meanSquare, MOST_PULL) : 1;
 	}
 
 	private Interval linear(int j, double distance) {
