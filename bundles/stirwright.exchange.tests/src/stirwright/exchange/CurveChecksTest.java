@@ -86,7 +86,7 @@ class CurveChecksTest {
 
     @Test
     void everythingCanBeOverruled() {
-        CurveSource source = CurveSource.clipboard("a,b;c,d;e\n1,0;2,5;7\n10,0;7,5;8\n100,0;20,5;9\n");
+        CurveSource source = CurveSource.clipboard("shear stress,b;shear rate,d;e\n1,0;2,5;7\n10,0;7,5;8\n100,0;20,5;9\n");
         CurveImport read = CurveImport.of(source, ImportChoice.DETECT
                 .with(new ColumnChoice("", 2, Optional.of(CurveQuantity.SHEAR_RATE), "1/min"))
                 .with(new ColumnChoice("", 1, Optional.of(CurveQuantity.SHEAR_STRESS), "kPa"))

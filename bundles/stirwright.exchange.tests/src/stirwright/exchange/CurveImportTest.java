@@ -47,7 +47,7 @@ class CurveImportTest {
         "0.5 2.5\n10 7.25\n100 20\n",
         "shear_rate_1_s   shear_stress_Pa\n0,5   2,5\n10   7,25\n100    20\n",
         "\"0,5\",\"2,5\"\n10,\"7,25\"\n100,20\n",
-        "\uFEFFpoint,x,y\nfirst,0.5,2.5\nsecond,10,7.25\nthird,100,20\n",
+        "\uFEFFpoint,rate,stress\nfirst,0.5,2.5\nsecond,10,7.25\nthird,100,20\n",
         "100,20\n0.5,2.5\n10,7.25\n",
         "Shear rate;Viscosity\n1/s;Pa s\n0.5;5\n10;0.725\n100;0.2\n",
         "shear rate in 1/s|shear stress in kPa\n0.5|0.0025\n10|0.00725\n100|0.02\n",
@@ -64,10 +64,10 @@ class CurveImportTest {
 
     @Test
     void whatWasFoundIsReported() {
-        String report = String.join("\n", read("a;b;c\nx;0,5;2,5\nx;1;2\nx;2;3\n").report());
+        String report = String.join("\n", read("a;shear rate;stress\nx;0,5;2,5\nx;1;2\nx;2;3\n").report());
         assertTrue(report.contains("ketchup 7.txt: separator: semicolon"), report);
         assertTrue(report.contains("decimal comma"), report);
-        assertTrue(report.contains("column 2 'b': shear rate in 1/s"), report);
+        assertTrue(report.contains("column 2 'shear rate': shear rate in 1/s"), report);
         assertTrue(report.contains("Pa is assumed"), report);
     }
 
@@ -113,8 +113,8 @@ class CurveImportTest {
         assertUnusable(() -> read("a,b\nx,1\ny,2\n").requireCurves(), "two numbers");
         assertUnusable(() -> read("shear_rate_1_s,temperature\n1,2\n2,3\n3,4\n").requireCurves(), "shear stress", "shear_stress_Pa");
         assertUnusable(() -> read("speed_rpm,viscosity_cP\n1,2\n2,3\n3,4\n").requireCurves(), "shear rate", "geometry");
-        assertUnusable(() -> read("x;y\n0,5;1\n1.5;2\n2;3\n").requireCurves(), "line 2", "'0,5'", "line 3", "'1.5'");
-        CurveImport chosen = CurveImport.of(CurveSource.clipboard("x;y\n0,5;1\n1.5;2\n2;3\n3;4\n"),
+        assertUnusable(() -> read("rate;stress\n0,5;1\n1.5;2\n2;3\n").requireCurves(), "line 2", "'0,5'", "line 3", "'1.5'");
+        CurveImport chosen = CurveImport.of(CurveSource.clipboard("rate;stress\n0,5;1\n1.5;2\n2;3\n3;4\n"),
                 ImportChoice.DETECT.withDecimalSign(Optional.of(DecimalSign.COMMA)));
         assertEquals(3, chosen.requireCurves().get(0).points().size());
     }
@@ -128,8 +128,29 @@ class CurveImportTest {
 
     @Test
     void thousandsSignsAreAskedFor() {
-        String messages = read("shear rate;shear stress\n100;1,234\n200;2,345\n300;3,456\n").messages().toString();
-        assertTrue(messages.contains("three digits") && messages.contains("'1,234'"), messages);
+        assertUnusable(() -> read("shear rate;shear stress\n100;1,234\n200;2,345\n300;3,456\n").requireCurves(), "three digits", "'1,234'", "choose");
+        assertUnusable(() -> read("shear rate;viscosity mPas\n1;1.860\n2;1.420\n5;980\n10;745\n").requireCurves(), "three digits", "'1.860'");
+        assertUnusable(() -> read("rate,viscosity cP\n1,\"16,000\"\n2,\"8,732\"\n5,\"4,051\"\n").requireCurves(), "three digits", "'16,000'");
+        CurveImport chosen = CurveImport.of(CurveSource.clipboard("rate;stress\n100;1,234\n200;2,345\n300;3,456\n"),
+                ImportChoice.DETECT.withDecimalSign(Optional.of(DecimalSign.COMMA)));
+        assertArrayEquals(new double[] {1.234, 2.345, 3.456}, chosen.requireCurves().get(0).points().stresses());
+    }
+
+    @Test
+    void oneNumberThatIsNoThousandsSettlesTheSign() {
+        for (String settled : new String[] {"rate;stress\n0.5;1.234\n2;2.345\n3;3.456\n", "rate;stress;x\n1;1.234;0.1\n2;2.345;1\n3;3.456;2\n"}) {
+            assertArrayEquals(new double[] {1.234, 2.345, 3.456}, read(settled).requireCurves().get(0).points().stresses());
+            assertEquals(1, read(settled).curves().get(0).measurement().warnings().stream().filter(w -> !w.contains("decade")).count());
+        }
+        CurveImport commas = read("rate,stress\n1,1.234\n10,2.345\n100,3.456\n");
+        assertArrayEquals(new double[] {1.234, 2.345, 3.456}, commas.requireCurves().get(0).points().stresses());
+        assertTrue(commas.curves().get(0).measurement().warnings().toString().contains("commas stand between"), commas.messages().toString());
+    }
+
+    @Test
+    void aDoubtOfTheSignReachesTheCurve() {
+        CurveImport read = read("rate;stress\n0.5;1.25\n2;2.5\n3;3.5\n4;4,5\n");
+        assertTrue(read.requireCurves().get(0).measurement().warnings().toString().contains("'4,5'"), read.messages().toString());
     }
 
     @Test

@@ -1,8 +1,13 @@
 package stirwright.exchange.internal.curves;
 
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import stirwright.exchange.CurveQuantity;
@@ -18,7 +23,11 @@ record HeaderCell(CurveQuantity quantity, String unit, String label) {
     private static final Pattern BRACKETS = Pattern.compile("[\\[({<]([^\\])}>]*)[\\])}>]");
     private static final Pattern LEAD = Pattern.compile("^[\\s_,:/.-]*(?:(?:in|en|em)\\s+)?");
     private static final Pattern LOOKS_LIKE_A_UNIT = Pattern.compile(".*[/%^\u00B0\u00B7].*|.*\\p{L}[-\u2212]?[0-9].*|\\[.*");
-    private static final Pattern REMARK = Pattern.compile("[\\p{L} ]{4,}");
+    /** A factor in a name may have been applied, or be still to apply. */
+    private static final Pattern MULTIPLE = Pattern.compile("[x\u00D7*\u00B7\u00F7]\\s*1(?:0+\\b|[eE][-+]?[0-9]|0[\\^\u207B\u00B9\u00B2\u00B3\u2070-\u2079])"
+            + "|\\b10\\s*(?:\\^|[\u207B\u00B9\u00B2\u00B3\u2070-\u2079])\\S*");
+    private static final Pattern AT_TEMPERATURE = Pattern.compile(
+            "(?:(?:\\b(?:at|bei|a)|@|,)\\s*)?(?<![\\p{L}0-9^/*.-])([-+]?[0-9]+(?:[.,][0-9]+)?\\s*(?:[\u00B0\u00BA\u02DA]|deg\\.?)\\s*[CF]\\b)");
     private static final int LONGEST = 120;
 
     /** Empty when the text names none of the quantities. */
@@ -66,19 +75,101 @@ record HeaderCell(CurveQuantity quantity, String unit, String label) {
         if (quantity == CurveQuantity.TORQUE && (before + after).indexOf('%') >= 0) {
             return new HeaderCell(CurveQuantity.TORQUE_PERCENT, "%", "");
         }
+        Matcher at = main(quantity) ? AT_TEMPERATURE.matcher(after) : null;
+        boolean tempered = at != null && at.find();
+        String rest = tempered ? after.substring(0, at.start()) + " " + after.substring(at.end()) : after;
+        String bare = BRACKETS.matcher(rest).replaceAll(" ");
+        HeaderCell behind = trailing(quantity, before, bare);
+        HeaderCell found = bracketed(quantity, before, rest, bare, behind);
+        return tempered ? new HeaderCell(quantity, found.unit(), label(found.label(), at.group(1))) : found;
+    }
+
+    /** A known unit in any bracket, else one behind the name; whatever might be another unit is named, so that it is asked for. */
+    private static HeaderCell bracketed(CurveQuantity quantity, String before, String after, String bare, HeaderCell behind) {
+        Matcher times = MULTIPLE.matcher(before + " " + bare);
+        if (times.find()) {
+            return new HeaderCell(quantity, times.group().strip(), label(before, ""));
+        }
+        Set<String> known = new LinkedHashSet<>();
+        Set<UnitScale> scales = new HashSet<>();
+        if (!behind.unit().isEmpty() && UnitWords.find(quantity, behind.unit()).isPresent()) {
+            known.add(behind.unit());
+            scales.add(UnitWords.find(quantity, behind.unit()).get());
+        }
+        boolean behindKnown = !known.isEmpty();
+        String strange = "";
         Matcher brackets = BRACKETS.matcher(after);
         while (brackets.find()) {
             String inside = brackets.group(1).strip();
-            if (UnitWords.find(quantity, inside).isPresent() || !remark(brackets.group(), inside)) {
-                return new HeaderCell(quantity, inside, label(before, brackets.replaceAll(" ")));
+            Optional<UnitScale> scale = UnitWords.find(quantity, inside);
+            if (scale.isPresent()) {
+                known.add(inside);
+                scales.add(scale.get());
+            } else if (strange.isEmpty() && !remark(brackets.group(), inside)) {
+                strange = inside;
             }
         }
-        return trailing(quantity, before, after.replaceFirst("\\([^)]*\\)", " "));
+        if (scales.size() > 1) {
+            return new HeaderCell(quantity, String.join(" or ", known), label(before, ""));
+        }
+        if (behindKnown || known.isEmpty() && strange.isEmpty()) {
+            return behind;
+        }
+        return new HeaderCell(quantity, known.isEmpty() ? strange : known.iterator().next(), label(before, bare));
     }
 
-    /** Round brackets may hold a word of their own, square ones hold units. */
+    /**
+     * A name that is not known, told by its unit alone: one of a shear rate, a shear stress or a viscosity that nothing
+     * else has. Empty for all others, and for a unit that stands alone.
+     *
+     * @param below the unit in the row below; empty without
+     */
+    static Optional<HeaderCell> byUnit(String text, String below) {
+        if (text.isEmpty() || text.length() > LONGEST || read(text).isPresent()) {
+            return Optional.empty();
+        }
+        Folded folded = Folded.of(text);
+        if (folded.hasAny(HeaderWords.OTHER_THINGS) || folded.hasAny(HeaderWords.NOT_BY_UNIT)) {
+            return Optional.empty();
+        }
+        List<String> units = new ArrayList<>(List.of(below));
+        Matcher brackets = BRACKETS.matcher(text);
+        while (brackets.find()) {
+            if (named(text.substring(0, brackets.start()))) {
+                units.add(brackets.group(1).strip());
+            }
+        }
+        String bare = BRACKETS.matcher(text).replaceAll(" ");
+        for (int i = bare.indexOf(' '); i >= 0; i = bare.indexOf(' ', i + 1)) {
+            if (named(bare.substring(0, i))) {
+                units.add(LEAD.matcher(bare.substring(i)).replaceFirst("").strip());
+            }
+        }
+        if (MULTIPLE.matcher(bare).find() || !named(bare)) {
+            return Optional.empty();
+        }
+        for (String unit : units) {
+            Optional<CurveQuantity> quantity = UnitWords.telling(unit);
+            if (quantity.isPresent()) {
+                return Optional.of(new HeaderCell(quantity.get(), unit, ""));
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static boolean named(String text) {
+        return text.chars().anyMatch(Character::isLetter);
+    }
+
+    private static boolean main(CurveQuantity quantity) {
+        return quantity == CurveQuantity.SHEAR_RATE || quantity == CurveQuantity.SHEAR_STRESS || quantity == CurveQuantity.VISCOSITY;
+    }
+
+    /** Round brackets may hold a word of their own, from a list; square ones hold units. */
     private static boolean remark(String whole, String inside) {
-        return inside.isEmpty() || whole.startsWith("(") && REMARK.matcher(inside).matches();
+        String words = Folded.of(inside).words();
+        return words.isEmpty() && inside.chars().noneMatch(c -> c == '%' || c == '\u00B0')
+                || whole.startsWith("(") && Arrays.stream(words.split(" ")).allMatch(HeaderWords.REMARKS::contains);
     }
 
     /** "Viscosity cP", "Viskosität / mPa·s", "shear_rate_1_s", "Shear stress in Pa". */

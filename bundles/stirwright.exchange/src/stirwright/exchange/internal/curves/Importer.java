@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.stream.Stream;
 import stirwright.exchange.CurveBlock;
 import stirwright.exchange.CurveImport;
 import stirwright.exchange.CurvePoint;
@@ -42,7 +43,7 @@ public final class Importer {
         Sources sources = Sources.read(source, choice);
         findings.addAll(sources.findings());
         sort(sources);
-        SignVote vote = SignVote.of(stretches, choice);
+        SignVote vote = SignVote.of(stretches, choice, sources.separator());
         findings.add(vote.finding());
         vote.tie().ifPresent(messages::problem);
         vote.doubts().forEach(messages::warning);
@@ -52,12 +53,13 @@ public final class Importer {
         List<Part> parts = stretches.stream().flatMap(s -> Part.of(s, reader.read(s)).stream()).toList();
         List<CurveBlock> blocks = new Blocks(parts, choice, statuses).build(vote.tie().isEmpty());
         List<DroppedPoint> dropped = new ArrayList<>();
-        List<MeasuredCurve> curves = curves(parts, blocks, dropped);
+        List<MeasuredCurve> curves = curves(parts, blocks, dropped, vote.doubts());
         findings.add(new Finding(Topic.BLOCKS, blocks.size() + (blocks.size() == 1 ? " block, " : " blocks, ") + curves.size()
                 + " taken", "heads, numbers that start again, and turns of the shear rate part them", !choice.blocks().isEmpty()));
         layouts.forEach(layout -> {
             layout.problems().forEach(messages::problem);
             layout.notes().forEach(messages::warning);
+            layout.doubts().forEach(messages::warning);
         });
         messages.outside(rows);
         messages.blocks(blocks);
@@ -110,7 +112,7 @@ public final class Importer {
         stretches.addAll(sorter.stretches);
     }
 
-    private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<DroppedPoint> dropped) {
+    private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<DroppedPoint> dropped, List<String> doubts) {
         CurveNames names = new CurveNames(source.stem(), blocks.stream().filter(CurveBlock::taken).toList());
         List<MeasuredCurve> curves = new ArrayList<>();
         for (int i = 0; i < blocks.size(); i++) {
@@ -129,9 +131,15 @@ public final class Importer {
                         FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
                                 taken.stream().mapToDouble(CurvePoint::shearStress).toArray()),
                         new Measurement(source.name(), source.sha256(), Messages.name(block),
-                                parts.get(i).sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here, block.warnings())));
+                                parts.get(i).sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here,
+                                warnings(block, parts.get(i), doubts))));
             }
         }
         return curves;
+    }
+
+    /** What speaks against a block, and what is doubtful of its table or of the whole source. */
+    private static List<String> warnings(CurveBlock block, Part part, List<String> doubts) {
+        return Stream.of(block.warnings(), part.stretch().layout.doubts(), doubts).flatMap(List::stream).toList();
     }
 }

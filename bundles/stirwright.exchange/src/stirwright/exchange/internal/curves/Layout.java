@@ -9,6 +9,7 @@ import java.util.List;
  * @param groups one for each sample, all complete
  * @param width how many columns the row of names fills; 0 when any row may be wider
  * @param problems what cannot be read, a sentence each
- * @param notes what is doubtful, a sentence each
+ * @param notes what is not read and may be missed, a sentence each
+ * @param doubts what makes the curves themselves doubtful, a sentence each
  */
-record Layout(int line, List<Group> groups, int width, List<String> problems, List<String> notes) {}
+record Layout(int line, List<Group> groups, int width, List<String> problems, List<String> notes, List<String> doubts) {}

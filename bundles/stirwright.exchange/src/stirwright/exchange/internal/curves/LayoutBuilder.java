@@ -1,6 +1,7 @@
 package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.IdentityHashMap;
 import java.util.List;
@@ -52,6 +53,7 @@ final class LayoutBuilder {
             }
             last = names.cell(i).isEmpty() ? last : i + 1;
         }
+        byUnit(names, units, columns, above);
         List<Group> groups = new ArrayList<>();
         for (Group group : grouped(columns)) {
             if (group.complete()) {
@@ -60,7 +62,7 @@ final class LayoutBuilder {
                 problems.add(missing(names, group));
             }
         }
-        return new Layout(names.line(), List.copyOf(groups), last, List.copyOf(problems), List.copyOf(notes));
+        return new Layout(names.line(), List.copyOf(groups), last, List.copyOf(problems), List.copyOf(notes), List.of());
     }
 
     private Column column(String name, String unitBelow, int position) {
@@ -81,6 +83,32 @@ final class LayoutBuilder {
             labels.put(column, read.get().label());
         }
         return column;
+    }
+
+    /** What no name says, the unit of a column may say, if it is the only one. */
+    private void byUnit(SourceRow names, SourceRow units, List<Column> columns, SourceRow above) {
+        boolean rated = columns.stream().anyMatch(c -> c.quantity() == CurveQuantity.SHEAR_RATE);
+        boolean stressed = columns.stream().anyMatch(c -> isMain(c) && c.quantity() != CurveQuantity.SHEAR_RATE);
+        for (CurveQuantity quantity : List.of(CurveQuantity.SHEAR_RATE, CurveQuantity.SHEAR_STRESS, CurveQuantity.VISCOSITY)) {
+            List<Column> told = new ArrayList<>();
+            for (int i = 0; i < names.cells().size() && !(quantity == CurveQuantity.SHEAR_RATE ? rated : stressed); i++) {
+                int column = i + 1;
+                Optional<HeaderCell> cell = choice.columns().stream().anyMatch(c -> c.speaksOf(sheet, column)) ? Optional.empty()
+                        : headers.byUnit(names.cell(i), units == null ? "" : inside(units.cell(i)));
+                if (cell.isPresent() && cell.get().quantity() == quantity) {
+                    told.add(scaled(names.cell(i), quantity, cell.get().unit(), i, "no name says so, but no other unit is one of a "
+                            + quantity.words()));
+                }
+            }
+            if (told.size() == 1) {
+                labels.put(told.get(0), labelAbove(above, told.get(0).position()));
+                columns.add(told.get(0));
+            } else if (told.size() > 1) {
+                notes.add("several columns have a unit of a " + quantity.words() + " and no name that is known: "
+                        + String.join(", ", told.stream().map(Column::name).toList()) + "; choose the one that holds it");
+            }
+        }
+        columns.sort(Comparator.comparingInt(Column::position));
     }
 
     private Column scaled(String name, CurveQuantity named, String unit, int position, String reason) {

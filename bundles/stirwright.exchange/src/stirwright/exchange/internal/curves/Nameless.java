@@ -12,7 +12,8 @@ import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.SourceRow;
 
 /**
- * Tables whose columns have no names that are known: a shear rate and a stress are the first two that hold numbers.
+ * Tables whose columns have no names that are known. Without any words above the numbers, a shear rate and a stress are the
+ * first two columns that hold numbers; words that name neither are not overruled by where a column stands.
  *
  * @param problem why that cannot be said here; empty when it can
  */
@@ -33,20 +34,57 @@ record Nameless(SheetSorter sorter, boolean set, String problem) {
         }
         SetHeads heads = new SetHeads();
         boolean set = first > 0 && heads.read(filled.get(first - 1).row, true).isPresent();
-        WorkRow above = first == 0 || set ? null : filled.get(first - 1);
-        boolean headed = above != null && SheetSorter.noNumbers(above.row) && above.row.filled() > 1;
+        WorkRow above = set ? null : header(filled, first);
+        boolean headed = above != null;
         SourceRow names = headed ? above.row : new SourceRow(0, List.of(), null);
         SourceRow numbers = filled.get(first).row;
         if (!choice.columns().isEmpty()) {
             Layout chosen = new LayoutBuilder(sheet, choice, cells).build(names, null, null);
-            return sorted(sorter, chosen, headed ? above : null, set ? heads : null);
+            return sorted(sorter, chosen, above, set ? heads : null);
         }
-        if (separator == CurveSeparator.COMMA && !headed && numbers.cells().size() > 2 && noPoint(filled)) {
+        if (headed) {
+            Layout told = new LayoutBuilder(sheet, choice, cells).build(names, null, null);
+            if (told.groups().isEmpty()) {
+                above.kind = Kind.NAMES;
+                sorter.layouts.add(told);
+                return new Nameless(sorter, false, "");
+            }
+            return sorted(sorter, told, above, null);
+        }
+        if (separator == CurveSeparator.COMMA && numbers.cells().size() > 2 && noPoint(filled)) {
             return new Nameless(sorter, false, "line " + numbers.line() + " has " + numbers.cells().size()
                     + " cells between commas and no decimal point, so commas may be decimal signs; name the columns in a header,"
                     + " choose the columns, or use another separator");
         }
-        return sorted(sorter, byPosition(names, numbers), headed ? above : null, set ? heads : null);
+        boolean plain = set || numbers.filled() == 2;
+        return sorted(sorter, byPosition(numbers, plain), null, set ? heads : null);
+    }
+
+    /** The last row of several words above the first numbers, or the row of these numbers if words stand over other numbers. */
+    private static WorkRow header(List<WorkRow> filled, int first) {
+        WorkRow row = filled.get(first);
+        for (int i = 0; first + 1 < filled.size() && i < row.row.cells().size(); i++) {
+            SourceRow below = filled.get(first + 1).row;
+            String cell = row.row.cell(i);
+            if (!row.row.isTyped(i) && cell.chars().anyMatch(Character::isLetter) && !Numbers.isNumber(cell)
+                    && !Character.isDigit(cell.charAt(0)) && (below.isTyped(i) || Numbers.isNumber(below.cell(i))) && i == firstFilled(row.row)) {
+                return row;
+            }
+        }
+        for (int i = first - 1; i >= 0; i--) {
+            if (SheetSorter.noNumbers(filled.get(i).row) && filled.get(i).row.filled() > 1) {
+                return filled.get(i);
+            }
+        }
+        return null;
+    }
+
+    private static int firstFilled(SourceRow row) {
+        int at = 0;
+        while (row.cell(at).isEmpty()) {
+            at++;
+        }
+        return at;
     }
 
     private static Nameless sorted(SheetSorter sorter, Layout layout, WorkRow names, SetHeads heads) {
@@ -84,16 +122,17 @@ record Nameless(SheetSorter sorter, boolean set, String problem) {
         return rows.stream().flatMap(r -> r.row.cells().stream()).noneMatch(c -> c.indexOf('.') >= 0 && Numbers.isNumber(c));
     }
 
-    private static Layout byPosition(SourceRow names, SourceRow numbers) {
+    private static Layout byPosition(SourceRow numbers, boolean plain) {
         List<Integer> at = numbers(numbers);
         Map<CurveQuantity, Column> columns = new EnumMap<>(CurveQuantity.class);
         for (int i = 0; i < 2; i++) {
             CurveQuantity quantity = i == 0 ? CurveQuantity.SHEAR_RATE : CurveQuantity.SHEAR_STRESS;
-            columns.put(quantity, new Column(at.get(i), names.cell(at.get(i)), quantity, UnitWords.own(quantity),
+            columns.put(quantity, new Column(at.get(i), "", quantity, UnitWords.own(quantity),
                     "no name says so: it is the " + (i == 0 ? "first" : "second") + " column with numbers; no unit stands there, "
                             + quantity.unit() + " is assumed"));
         }
-        int width = names.line() == 0 ? numbers.cells().size() : names.cells().size();
-        return new Layout(names.line(), List.of(Group.of(1, "", columns)), width, List.of(), List.of());
+        return new Layout(0, List.of(Group.of(1, "", columns)), numbers.cells().size(), List.of(), List.of(), plain ? List.of() : List.of(
+                "no column has a name, and column " + (at.get(0) + 1) + " was taken for a shear rate in 1/s and column " + (at.get(1) + 1)
+                        + " for a shear stress in Pa, since they are the first two with numbers; write names above, or choose the columns"));
     }
 }

@@ -45,15 +45,22 @@ final class SheetSorter {
                 continue;
             }
             boolean words = noNumbers(row.row);
-            if (words && headers.areNames(row.row)) {
-                takeNames(i);
-            } else if (words && unitsMayFollow && isUnits(row.row)) {
+            if (words && unitsMayFollow && isUnits(row.row)) {
                 row.kind = Kind.UNITS;
                 if (!row.row.cells().equals(units)) {
                     units = row.row.cells();
                     relayout(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
                 }
                 unitsMayFollow = false;
+            } else if ((words || mayName(row.row)) && headers.areNames(row.row)) {
+                takeNames(i);
+            } else if (words && names != null && isOtherUnits(row.row)) {
+                row.kind = Kind.UNITS;
+                if (!row.row.cells().equals(units)) {
+                    units = row.row.cells();
+                    close(heads);
+                    use(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
+                }
             } else {
                 sortOther(row);
             }
@@ -176,6 +183,28 @@ final class SheetSorter {
             }
         }
         return true;
+    }
+
+    /** A row with numbers has names as well when it begins with a word and holds no point. */
+    private boolean mayName(SourceRow row) {
+        for (String cell : row.cells()) {
+            if (!cell.isEmpty()) {
+                return !Numbers.isNumber(cell) && cell.chars().anyMatch(Character::isLetter) && !holdsPoint(row);
+            }
+        }
+        return false;
+    }
+
+    /** A row further down that holds a known unit in the place of a rate, a stress or a viscosity, and no words but units. */
+    private boolean isOtherUnits(SourceRow row) {
+        boolean main = false;
+        for (int i = 0; i < row.cells().size(); i++) {
+            String unit = LayoutBuilder.inside(row.cell(i));
+            Optional<CurveQuantity> quantity = headers.read(names.cell(i)).map(HeaderCell::quantity);
+            boolean known = quantity.isPresent() && UnitWords.find(quantity.get(), unit).isPresent();
+            main |= known && UnitWords.telling(unit).filter(q -> q == quantity.get()).isPresent();
+        }
+        return main;
     }
 
     private boolean isUnits(SourceRow row) {

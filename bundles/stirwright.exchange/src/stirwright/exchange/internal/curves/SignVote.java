@@ -3,6 +3,7 @@ package stirwright.exchange.internal.curves;
 import java.util.List;
 import java.util.Optional;
 import java.util.regex.Pattern;
+import stirwright.exchange.CurveSeparator;
 import stirwright.exchange.DecimalSign;
 import stirwright.exchange.Finding;
 import stirwright.exchange.ImportChoice;
@@ -17,9 +18,9 @@ import stirwright.exchange.internal.table.Texts;
  */
 record SignVote(DecimalSign sign, Finding finding, Optional<String> tie, List<String> doubts) {
     /** What a thousands sign looks like as well. */
-    private static final Pattern THOUSANDS = Pattern.compile("[+-]?[1-9][0-9]{0,2}[.,][0-9]{3}");
+    private static final Pattern THOUSANDS = Pattern.compile("[+-]?[1-9][0-9]{0,2}(?:[.,][0-9]{3})+");
 
-    static SignVote of(List<Stretch> stretches, ImportChoice choice) {
+    static SignVote of(List<Stretch> stretches, ImportChoice choice, CurveSeparator separator) {
         Count count = new Count();
         for (Stretch stretch : stretches) {
             for (WorkRow row : stretch.rows) {
@@ -31,7 +32,7 @@ record SignVote(DecimalSign sign, Finding finding, Optional<String> tie, List<St
             }
         }
         return choice.decimalSign().map(s -> new SignVote(s, finding(s.words(), "chosen by hand", true), Optional.empty(), List.of()))
-                .orElseGet(count::result);
+                .orElseGet(() -> count.result(stretches, separator));
     }
 
     private static Finding finding(String value, String reason, boolean overruled) {
@@ -62,7 +63,7 @@ record SignVote(DecimalSign sign, Finding finding, Optional<String> tie, List<St
             }
         }
 
-        SignVote result() {
+        SignVote result(List<Stretch> stretches, CurveSeparator separator) {
             if (votes[0] + votes[1] == 0) {
                 return new SignVote(DecimalSign.POINT, typed > 0
                         ? finding("none needed", "the workbook holds its numbers as numbers", false)
@@ -76,14 +77,26 @@ record SignVote(DecimalSign sign, Finding finding, Optional<String> tie, List<St
                         "decimal point and decimal comma occur equally often, for instance " + first[0] + " and " + first[1]
                                 + "; choose the decimal sign, or use one of them throughout"), List.of());
             }
+            if (votes[winner] == likeThousands[winner] && votes[1 - winner] == 0 && separator == CurveSeparator.COMMA && sign == DecimalSign.POINT) {
+                return new SignVote(sign, finding(sign.words(), seen + "; commas stand between the cells", false), Optional.empty(),
+                        List.of("every number with a point has three digits behind it, for instance " + first[winner]
+                                + ": it is read as decimal point, since commas stand between the cells; write thousands without a sign"));
+            }
+            if (votes[winner] == likeThousands[winner] && !shownBeside(stretches, sign)) {
+                return new SignVote(sign, finding("cannot be told", seen, false), Optional.of("every number with a " + (winner == 0 ? "point"
+                        : "comma") + " has three digits behind it, for instance " + first[winner] + ", so it may be a decimal sign or part"
+                        + " thousands; choose the " + sign.words() + ", or write the numbers without a thousands sign"), List.of());
+            }
             return new SignVote(sign, finding(sign.words(), seen, false), Optional.empty(), doubts(winner, sign));
         }
 
+        /** Whether any cell beside, also of a column that is not read, shows the sign where no thousands sign can stand. */
+        private static boolean shownBeside(List<Stretch> stretches, DecimalSign sign) {
+            return stretches.stream().flatMap(s -> s.rows.stream()).flatMap(r -> r.row.cells().stream())
+                    .anyMatch(c -> Numbers.shows(c, sign) && !THOUSANDS.matcher(c).matches());
+        }
+
         private List<String> doubts(int winner, DecimalSign sign) {
-            if (votes[winner] == likeThousands[winner]) {
-                return List.of("every number with a " + (winner == 0 ? "point" : "comma") + " has three digits behind it, for instance "
-                        + first[winner] + ": it is read as " + sign.words() + "; if it is a thousands sign, write the numbers without it");
-            }
             return votes[1 - winner] == 0 ? List.of() : List.of(votes[1 - winner] + " numbers show a " + sign.other().words()
                     + ", for instance " + first[1 - winner] + ", and are not read, since " + votes[winner] + " show a " + sign.words());
         }

@@ -5,8 +5,12 @@ import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import java.util.stream.Stream;
 import stirwright.exchange.CurveQuantity;
 
 /**
@@ -18,8 +22,14 @@ final class UnitWords {
     private static final double POUND_FORCE = 0.45359237 * 9.80665;
     private static final double FOOT = 0.3048;
     private static final Map<CurveQuantity, Map<String, UnitScale>> ALL = all();
-    /** Named instead of taken: mega where milli is meant. */
-    private static final Set<String> DOUBTFUL = Set.of("MPas");
+    /** Named instead of taken unless it is known as written: mega where milli is meant. */
+    private static final Pattern DOUBTFUL = Pattern.compile("(?:MPa|\u041C\u041F\u0430).*");
+    /** "10^-3 Pa s", in each way to write it; never 100 or 10 alone. */
+    private static final Pattern POWER = Pattern.compile("(?:10\\s*\\^\\s*([-\u2212]?[0-9]{1,2})|10(\u207B?[\u2070\u00B9\u00B2\u00B3\u2074-\u2079]{1,2})"
+            + "|1[eE]([-\u2212]?[0-9]{1,2}))\\s*[\u00B7*x\u00D7]?\\s*(\\p{L}.*)");
+    private static final Map<CurveQuantity, Set<String>> TELLING = Map.of(CurveQuantity.SHEAR_RATE, Set.of("1/s"),
+            CurveQuantity.SHEAR_STRESS, Set.of("Pa", "kPa", "mPa", "dyn/cm2"),
+            CurveQuantity.VISCOSITY, Set.of("Pa s", "kPa s", "mPa s", "cP"));
 
     private UnitWords() {}
 
@@ -28,11 +38,26 @@ final class UnitWords {
         return UnitScale.ten(quantity.unit(), 0);
     }
 
+    /** The quantity that alone has this unit in a table of a flow curve; empty where several do, or none. */
+    static Optional<CurveQuantity> telling(String unit) {
+        if (unit.isEmpty()) {
+            return Optional.empty();
+        }
+        return TELLING.entrySet().stream().filter(e -> find(e.getKey(), unit).filter(u -> e.getValue().contains(u.unit())).isPresent())
+                .map(Map.Entry::getKey).findFirst();
+    }
+
     /** Empty when it is unknown, or known only in another case and then with two meanings. */
     static Optional<UnitScale> find(CurveQuantity quantity, String text) {
+        Matcher power = POWER.matcher(text.strip());
+        if (power.matches()) {
+            String exponent = plain(Stream.of(1, 2, 3).map(power::group).filter(Objects::nonNull).findFirst().orElseThrow());
+            return find(quantity, power.group(4)).filter(u -> u.factor() == 1 && u.offset() == 0)
+                    .map(u -> UnitScale.ten(text.strip(), u.power() + Integer.parseInt(exponent)));
+        }
         Map<String, UnitScale> known = ALL.getOrDefault(quantity, Map.of());
         String plain = plain(text);
-        if (known.containsKey(plain) || DOUBTFUL.contains(plain)) {
+        if (known.containsKey(plain) || DOUBTFUL.matcher(plain).matches()) {
             return Optional.ofNullable(known.get(plain));
         }
         UnitScale found = null;
@@ -79,7 +104,7 @@ final class UnitWords {
         Map<CurveQuantity, Map<String, UnitScale>> all = new EnumMap<>(CurveQuantity.class);
         Arrays.stream(CurveQuantity.values()).forEach(q -> all.put(q, new HashMap<>()));
         put(all.get(CurveQuantity.SHEAR_RATE), UnitScale.ten("1/s", 0), "1/s", "s-1", "/s", "1/sec", "sec-1", "/sec",
-                "reciprocalseconds", "1s");
+                "reciprocalseconds", "reciprocalsecond", "reciprocalsec", "1s", "1/\u0441", "\u0441-1");
         put(all.get(CurveQuantity.SHEAR_RATE), UnitScale.times("1/min", 1 / 60.0), "1/min", "min-1", "/min");
         stresses(all.get(CurveQuantity.SHEAR_STRESS));
         viscosities(all.get(CurveQuantity.VISCOSITY));
@@ -108,26 +133,28 @@ final class UnitWords {
     }
 
     private static void stresses(Map<String, UnitScale> into) {
-        put(into, UnitScale.ten("Pa", 0), "Pa", "N/m2", "Nm-2", "Pascal");
-        put(into, UnitScale.ten("kPa", 3), "kPa");
+        put(into, UnitScale.ten("Pa", 0), "Pa", "N/m2", "Nm-2", "Pascal", "Pascals", "\u041F\u0430");
+        put(into, UnitScale.ten("kPa", 3), "kPa", "kilopascal", "kilopascals");
         put(into, UnitScale.ten("hPa", 2), "hPa", "mbar");
         put(into, UnitScale.ten("mPa", -3), "mPa");
         put(into, UnitScale.ten("uPa", -6), "uPa");
         put(into, UnitScale.ten("MPa", 6), "MPa", "N/mm2", "Nmm-2");
         put(into, UnitScale.ten("bar", 5), "bar");
-        put(into, UnitScale.ten("dyn/cm2", -1), "dyn/cm2", "dyne/cm2", "dynes/cm2", "dyncm-2", "dynecm-2", "dyncm2", "dynecm2", "D/cm2");
+        put(into, UnitScale.ten("dyn/cm2", -1), "dyn/cm2", "dyne/cm2", "dynes/cm2", "dyncm-2", "dynecm-2", "dyncm2", "dynecm2", "D/cm2",
+                "dina/cm2", "dinas/cm2");
         put(into, UnitScale.times("psi", POUND_FORCE / (FOOT / 12 * FOOT / 12)), "psi", "lbf/in2");
         put(into, UnitScale.times("lbf/ft2", POUND_FORCE / (FOOT * FOOT)), "lbf/ft2", "lb/ft2", "psf");
         put(into, UnitScale.times("lbf/100ft2", POUND_FORCE / (100 * FOOT * FOOT)), "lbf/100ft2", "lb/100ft2");
     }
 
     private static void viscosities(Map<String, UnitScale> into) {
-        put(into, UnitScale.ten("Pa s", 0), "Pas", "Pa-s", "Ns/m2", "Nsm-2", "kg/(ms)", "Pa/s-1");
+        put(into, UnitScale.ten("Pa s", 0), "Pas", "Pa-s", "Pasec", "Paxs", "Pascalsecond", "Pascalseconds", "\u041F\u0430\u0441", "Ns/m2", "Nsm-2", "kg/(ms)", "Pa/s-1");
         put(into, UnitScale.ten("kPa s", 3), "kPas");
-        put(into, UnitScale.ten("mPa s", -3), "mPas", "mPa-s");
+        put(into, UnitScale.ten("mPa s", -3), "mPas", "mPa-s", "mPasec", "mPaxs", "millipascalsecond",
+                "millipascalseconds", "millipascalsec", "\u043C\u041F\u0430\u0441");
         put(into, UnitScale.ten("uPa s", -6), "uPas");
         put(into, UnitScale.ten("P", -1), "P", "Poise", "dyns/cm2", "g/(cms)");
-        put(into, UnitScale.ten("cP", -3), "cP", "centipoise", "cps", "cPoise");
+        put(into, UnitScale.ten("cP", -3), "cP", "centipoise", "centipoises", "cps", "cPoise");
     }
 
     private static void put(Map<String, UnitScale> into, UnitScale scale, String... spellings) {
