@@ -191,6 +191,10 @@ class CurveImportTest {
     void otherFiles() {
         assertUnusable(() -> CurveFiles.read(folder, "a.xls", new byte[] {(byte) 0xD0, (byte) 0xCF, 0x11, (byte) 0xE0, 0, 0}), "a.xls", "old", ".xlsx");
         assertUnusable(() -> CurveFiles.read(folder, "a.pdf", "%PDF-1.7".getBytes(UTF_8)), "a.pdf", "PDF", "CSV");
+        for (String page : new String[] {"<html><table><tr><td>1</td></tr></table></html>", "\n<!DOCTYPE html>\n<p>", "\uFEFF<?xml version='1.0'?><Workbook/>"}) {
+            assertUnusable(() -> CurveFiles.read(folder, "a.xls", page.getBytes(UTF_8)), "a.xls", "web page", ".xlsx");
+        }
+        assertUnusable(() -> CurveFiles.read(folder, "a.xlsx", new byte[] {(byte) 0x89, 'P', 'N', 'G', 13, 10}), "a.xlsx", "picture");
         assertUnusable(() -> CurveFiles.read(folder, "a.bin", new byte[4000]), "a.bin", "no text");
         assertUnusable(() -> CurveFiles.read(folder, "a.csv", new byte[0]), "a.csv", "empty");
         assertUnusable(() -> CurveSource.file(folder.resolve("none.csv")), "none.csv", "no such file");

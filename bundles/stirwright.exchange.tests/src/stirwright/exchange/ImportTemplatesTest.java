@@ -1,6 +1,7 @@
 package stirwright.exchange;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 import static stirwright.exchange.Refusals.assertUnusable;
 
 import java.io.IOException;
@@ -66,5 +67,30 @@ class ImportTemplatesTest {
         CurveImport read = CurveImport.of(CurveSource.clipboard("x;y\n0.5;1\n0.7;10\n0.9;100\n"), templates.load("swapped"));
         assertEquals(500, read.requireCurves().get(0).points().stress(0));
         assertEquals(100, read.curves().get(0).points().shearRate(2));
+    }
+
+    private static List<String> warnings(ImportChoice choice) {
+        return CurveImport.of(CurveSource.clipboard("rate;stress;x\n1;2;5\n10;3;5\n20;4;5\n50;5;5\n80;6;5\n100;7;5\n"), choice)
+                .requireCurves().get(0).measurement().warnings();
+    }
+
+    @Test
+    void whatFindsNothingIsNamedInEachCurve() {
+        assertEquals(List.of(), warnings(ImportChoice.DETECT));
+        assertNamed(ImportChoice.DETECT.with(new ColumnChoice("", 9, Optional.of(CurveQuantity.TIME), "s")), "column 9", "time", "3 cells");
+        assertNamed(ImportChoice.DETECT.with(new ColumnChoice("", 3, Optional.of(CurveQuantity.VISCOSITY), "furlong")), "column 3", "'furlong'");
+        assertNamed(ImportChoice.DETECT.with(new ColumnChoice("up", 1, Optional.of(CurveQuantity.TIME), "s")), "column 1", "'up'", "no sheets");
+        assertNamed(ImportChoice.DETECT.with(new BlockChoice(7, Optional.empty(), Optional.of(true))), "block 7", "1 block");
+        assertNamed(ImportChoice.DETECT.withSheets(List.of("Blatt")), "'Blatt'", "no sheets");
+        assertEquals(List.of(), warnings(ImportChoice.DETECT.with(new ColumnChoice("", 3, Optional.of(CurveQuantity.TORQUE), "%"))
+                .with(new BlockChoice(1, Optional.empty(), Optional.of(true)))));
+    }
+
+    private static void assertNamed(ImportChoice choice, String... words) {
+        List<String> warnings = warnings(choice);
+        assertEquals(1, warnings.size(), warnings.toString());
+        for (String word : words) {
+            assertTrue(warnings.get(0).contains(word), warnings.toString());
+        }
     }
 }

@@ -46,16 +46,18 @@ public final class Importer {
         SignVote vote = SignVote.of(stretches, choice, sources.separator());
         findings.add(vote.finding());
         vote.tie().ifPresent(messages::problem);
-        vote.doubts().forEach(messages::warning);
         StatusWords statuses = StatusWords.of(stretches);
         statuses.finding().ifPresent(findings::add);
         PointReader reader = new PointReader(choice, vote.sign(), statuses, sources.separator());
         List<Part> parts = stretches.stream().flatMap(s -> Part.of(s, reader.read(s)).stream()).toList();
         List<CurveBlock> blocks = new Blocks(parts, choice, statuses).build(vote.tie().isEmpty());
         List<DroppedPoint> dropped = new ArrayList<>();
-        List<MeasuredCurve> curves = curves(parts, blocks, dropped, vote.doubts());
+        List<String> doubts = new ArrayList<>(vote.doubts());
+        doubts.addAll(ChoiceCheck.unmatched(choice, sources.sheets().stream().map(SourceSheet::name).toList(), rows, blocks.size()));
+        List<MeasuredCurve> curves = curves(parts, blocks, dropped, doubts);
         findings.add(new Finding(Topic.BLOCKS, blocks.size() + (blocks.size() == 1 ? " block, " : " blocks, ") + curves.size()
                 + " taken", "heads, numbers that start again, and turns of the shear rate part them", !choice.blocks().isEmpty()));
+        doubts.forEach(messages::warning);
         layouts.forEach(layout -> {
             layout.problems().forEach(messages::problem);
             layout.notes().forEach(messages::warning);
@@ -109,6 +111,7 @@ public final class Importer {
 
     private void take(SheetSorter sorter) {
         layouts.addAll(sorter.layouts);
+        sorter.problems.forEach(messages::problem);
         stretches.addAll(sorter.stretches);
     }
 

@@ -15,6 +15,8 @@ import stirwright.exchange.internal.table.SourceRow;
 final class SheetSorter {
     final List<Layout> layouts = new ArrayList<>();
     final List<Stretch> stretches = new ArrayList<>();
+    /** What is wrong with points that were left out, a sentence each. */
+    final List<String> problems = new ArrayList<>();
 
     private final String sheet;
     private final ImportChoice choice;
@@ -57,14 +59,28 @@ final class SheetSorter {
             } else if (words && names != null && isOtherUnits(row.row)) {
                 row.kind = Kind.UNITS;
                 if (!row.row.cells().equals(units)) {
+                    SourceRow now = new SourceRow(row.row.line(), goingOn(row.row), null);
                     units = row.row.cells();
                     close(heads);
-                    use(new LayoutBuilder(sheet, choice, headers).build(names, row.row, above));
+                    use(new LayoutBuilder(sheet, choice, headers).build(names, now, above));
                 }
             } else {
                 sortOther(row);
             }
         }
+        stretches.removeIf(this::hasOtherUnits);
+    }
+
+    private boolean hasOtherUnits(Stretch stretch) {
+        Optional<String> problem = UnitColumns.problem(stretch);
+        problem.ifPresent(words -> {
+            problems.add(words);
+            for (WorkRow row : stretch.rows) {
+                row.points--;
+                row.kind = row.points == 0 ? Kind.NOTE : row.kind;
+            }
+        });
+        return problem.isPresent();
     }
 
     /** By a layout that is known beforehand, in a set of curves or a table without names. */
@@ -105,7 +121,7 @@ final class SheetSorter {
         if (before != null && (before.kind == Kind.NOTE || before.kind == Kind.BLOCK)) {
             above = before.row;
         }
-        Layout found = new LayoutBuilder(sheet, choice, headers).build(names, null, above);
+        Layout found = new LayoutBuilder(sheet, choice, headers).build(names, toldBeside(at), above);
         if (above != null && found.groups().size() > 1) {
             // What looked like the head of a sample names several that stand side by side.
             heads = before.kind == Kind.BLOCK ? headsBefore : heads;
@@ -119,6 +135,25 @@ final class SheetSorter {
     private boolean isRepeated(SourceRow row) {
         return names != null && row.cells().equals(names.cells()) && layout.groups().size() == 1 && Stream.of(
                 CurveQuantity.POINT_NUMBER, CurveQuantity.SEGMENT_AND_POINT).anyMatch(layout.groups().get(0).columns()::containsKey);
+    }
+
+    /** Units in columns of their own, as the first row of points has them; null without. */
+    private SourceRow toldBeside(int at) {
+        for (int i = at + 1; i < Math.min(rows.size(), at + 4); i++) {
+            if (rows.get(i).numbers() > 1) {
+                return UnitColumns.told(names, rows.get(i).row, headers);
+            }
+        }
+        return null;
+    }
+
+    /** A units row further down says nothing of the columns that it leaves blank. */
+    private List<String> goingOn(SourceRow row) {
+        List<String> all = new ArrayList<>();
+        for (int i = 0; i < Math.max(row.cells().size(), units.size()); i++) {
+            all.add(!row.cell(i).isEmpty() || i >= units.size() ? row.cell(i) : units.get(i));
+        }
+        return all;
     }
 
     private void use(Layout found) {

@@ -35,6 +35,10 @@ record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding>
             case OLD_WORKBOOK -> throw new UnusableFileException(source.shown(), "is a workbook in an old binary format, or one with a"
                     + " password; save it as .xlsx or as CSV in UTF-8");
             case PDF -> throw new UnusableFileException(source.shown(), "is a PDF document; save its table as .xlsx or as CSV in UTF-8");
+            case WEB_PAGE -> throw new UnusableFileException(source.shown(), "is a web page (HTML or XML), whatever its name ends in; open it"
+                    + " in a spreadsheet and save it as .xlsx or as CSV in UTF-8");
+            case IMAGE -> throw new UnusableFileException(source.shown(), "is a picture; type its numbers, or save the table as .xlsx or"
+                    + " as CSV in UTF-8");
             case TEXT -> text(source, bytes, choice);
         };
     }

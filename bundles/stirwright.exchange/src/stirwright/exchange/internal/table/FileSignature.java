@@ -1,12 +1,19 @@
 package stirwright.exchange.internal.table;
 
+import java.nio.charset.StandardCharsets;
 import java.util.Optional;
+import java.util.regex.Pattern;
 
 /** Tells what a file is by its bytes, so that it can be read or named. */
 public final class FileSignature {
 
     /** What a file of flow curves can be. */
-    public enum Kind { ZIP, OLD_WORKBOOK, PDF, TEXT }
+    public enum Kind { ZIP, OLD_WORKBOOK, PDF, WEB_PAGE, IMAGE, TEXT }
+
+    private static final int BEGINNING = 500;
+    /** Some programs give tables of a web page the ending of a workbook. */
+    private static final Pattern WEB_PAGE = Pattern.compile("(?:\\u00EF\\u00BB\\u00BF)?\\s*<(?:!doctype\\s+html|html|head|body|table|meta|style|\\?xml)\\b",
+            Pattern.CASE_INSENSITIVE);
 
     private FileSignature() {}
 
@@ -33,7 +40,10 @@ public final class FileSignature {
             return Kind.ZIP;
         }
         return starts(bytes, 0xD0, 0xCF, 0x11, 0xE0) ? Kind.OLD_WORKBOOK
-                : starts(bytes, '%', 'P', 'D', 'F') ? Kind.PDF : Kind.TEXT;
+                : starts(bytes, '%', 'P', 'D', 'F') ? Kind.PDF
+                : starts(bytes, 0x89, 'P', 'N', 'G') || starts(bytes, 0xFF, 0xD8, 0xFF) || starts(bytes, 'G', 'I', 'F', '8') ? Kind.IMAGE
+                : WEB_PAGE.matcher(new String(bytes, 0, Math.min(bytes.length, BEGINNING), StandardCharsets.ISO_8859_1)).lookingAt()
+                ? Kind.WEB_PAGE : Kind.TEXT;
     }
 
     private static boolean starts(byte[] bytes, int... signature) {
