@@ -10,6 +10,7 @@ import static stirwright.exchange.Refusals.assertUnusable;
 
 import java.nio.charset.Charset;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -60,6 +61,14 @@ class CurveImportTest {
         assertCurve(read);
         assertEquals("ketchup 7", read.curves().get(0).label());
         assertEquals("ketchup 7.txt", read.curves().get(0).measurement().source());
+    }
+
+    @Test
+    void betweenVerticalBars() {
+        assertCurve(read("Shear rate (1/s)|Shear stress (Pa)\n0.5|2.5\n10|7.25\n100|20\n"));
+        CurveImport drawn = read("| Shear rate (1/s) | Shear stress (Pa) |\n|:---|---:|\n| 0.5 | 2.5 |\n| 10 | 7.25 |\n| 100 | 20 |\n");
+        assertCurve(drawn);
+        assertEquals(List.of(), drawn.dropped());
     }
 
     @Test

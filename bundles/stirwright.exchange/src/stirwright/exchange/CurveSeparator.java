@@ -5,6 +5,7 @@ public enum CurveSeparator {
     TAB("tab"),
     SEMICOLON("semicolon"),
     COMMA("comma"),
+    BAR("vertical bar"),
     /** One or more; two or more where the text has other words with single spaces. */
     SPACES("spaces");
 

@@ -43,7 +43,7 @@ final class SheetSorter {
     void sort() {
         for (int i = 0; i < rows.size(); i++) {
             WorkRow row = rows.get(i);
-            if (row.kind == Kind.BLANK) {
+            if (row.kind == Kind.BLANK || isRule(row.row)) {
                 continue;
             }
             boolean words = noNumbers(row.row);
@@ -240,6 +240,16 @@ final class SheetSorter {
             main |= known && UnitWords.telling(unit).filter(q -> q == quantity.get()).isPresent();
         }
         return main;
+    }
+
+    /** A line drawn with signs below a header. */
+    private static boolean isRule(SourceRow row) {
+        for (String cell : row.cells()) {
+            if (!cell.isEmpty() && ("-:=".indexOf(cell.charAt(0)) < 0 || cell.length() < 2 || cell.chars().anyMatch(c -> "-:=+".indexOf(c) < 0))) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private boolean isUnits(SourceRow row) {

@@ -39,6 +39,7 @@ public final class CellSplitter {
             case TAB -> '\t';
             case SEMICOLON -> ';';
             case COMMA -> ',';
+            case BAR -> '|';
             case SPACES -> '\n';
         }, mostCells);
         splitter.run();
