@@ -80,4 +80,44 @@ class SampleFitsTest {
         assertTrue(sample.temperatures().stream().allMatch(t -> t.pooled().isEmpty()), "curves of different temperatures are no replicates");
         assertTrue(samples(curves[0]).get(0).law().isEmpty());
     }
+
+    private static CurveFits from(String source, List<String> warnings, double celsius, FluidModel model) {
+        FlowCurve points = FlowCurve.of(RATES, Arrays.stream(RATES).map(model::stress).toArray());
+        return CurveFits.of(new MeasuredCurve(source, points,
+                new Measurement(source, "0f", "", "", Ramp.UP, 1, celsius, List.of(), warnings)), FitOptions.DEFAULT);
+    }
+
+    @Test
+    void theSamePointsCountOnce() {
+        CurveFits one = from("a.csv", List.of(), 25, new PowerLaw(8, 0.4));
+        SampleFits.AtTemperature twice = samples(one, one).get(0).temperatures().get(0);
+        assertEquals(List.of(), twice.pooled(), "a file that is read twice is no replicate of itself");
+        CurveFits pooled = samples(one, one, from("a.csv", List.of(), 25, new PowerLaw(9, 0.4))).get(0).temperatures().get(0).pooled().get(0);
+        assertEquals(2 * RATES.length, pooled.curve().points().size());
+        assertTrue(pooled.curve().measurement().warnings().toString().contains("same points"), pooled.curve().measurement().toString());
+    }
+
+    @Test
+    void aPoolKeepsTheWarningsOfItsParts() {
+        CurveFits pooled = samples(from("a.csv", List.of(), 25, new PowerLaw(8, 0.4)),
+                from("a.csv", List.of("the temperature drifts"), 25, new PowerLaw(9, 0.4))).get(0).temperatures().get(0).pooled().get(0);
+        assertTrue(pooled.curve().measurement().warnings().toString().contains("the temperature drifts"));
+        assertEquals(stirwright.core.Status.FLAGGED, pooled.status());
+    }
+
+    @Test
+    void filesNamedByTheirTemperatureAreOneSample() {
+        List<SampleFits> warm = samples(from("paste_T20.csv", List.of(), 20, new PowerLaw(8, 0.4)), from("paste_T60.csv", List.of(), 60, new PowerLaw(4, 0.4)));
+        assertEquals(1, warm.size());
+        assertTrue(warm.get(0).law().isPresent());
+        assertEquals(1, samples(from("paste 20C.csv", List.of(), 20, new PowerLaw(8, 0.4)), from("paste 60C.csv", List.of(), 60, new PowerLaw(4, 0.4))).size());
+        assertEquals(2, samples(from("paste_T20.csv", List.of(), 25, new PowerLaw(8, 0.4)), from("paste_T60.csv", List.of(), 25, new PowerLaw(4, 0.4))).size(),
+                "a T may be a sample's letter");
+        assertEquals(2, samples(from("paste 20C.csv", List.of(), 20, new PowerLaw(8, 0.4)), from("cream 20C.csv", List.of(), 20, new PowerLaw(4, 0.4))).size());
+        CurveFits other = from("paste 20C.csv", List.of(), 20, new PowerLaw(4, 0.4));
+        Measurement there = other.curve().measurement();
+        CurveFits elsewhere = new CurveFits(new MeasuredCurve("b", other.curve().points(), new Measurement(there.source(), "1e", "", "",
+                Ramp.UP, 1, 20, List.of(), List.of())), other.fits());
+        assertEquals(2, samples(from("paste 20C.csv", List.of(), 20, new PowerLaw(8, 0.4)), elsewhere).size(), "two files of one name in two folders");
+    }
 }

@@ -22,6 +22,14 @@ final class Xlsx {
 
     /** @param sheets rows of texts and {@link BigDecimal}s; a {@link LocalDate} is a number that is shown as a date */
     static byte[] write(Map<String, List<List<Object>>> sheets) {
+        return write(sheets, List.of(), List.of());
+    }
+
+    /**
+     * @param hidden names of sheets that are not shown
+     * @param hiddenRows lines of the first sheet that are not shown
+     */
+    static byte[] write(Map<String, List<List<Object>>> sheets, List<String> hidden, List<Integer> hiddenRows) {
         List<String> texts = new ArrayList<>();
         StringBuilder names = new StringBuilder();
         StringBuilder relations = new StringBuilder();
@@ -30,9 +38,9 @@ final class Xlsx {
             int i = 0;
             for (Map.Entry<String, List<List<Object>>> sheet : sheets.entrySet()) {
                 i++;
-                names.append("<sheet name=\"" + sheet.getKey() + "\" sheetId=\"" + i + "\" r:id=\"rId" + i + "\"/>");
+                names.append("<sheet name=\"" + sheet.getKey() + "\" sheetId=\"" + i + (hidden.contains(sheet.getKey()) ? "\" state=\"hidden" : "") + "\" r:id=\"rId" + i + "\"/>");
                 relations.append("<Relationship Id=\"rId" + i + "\" Type=\"" + RELATIONS + "/worksheet\" Target=\"worksheets/s" + i + ".xml\"/>");
-                put(zip, "xl/worksheets/s" + i + ".xml", sheet(sheet.getValue(), texts));
+                put(zip, "xl/worksheets/s" + i + ".xml", sheet(sheet.getValue(), texts, i == 1 ? hiddenRows : List.of()));
             }
             put(zip, "xl/workbook.xml", "<workbook xmlns=\"" + MAIN + "\" xmlns:r=\"" + RELATIONS + "\"><sheets>" + names + "</sheets></workbook>");
             put(zip, "xl/_rels/workbook.xml.rels", "<Relationships>" + relations + "</Relationships>");
@@ -46,10 +54,10 @@ final class Xlsx {
         return bytes.toByteArray();
     }
 
-    private static String sheet(List<List<Object>> rows, List<String> texts) {
+    private static String sheet(List<List<Object>> rows, List<String> texts, List<Integer> hidden) {
         StringBuilder xml = new StringBuilder("<worksheet xmlns=\"" + MAIN + "\"><sheetData>");
         for (int r = 0; r < rows.size(); r++) {
-            xml.append("<row r=\"" + (r + 1) + "\">");
+            xml.append("<row r=\"" + (r + 1) + (hidden.contains(r + 1) ? "\" hidden=\"1" : "") + "\">");
             for (int c = 0; c < rows.get(r).size(); c++) {
                 Object cell = rows.get(r).get(c);
                 String at = "<c r=\"" + (char) ('A' + c) + (r + 1) + "\"";

@@ -2,12 +2,17 @@ package stirwright.exchange;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.stream.Stream;
+import stirwright.exchange.internal.curves.SamePoints;
+import stirwright.exchange.internal.curves.SourceTemperature;
 import stirwright.rheology.FitOptions;
 import stirwright.rheology.FlowCurve;
 import stirwright.rheology.Hysteresis;
@@ -49,17 +54,35 @@ public record SampleFits(String name, List<AtTemperature> temperatures, Optional
     }
 
     /**
-     * Groups fitted curves by sample, in the order of their first curve.
+     * Groups fitted curves by sample, in the order of their first curve. Sources are different samples, unless their names
+     * differ by a temperature alone, for instance ketchup_20C.csv and ketchup_40C.csv.
      *
      * @param staticYield Pa, as a vane measured it on all of them; empty when nobody did
      */
     public static List<SampleFits> of(List<CurveFits> fits, FitOptions options, OptionalDouble staticYield) {
+        Map<List<String>, List<CurveFits>> warm = new LinkedHashMap<>();
+        Set<String> mixed = new HashSet<>();
+        fits.forEach(one -> SourceTemperature.without(from(one)).ifPresentOrElse(
+                name -> warm.computeIfAbsent(List.of(name, from(one).sample()), k -> new ArrayList<>()).add(one), () -> mixed.add(from(one).sha256())));
+        // A source with other temperatures than its name's is a sample of its own.
+        warm.values().removeIf(curves -> !apart(curves) || curves.stream().anyMatch(c -> mixed.contains(from(c).sha256())));
         Map<List<String>, List<CurveFits>> samples = new LinkedHashMap<>();
         for (CurveFits one : fits) {
-            Measurement from = one.curve().measurement();
-            samples.computeIfAbsent(List.of(from.source(), from.sha256(), from.sample()), k -> new ArrayList<>()).add(one);
+            Measurement from = from(one);
+            List<String> key = SourceTemperature.without(from).map(name -> List.of(name, from.sample()))
+                    .filter(warm::containsKey).orElseGet(() -> List.of(from.source(), from.sha256(), from.sample()));
+            samples.computeIfAbsent(key, k -> new ArrayList<>()).add(one);
         }
         return samples.values().stream().map(curves -> sample(curves, options, staticYield)).toList();
+    }
+
+    private static Measurement from(CurveFits one) {
+        return one.curve().measurement();
+    }
+
+    /** Whether no two sources have the same temperature: nothing says that these are replicates. */
+    private static boolean apart(List<CurveFits> curves) {
+        return byTemperature(curves).stream().allMatch(alike -> alike.stream().map(c -> from(c).sha256()).distinct().count() == 1);
     }
 
     private static SampleFits sample(List<CurveFits> curves, FitOptions options, OptionalDouble staticYield) {
@@ -91,8 +114,9 @@ public record SampleFits(String name, List<AtTemperature> temperatures, Optional
         List<CurveFits> pooled = new ArrayList<>();
         Map<String, RankedFits> whole = new LinkedHashMap<>();
         for (List<CurveFits> replicates : ramps.values()) {
-            CurveFits together = replicates.size() == 1 ? replicates.get(0) : CurveFits.of(pool(replicates), options);
-            if (replicates.size() > 1) {
+            List<CurveFits> each = distinct(replicates);
+            CurveFits together = each.size() == 1 ? each.get(0) : CurveFits.of(pool(each, replicates.size() - each.size()), options);
+            if (each.size() > 1) {
                 pooled.add(together);
             }
             whole.put(together.curve().label(), together.fits());
@@ -102,16 +126,33 @@ public record SampleFits(String name, List<AtTemperature> temperatures, Optional
         return new AtTemperature(celsius(alike.get(0)), alike, pooled, loop, YieldRange.of(whole, staticYield));
     }
 
-    private static FlowCurve points(List<CurveFits> replicates) {
-        return FlowCurve.pooled(replicates.stream().map(c -> c.curve().points()).toList());
+    /** A curve that was read twice counts once. */
+    private static List<CurveFits> distinct(List<CurveFits> curves) {
+        Map<SamePoints, CurveFits> seen = new LinkedHashMap<>();
+        curves.forEach(c -> seen.putIfAbsent(new SamePoints(c.curve().points()), c));
+        return List.copyOf(seen.values());
     }
 
-    private static MeasuredCurve pool(List<CurveFits> replicates) {
+    private static FlowCurve points(List<CurveFits> replicates) {
+        return FlowCurve.pooled(distinct(replicates).stream().map(c -> c.curve().points()).toList());
+    }
+
+    /** @param twice how many curves are left out since their points are those of another */
+    private static MeasuredCurve pool(List<CurveFits> replicates, int twice) {
         MeasuredCurve first = replicates.get(0).curve();
         Measurement from = first.measurement();
+        Set<String> warnings = new LinkedHashSet<>();
+        List<DroppedPoint> dropped = new ArrayList<>();
+        for (CurveFits one : replicates) {
+            one.curve().measurement().warnings().forEach(w -> warnings.add("'" + one.curve().label() + "': " + w));
+            dropped.addAll(one.curve().measurement().dropped());
+        }
+        if (twice > 0) {
+            warnings.add(twice + (twice == 1 ? " curve is" : " curves are") + " left out: the same points are in the pool already");
+        }
         return new MeasuredCurve(first.label() + " and " + (replicates.size() - 1) + " more, pooled", points(replicates),
                 new Measurement(from.source(), from.sha256(), "", from.sample(), from.ramp(), replicates.size(), from.temperature(),
-                        List.of(), List.of()));
+                        dropped, List.copyOf(warnings)));
     }
 
     /** Over one ramp alone, the rising one if there is one, since ramps are never averaged. */

@@ -19,6 +19,11 @@ final class BlockWarnings {
 
     static List<String> of(Part part, StatusWords statuses) {
         List<String> warnings = new ArrayList<>();
+        if (part.stretch().layout.groups().size() > 1 && part.stretch().group.column(CurveQuantity.SAMPLE) == null
+                && NameWords.of(part.sample()).numberAlone()) {
+            warnings.add("its columns are told from others by the number " + part.sample() + " alone: taken for a replicate of one"
+                    + " sample; name the samples in the header if they are several");
+        }
         RowCheck.of(part).ifPresent(warnings::add);
         long taken = part.points().stream().filter(ReadPoint::taken).count();
         if (taken < FEW) {

@@ -15,9 +15,16 @@ final class Blocks {
     private final List<Part> parts;
     private final ImportChoice choice;
     private final StatusWords statuses;
+    private final String file;
+    private final SampleNames names;
     private final Replicates replicates = new Replicates();
+    /** What tells the sample of each block from others of the source; empty where nothing does. */
+    final List<String> samples = new ArrayList<>();
 
-    Blocks(List<Part> parts, ImportChoice choice, StatusWords statuses) {
+    /** @param file its name, which may hold a temperature */
+    Blocks(List<Part> parts, ImportChoice choice, StatusWords statuses, String file) {
+        this.file = file;
+        this.names = new SampleNames(parts);
         this.parts = parts;
         this.choice = choice;
         this.statuses = statuses;
@@ -54,9 +61,11 @@ final class Blocks {
                 + (wanted && !readable ? "; not taken, since the decimal sign cannot be told" : "")
                 + (wanted && readable && !taken ? "; not taken: a flow curve needs at least " + LEAST_POINTS + " points, "
                         + usable + " can be used" : "");
-        double temperature = part.temperature();
+        double temperature = part.temperature(file);
+        String name = names.next(part, use, temperature);
+        samples.add(name);
         return new CurveBlock(number, part.name(), part.stretch().sheet, part.stretch().group.sample(), found, use, taken, reason,
-                taken ? replicates.next(part, use, temperature) : 0, temperature,
+                taken ? replicates.next(name, use, temperature) : 0, temperature,
                 part.stretch().group.columns().values().stream().map(c -> c.shown(part.stretch().sheet)).toList(),
                 part.points().stream().map(ReadPoint::point).toList(),
                 taken || use.isCurve() ? BlockWarnings.of(part, statuses) : List.of());

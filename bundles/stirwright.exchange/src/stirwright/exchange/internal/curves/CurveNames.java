@@ -23,14 +23,15 @@ final class CurveNames {
                 .anyMatch(b -> !Measurement.sameTemperature(b.temperature(), taken.get(0).temperature()));
     }
 
-    String next(CurveBlock block, Part part) {
+    /** @param sample what tells its sample from others of the source; may be empty */
+    String next(CurveBlock block, Part part, String sample) {
         String own = part.stretch().heads.own();
-        return unique(!own.isEmpty() ? own : several ? words(block, part) : stem);
+        return unique(!own.isEmpty() ? own : several ? words(block, part, sample) : stem);
     }
 
-    private String words(CurveBlock block, Part part) {
+    private String words(CurveBlock block, Part part, String told) {
         List<String> words = new ArrayList<>(List.of(stem));
-        String sample = part.sample();
+        String sample = part.sample().isEmpty() && !told.equals(block.sheet()) ? told : part.sample();
         if (!sample.isEmpty()) {
             words.add(sample);
         } else if (block.sample() > 1 || part.stretch().layout.groups().size() > 1) {

@@ -18,6 +18,9 @@ final class HeadWords {
             "intervall", "schritt", "rampe", "intervalle", "etape", "intervalo", "paso", "tramo", "rampa", "preshear",
             "vorscherung", "phase", "fase");
 
+    /** A longer line is a remark; common practice, no source. */
+    private static final int LONGEST_TITLE = 60;
+
     private HeadWords() {}
 
     /** What the heads are with this row, which is not blank; empty when it is no head. */
@@ -32,13 +35,29 @@ final class HeadWords {
         String word = Folded.of(Texts.show(row.cell(first))).words().split(" ")[0];
         String name = words(row);
         if (SAMPLE.contains(word)) {
-            return Optional.of(new Heads("", name, "", ""));
+            return Optional.of(new Heads("", name, "", "", ""));
         }
         if (RUN.contains(word)) {
-            return Optional.of(new Heads("", before.sample(), name, ""));
+            return Optional.of(new Heads("", before.sample(), name, "", before.title()));
         }
         return INTERVAL.contains(word) || name.toLowerCase(Locale.ROOT).startsWith("pre-shear")
-                ? Optional.of(new Heads("", before.sample(), before.run(), name)) : Optional.empty();
+                ? Optional.of(new Heads("", before.sample(), before.run(), name, before.title())) : Optional.empty();
+    }
+
+    /**
+     * Whether a row is one short line of words, or a temperature alone.
+     *
+     * @param before the place of the first column that is read: a word further right is a cell of a point
+     */
+    static boolean isTitle(SourceRow row, int before) {
+        if (row.filled() != 1 || !SheetSorter.noNumbers(row) || row.cells().indexOf(words(row)) > before) {
+            return false;
+        }
+        String words = words(row);
+        if (StatusWords.saysBad(words) || words.length() < 2 || words.startsWith("sep=")) {
+            return false;
+        }
+        return words.length() <= LONGEST_TITLE && (Character.isLetter(words.charAt(0)) || NameWords.temperatureAlone(words));
     }
 
     /** The cells that are filled, in one line. */

@@ -37,7 +37,10 @@ final class HeaderWords {
     /** A header with one of these is something else: a normal stress, a set value, a standard deviation; between spaces. */
     static final List<String> OTHER_THINGS = Stream.of("normal", "yield", "modulus", "complex", "kinematic", "intrinsic", "inherent",
             "relative", "deviation", "error", "sd", "std", "stdev", "set", "setpoint", "target", "soll", "sollwert", "consigne",
-            "consigna", "modul", "normalspannung", "fliessgrenze", "komplexe", "abweichung", "ecart", "desviacion", "log", "ln").map(HeaderWords::between).toList();
+            "consigna", "modul", "normalspannung", "fliessgrenze", "komplexe", "abweichung", "ecart", "desviacion", "log", "ln",
+            "fitted", "fit", "model", "modell", "modele", "modelo", "predicted", "predicting", "prediction", "theoretical", "regression",
+            "hb", "herschel", "bingham", "casson", "elastic", "specific", "extensional", "elongational", "average", "storage",
+            "loss").map(HeaderWords::between).toList();
 
     /** Names whose unit may be one of a flow curve and that are nothing of it: a frequency, a pressure, a modulus as a letter. */
     static final List<String> NOT_BY_UNIT = Stream.of("frequency", "frequenz", "frequence", "frecuencia", "omega", "\u03C9", "angular", "pressure",

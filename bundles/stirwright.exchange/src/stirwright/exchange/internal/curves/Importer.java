@@ -1,8 +1,10 @@
 package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.stream.Stream;
 import stirwright.exchange.CurveBlock;
@@ -26,6 +28,7 @@ public final class Importer {
     private final List<WorkRow> rows = new ArrayList<>();
     private final List<Layout> layouts = new ArrayList<>();
     private final List<Stretch> stretches = new ArrayList<>();
+    private final Set<String> unread = new LinkedHashSet<>();
     private final Set<Finding> findings = new LinkedHashSet<>();
     private final Messages messages = new Messages();
 
@@ -50,11 +53,12 @@ public final class Importer {
         statuses.finding().ifPresent(findings::add);
         PointReader reader = new PointReader(choice, vote.sign(), statuses, sources.separator());
         List<Part> parts = stretches.stream().flatMap(s -> Part.of(s, reader.read(s)).stream()).toList();
-        List<CurveBlock> blocks = new Blocks(parts, choice, statuses).build(vote.tie().isEmpty());
+        Blocks found = new Blocks(parts, choice, statuses, source.stem());
+        List<CurveBlock> blocks = found.build(vote.tie().isEmpty());
         List<DroppedPoint> dropped = new ArrayList<>();
         List<String> doubts = new ArrayList<>(vote.doubts());
         doubts.addAll(ChoiceCheck.unmatched(choice, sources.sheets().stream().map(SourceSheet::name).toList(), rows, blocks.size()));
-        List<MeasuredCurve> curves = curves(parts, blocks, dropped, doubts);
+        List<MeasuredCurve> curves = curves(parts, blocks, found.samples, dropped, doubts);
         findings.add(new Finding(Topic.BLOCKS, blocks.size() + (blocks.size() == 1 ? " block, " : " blocks, ") + curves.size()
                 + " taken", "heads, numbers that start again, and turns of the shear rate part them", !choice.blocks().isEmpty()));
         doubts.forEach(messages::warning);
@@ -63,6 +67,8 @@ public final class Importer {
             layout.notes().forEach(messages::warning);
             layout.doubts().forEach(messages::warning);
         });
+        sources.notes().forEach(messages::warning);
+        messages.unread(unread);
         messages.outside(rows);
         messages.blocks(blocks);
         messages.dropped(dropped);
@@ -113,11 +119,14 @@ public final class Importer {
         layouts.addAll(sorter.layouts);
         sorter.problems.forEach(messages::problem);
         stretches.addAll(sorter.stretches);
+        unread.addAll(sorter.unread);
     }
 
-    private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<DroppedPoint> dropped, List<String> doubts) {
+    private List<MeasuredCurve> curves(List<Part> parts, List<CurveBlock> blocks, List<String> samples, List<DroppedPoint> dropped,
+            List<String> doubts) {
         CurveNames names = new CurveNames(source.stem(), blocks.stream().filter(CurveBlock::taken).toList());
         List<MeasuredCurve> curves = new ArrayList<>();
+        Map<List<Object>, String> twins = new HashMap<>();
         for (int i = 0; i < blocks.size(); i++) {
             CurveBlock block = blocks.get(i);
             List<DroppedPoint> here = new ArrayList<>();
@@ -130,12 +139,20 @@ public final class Importer {
             dropped.addAll(here);
             if (block.taken()) {
                 List<CurvePoint> taken = block.points().stream().filter(CurvePoint::taken).toList();
-                curves.add(new MeasuredCurve(names.next(block, parts.get(i)),
-                        FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
-                                taken.stream().mapToDouble(CurvePoint::shearStress).toArray()),
-                        new Measurement(source.name(), source.sha256(), Messages.name(block),
-                                parts.get(i).sampleName(), block.use().ramp(), block.replicate(), block.temperature(), here,
-                                warnings(block, parts.get(i), doubts))));
+                FlowCurve points = FlowCurve.of(taken.stream().mapToDouble(CurvePoint::shearRate).toArray(),
+                        taken.stream().mapToDouble(CurvePoint::shearStress).toArray());
+                List<String> warnings = new ArrayList<>(warnings(block, parts.get(i), doubts));
+                String label = names.next(block, parts.get(i), samples.get(i));
+                String twin = twins.putIfAbsent(List.of(block.use().ramp(), new SamePoints(points)), label);
+                if (twin != null) {
+                    String same = "its points are those of '" + twin + "', so it is no replicate and is pooled with none";
+                    messages.warning("'" + label + "': " + same);
+                    if (parts.get(i).stretch().heads.own().isEmpty()) {
+                        warnings.add(same);
+                    }
+                }
+                curves.add(new MeasuredCurve(label, points, new Measurement(source.name(), source.sha256(), Messages.name(block),
+                        samples.get(i), block.use().ramp(), block.replicate(), block.temperature(), here, warnings)));
             }
         }
         return curves;

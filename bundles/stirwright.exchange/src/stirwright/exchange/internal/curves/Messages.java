@@ -15,6 +15,7 @@ import stirwright.exchange.RawRow.Kind;
 /** Gathers what a reader should see, each line once. */
 final class Messages {
     private static final int MOST_NAMED = 5;
+    private static final int MOST_UNREAD = 12;
     /** Of more blocks than these only those that are not taken are told. */
     private static final int MOST_BLOCKS = 8;
 
@@ -51,6 +52,14 @@ final class Messages {
                         + " points, " + (block.taken() ? "taken" : "not taken") + " (" + block.reason() + ")");
             }
             block.warnings().forEach(w -> warning("block " + name(block) + ": " + w));
+        }
+    }
+
+    /** Names of columns that are not read. */
+    void unread(Set<String> columns) {
+        if (!columns.isEmpty()) {
+            note("not read: " + String.join(", ", columns.stream().limit(MOST_UNREAD).toList())
+                    + (columns.size() > MOST_UNREAD ? " and " + (columns.size() - MOST_UNREAD) + " more" : ""));
         }
     }
 

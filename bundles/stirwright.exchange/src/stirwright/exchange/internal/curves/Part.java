@@ -2,10 +2,10 @@ package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
+import java.util.Map;
 import stirwright.exchange.BlockUse;
 import stirwright.exchange.CurveQuantity;
 
@@ -18,34 +18,62 @@ import stirwright.exchange.CurveQuantity;
 record Part(Stretch stretch, String sample, String segment, List<ReadPoint> points) {
     private static final List<String> PRE_SHEAR = List.of("pre shear", "preshear", "conditioning", "vorscher", "precisaill",
             "pre cisaill", "precizall", "pre cizall", "konditionier");
+    private static final List<String> AFTER = List.of(" after ", " no ", " without ", " nach ", " ohne ", " apres ", " sans ", " sin ");
 
-    /** Parts of a stretch: at numbers that start again, and where the shear rate turns or stands still. */
+    /** Parts of a stretch: at numbers that start again, at other temperatures, and where the shear rate turns or stands still. */
     static List<Part> of(Stretch stretch, List<ReadPoint> points) {
         List<Part> parts = new ArrayList<>();
         Group group = Numbering.found(stretch);
+        for (Map.Entry<String, List<ReadPoint>> whose : bySample(stretch, points)) {
+            numbered(parts, stretch, group, whose.getKey(), whose.getValue());
+        }
+        return parts;
+    }
+
+    /** Runs of one sample; samples that take turns are gathered. */
+    private static List<Map.Entry<String, List<ReadPoint>>> bySample(Stretch stretch, List<ReadPoint> points) {
+        List<Map.Entry<String, List<ReadPoint>>> runs = new ArrayList<>();
+        Map<String, List<ReadPoint>> all = new LinkedHashMap<>();
+        String before = "";
+        for (ReadPoint point : points) {
+            String whose = stretch.sample(point.row().row, before);
+            if (runs.isEmpty() || !whose.equals(before)) {
+                runs.add(Map.entry(whose, new ArrayList<>()));
+            }
+            runs.getLast().getValue().add(point);
+            all.computeIfAbsent(whose, w -> new ArrayList<>()).add(point);
+            before = whose;
+        }
+        // Each with a few points in turn: a table in the order of the rates.
+        return runs.size() > all.size() && points.size() < 3 * runs.size() ? List.copyOf(all.entrySet()) : runs;
+    }
+
+    private static void numbered(List<Part> parts, Stretch stretch, Group group, String sample, List<ReadPoint> points) {
         int begin = 0;
         String segment = "";
-        String sample = "";
         int before = -1;
         for (int i = 0; i < points.size(); i++) {
             WorkRow row = points.get(i).row();
             String now = Numbering.segment(row.row, group);
-            String whose = stretch.sample(row.row);
             int number = Numbering.point(row.row, group);
             boolean again = number >= 0 && before >= 0 && number <= before;
-            if (i > begin && (again || !now.equals(segment) || !whose.equals(sample))) {
+            if (i > begin && (again || !now.equals(segment))) {
                 split(parts, stretch, sample, segment, points.subList(begin, i));
                 begin = i;
             }
             segment = now;
-            sample = whose;
             before = number >= 0 ? number : again ? -1 : before;
         }
         split(parts, stretch, sample, segment, points.subList(begin, points.size()));
-        return parts;
     }
 
     private static void split(List<Part> into, Stretch stretch, String sample, String segment, List<ReadPoint> points) {
+        for (List<ReadPoint> alike : Temperatures.apart(points)) {
+            ramps(into, stretch, sample, segment, alike);
+        }
+    }
+
+    private static void ramps(List<Part> into, Stretch stretch, String sample, String segment, List<ReadPoint> points) {
         int[] placed = new int[points.size()];
         int count = 0;
         for (int i = 0; i < points.size(); i++) {
@@ -70,10 +98,9 @@ record Part(Stretch stretch, String sample, String segment, List<ReadPoint> poin
         }
     }
 
-    /** What tells its sample from others of the source; empty where nothing does. Equal names are one sample. */
-    String sampleName() {
-        String place = sample.isEmpty() && stretch.layout.groups().size() > 1 ? "sample " + stretch.group.sample() : "";
-        return Stream.of(stretch.heads.own(), sample, place).filter(w -> !w.isEmpty()).collect(Collectors.joining(" "));
+    /** Whether a blank row stands within it or before it. */
+    boolean interrupted() {
+        return points.stream().anyMatch(p -> p.row().gap);
     }
 
     /** As the source calls it. */
@@ -92,17 +119,24 @@ record Part(Stretch stretch, String sample, String segment, List<ReadPoint> poin
             return BlockUse.CONSTANT_RATE;
         }
         int steps = RampSplit.stepCount(rates);
-        if (steps == 2 && rates.length > 4) {
+        if (rates.length >= Blocks.LEAST_POINTS && RampSplit.distinct(rates) < Blocks.LEAST_POINTS) {
             return BlockUse.OTHER;
         }
         int direction = steps == 2 ? 0 : RampSplit.direction(rates);
         return direction > 0 ? BlockUse.UP : direction < 0 ? BlockUse.DOWN : BlockUse.UNORDERED;
     }
 
-    /** Whether its head or its sheet calls it a pre-shear. */
+    /** Whether a head, its sheet, its segment or its sample calls it a pre-shear. */
     boolean namedPreShear() {
-        String folded = Folded.of(stretch.heads.block() + " " + stretch.heads.run() + " " + stretch.sheet).text();
-        return PRE_SHEAR.stream().anyMatch(folded::contains);
+        String folded = Folded.of(String.join(" ", stretch.heads.block(), stretch.heads.run(), stretch.heads.title(), stretch.sheet, segment)).text();
+        String whose = Folded.of(sample).text();
+        return PRE_SHEAR.stream().anyMatch(w -> named(folded, w) || !w.startsWith("condition") && !w.startsWith("konditio") && named(whose, w));
+    }
+
+    /** A curve may be called one "after pre-shear". */
+    private static boolean named(String folded, String word) {
+        int at = folded.indexOf(word);
+        return at >= 0 && AFTER.stream().noneMatch(folded.substring(0, at)::endsWith);
     }
 
     double[] taken(CurveQuantity quantity) {
@@ -114,11 +148,15 @@ record Part(Stretch stretch, String sample, String segment, List<ReadPoint> poin
         }).filter(v -> !Double.isNaN(v)).toArray();
     }
 
-    /** Mean in deg C of the points that are taken, else what its names say; NaN for neither. */
-    double temperature() {
+    /**
+     * Mean in deg C of the points that are taken, else what its names say; NaN for neither.
+     *
+     * @param file the file's name, which counts last
+     */
+    double temperature(String file) {
         double[] measured = taken(CurveQuantity.TEMPERATURE);
         // Differences, so that the mean of equal readings is that reading.
         return measured.length > 0 ? measured[0] + Arrays.stream(measured).map(t -> t - measured[0]).average().orElseThrow()
-                : TemperatureInName.of(sample + " " + stretch.heads.words() + " " + stretch.sheet);
+                : TemperatureInName.of(sample + " " + stretch.heads.words() + " " + stretch.sheet + " " + file);
     }
 }

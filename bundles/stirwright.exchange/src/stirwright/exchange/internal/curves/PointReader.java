@@ -1,7 +1,9 @@
 package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import stirwright.exchange.CurvePoint;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.CurveSeparator;
@@ -28,11 +30,27 @@ final class PointReader {
     List<ReadPoint> read(Stretch stretch) {
         boolean stressed = stretch.group.column(CurveQuantity.SHEAR_STRESS) != null
                 && (stretch.group.column(CurveQuantity.VISCOSITY) == null || anyNumber(stretch));
+        Set<String> nines = nines(stretch);
         List<ReadPoint> points = new ArrayList<>(stretch.rows.size());
         for (WorkRow row : stretch.rows) {
-            points.add(read(row, stretch, stressed));
+            points.add(read(row, stretch, stressed, nines));
         }
         return points;
+    }
+
+    /** A full-scale number comes again at each rate beyond the range. */
+    private static Set<String> nines(Stretch stretch) {
+        Set<String> seen = new HashSet<>();
+        Set<String> again = new HashSet<>();
+        for (Column column : stretch.group.main()) {
+            for (WorkRow row : column.quantity() == CurveQuantity.SHEAR_RATE ? List.<WorkRow>of() : stretch.rows) {
+                String cell = row.row.cell(column.position());
+                if (Reasons.isNines(cell) && !seen.add(column.position() + " " + cell)) {
+                    again.add(cell);
+                }
+            }
+        }
+        return again;
     }
 
     private static boolean anyNumber(Stretch stretch) {
@@ -40,7 +58,7 @@ final class PointReader {
         return stretch.rows.stream().anyMatch(r -> r.row.isTyped(stress.position()) || Numbers.isNumber(r.row.cell(stress.position())));
     }
 
-    private ReadPoint read(WorkRow row, Stretch stretch, boolean stressed) {
+    private ReadPoint read(WorkRow row, Stretch stretch, boolean stressed, Set<String> nines) {
         Group group = stretch.group;
         Column rateColumn = group.column(CurveQuantity.SHEAR_RATE);
         Column stressColumn = group.column(stressed ? CurveQuantity.SHEAR_STRESS : CurveQuantity.VISCOSITY);
@@ -55,7 +73,7 @@ final class PointReader {
         String reason = choice.leftOut().contains(place) ? "left out by hand"
                 : usable && choice.putBack().contains(place) ? ""
                 : Reasons.of(row.row, stretch.layout, rateColumn, rate, stressColumn, stressed ? stress : viscosity,
-                        group, torque, status, statuses.isBad(status), sign, commas);
+                        group, torque, status, statuses.isBad(status), nines, sign, commas);
         return new ReadPoint(row, new CurvePoint(place, rate, stress, viscosity, value(row, group.column(CurveQuantity.TEMPERATURE)),
                 value(row, group.column(CurveQuantity.TIME)), torque, status, reason),
                 row.row.cell(rateColumn.position()), row.row.cell(stressColumn.position()), usable);

@@ -11,6 +11,10 @@ import java.util.stream.DoubleStream;
  */
 final class RampSplit {
     private static final double SAME = 0.02;
+    /** A rate that is held keeps within this share. */
+    private static final double STILL = 0.002;
+    /** The next step of a ramp is hardly wider than this many of the one before. */
+    private static final double WIDER = 1.6;
     /** Fewer points at one rate are a step of a ramp. */
     private static final int LEAST_CONSTANT = 5;
     /** A ramp has at least three steps; a shorter one is a stray point. */
@@ -32,13 +36,21 @@ final class RampSplit {
         int usual = steps.stream().mapToInt(s -> s.end - s.begin).sorted().skip(steps.size() / 2).findFirst().orElse(0);
         List<Part> parts = new ArrayList<>();
         List<Part> ramp = new ArrayList<>();
-        for (Part step : steps) {
-            if (steps.size() > 1 && step.end - step.begin >= Math.max(LEAST_CONSTANT, 4 * usual) && !trending(rates, step)) {
-                Part hold = trimmed(rates, step);
+        for (int i = 0; i < steps.size(); i++) {
+            Part step = steps.get(i);
+            boolean many = steps.size() > 1 && step.end - step.begin >= Math.max(LEAST_CONSTANT, 4 * usual) && !trending(rates, step);
+            Part hold = many ? trimmed(rates, step) : step;
+            if (many && still(rates, hold)) {
+                // The first point of a hold ends the ramp before it, the last one begins the ramp behind it.
+                boolean after = ramp.size() > 1 && goesOn(rates[ramp.get(ramp.size() - 2).begin], rates[ramp.getLast().begin], rates[hold.begin]);
+                boolean between = after && i + 2 < steps.size() && goesOn(rates[steps.get(i + 2).begin], rates[steps.get(i + 1).begin], rates[hold.begin]);
+                hold = new Part(hold.begin + (after && hold.begin == step.begin ? 1 : 0), hold.end - (between && hold.end == step.end ? 1 : 0));
                 ramp.add(new Part(step.begin, hold.begin));
                 parts.addAll(ramps(rates, ramp));
                 parts.add(hold);
                 ramp = new ArrayList<>(List.of(new Part(hold.end, step.end)));
+            } else if (i == 0 && beforeARamp(rates, steps, usual)) {
+                parts.add(step);
             } else {
                 ramp.add(step);
             }
@@ -60,6 +72,39 @@ final class RampSplit {
             end--;
         }
         return new Part(begin, end);
+    }
+
+    /** Whether a rate is the next one of a ramp, by the step before it. */
+    private static boolean goesOn(double first, double second, double next) {
+        double linear = (next - second) / (second - first);
+        double log = Math.log(next / second) / Math.log(second / first);
+        return linear > 0 && Math.min(linear, log) < WIDER;
+    }
+
+    /** Whether a rate stands still, and does not pass a turn of a dense ramp. */
+    private static boolean still(double[] rates, Part hold) {
+        double median = median(Arrays.stream(rates, hold.begin, hold.end));
+        return median(Arrays.stream(rates, hold.begin, hold.end).map(r -> Math.abs(r - median))) <= STILL * median;
+    }
+
+    /** Two or more equal rates at the start, and a ramp that does not begin there. */
+    private static boolean beforeARamp(double[] rates, List<Part> steps, int usual) {
+        Part first = steps.get(0);
+        int count = first.end - first.begin;
+        if (count < 2 * usual || count < 2 || steps.size() <= LEAST_STEPS || !still(rates, first)) {
+            return false;
+        }
+        double[] next = steps.stream().limit(LEAST_STEPS + 1).mapToDouble(s -> rates[s.begin]).toArray();
+        double way = Math.signum(next[2] - next[1]);
+        boolean ramp = way != 0 && Math.signum(next[3] - next[2]) == way;
+        return ramp && (count > 2 || Math.signum(next[1] - next[0]) != way);
+    }
+
+    /** How many rates differ by more than 2 %, in whatever order. */
+    static int distinct(double[] rates) {
+        double[] sorted = rates.clone();
+        Arrays.sort(sorted);
+        return stepCount(sorted);
     }
 
     private static double median(DoubleStream values) {

@@ -1,5 +1,6 @@
 package stirwright.exchange.internal.curves;
 
+import java.util.Set;
 import java.util.regex.Pattern;
 import stirwright.correlation.Figures;
 import stirwright.exchange.CurveQuantity;
@@ -17,11 +18,29 @@ final class Reasons {
     private static final Pattern FULL_SCALE = Pattern.compile("9{4,}([.,]9*0*)?|9{3,}[.,]9+0*");
     private static final Pattern DATE = Pattern.compile("[0-9]{4}-[0-9]{2}-[0-9]{2}.*");
 
+    /** A number of four nines may be measured; common practice, no source. */
+    private static final int MANY_NINES = 5;
+    private static final CurveQuantity[] BESIDE = {CurveQuantity.VISCOSITY, CurveQuantity.TORQUE, CurveQuantity.TORQUE_PERCENT};
+
     private Reasons() {}
 
-    /** Empty when nothing speaks against it. */
+    /** Whether a cell is what a display shows when it has no more digits, or a number that was measured. */
+    static boolean isNines(String cell) {
+        return cell.startsWith("9") && FULL_SCALE.matcher(cell).matches();
+    }
+
+    /** Words, and signs that fill a display; one dash is a blank. */
+    private static boolean isWord(String cell) {
+        return cell.length() > 1 && !Numbers.isNumber(cell) && cell.chars().noneMatch(c -> c >= '0' && c <= '9');
+    }
+
+    /**
+     * Empty when nothing speaks against it.
+     *
+     * @param nines numbers of nines that come more than once
+     */
     static String of(SourceRow row, Layout layout, Column rateColumn, double rate, Column stressColumn, double stress, Group group,
-            double torque, String status, boolean badStatus, DecimalSign sign, boolean commas) {
+            double torque, String status, boolean badStatus, Set<String> nines, DecimalSign sign, boolean commas) {
         String extra = commas ? extraCells(row, layout) : "";
         if (!extra.isEmpty()) {
             return extra;
@@ -33,8 +52,16 @@ final class Reasons {
         }
         for (Column column : group.main()) {
             String cell = row.cell(column.position());
-            if (column != rateColumn && cell.startsWith("9") && FULL_SCALE.matcher(cell).matches()) {
-                return column.name() + " '" + cell + "' is a full-scale number: over range";
+            if (column != rateColumn && isNines(cell) && cell.chars().filter(c -> c == '9').count() >= MANY_NINES
+                    || nines.contains(cell) && column != rateColumn) {
+                return column.name() + " '" + Texts.show(cell) + "' is a full-scale number: over range";
+            }
+        }
+        for (CurveQuantity quantity : BESIDE) {
+            Column column = group.column(quantity);
+            String cell = column == null ? "" : row.cell(column.position());
+            if (column != stressColumn && isWord(cell)) {
+                return column.name() + " '" + Texts.show(cell) + "' is a word where a number is expected: the instrument gave the point up";
             }
         }
         if (torque >= 100 || torque <= 0) {

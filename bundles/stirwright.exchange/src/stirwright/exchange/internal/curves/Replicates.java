@@ -16,8 +16,8 @@ final class Replicates {
         int count;
     }
 
-    int next(Part part, BlockUse use, double temperature) {
-        List<Object> sample = List.of(part.sampleName(), use.ramp());
+    int next(String name, BlockUse use, double temperature) {
+        List<Object> sample = List.of(name, use.ramp());
         List<Seen> all = seen.computeIfAbsent(sample, s -> new ArrayList<>());
         Seen same = all.stream().filter(s -> Measurement.sameTemperature(s.temperature, temperature)).findFirst().orElse(null);
         if (same == null) {

@@ -17,7 +17,7 @@ final class SetHeads {
         boolean named = isCount(row.cell(0)) && !row.cell(1).isEmpty() && !Numbers.isNumber(row.cell(1));
         boolean third = row.filled() == 3 && isCount(row.cell(2)) && isCount(row.cell(0)) && !row.cell(1).isEmpty();
         return named && (afterGap || third) || third && afterGap
-                ? Optional.of(new Heads(Texts.show(row.cell(0)), Texts.show(row.cell(1)), "", "")) : Optional.empty();
+                ? Optional.of(new Heads(Texts.show(row.cell(0)), Texts.show(row.cell(1)), "", "", "")) : Optional.empty();
     }
 
     private static boolean isCount(String cell) {

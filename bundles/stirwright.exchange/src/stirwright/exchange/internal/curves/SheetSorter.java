@@ -1,8 +1,11 @@
 package stirwright.exchange.internal.curves;
 
 import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.ImportChoice;
@@ -10,6 +13,7 @@ import stirwright.exchange.RawRow.Kind;
 import stirwright.exchange.internal.curves.Stretch.Heads;
 import stirwright.exchange.internal.table.Numbers;
 import stirwright.exchange.internal.table.SourceRow;
+import stirwright.exchange.internal.table.Texts;
 
 /** Goes once through the rows of a sheet, says what each is, and gathers the points under their heads. */
 final class SheetSorter {
@@ -31,6 +35,12 @@ final class SheetSorter {
     private Stretch[] open = {};
     private Heads heads = Heads.NONE;
     private Heads headsBefore = Heads.NONE;
+    /** A line of words that heads what follows, if points do. */
+    private WorkRow pending;
+    private boolean titled = true;
+    private boolean gap;
+    /** Names of columns that are not read. */
+    final Set<String> unread = new LinkedHashSet<>();
 
     SheetSorter(String sheet, ImportChoice choice, HeaderCells headers, List<WorkRow> rows) {
         this.sheet = sheet;
@@ -43,11 +53,12 @@ final class SheetSorter {
     void sort() {
         for (int i = 0; i < rows.size(); i++) {
             WorkRow row = rows.get(i);
-            if (row.kind == Kind.BLANK || isRule(row.row)) {
+            if (row.kind == Kind.BLANK || UnitRows.isRule(row.row)) {
+                gap |= row.kind == Kind.BLANK;
                 continue;
             }
             boolean words = noNumbers(row.row);
-            if (words && unitsMayFollow && isUnits(row.row)) {
+            if (words && unitsMayFollow && new UnitRows(headers, names).isUnits(row.row)) {
                 row.kind = Kind.UNITS;
                 if (!row.row.cells().equals(units)) {
                     units = row.row.cells();
@@ -56,7 +67,7 @@ final class SheetSorter {
                 unitsMayFollow = false;
             } else if ((words || mayName(row.row)) && headers.areNames(row.row)) {
                 takeNames(i);
-            } else if (words && names != null && isOtherUnits(row.row)) {
+            } else if (words && names != null && new UnitRows(headers, names).isOther(row.row)) {
                 row.kind = Kind.UNITS;
                 if (!row.row.cells().equals(units)) {
                     SourceRow now = new SourceRow(row.row.line(), goingOn(row.row), null);
@@ -86,21 +97,26 @@ final class SheetSorter {
     /** By a layout that is known beforehand, in a set of curves or a table without names. */
     void sort(Layout fixed, SetHeads set) {
         use(fixed);
+        titled = set == null;
         boolean blankBefore = true;
         int lineBefore = 0;
         for (WorkRow row : rows) {
-            boolean gap = blankBefore || row.row.line() > lineBefore + 1;
+            boolean apart = blankBefore || row.row.line() > lineBefore + 1;
             lineBefore = row.row.line();
             blankBefore = row.kind == Kind.BLANK;
+            gap |= blankBefore;
+            if (row.kind == Kind.NAMES) {
+                noteUnread(row.row, fixed);
+            }
             if (blankBefore || row.kind == Kind.NAMES) {
                 continue;
             }
-            Optional<Heads> head = set == null ? Optional.empty() : set.read(row.row, gap);
+            Optional<Heads> head = set == null ? Optional.empty() : set.read(row.row, apart);
             if (head.isPresent()) {
                 row.kind = Kind.BLOCK;
                 close(head.get());
             } else {
-                if (set != null && gap && open.length > 0 && open[0] != null) {
+                if (set != null && apart && open.length > 0 && open[0] != null) {
                     close(Heads.NONE);
                 }
                 sortOther(row);
@@ -126,9 +142,32 @@ final class SheetSorter {
             // What looked like the head of a sample names several that stand side by side.
             heads = before.kind == Kind.BLOCK ? headsBefore : heads;
             before.kind = Kind.NAMES;
+        } else if (pending != null && (pending == before || !stretches.isEmpty())) {
+            promote();
         }
+        pending = null;
         close(heads);
         use(found);
+        noteUnread(names, found);
+    }
+
+    private void noteUnread(SourceRow header, Layout found) {
+        Set<Integer> read = new HashSet<>();
+        found.groups().forEach(g -> g.columns().values().forEach(c -> read.add(c.position())));
+        for (int i = 0; i < header.cells().size(); i++) {
+            if (!header.cell(i).isEmpty() && !read.contains(i)) {
+                unread.add("column " + (i + 1) + " '" + Texts.show(header.cell(i)) + "'");
+            }
+        }
+    }
+
+    /** The line of words is the head of what follows; an interval's name above it ends there. */
+    private void promote() {
+        pending.kind = Kind.BLOCK;
+        headsBefore = heads;
+        Heads next = new Heads("", heads.sample(), "", "", HeadWords.words(pending.row));
+        pending = null;
+        close(next);
     }
 
     /** A header that comes again on each page parts nothing as long as points have numbers, which then go on. */
@@ -170,12 +209,25 @@ final class SheetSorter {
     private void sortOther(WorkRow row) {
         Optional<Heads> head = HeadWords.read(row.row, heads);
         if (head.isPresent() && !holdsPoint(row.row)) {
+            if (pending != null && !stretches.isEmpty()) {
+                promote();
+                head = HeadWords.read(row.row, heads);
+            }
+            pending = null;
             row.kind = Kind.BLOCK;
             headsBefore = heads;
             close(head.get());
+        } else if (titled && HeadWords.isTitle(row.row, firstColumn())
+                && (headers.read(HeadWords.words(row.row)).isEmpty() || NameWords.temperatureAlone(HeadWords.words(row.row)))) {
+            pending = row;
         } else if (layout != null && takePoints(row)) {
             unitsMayFollow = false;
         }
+    }
+
+    private int firstColumn() {
+        return layout == null ? Integer.MAX_VALUE : layout.groups().stream().flatMap(g -> g.main().stream())
+                .mapToInt(Column::position).min().orElse(Integer.MAX_VALUE);
     }
 
     /** A row that begins like a head is a point all the same when it has a rate, or words in two of its places. */
@@ -199,14 +251,21 @@ final class SheetSorter {
         for (int i = 0; i < open.length; i++) {
             Group group = layout.groups().get(i);
             if (PointRows.isPoint(row.row, group, open.length == 1)) {
+                if (pending != null) {
+                    promote();
+                }
                 if (open[i] == null) {
-                    open[i] = new Stretch(layout, group, sheet, heads);
+                    open[i] = new Stretch(layout, group, sheet, heads, names);
                     stretches.add(open[i]);
                 }
                 open[i].rows.add(row);
                 row.points++;
                 row.kind = Kind.POINT;
             }
+        }
+        if (row.points > 0) {
+            row.gap = gap;
+            gap = false;
         }
         return row.points > 0;
     }
@@ -228,42 +287,5 @@ final class SheetSorter {
             }
         }
         return false;
-    }
-
-    /** A row further down that holds a known unit in the place of a rate, a stress or a viscosity, and no words but units. */
-    private boolean isOtherUnits(SourceRow row) {
-        boolean main = false;
-        for (int i = 0; i < row.cells().size(); i++) {
-            String unit = LayoutBuilder.inside(row.cell(i));
-            Optional<CurveQuantity> quantity = headers.read(names.cell(i)).map(HeaderCell::quantity);
-            boolean known = quantity.isPresent() && UnitWords.find(quantity.get(), unit).isPresent();
-            main |= known && UnitWords.telling(unit).filter(q -> q == quantity.get()).isPresent();
-        }
-        return main;
-    }
-
-    /** A line drawn with signs below a header. */
-    private static boolean isRule(SourceRow row) {
-        for (String cell : row.cells()) {
-            if (!cell.isEmpty() && ("-:=".indexOf(cell.charAt(0)) < 0 || cell.length() < 2 || cell.chars().anyMatch(c -> "-:=+".indexOf(c) < 0))) {
-                return false;
-            }
-        }
-        return true;
-    }
-
-    private boolean isUnits(SourceRow row) {
-        boolean bracketed = true;
-        for (int i = 0; i < row.cells().size(); i++) {
-            String cell = row.cell(i);
-            bracketed &= cell.isEmpty() || cell.startsWith("[") || cell.startsWith("(");
-            String unit = LayoutBuilder.inside(cell);
-            Optional<CurveQuantity> quantity = headers.read(names.cell(i)).map(HeaderCell::quantity);
-            if (!unit.isEmpty() && quantity.isPresent() && (UnitWords.find(quantity.get(), unit).isPresent()
-                    || quantity.get() == CurveQuantity.TORQUE && unit.equals("%"))) {
-                return true;
-            }
-        }
-        return bracketed;
     }
 }

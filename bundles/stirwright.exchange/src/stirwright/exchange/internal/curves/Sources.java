@@ -21,8 +21,9 @@ import stirwright.exchange.internal.workbook.Workbook;
  * A source as rows of cells.
  *
  * @param separator null for a workbook
+ * @param notes what is left out, a sentence each
  */
-record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding> findings) {
+record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding> findings, List<String> notes) {
     /** Room for 100,000 rows of 12 columns; what the 320 MB that the start script gives can hold. */
     private static final int MOST_CELLS = 1_200_000;
 
@@ -45,17 +46,27 @@ record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding>
 
     private static Sources workbook(CurveSource source, byte[] bytes, ImportChoice choice) {
         List<SourceSheet> all = Workbook.read(source.shown(), bytes, MOST_CELLS);
-        List<SourceSheet> read = all.stream().filter(s -> choice.sheets().isEmpty() || choice.sheets().contains(s.name())).toList();
+        List<SourceSheet> read = all.stream().filter(s -> choice.sheets().isEmpty() ? !s.hidden() : choice.sheets().contains(s.name())).toList();
         List<String> names = all.stream().map(SourceSheet::name).toList();
+        if (read.isEmpty() && choice.sheets().isEmpty()) {
+            throw new UnusableFileException(source.shown(), "has hidden sheets alone (" + String.join(", ", names)
+                    + "); show the one with the flow curve in a spreadsheet and save it again, or choose it");
+        }
         if (read.isEmpty()) {
             throw new UnusableFileException(source.shown(), "has no sheet '" + String.join("' or '", choice.sheets())
                     + "'; its sheets are " + String.join(", ", names));
         }
+        List<String> notes = new ArrayList<>();
+        all.stream().filter(s -> s.hidden() && !read.contains(s))
+                .forEach(s -> notes.add("sheet '" + s.name() + "' is hidden: not read; choose it to read it"));
+        read.stream().filter(s -> !s.hiddenRows().isEmpty()).forEach(s -> notes.add("sheet '" + s.name() + "': "
+                + s.hiddenRows().size() + (s.hiddenRows().size() == 1 ? " hidden row" : " hidden rows") + " (the first is row "
+                + s.hiddenRows().get(0) + ") not read; show them in a spreadsheet to have them read"));
         boolean chosen = !choice.sheets().isEmpty();
         return new Sources(read, null, List.of(
                 new Finding(Topic.FORM, "workbook", "its bytes say so", false),
                 new Finding(Topic.SHEETS, String.join(", ", read.stream().map(SourceSheet::name).toList()),
-                        chosen ? "chosen by hand of " + String.join(", ", names) : "all of them are looked through", chosen)));
+                        chosen ? "chosen by hand of " + String.join(", ", names) : "all that are shown are looked through", chosen)), notes);
     }
 
     private static Sources text(CurveSource source, byte[] bytes, ImportChoice choice) {
@@ -74,6 +85,6 @@ record Sources(List<SourceSheet> sheets, CurveSeparator separator, List<Finding>
         if (rows.stream().mapToInt(r -> r.cells().size()).sum() >= MOST_CELLS) {
             throw new UnusableFileException(source.shown(), "has more than " + MOST_CELLS + " cells; split it");
         }
-        return new Sources(List.of(new SourceSheet("", rows)), vote.winner(), findings);
+        return new Sources(List.of(new SourceSheet("", rows)), vote.winner(), findings, List.of());
     }
 }

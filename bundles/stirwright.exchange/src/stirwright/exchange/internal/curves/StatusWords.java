@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import stirwright.exchange.CurveQuantity;
 import stirwright.exchange.Finding;
 import stirwright.exchange.internal.table.Texts;
@@ -18,9 +19,14 @@ import stirwright.exchange.internal.table.Texts;
  * @param bad those that say that a point is bad
  */
 record StatusWords(String normal, Optional<Finding> finding, Set<String> bad) {
-    private static final List<String> BAD = List.of("invalid", "error", "over", "under", "out of range", "fail", "bad", "unstable",
-            "not steady", "not reached", "limit", "ungultig", "fehler", "uber", "unter", "instabil", "nicht stationar", "erreur",
-            "depass", "instable", "hors", "invalide", "invalido", "fuera", "inestable", "errore", "nan");
+    /** Whole words, between spaces; "overshoot" says nothing bad. */
+    private static final List<String> BAD = Stream.of("invalid", "error", "errors", "over", "under", "overrange", "underrange",
+            "overload", "overloaded", "overflow", "underflow", "out of range", "exceed", "exceeds", "exceeded", "exceeding", "fail", "fails",
+            "failed", "failure", "bad", "unstable", "not steady", "not reached", "not stable", "limit", "limits", "limited", "ungultig",
+            "ungultige", "ungueltig", "fehler", "uber", "unter", "ueber", "uberlast", "uberlauf", "uberschritten", "unterschritten",
+            "messbereichsuberschreitung", "messbereichsunterschreitung", "instabil", "nicht stationar", "nicht stabil", "nicht erreicht",
+            "grenze", "grenzwert", "erreur", "depassement", "depasse", "depassee", "instable", "hors", "invalide", "invalido", "invalida",
+            "fuera", "inestable", "errore", "nan").map(w -> " " + w + " ").toList();
 
     static StatusWords of(List<Stretch> stretches) {
         Map<String, Integer> counts = new HashMap<>();
@@ -45,12 +51,12 @@ record StatusWords(String normal, Optional<Finding> finding, Set<String> bad) {
         return bad.contains(status);
     }
 
-    private static boolean saysBad(String status) {
+    static boolean saysBad(String status) {
         if (status.isEmpty()) {
             return false;
         }
         String folded = Folded.of(Texts.show(status)).text();
-        return BAD.stream().anyMatch(word -> folded.contains(" " + word));
+        return BAD.stream().anyMatch(word -> folded.contains(word));
     }
 
     boolean isNormal(String status) {

@@ -12,9 +12,12 @@ final class Stretch {
     final Group group;
     final String sheet;
     final Heads heads;
+    /** The names above; null without. */
+    final SourceRow names;
     final List<WorkRow> rows = new ArrayList<>();
 
-    Stretch(Layout layout, Group group, String sheet, Heads heads) {
+    Stretch(Layout layout, Group group, String sheet, Heads heads, SourceRow names) {
+        this.names = names;
         this.layout = layout;
         this.group = group;
         this.sheet = sheet;
@@ -28,20 +31,25 @@ final class Stretch {
      * @param sample the sample's name
      * @param run the run's or test's name
      * @param block the interval's name
+     * @param title a line of words that are not known
      */
-    record Heads(String own, String sample, String run, String block) {
-        static final Heads NONE = new Heads("", "", "", "");
+    record Heads(String own, String sample, String run, String block, String title) {
+        static final Heads NONE = new Heads("", "", "", "", "");
 
         /** All of it in one line. */
         String words() {
-            return String.join(", ", List.of(own, sample, run, block).stream().filter(w -> !w.isEmpty()).toList());
+            return String.join(", ", List.of(own, sample, title, run, block).stream().filter(w -> !w.isEmpty()).toList());
         }
     }
 
-    /** What the sample of a row is called, by its own cell, by the header of its columns or by the head above. */
-    String sample(SourceRow row) {
+    /**
+     * What the sample of a row is called, by its own cell, by the header of its columns or by the head above.
+     *
+     * @param above what that of the row above is called: a merged cell is written once
+     */
+    String sample(SourceRow row, String above) {
         Column column = group.column(CurveQuantity.SAMPLE);
-        return column != null ? Texts.show(row.cell(column.position()))
+        return column != null ? row.cell(column.position()).isEmpty() ? above : Texts.show(row.cell(column.position()))
                 : group.label().isEmpty() || layout.groups().size() == 1 ? heads.sample() : group.label();
     }
 }

@@ -10,6 +10,8 @@ final class WorkRow {
     final SourceRow row;
     RawRow.Kind kind = RawRow.Kind.NOTE;
     int block;
+    /** Whether a blank row stands between it and the point before. */
+    boolean gap;
     /** How many points it holds. */
     int points;
 
@@ -23,6 +25,7 @@ final class WorkRow {
     void forget() {
         kind = row.blank() ? RawRow.Kind.BLANK : RawRow.Kind.NOTE;
         points = 0;
+        gap = false;
         block = 0;
     }
 

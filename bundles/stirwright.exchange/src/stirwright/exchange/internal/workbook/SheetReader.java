@@ -33,7 +33,8 @@ final class SheetReader {
         return count;
     }
 
-    List<SourceRow> read(byte[] part) throws XMLStreamException {
+    /** @param hidden to which lines of rows are added that a spreadsheet does not show, for instance filtered ones */
+    List<SourceRow> read(byte[] part, List<Integer> hidden) throws XMLStreamException {
         List<SourceRow> rows = new ArrayList<>();
         XMLStreamReader xml = Xml.read(part);
         int line = 0;
@@ -41,7 +42,13 @@ final class SheetReader {
             if (xml.next() == XMLStreamConstants.START_ELEMENT && xml.getLocalName().equals("row")) {
                 int said = number(Xml.attribute(xml, "r"));
                 line = said > line ? said : line + 1;
-                rows.add(row(xml, line));
+                boolean shown = !Xml.attribute(xml, "hidden").matches("1|true");
+                SourceRow row = row(xml, line);
+                if (shown) {
+                    rows.add(row);
+                } else if (!row.blank()) {
+                    hidden.add(line);
+                }
             }
         }
         return rows;

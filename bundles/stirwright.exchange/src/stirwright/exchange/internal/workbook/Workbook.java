@@ -3,14 +3,18 @@ package stirwright.exchange.internal.workbook;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.NoSuchElementException;
+import java.util.Set;
 import javax.xml.stream.XMLStreamConstants;
 import javax.xml.stream.XMLStreamException;
 import javax.xml.stream.XMLStreamReader;
 import stirwright.exchange.UnusableFileException;
+import stirwright.exchange.internal.table.SourceRow;
 import stirwright.exchange.internal.table.SourceSheet;
 
 /** The sheets of a workbook, in their order. */
@@ -34,9 +38,12 @@ public final class Workbook {
             SheetReader reader = new SheetReader(SharedTexts.read(parts.part("xl/sharedStrings.xml")),
                     new Styles(parts.part("xl/styles.xml")), mostCells);
             List<SourceSheet> sheets = new ArrayList<>();
-            for (Map.Entry<String, String> sheet : paths(parts).entrySet()) {
+            Set<String> hidden = new HashSet<>();
+            for (Map.Entry<String, String> sheet : paths(parts, hidden).entrySet()) {
                 if (parts.has(sheet.getValue())) {
-                    sheets.add(new SourceSheet(sheet.getKey(), reader.read(parts.part(sheet.getValue()))));
+                    List<Integer> hiddenRows = new ArrayList<>();
+                    List<SourceRow> rows = reader.read(parts.part(sheet.getValue()), hiddenRows);
+                    sheets.add(new SourceSheet(sheet.getKey(), rows, hidden.contains(sheet.getKey()), hiddenRows));
                 }
             }
             if (reader.count() >= mostCells) {
@@ -51,8 +58,8 @@ public final class Workbook {
         }
     }
 
-    /** Name of each sheet and the part that holds it. */
-    private static Map<String, String> paths(ZipParts parts) throws XMLStreamException {
+    /** Name of each sheet and the part that holds it; adds the names of those that are not shown. */
+    private static Map<String, String> paths(ZipParts parts, Set<String> hidden) throws XMLStreamException {
         Map<String, String> targets = new HashMap<>();
         if (parts.has("xl/_rels/workbook.xml.rels")) {
             XMLStreamReader xml = Xml.read(parts.part("xl/_rels/workbook.xml.rels"));
@@ -68,6 +75,9 @@ public final class Workbook {
         while (xml.hasNext()) {
             if (xml.next() == XMLStreamConstants.START_ELEMENT && xml.getLocalName().equals("sheet")) {
                 String id = Xml.attribute(xml, "id");
+                if (Xml.attribute(xml, "state").toLowerCase(Locale.ROOT).endsWith("hidden")) {
+                    hidden.add(Xml.attribute(xml, "name"));
+                }
                 paths.put(Xml.attribute(xml, "name"), targets.getOrDefault(id, "xl/worksheets/sheet" + (paths.size() + 1) + ".xml"));
             }
         }
