@@ -55,6 +55,7 @@ class HeadersTest {
         assertRead("Lp;SR [1/s];SS [kPa]\n" + rows("#", 1, 1e3, false, false));
         assertRead("rpm;SR 1/s;SS D/cm2\n" + rows("#", 1, 0.1, false, false));
         assertRead("Szybko\u015B\u0107 \u015Bcinania [1/min];Lepko\u015B\u0107 [mPa\u00B7s]\n" + rows("", 1 / 60.0, 1e-3, true, false));
+        assertRead("SR;Visc\n1/s;mPas\n" + rows("", 1, 1e-3, true, false));
         assertRead("\u65F6\u95F4 [s];\u526A\u5207\u901F\u7387 [1/s];\u526A\u5207\u5E94\u529B [Pa]\n" + rows("#", 1, 1, false, false));
     }
 
@@ -97,7 +98,7 @@ class HeadersTest {
         "Viscosity (mPa x s)|1e-3", "Viscosity (centipoises)|1e-3", "Viscosity (mPa sec)|1e-3", "Viscosity (milli Pascal sec)|1e-3",
         "Viscosity (25 \u00B0C) mPa.s|1e-3", "Viscosity (LV2) [cP]|1e-3", "Viscosity (10^-3 Pa\u00B7s)|1e-3", "Viscosity [10\u207B\u00B3 Pa s]|1e-3",
         "Viscosity mPas 20\u00B0C|1e-3", "Viscosity (mPa.s at 25 \u00B0C)|1e-3", "Viscosity / mPa s (20 \u00B0C)|1e-3", "Viscosity (apparent) [Pa s]|1",
-        "Viscosity (measured)|1", "Viscosity (mean) in mPas|1e-3", "Viscosity (1e-3 Pa s)|1e-3"})
+        "Viscosity (measured)|1", "Viscosity (mean) in mPas|1e-3", "Viscosity (1e-3 Pa s)|1e-3", "Viscosity (cP, spindle 4)|1e-3"})
     void everyBracketIsTriedForAUnit(String header, double scale) {
         assertRead("Shear rate (1/s);" + header + "\n" + rows("", 1, scale, true, false));
     }

@@ -33,6 +33,9 @@ class UnitRowsTest {
         assertArrayEquals(new double[] {2 / 60.0, 3 / 60.0, 4 / 60.0, 5 / 60.0, 8 / 60.0, 12 / 60.0},
                 stresses(read(top.replace("1/s", "1/min") + ";Pas\n10;0.5\n20;0.4\n40;0.3\n")), 1e-12);
         assertArrayEquals(new double[] {2, 3, 4}, stresses(read(top + "1/s;mPas\n")), 1e-12);
+        // Nor does a second such row bring back what the header says.
+        assertArrayEquals(new double[] {2 / 60.0, 3 / 60.0, 4 / 60.0, 5 / 60.0, 8 / 60.0, 12 / 60.0, 20 / 60.0, 30 / 60.0, 40 / 60.0},
+                stresses(read(top.replace("1/s", "1/min") + ";Pas\n10;0.5\n20;0.4\n40;0.3\n;mPas\n50;400\n100;300\n200;200\n")), 1e-12);
     }
 
     @Test

@@ -100,7 +100,10 @@ record HeaderCell(CurveQuantity quantity, String unit, String label) {
         String strange = "";
         Matcher brackets = BRACKETS.matcher(after);
         while (brackets.find()) {
-            String inside = brackets.group(1).strip();
+            String whole = brackets.group(1).strip();
+            // "cP, spindle 4"
+            int comma = UnitWords.find(quantity, whole).isPresent() ? -1 : whole.indexOf(',');
+            String inside = comma > 0 && UnitWords.find(quantity, whole.substring(0, comma)).isPresent() ? whole.substring(0, comma) : whole;
             Optional<UnitScale> scale = UnitWords.find(quantity, inside);
             if (scale.isPresent()) {
                 known.add(inside);

@@ -43,7 +43,15 @@ record Nameless(SheetSorter sorter, boolean set, String problem) {
             return sorted(sorter, chosen, above, set ? heads : null);
         }
         if (headed) {
-            Layout told = new LayoutBuilder(sheet, choice, cells).build(names, null, null);
+            int at = filled.indexOf(above);
+            WorkRow before = at > 0 && above.row.cells().stream().anyMatch(c -> UnitWords.telling(LayoutBuilder.inside(c)).isPresent())
+                    ? filled.get(at - 1) : null;
+            boolean units = before != null && SheetSorter.noNumbers(before.row) && before.row.filled() > 1;
+            Layout told = units ? new LayoutBuilder(sheet, choice, cells).build(before.row, above.row, null)
+                    : new LayoutBuilder(sheet, choice, cells).build(names, null, null);
+            if (units) {
+                before.kind = Kind.NAMES;
+            }
             if (told.groups().isEmpty()) {
                 above.kind = Kind.NAMES;
                 sorter.layouts.add(told);

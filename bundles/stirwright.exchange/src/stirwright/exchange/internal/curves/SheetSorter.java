@@ -69,9 +69,9 @@ final class SheetSorter {
                 takeNames(i);
             } else if (words && names != null && new UnitRows(headers, names).isOther(row.row)) {
                 row.kind = Kind.UNITS;
-                if (!row.row.cells().equals(units)) {
-                    SourceRow now = new SourceRow(row.row.line(), goingOn(row.row), null);
-                    units = row.row.cells();
+                SourceRow now = new SourceRow(row.row.line(), goingOn(row.row), null);
+                if (!now.cells().equals(units)) {
+                    units = now.cells();
                     close(heads);
                     use(new LayoutBuilder(sheet, choice, headers).build(names, now, above));
                 }
