@@ -241,6 +241,18 @@ class CommandLineTest {
     }
 
     @Test
+    void fitAsksForTheDecimalSignThatNothingTells() throws IOException {
+        Path curve = Files.writeString(folder.resolve("three.csv"),
+                "shear rate 1/s;shear stress Pa\n1;16.000\n3;18.558\n10;23.274\n30;30.483\n100;44.773\n300;66.125\n");
+        assertEquals(3, run("fit", curve.toString()));
+        assertTrue(err.toString().contains("so it may be a decimal sign or part thousands"), err.toString());
+        assertEquals(0, run("fit", curve.toString(), "--decimal-sign", "point"), err::toString);
+        assertTrue(out.toString().contains("three: 6 points"), out.toString());
+        assertEquals(3, run("fit", curve.toString(), "--decimal-sign", "dot"));
+        assertTrue(err.toString().contains("--decimal-sign dot: must be point or comma"), err.toString());
+    }
+
+    @Test
     void fitReadsAsATemplateSays() throws IOException {
         Path curve = folder.resolve("odd.csv");
         Files.writeString(curve, "a;b;c\n1;10;5\n3;30;6,2\n10;100;8,7\n30;300;13\n100;1000;22\n300;3000;39\n");

@@ -2,6 +2,7 @@ package stirwright.console.internal;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -10,6 +11,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import stirwright.exchange.CurveFits;
+import stirwright.exchange.DecimalSign;
 import stirwright.exchange.ImportChoice;
 import stirwright.exchange.ImportTemplates;
 import stirwright.exchange.Origin;
@@ -38,6 +40,10 @@ final class FitCommand implements Callable<Integer> {
             description = "read the files as this import template says, as the window keeps it; without, all is detected")
     private Path template;
 
+    @Option(names = "--decimal-sign", paramLabel = "SIGN",
+            description = "point or comma, where the numbers do not tell (12.345 may be twelve thousand)")
+    private String decimalSign;
+
     @Option(names = "--static-yield", paramLabel = "PA",
             description = "static yield stress in Pa, from a vane or a stress ramp after rest; widens the range of the yield stress")
     private Double staticYield;
@@ -52,6 +58,9 @@ final class FitCommand implements Callable<Integer> {
             throw new UnusableFileException("--static-yield " + staticYield, "must be a finite number, 0 or greater, in Pa");
         }
         ImportChoice choice = template == null ? ImportChoice.DETECT : ImportTemplates.read(template);
+        if (decimalSign != null) {
+            choice = choice.withDecimalSign(Optional.of(sign()));
+        }
         List<Path> inputs = new ArrayList<>(files);
         Optional.ofNullable(template).ifPresent(inputs::add);
         Outputs written = new Outputs(new Origin(desk.version(), ""), inputs);
@@ -63,5 +72,10 @@ final class FitCommand implements Callable<Integer> {
         } finally {
             opened.forEach(Output::close);
         }
+    }
+
+    private DecimalSign sign() {
+        return Arrays.stream(DecimalSign.values()).filter(s -> s.name().equalsIgnoreCase(decimalSign)).findFirst()
+                .orElseThrow(() -> new UnusableFileException("--decimal-sign " + decimalSign, "must be point or comma"));
     }
 }

@@ -66,15 +66,19 @@ public final class Search {
 			held[j] = j != fixed && (at[j] == shape.lower(j) || at[j] == shape.upper(j));
 		}
 		boolean[] released = new boolean[size];
-		Place best = new Place(at.clone(), held.clone(), evaluate(at).sum());
+		Place best = null;
 		for (int round = 0; round < 2 * size + 1; round++) {
 			LeastSquares.Minimum next = LeastSquares.roughly(free(at, held, fixed), pick(at, held, fixed));
 			double[] there = spread(next.at(), at, held, fixed);
+			if (best == null && !inside(there, held, fixed)) {
+				// What is clamped may end above the start, which a descent within the bounds never does.
+				best = new Place(at.clone(), held.clone(), evaluate(at).sum());
+			}
 			if (clamp(there, at, held, fixed)) {
 				continue;
 			}
 			at = there;
-			if (next.sum() < best.sum()) {
+			if (best == null || next.sum() < best.sum()) {
 				best = new Place(at.clone(), held.clone(), next.sum());
 			}
 			if (!release(at, held, released)) {
@@ -105,6 +109,10 @@ public final class Search {
 			}
 		}
 		return any;
+	}
+
+	private boolean inside(double[] at, boolean[] held, int fixed) {
+		return IntStream.range(0, size).allMatch(j -> j == fixed || held[j] || inside(j, at[j]));
 	}
 
 	private boolean inside(int j, double coordinate) {
