@@ -125,6 +125,19 @@ class FitPropertiesTest {
 		}
 	}
 
+	@Test
+	void aBoundIsLookedAtByAllOfManyPoints() {
+		// the yield stress is a third of the lowest viscous stress; some of the points lead the way, all must settle it
+		RandomModels random = new RandomModels(12);
+		FluidModel truth = new HerschelBulkley(0.1, 3, 0.5);
+		double[] rates = IntStream.range(0, 20_000).mapToDouble(i -> Math.pow(10, -2 + 5 * i / 19_999.0)).toArray();
+		FlowCurve curve = FlowCurve.of(rates, Arrays.stream(rates).map(r -> truth.stress(r) * random.noise(0.03)).toArray());
+		ModelFit fit = fit(ModelKind.HERSCHEL_BULKLEY, curve, Objective.RELATIVE);
+		assertTrue(fit.residualSumOfSquares() <= Objective.RELATIVE.residualSumOfSquares(truth, curve), fit::toString);
+		assertTrue(fit.estimate("yield_stress").interval().contains(0.1), fit.estimate("yield_stress")::toString);
+		assertTrue(fit.estimate("yield_stress").interval().low() > 0, fit.estimate("yield_stress")::toString);
+	}
+
 	private static void forNoisyCurves(Consumer<FlowCurve> assertion) {
 		RandomModels random = new RandomModels(5);
 		for (int i = 0; i < CURVES; i++) {

@@ -84,19 +84,20 @@ public final class LeastSquares {
 
 	/** Searches from a start, which may be there already, with steps of Gauss and Newton's, which find the last digits. */
 	public static Minimum toTheLastDigit(Deviations function, double[] start) {
-		return refined(function, start, LAST_DIGIT, NEAR);
+		return refined(function, start, LAST_DIGIT, NEAR, TOLERANCE, MOST_ITERATIONS);
 	}
 
 	/** The same to a relative 1e-7 of the coordinates. */
 	public static Minimum closely(Deviations function, double[] start) {
-		return refined(function, start, CLOSE, CLOSE_ENOUGH);
+		return refined(function, start, CLOSE, CLOSE_ENOUGH, ROUGH_TOLERANCE, MOST_ROUGH_ITERATIONS);
 	}
 
-	private static Minimum refined(Deviations function, double[] start, double wanted, double near) {
+	private static Minimum refined(Deviations function, double[] start, double wanted, double near,
+			double tolerance, int iterations) {
 		LeastSquares search = new LeastSquares(function);
 		search.evaluate(start);
 		if (start.length > 0 && !(search.lastSteps(wanted) <= near)) {
-			search.search(search.best.at(), TOLERANCE, MOST_ITERATIONS);
+			search.search(search.best.at(), tolerance, iterations);
 			search.lastSteps(wanted);
 		}
 		return search.best;

@@ -42,8 +42,7 @@ public final class Search {
 	/** From every start of the shape; null where it has none. */
 	public Place best() {
 		if (points.size() > MANY) {
-			Place rough = new Search(shape, points.thinned(MANY), measure).best();
-			return rough == null ? null : toTheLastDigit(rough, -1);
+			return bestOfMany();
 		}
 		Place best = null;
 		for (double[] start : shape.starts(points)) {
@@ -53,12 +52,28 @@ public final class Search {
 		return best == null ? null : toTheLastDigit(best, -1);
 	}
 
+	/** From where some of the points lead; a bound is looked at anew by all of them. */
+	private Place bestOfMany() {
+		Place some = new Search(shape, points.thinned(MANY), measure).best();
+		if (some == null) {
+			return null;
+		}
+		Place rough = new Place(some.at(), some.held(), evaluate(some.at()).sum());
+		Place close = toTheLastDigit(rough, -1);
+		// A first coordinate that may be 0 is a yield stress or the like; the models with two plateaus have none, and are slow.
+		boolean again = scales[0] != Scale.LOG && (rough.held()[0] || close == rough);
+		return again ? toTheLastDigit(from(rough.at(), -1), -1) : close;
+	}
+
 	/** From a start within the bounds with one coordinate fixed, to the last digit. */
 	public Place best(double[] start, int fixed) {
 		return toTheLastDigit(from(start, fixed), fixed);
 	}
 
-	/** From a start within the bounds, with one coordinate fixed, or -1 for none, to a millionth of the sum or so. What starts at a bound is held there at first. */
+	/**
+	 * From a start within the bounds, with one coordinate fixed, or -1 for none, to a millionth of the sum or so. What starts at
+	 * a bound is held there at first.
+	 */
 	public Place from(double[] start, int fixed) {
 		double[] at = start.clone();
 		boolean[] held = new boolean[size];
