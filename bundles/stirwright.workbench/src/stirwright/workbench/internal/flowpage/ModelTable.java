@@ -42,10 +42,7 @@ final class ModelTable extends Composite {
         this.flow = flow;
         setLayout(new FillLayout());
         table = Names.name(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE), PageWords.Table_name);
-        table.setHeaderVisible(true);
-        table.setBackground(looks.palette().surface());
-        table.setForeground(looks.palette().text());
-        table.setFont(looks.small());
+        looks.table(table);
         swatches = new Swatches(table, looks.palette());
         TableColumn swatch = new TableColumn(table, SWT.LEFT);
         swatch.setText(PageWords.Column_curve);

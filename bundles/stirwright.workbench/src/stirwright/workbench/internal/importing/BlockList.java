@@ -51,11 +51,7 @@ final class BlockList extends Composite {
         layout.marginHeight = 0;
         layout.verticalSpacing = Looks.STEP;
         setLayout(layout);
-        table = Names.name(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL), ImportWords.Blocks_name);
-        table.setHeaderVisible(true);
-        table.setFont(looks.small());
-        table.setBackground(looks.palette().surface());
-        table.setForeground(looks.palette().text());
+        table = Names.name(looks.table(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL)), ImportWords.Blocks_name);
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 2, 1));
         for (String head : List.of(ImportWords.Blocks_block, ImportWords.Blocks_use, ImportWords.Blocks_points)) {
             new TableColumn(table, head.equals(ImportWords.Blocks_points) ? SWT.RIGHT : SWT.LEFT).setText(head);

@@ -61,11 +61,7 @@ final class PointRows extends Composite {
         droppedOnly = looks.onPage(new Button(this, SWT.CHECK));
         droppedOnly.setText(Messages.bind(ImportWords.Points_droppedOnly, 0));
         droppedOnly.addListener(SWT.Selection, e -> show());
-        table = Names.name(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL), ImportWords.Points_name);
-        table.setHeaderVisible(true);
-        table.setFont(looks.small());
-        table.setBackground(looks.palette().surface());
-        table.setForeground(looks.palette().text());
+        table = Names.name(looks.table(new Table(this, SWT.CHECK | SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL)), ImportWords.Points_name);
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 2, 1));
         for (String title : List.of(ImportWords.Raw_line, ImportWords.Points_block, ImportWords.Points_rate, ImportWords.Points_stress,
                 ImportWords.Points_viscosity, ImportWords.Points_temperature, ImportWords.Points_reason)) {

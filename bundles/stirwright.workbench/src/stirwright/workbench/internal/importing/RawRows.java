@@ -42,11 +42,7 @@ final class RawRows extends Composite {
         Label heading = looks.label(this, SWT.NONE, ImportWords.Raw_heading);
         heading.setFont(looks.strong());
         heading.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        table = Names.name(new Table(this, SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL), ImportWords.Raw_name);
-        table.setHeaderVisible(true);
-        table.setFont(looks.small());
-        table.setBackground(looks.palette().surface());
-        table.setForeground(looks.palette().text());
+        table = Names.name(looks.table(new Table(this, SWT.FULL_SELECTION | SWT.SINGLE | SWT.VIRTUAL)), ImportWords.Raw_name);
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         column(ImportWords.Raw_line, LINE_WIDTH, SWT.RIGHT);
         table.addListener(SWT.SetData, e -> fill((TableItem) e.item, table.indexOf((TableItem) e.item)));

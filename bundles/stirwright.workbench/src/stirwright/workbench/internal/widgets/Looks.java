@@ -9,6 +9,7 @@ import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
+import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.Text;
 import stirwright.chart.Palette;
 
@@ -66,6 +67,15 @@ public final class Looks {
         text.setBackground(palette.surface());
         text.setForeground(palette.text());
         return text;
+    }
+
+    /** A table with its header, raised above the page, in letters that let many rows be seen. */
+    public Table table(Table table) {
+        table.setHeaderVisible(true);
+        table.setFont(small);
+        table.setBackground(palette.surface());
+        table.setForeground(palette.text());
+        return table;
     }
 
     /** An empty area of the page. */
